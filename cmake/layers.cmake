@@ -1,0 +1,29 @@
+# One object library for each folder of src, all with the same strict flags.
+
+set(BACKSAW_WARNINGS -Wall -Wextra -Wpedantic -Wshadow -Wvla -Wwrite-strings
+    -Wstrict-prototypes -Wmissing-prototypes -Wpointer-arith -Wundef)
+if(BACKSAW_WERROR)
+    list(APPEND BACKSAW_WARNINGS -Werror)
+endif()
+
+# Flags that every target of the project shares.
+function(backsaw_flags target)
+    target_compile_options(${target} PRIVATE ${BACKSAW_WARNINGS})
+    # -std=c17 hides POSIX; the project asks for it here and nowhere else.
+    target_compile_definitions(${target} PRIVATE _POSIX_C_SOURCE=200809L _DEFAULT_SOURCE)
+    target_include_directories(${target} PRIVATE ${PROJECT_SOURCE_DIR}/src
+        ${PROJECT_SOURCE_DIR}/include)
+    if(BACKSAW_SANITIZE)
+        # The debug arenas pass every request to malloc, so that overruns are seen.
+        target_compile_definitions(${target} PRIVATE BS_ARENA_DEBUG=1)
+        target_compile_options(${target} PRIVATE -fsanitize=address,undefined
+            -fno-sanitize-recover=all -fno-omit-frame-pointer)
+        target_link_options(${target} PRIVATE -fsanitize=address,undefined)
+    endif()
+endfunction()
+
+# backsaw_layer(core a.c b.c) makes the object library backsaw_core.
+function(backsaw_layer name)
+    add_library(backsaw_${name} OBJECT ${ARGN})
+    backsaw_flags(backsaw_${name})
+endfunction()

@@ -1,0 +1,13 @@
+/* backsaw: everything. Each module's header explains itself. */
+#ifndef BACKSAW_H
+#define BACKSAW_H
+
+#include "backsaw/core.h"
+#include "backsaw/mol.h"
+#include "backsaw/draft.h"
+#include "backsaw/format.h"
+#include "backsaw/match.h"
+#include "backsaw/rule.h"
+#include "backsaw/catalogue.h"
+
+#endif

@@ -1,0 +1,230 @@
+/*
+ * Rules: rewriting, synthons, transforms, and steps made with them.
+ *
+ * A rewriting is a pair of graph patterns, `L>>R`, with the usual semantics of reaction SMARTS:
+ * atoms that carry the same map number on both sides persist, the others of L go and the others
+ * of R come; L only tests; atom properties written in R are set and all others kept; hydrogens
+ * follow the valence unless written; bonds between mapped atoms are as written in R. A mapped
+ * atom of L that R lacks is removed with what hangs on it only if nothing mapped hangs there.
+ *
+ * A transform is written backwards: its `target` is a pattern of the product, and running it
+ * backwards gives precursors. A disconnection by synthons is compiled into one rewriting for
+ * each pair of equivalents (a case); run forwards, the rewriting is read from R to L. Everything
+ * below (back, forth, check) works on cases only.
+ *
+ * A rule book (`bs_rules`) holds synthons and transforms in the order in which they were added;
+ * indices are 0-based and stay. Adding is for one thread; a book that no longer grows can be used
+ * by several threads, each with its own context and hooks.
+ */
+#ifndef BACKSAW_RULE_H
+#define BACKSAW_RULE_H
+
+#include "backsaw/match.h"
+
+/* ---- Rewriting ------------------------------------------------------------------------- */
+
+typedef struct bs_rewrite bs_rewrite;
+
+/* Compiles reaction SMARTS, "L>>R". Errors as bs_pattern_read(), offsets in the whole text. */
+bs_status bs_rewrite_read(bs_ctx *cx, bs_arena *home, const char *text, size_t length,
+                          bs_rewrite **out);
+
+/* Number of reactants that bs_rewrite_apply() wants: dot-separated parts of L, groups counted once. */
+int bs_rewrite_reactant_count(const bs_rewrite *rewrite);
+
+/*
+ * One result of a rewriting: a set of product molecules. `site` gives for each atom of L, in the
+ * order of the text, where it lay: the number of the reactant and the atom.
+ */
+typedef struct bs_outcome {
+    bs_mol **products;
+    char **smiles; /* canonical, same order */
+    int product_count;
+    uint32_t *site_reactant;
+    uint32_t *site_atom;
+    int site_count;
+} bs_outcome;
+
+typedef struct bs_outcomes {
+    bs_outcome *items;
+    int count;
+} bs_outcomes;
+
+/*
+ * Applies a rewriting to reactants in the order of its parts. Outcomes with the same products
+ * are given once; outcomes whose valences are impossible are left out.
+ *
+ *   errors  BS_EVALUE  wrong number of reactants
+ *           BS_ELIMIT  the step budget ran out, or more than 10000 outcomes
+ */
+bs_status bs_rewrite_apply(bs_ctx *cx, bs_arena *home, const bs_rewrite *rewrite,
+                           const bs_mol *const *reactants, int count, bs_outcomes *out);
+
+/* ---- Definitions ----------------------------------------------------------------------- */
+
+typedef enum bs_synthon_kind { BS_DONOR, BS_ACCEPTOR } bs_synthon_kind;
+
+/*
+ * A stable compound that stands in for a synthon. Exactly one of `attach` and `rewrite` is set.
+ *
+ * attach:  SMILES of a fragment; its first atom is bonded to the cut atom with the order of the
+ *          bond that was cut, or the order of a leading bond symbol ("=O"). "[H]" leaves a
+ *          hydrogen. With `ionic` the fragment is a cation beside the cut atom, which becomes an
+ *          anion: "[Na]" gives [Na+] and a cut atom with one charge less.
+ * rewrite: reaction SMARTS on the half; the atom with map 1 on its left side is the cut atom.
+ *          Other left atoms are found among the neighbours; where the target names such an atom
+ *          too, it is that one.
+ */
+typedef struct bs_equivalent_def {
+    const char *attach;
+    const char *rewrite;
+    const char *name; /* or NULL */
+    bool ionic;
+    double equivalents; /* moles a mole of product; 0 stands for 1 */
+} bs_equivalent_def;
+
+typedef struct bs_synthon_def {
+    const char *name;
+    bs_synthon_kind kind;
+    const bs_equivalent_def *equivalents;
+    int equivalent_count;
+    const char *origin; /* pack and line, for messages; or NULL */
+} bs_synthon_def;
+
+typedef enum bs_transform_kind { BS_DISCONNECTION, BS_INTERCONVERSION } bs_transform_kind;
+
+typedef struct bs_words {
+    const char *const *items;
+    int count;
+} bs_words;
+
+/*
+ * A transform as its author wrote it. Either `from` is set (rewriting) or `cut` with synthons.
+ * Strings are copied. `hook_when`, `hook_prefer` are numbers of functions that the hooks below
+ * resolve, or -1.
+ */
+typedef struct bs_transform_def {
+    const char *name;
+    bs_words also;
+    bs_transform_kind kind;
+    const char *target;
+    const char *from;
+    int cut[2]; /* map numbers; 0 if `from` is used */
+    int acceptor_map, donor_map;
+    const char *acceptor, *donor; /* names of synthons */
+    const char *conditions;       /* class of conditions */
+    const char *recipe;           /* in words */
+    double yield_low, yield_high; /* per cent; 0 if not given */
+    double step_cost;             /* extra cost of the step, same unit as the plan's; usually 0 */
+    bs_words spares, also_attacks, cautions, reagents;
+    const char *source, *rxno, *pack;
+    int hook_when, hook_prefer;
+    const char *origin; /* pack and line */
+} bs_transform_def;
+
+/* ---- The rule book --------------------------------------------------------------------- */
+
+typedef struct bs_rules bs_rules;
+
+/* A new, empty book with an arena of its own. Free it with bs_rules_free(). */
+bs_status bs_rules_new(bs_ctx *cx, bs_rules **out);
+void bs_rules_free(bs_rules *rules);
+
+/*
+ * Adds a synthon or a transform. Names are compared without regard to case, spaces and hyphens.
+ *
+ *   errors  BS_ESYNTAX, BS_EVALUE  in a pattern, with the offset in it; the message names the
+ *                                  field ("target: ...")
+ *           BS_EVALUE     a name that is taken, maps that do not balance, a cut that is no bond
+ *           BS_ENOTFOUND  a synthon that nobody defined
+ *           On any error the book is as before.
+ */
+bs_status bs_rules_add_synthon(bs_ctx *cx, bs_rules *rules, const bs_synthon_def *def);
+bs_status bs_rules_add_transform(bs_ctx *cx, bs_rules *rules, const bs_transform_def *def,
+                                 int *index);
+
+int bs_rules_count(const bs_rules *rules);
+
+/* Index of a transform by name or by one of its other names; -1 if there is none. */
+int bs_rules_find(const bs_rules *rules, const char *name);
+
+/* The definition as kept by the book. */
+const bs_transform_def *bs_rules_transform(const bs_rules *rules, int index);
+
+/* ---- Hooks ----------------------------------------------------------------------------- */
+
+/* Where a target pattern lies in a product: atoms by map number, ascending. */
+typedef struct bs_site {
+    const int *maps;
+    const uint32_t *atoms;
+    int count;
+} bs_site;
+
+/* Functions of a rule that live elsewhere (in Lua). Both may be NULL if no rule has a hook. */
+typedef struct bs_rule_hooks {
+    void *payload;
+    /* Whether the transform may be used at this place of the product. */
+    bs_status (*when)(void *payload, bs_ctx *cx, int hook, const bs_mol *product,
+                      const bs_site *site, bool *allowed);
+    /* Score of a product of the forward reaction; the highest wins. */
+    bs_status (*prefer)(void *payload, bs_ctx *cx, int hook, const bs_mol *product,
+                        const bs_site *site, double *score);
+} bs_rule_hooks;
+
+/* ---- Steps ----------------------------------------------------------------------------- */
+
+/*
+ * One use of a transform on a product. Precursors are distinct compounds, each with its canonical
+ * SMILES and its moles a mole of product, in the order of their SMILES. `rivals` are the other
+ * product sets of the forward run.
+ */
+typedef struct bs_step {
+    int transform;
+    bs_mol **precursors;
+    char **smiles;
+    double *equivalents;
+    int precursor_count;
+    bs_site site;
+    bs_outcomes rivals;
+} bs_step;
+
+typedef struct bs_steps {
+    bs_step *items;
+    int count;
+} bs_steps;
+
+enum {
+    BS_BACK_UNCHECKED = 1 /* leave out the forward run: no rivals, and steps that fail it stay */
+};
+
+/*
+ * The steps that make `product` by one transform (or by all, with -1, in the order of the book).
+ * Each step was run forwards and gave the product. Steps with the same precursors by the same
+ * transform are given once.
+ */
+bs_status bs_rules_back(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int transform,
+                        const bs_mol *product, const bs_rule_hooks *hooks, unsigned flags,
+                        bs_steps *out);
+
+/* A set of products of one forward run. `score` is that of `prefer`, 0 without. */
+typedef struct bs_product_set {
+    int transform;
+    bool expected; /* passes all tests of the target */
+    double score;
+    bs_outcome outcome;
+} bs_product_set;
+
+typedef struct bs_product_sets {
+    bs_product_set *items;
+    int count;
+} bs_product_sets;
+
+/*
+ * What a transform (or with -1 each one) makes of these reactants, in any order; reactants that
+ * the transform does not need may not be given. Expected sets first, by score, then rivals.
+ */
+bs_status bs_rules_forth(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int transform,
+                         const bs_mol *const *reactants, int count, const bs_rule_hooks *hooks,
+                         bs_product_sets *out);
+
+#endif
