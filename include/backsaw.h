@@ -9,5 +9,7 @@
 #include "backsaw/match.h"
 #include "backsaw/rule.h"
 #include "backsaw/catalogue.h"
+#include "backsaw/route.h"
+#include "backsaw/search.h"
 
 #endif

@@ -1,0 +1,181 @@
+/*
+ * Routes: from what can be bought to the target, step by step.
+ *
+ * A route makes each compound in one way. Its molecules are numbered from 0, the target first;
+ * each is either made by one step of the route or bought. Steps stand in bench order: a step
+ * comes after those that make its precursors, and the last one makes the target. Buying the
+ * target is a route of no steps.
+ *
+ * A step may have several ways to run it: transforms that join the same precursors to the same
+ * product. They stand cheapest first, and ways[0] is the one that the numbers of the route are
+ * for.
+ *
+ * A route is self-contained: all that it points at lies in the arena it was made in, and
+ * bs_route_copy() moves it to another. Nothing in it is changed after it was made. The search
+ * makes routes (search.h); bs_route_build() makes one by hand.
+ *
+ * Units: costs in the unit of the plan (€ per mole by default), yields in per cent, amounts in
+ * moles a mole of target.
+ */
+#ifndef BACKSAW_ROUTE_H
+#define BACKSAW_ROUTE_H
+
+#include "backsaw/catalogue.h"
+#include "backsaw/rule.h"
+
+/* How a cost is made of the costs below it. */
+typedef enum bs_cost_mode {
+    BS_COST_PER_MOLE, /* (sum of equivalents x cost of precursor + step cost) / yield */
+    BS_COST_ADDITIVE  /* sum of costs of precursors + step cost; equivalents and yield left out */
+} bs_cost_mode;
+
+typedef struct bs_route_molecule {
+    const char *smiles; /* canonical */
+    bool bought;
+    double price;   /* per mole, where it is bought; else negative */
+    double cost;    /* of a mole, bought or made */
+    double moles;   /* that the route needs for a mole of target; see bs_route_build() */
+    int step;       /* the step that makes it, or -1 */
+    bs_offer offer; /* its smiles is NULL unless the molecule is bought by an offer of a catalogue */
+} bs_route_molecule;
+
+/* One way to run a step. Strings are NULL where the rule says nothing. */
+typedef struct bs_route_way {
+    const char *transform; /* name of the transform or of the known step */
+    int rule;              /* index in the rule book, or -1 for a known step */
+    const char *conditions;
+    const char *recipe;
+    const char *source;
+    const char *pack;
+    bs_words cautions;
+    bs_words reagents;
+    double cost;                  /* of the step, before it is divided by the yield */
+    double yield_low, yield_high; /* range as given; both 0 if none was given */
+    double yield;                 /* that the cost is for: the middle of the range, or the default */
+    double *equivalents;          /* moles of each precursor a mole of product, without the yield */
+} bs_route_way;
+
+typedef struct bs_route_step {
+    int product;      /* a molecule of the route */
+    int *precursors;  /* distinct molecules of the route */
+    int precursor_count;
+    bs_route_way *ways; /* at least one */
+    int way_count;
+    bool known;   /* a step of the user's own, taken as given */
+    bool checked; /* run forwards, it gave the product */
+    char **rivals; /* what else it could give: SMILES, products of one run joined by dots */
+    int rival_count;
+} bs_route_step;
+
+typedef struct bs_route {
+    bs_cost_mode mode;
+    double cost; /* of a mole of target */
+    bs_route_molecule *molecules; /* [0] is the target */
+    int molecule_count;
+    bs_route_step *steps; /* bench order */
+    int step_count;
+    double rank; /* what the rank function of the plan said; the cost without one */
+} bs_route;
+
+/* ---- Making ---------------------------------------------------------------------------- */
+
+/*
+ * Makes a route from molecules and steps in any order. Of a molecule `smiles`, `price` and
+ * `offer` are read, of a step all but `ways` beyond `way_count`; a molecule without step is
+ * bought. Fills cost, moles, bought, step and rank, puts the target first, then the others as the
+ * steps first need them from the target backwards, and the steps in bench order. In additive mode
+ * `moles` still heeds equivalents and yields.
+ *
+ *   target  index of the target in `molecules`
+ *   errors  BS_EVALUE  no molecules, an index out of range, a molecule that two steps make, a
+ *                      circle, a molecule that is neither made nor has a price of 0 or more, a
+ *                      step that nothing needs, equivalents not above 0, a yield not above 0
+ */
+bs_status bs_route_build(bs_ctx *cx, bs_arena *home, bs_cost_mode mode,
+                         const bs_route_molecule *molecules, int molecule_count,
+                         const bs_route_step *steps, int step_count, int target, bs_route **out);
+
+/* A copy in `home`. */
+bs_status bs_route_copy(bs_ctx *cx, bs_arena *home, const bs_route *route, bs_route **out);
+
+/* ---- Asking ---------------------------------------------------------------------------- */
+
+typedef struct bs_route_measures {
+    int steps;   /* distinct steps */
+    int runs;    /* steps in the unfolded tree, each use of an intermediate counted */
+    int longest; /* longest linear sequence: most steps from an offer to the target */
+    int leaves;  /* bought molecules */
+    double cost;
+    /*
+     * Overall yield along the longest linear sequence: product of the step yields at the low end,
+     * as used for the cost, and at the high end; where several are longest, the lowest. A step
+     * without a range counts with the yield used for its cost. 100 for a route of no steps.
+     */
+    double yield_low, yield, yield_high;
+    bool checked; /* every step was run forwards or is a known step */
+} bs_route_measures;
+
+/* Cannot fail; O(molecules + steps). */
+void bs_route_measure(const bs_route *route, bs_route_measures *out);
+
+/*
+ * Runs every rule's step forwards again with the rules given: `failed` is the first step that did
+ * not give its product, or whose transform the book does not have, or -1. Known steps are taken
+ * as given.
+ */
+bs_status bs_route_verify(bs_ctx *cx, const bs_route *route, const bs_rules *rules,
+                          const bs_rule_hooks *hooks, int *failed);
+
+/*
+ * Whether two routes have the same steps: product and precursors, whatever the ways to run them
+ * and the offers.
+ */
+bool bs_route_same(const bs_route *a, const bs_route *b);
+
+/* ---- Text ------------------------------------------------------------------------------ */
+
+/*
+ * Adds the route as an indented tree, plain ASCII, target first, each line ending in a newline.
+ * A compound that is used again is not unfolded twice.
+ */
+bs_status bs_route_text(const bs_route *route, bs_text *text);
+
+/* ---- Lists of routes ------------------------------------------------------------------- */
+
+/* A molecule that blocks routes: nobody sells it and nothing found makes it. */
+typedef struct bs_gap {
+    const char *smiles;
+    int opens;       /* molecules of the explored graph that would become makeable with it alone */
+    bool opens_target; /* whether the target would be among them */
+    int steps;       /* explored steps that use it */
+} bs_gap;
+
+typedef struct bs_routes {
+    bs_arena arena; /* all below lies here */
+    bs_route **items;
+    int count;
+    bool complete;      /* nothing was cut short: these are the best of all routes */
+    const char *reason; /* why not, in words, such as "the limit of 20000 molecules was reached";
+                           NULL if complete */
+    const char *target; /* canonical SMILES */
+    long molecules;     /* explored: molecules, those expanded, steps */
+    long expanded;
+    long steps;
+    bs_gap *gaps; /* those that open most first; for the target alone */
+    int gap_count;
+} bs_routes;
+
+/* NULL is allowed. The routes of the list die with it. */
+void bs_routes_free(bs_ctx *cx, bs_routes *routes);
+
+/*
+ * A new list with copies of `count` routes in the order given; the statements about the search
+ * are copied from `like`, or empty if that is NULL.
+ */
+bs_status bs_routes_pick(bs_ctx *cx, const bs_route *const *items, int count,
+                         const bs_routes *like, bs_routes **out);
+
+/* Adds a table with one line a route, aligned columns, plain ASCII. */
+bs_status bs_routes_table(const bs_routes *routes, bs_text *text);
+
+#endif

@@ -1,0 +1,117 @@
+/*
+ * Planning: explores what a target can be made from, and gives the cheapest routes.
+ *
+ * The search grows a directed hypergraph: molecules, and steps that make one molecule from
+ * several. Leaves are what the shelf sells. It expands first what the cheapest partial routes
+ * need, by known cost plus a guess for what is still open, in batches of fixed size that are
+ * merged in order (AO*: Martelli & Montanari 1973, Nilsson 1980). On what was explored the answer
+ * is exact: the `best` cheapest routes (Knuth 1977; Nielsen, Andersen & Pretolani 2005). The same
+ * input gives the same routes in the same order.
+ *
+ * A search that meets a limit or the stop flag gives what it found, marked incomplete with the
+ * reason: that is no error. No route is a list of none.
+ *
+ * Callbacks get the payload of the options and may fail: their status ends the plan and is passed
+ * on, but for BS_ESTOPPED, which ends the search only. They run on the calling thread.
+ */
+#ifndef BACKSAW_SEARCH_H
+#define BACKSAW_SEARCH_H
+
+#include "backsaw/route.h"
+
+/*
+ * A step of the user's own, known to work. `from` and `product` are SMILES. Numbers that are 0 or
+ * arrays that are NULL have the default named. A step of its own: two with the same compounds
+ * stay two.
+ */
+typedef struct bs_known_step {
+    const char *product;
+    const char *const *from;
+    const double *equivalents; /* moles a mole of product; NULL: 1 each */
+    int from_count;
+    bool has_cost;
+    double cost;  /* 0 or more; without has_cost as for a rule's step */
+    double yield; /* per cent, above 0 and at most 100; 0: BS_DEFAULT_YIELD */
+    const char *name;
+} bs_known_step;
+
+/* Yield of a step that states none, per cent. */
+#define BS_DEFAULT_YIELD 85.0
+
+/* Step cost by default, € before it is divided by the yield. */
+#define BS_DEFAULT_STEP_COST 50.0
+
+typedef struct bs_plan_limits {
+    int depth;      /* steps in line from the target; 0: 16 */
+    int steps;      /* distinct steps of a route in all; 0: no limit */
+    long molecules; /* in the explored graph; 0: 20000 */
+    double seconds; /* wall time of the exploration; 0: no limit */
+    size_t memory;  /* bytes that the search holds, checked after each expansion; 0: no limit */
+} bs_plan_limits;
+
+/* How far the search is, for a progress line. */
+typedef struct bs_plan_progress {
+    long molecules, expanded, steps, open;
+    double seconds;
+    bool solved; /* there is a route */
+} bs_plan_progress;
+
+/*
+ * What to plan and how. All zero but `shelf` is a sound default without rules. Steps are shown to
+ * the callbacks as a route of that one step: steps[0], its product molecules[0], precursors
+ * behind; precursors that cannot be bought have the price -1 there. The cost of its ways[0] is
+ * what the default gives.
+ */
+typedef struct bs_plan_opts {
+    const bs_rules *rules; /* or NULL */
+    const bs_rule_hooks *hooks; /* or NULL */
+    const int *transforms; /* indices of the rules to use; NULL: all */
+    int transform_count;   /* 0 with `transforms` set: the rules are off */
+    bs_shelf *shelf;       /* or NULL: nothing is sold, only carbon-free compounds are at hand */
+    const bs_known_step *known;
+    int known_count;
+    bs_plan_limits limits;
+    bs_cost_mode mode;
+    bool has_step_cost;
+    double step_cost; /* of each step, 0 or more; without has_step_cost BS_DEFAULT_STEP_COST; the
+                         step_cost of a transform's definition is added */
+    int best;         /* routes wanted; 0: 10 */
+    int batch;        /* molecules expanded at a time; 0: 16 */
+    int gaps;         /* gaps listed at most; 0: 10; negative: none */
+    void *payload;
+    /* Whether a step may be used. */
+    bs_status (*allow)(void *payload, bs_ctx *cx, const bs_route *step, bool *allowed);
+    /* Step cost, 0 or more, in place of step_cost. Known steps with a cost are not asked. */
+    bs_status (*cost)(void *payload, bs_ctx *cx, const bs_route *step, double *cost);
+    /* Cost expected for a molecule that is not explored and not sold, 0 or more. */
+    bs_status (*guess)(void *payload, bs_ctx *cx, const bs_mol *mol, const char *smiles,
+                       double *cost);
+    /* Whether a route counts. Those left out make room for the next. */
+    bs_status (*keep)(void *payload, bs_ctx *cx, const bs_route *route, bool *kept);
+    /*
+     * Orders the routes, lowest first; routes of the same rank stay in the order of cost. Ten
+     * times `best` routes, at most 200, are taken by cost, and the `best` of them by rank stay.
+     */
+    bs_status (*rank)(void *payload, bs_ctx *cx, const bs_route *route, double *rank);
+    /* Called between batches; may be NULL. */
+    void (*progress)(void *payload, const bs_plan_progress *now);
+} bs_plan_opts;
+
+/*
+ * Plans a target.
+ *
+ *   out     free with bs_routes_free()
+ *   errors  BS_EVALUE, BS_ESYNTAX  in a known step ("known step 3: from 2: ..."), or an option
+ *                                  out of its range
+ *           BS_ENOMEM; what a callback or the shelf failed with
+ */
+bs_status bs_plan(bs_ctx *cx, const bs_mol *target, const bs_plan_opts *opts, bs_routes **out);
+
+/*
+ * The default guess: what it may cost, in step costs, to make a molecule. It grows with the heavy
+ * atoms (one step for each six beyond six), rings, stereocentres and hetero atoms; 0 to 40. For
+ * tests and tools.
+ */
+double bs_guess_steps(const bs_mol *mol);
+
+#endif
