@@ -1,0 +1,264 @@
+-- Acyl groups moved between carbon, nitrogen and oxygen.
+-- Yields are typical ranges and sources stand from memory unless a source says otherwise.
+
+pack {
+    name = "acyl-transfer",
+    version = "0.1.0",
+    licence = "CC0-1.0",
+    about = "Acyl groups moved between carbon, nitrogen and oxygen",
+    needs = { "synthons" },
+}
+
+disconnection "amide-from-ethyl-ester" {
+    about = "Ammonolysis or aminolysis of an ethyl ester; chiral α carbon is kept under mild conditions",
+    target = "[#6:1][C;X3:2](=[O;X1:3])-!@[N;X3;H1,H2;!$(N[#7,#8]);!$(N-c);!$(N(-C=O)-[C,S]=O):4]",
+    cut = { 2, 4 },
+    acceptor = { 2, "acyl-ethyl-ester" },
+    donor = { 4, "amine" },
+    conditions = "amine-heat",
+    also_attacks = { "other ester", "acyl halide", "anhydride", "epoxide", "alkyl halide", "aldehyde" },
+    recipe = "conc. aq. NH3 or amine, EtOH, rt to 80 °C; also: methyl ester, NH3/MeOH in a pressure tube",
+    yield = { 70, 92 },
+    cautions = { "ammonia" },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "NC(=O)c1cnc(s1)-c1ccc(F)cc1", from = { "CCOC(=O)c1cnc(s1)-c1ccc(F)cc1", "N" } },
+    refuse { "CC(=O)Nc1ccccc1" }, -- anilines are too weak for unactivated esters
+}
+
+disconnection "hydrazide-from-ethyl-ester" {
+    about = "Hydrazinolysis of an ethyl ester; nitro and aryl halide survive at 80 °C",
+    target = "[#6:1][C;X3:2](=[O;X1:3])[N;X3;H1:4][N;X3;H2:5]",
+    cut = { 2, 4 },
+    acceptor = { 2, "acyl-ethyl-ester" },
+    donor = { 4, "amine" },
+    conditions = "hydrazine",
+    also_attacks = { "other ester", "aldehyde", "ketone", "acyl halide", "imide", "alkyl halide", "anhydride",
+        "lactone" },
+    recipe = "N2H4·H2O, EtOH, reflux; also: methyl ester",
+    yield = { 75, 92 },
+    cautions = { "hydrazine" },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "NNC(=O)Cc1c[nH]c2ccc(F)cc12", from = { "CCOC(=O)Cc1c[nH]c2ccc(F)cc12", "NN" } },
+    refuse { "CN(N)C(=O)c1ccccc1" }, -- N-methyl hydrazide needs methylhydrazine
+}
+
+disconnection "acetamide-from-anhydride" {
+    about = "N-Acetylation of an alkylamine with acetic anhydride (N-acylation to amide); amine before phenol and alcohol",
+    rxno = "RXNO:0000357",
+    target = "[C;X4:1][N;X3;!$(N(-C=O)-[C,S]=O);!$(N-[N,O]):2]-!@[C;X3:3](=[O:4])[C;H3:5]",
+    cut = { 3, 2 },
+    acceptor = { 3, "acetyl" },
+    donor = { 2, "amine" },
+    conditions = "acylation",
+    also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol" },
+    recipe = "Ac2O, Et3N, CH2Cl2, 0 °C to rt; also: AcCl, aq. NaOH",
+    yield = { 85, 97 },
+    cautions = { "acetic anhydride", "triethylamine" },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "COc1ccc2[nH]cc(CCNC(C)=O)c2c1", from = { "COc1ccc2[nH]cc(CCN)c2c1", "CC(=O)OC(C)=O" } },
+    refuse { "CC(=O)OCc1ccccc1" }, -- an ester oxygen, not an amide nitrogen
+}
+
+disconnection "oxazolidinone-n-acylation" {
+    about = "N-Acylation of an oxazolidinone (Evans auxiliary); auxiliary keeps its configuration",
+    rxno = "RXNO:0000357",
+    target = "[N;$(N1C(=O)OCC1):1]-!@[C;X3:2](=[O:3])[#6:4]",
+    cut = { 2, 1 },
+    acceptor = { 2, "acyl" },
+    donor = { 1, "amide-nitrogen" },
+    conditions = "organolithium",
+    also_attacks = { "free alcohol", "free acid", "primary amine", "secondary amine", "ketone", "aldehyde",
+        "other ester" },
+    recipe = "nBuLi, THF, -78 °C, then RCOCl; also: mixed pivalic anhydride with LiCl/Et3N",
+    yield = { 80, 95 },
+    cautions = { "butyllithium" },
+    source = "Carey and Sundberg, Advanced Organic Chemistry, Part B; from memory",
+    example { "O=C(CCc1ccc(F)cc1)N1C(=O)OC[C@@H]1Cc1ccccc1", from = { "O=C1N[C@@H](Cc2ccccc2)CO1", "O=C(Cl)CCc1ccc(F)cc1" } },
+    refuse { "O=C1OCCN1c1ccccc1" }, -- N-aryl: no acyl group
+}
+
+disconnection "indole-n-acylation" {
+    about = "N-Acylation of an indole; nitrogen of the sodium salt, C3 without base",
+    rxno = "RXNO:0000357",
+    target = "[n;r5;X3:1]-!@[C;X3:2](=[O:3])[#6:4]",
+    cut = { 2, 1 },
+    acceptor = { 2, "acyl" },
+    donor = { 1, "azole" },
+    conditions = "base-hindered",
+    also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol", "free acid" },
+    recipe = "NaH, DMF, 0 °C, then RCOCl; also: NaOH, Bu4NHSO4, CH2Cl2",
+    yield = { 65, 90 },
+    cautions = { "sodium hydride", "N,N-dimethylformamide" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "COc1ccc2n(C(=O)c3ccc(Cl)cc3)c(C)c(CC(=O)OC(C)(C)C)c2c1", from = { "COc1ccc2[nH]c(C)c(CC(=O)OC(C)(C)C)c2c1", "O=C(Cl)c1ccc(Cl)cc1" } },
+    refuse { "CC(=O)c1c[nH]c2ccccc12" }, -- a C-acyl indole
+}
+
+disconnection "sulfonylurea-isocyanate" {
+    about = "Sulfonylurea from a sulfonamide and an isocyanate; sulfonamide nitrogen of the anion",
+    rxno = "RXNO:0000358",
+    target = "[S;X4:1](=[O:2])(=[O:3])[N;X3;H1:4]-!@[C;X3:5](=[O:6])-!@[N;X3;H1:7][#6:8]",
+    cut = { 5, 4 },
+    acceptor = { 5, "carbamoyl" },
+    donor = { 4, "sulfonamide-nitrogen" },
+    conditions = "base-aq-mild",
+    also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol" },
+    recipe = "K2CO3, acetone, reflux; also: NaOH, CuCl/DMF",
+    yield = { 70, 90 },
+    cautions = { "isocyanates" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "COc1ccc(Cl)cc1C(=O)NCCc1ccc(cc1)S(=O)(=O)NC(=O)NC1CCCCC1", from = { "COc1ccc(Cl)cc1C(=O)NCCc1ccc(cc1)S(N)(=O)=O", "O=C=NC1CCCCC1" } },
+    refuse { "CS(=O)(=O)NC(=O)N(C)C" }, -- second nitrogen carries no H
+}
+
+disconnection "sulfonyl-carbamate" {
+    about = "Ethyl sulfonylcarbamate from a sulfonamide; no isomers to expect",
+    rxno = "RXNO:0000359",
+    target = "[S;X4:1](=[O:2])(=[O:3])[N;X3;H1:4]-!@[C;X3:5](=[O:6])[O:7][C;H2:8][C;H3:9]",
+    cut = { 5, 4 },
+    acceptor = { 5, "alkoxycarbonyl" },
+    donor = { 4, "sulfonamide-nitrogen" },
+    conditions = "acylation",
+    also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol" },
+    recipe = "K2CO3, acetone, reflux",
+    yield = { 75, 92 },
+    cautions = { "ethyl chloroformate" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "CCOC(=O)NS(=O)(=O)c1ccc(C)cc1", from = { "Cc1ccc(cc1)S(N)(=O)=O", "CCOC(=O)Cl" } },
+    refuse { "CCOC(=O)NCS(C)(=O)=O" }, -- nitrogen not on the sulfur
+}
+
+disconnection "sulfonylurea-from-carbamate" {
+    about = "Sulfonylurea from a sulfonylcarbamate and an amine; no isomers to expect",
+    rxno = "RXNO:0000358",
+    target = "[S;X4:1](=[O:2])(=[O:3])[N;X3;H1:4][C;X3:5](=[O:6])-!@[N;X3:7]",
+    cut = { 5, 7 },
+    acceptor = { 5, "acyl-ethyl-ester" },
+    donor = { 7, "amine" },
+    conditions = "amine-heat",
+    also_attacks = { "other activated ester", "acyl halide", "primary amine" },
+    recipe = "toluene, reflux, ethanol distilled off",
+    yield = { 75, 92 },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "Cc1ccc(cc1)S(=O)(=O)NC(=O)NN1CC2CCCC2C1", from = { "CCOC(=O)NS(=O)(=O)c1ccc(C)cc1", "NN1CC2CCCC2C1" } },
+    refuse { "CS(=O)(=O)NC(C)=O" }, -- an acyl sulfonamide
+}
+
+disconnection "carbamate-from-isocyanate" {
+    about = "Carbamate from an isocyanate and an alcohol; no isomers to expect",
+    rxno = "RXNO:0000359",
+    target = "[#6:1][N;X3;H1:2]-!@[C;X3:3](=[O:4])-!@[O;X2:5][C;X4:6]",
+    cut = { 3, 5 },
+    acceptor = { 3, "carbamoyl" },
+    donor = { 5, "alcohol" },
+    conditions = "amine-rt",
+    also_attacks = { "primary amine", "secondary amine", "phenol", "thiol", "free acid", "other alcohol" },
+    recipe = "Et3N or dibutyltin dilaurate, toluene, 60-90 °C",
+    yield = { 80, 95 },
+    cautions = { "isocyanates", "triethylamine" },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "CC(C)OC(=O)Nc1cccc(Cl)c1", from = { "CC(C)O", "O=C=Nc1cccc(Cl)c1" } },
+    refuse { "CCOC(=O)N(C)C" }, -- no N-H
+}
+
+disconnection "thiourea-from-isothiocyanate" {
+    about = "Thiourea from an isothiocyanate and an amine; no isomers to expect",
+    target = "[#6:1][N;X3;H1:2]-!@[C;X3:3](=[S;X1:4])-!@[N;X3:5]",
+    from = "[#6:1][N;H0:2]=[C:3]=[S:4].[N:5]",
+    conditions = "amine-rt",
+    also_attacks = { "other primary amine", "secondary amine", "thiol", "hydrazine" },
+    recipe = "EtOH or CH2Cl2, rt; NH3 for the mono-substituted thiourea",
+    yield = { 80, 97 },
+    cautions = { "isothiocyanates" },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "COC(=O)c1ccc(NC(=S)NCC2CCCO2)cc1", from = { "COC(=O)c1ccc(cc1)N=C=S", "NCC1CCCO1" } },
+    refuse { "CN(C)C(=S)N(C)C" }, -- no N-H
+}
+
+disconnection "half-ester-from-cyclic-anhydride" {
+    about = "Opening of a cyclic anhydride by an alcohol; cis; racemic, or enantioselective with a cinchona alkaloid",
+    target = "[O;X2;H1:1][C;X3:2](=[O;X1:3])[#6:4]~[#6:5][C;X3:6](=[O;X1:7])-!@[O;X2:8][C;X4:9]",
+    from = "[O;H0:1]1[C:2](=[O:3])[#6:4]~[#6:5][C:6]1=[O:7].[O;H1:8][C:9]",
+    conditions = "acylation",
+    also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol" },
+    recipe = "MeOH, reflux; also: other primary alcohols, DMAP",
+    yield = { 75, 95 },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "COC(=O)C1CC=CCC1C(=O)O", from = { "O=C1OC(=O)C2CC=CCC12", "CO" } },
+    refuse { "COC(=O)CC(=O)O" }, -- malonic half-ester: the four-membered anhydride is not available
+}
+
+disconnection "malonate-c-acylation" {
+    about = "C-Acylation of a malonic ester; C- over O-acylation with magnesium",
+    target = "[#6:1][C;X3:2](=[O:3])-!@[C;X4;H1:4]([C;X3:5](=[O:6])[O:7][C:8])[C;X3:9](=[O:10])[O:11][C:12]",
+    cut = { 2, 4 },
+    acceptor = { 2, "acyl" },
+    donor = { 4, "stabilised-carbanion" },
+    conditions = "acylation",
+    also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol" },
+    recipe = "MgCl2, Et3N, MeCN, 0 °C, then RCOCl; also: Mg(OEt)2",
+    yield = { 75, 92 },
+    cautions = { "triethylamine" },
+    source = "Carey and Sundberg, Advanced Organic Chemistry, Part B; from memory",
+    example { "CCOC(=O)C(C(=O)OCC)C(=O)c1cc(F)c(F)cc1Cl", from = { "O=C(Cl)c1cc(F)c(F)cc1Cl", "CCOC(=O)CC(=O)OCC" } },
+    refuse { "CCOC(=O)C(C)(C(C)=O)C(=O)OCC" }, -- no H left on the central carbon
+}
+
+disconnection "meldrum-acylation" {
+    about = "Acylation of Meldrum's acid; written as the enol",
+    target = "[#6:1][C;X3:2]([O;H1:3])=[C:4]1[C](=O)O[C]([C;H3])([C;H3])O[C]1=O",
+    from = "[#6:1][C:2](=[O;H0:3])Cl.[C;H2:4]1C(=O)OC(C)(C)OC1=O",
+    conditions = "acylation",
+    also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol" },
+    recipe = "pyridine or DMAP, CH2Cl2, 0 °C; also: acid with DCC or pivaloyl chloride",
+    yield = { 80, 95 },
+    cautions = { "pyridine", "4-dimethylaminopyridine" },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "CC1(C)OC(=O)C(=C(O)Cc2cc(F)c(F)cc2F)C(=O)O1", from = { "O=C(Cl)Cc1cc(F)c(F)cc1F", "CC1(C)OC(=O)CC(=O)O1" } },
+    refuse { "CC1(C)OC(=O)C(=Cc2ccccc2)C(=O)O1" }, -- an arylidene: Knoevenagel
+}
+
+disconnection "meldrum-alcoholysis" {
+    about = "β-Keto ester by alcoholysis of an acyl Meldrum's acid; loses CO2 and acetone",
+    target = "[#6:1][C;X3:2](=[O:3])[C;X4;H2:4][C;X3:5](=[O:6])[O;X2:7][C;X4:8]",
+    from = "[#6:1][C:2]([O;H1:3])=[C;H0:4]1[C:5](=[O:6])OC(C)(C)OC1=O.[O;H1:7][C:8]",
+    conditions = "heat-200",
+    also_attacks = { "primary amine", "secondary amine", "other alcohol" },
+    recipe = "MeOH, reflux; also: tBuOH or other alcohol in toluene reflux",
+    yield = { 80, 95 },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "COC(=O)CC(=O)Cc1cc(F)c(F)cc1F", from = { "CC1(C)OC(=O)C(=C(O)Cc2cc(F)c(F)cc2F)C(=O)O1", "CO" } },
+    refuse { "COC(=O)C(C)C(C)=O" }, -- substituted between the carbonyl groups
+}
+
+disconnection "baker-venkataraman" {
+    about = "Baker-Venkataraman rearrangement; intramolecular acyl transfer",
+    rxno = "RXNO:0000122",
+    target = "[O;H1:1][c:2]:[c:3][C;X3:4](=[O:5])[C;X4;H2:6]-!@[C;X3:7](=[O:8])[#6:9]",
+    from = "[O;H0:1]([C:7](=[O:8])[#6:9])[c:2]:[c:3][C:4](=[O:5])[C;H3:6]",
+    conditions = "base-aq-strong",
+    also_attacks = { "other ester", "alkyl halide", "aldehyde" },
+    recipe = "KOH, pyridine, 50 °C; also: KOtBu, NaH in DMSO",
+    yield = { 70, 90 },
+    cautions = { "pyridine", "potassium hydroxide" },
+    source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
+    example { "COc1ccc(cc1)C(=O)CC(=O)c1ccccc1O", from = { "COc1ccc(cc1)C(=O)Oc1ccccc1C(C)=O" } },
+    refuse { "O=C(CC(=O)c1ccccc1)c1ccccc1" }, -- no ortho hydroxyl group
+}
+
+disconnection "formamide-formation" {
+    about = "Formylation of an amine with formic acid; amine before alcohol",
+    rxno = "RXNO:0000357",
+    target = "[N;X3;!$(N(-C=O)-[C,S]=O):1]-!@[C;X3;H1:2]=[O:3]",
+    cut = { 2, 1 },
+    acceptor = { 2, "acyl-acid" },
+    donor = { 1, "amine" },
+    conditions = "amine-heat",
+    also_attacks = { "tertiary alcohol", "acetal", "Boc carbamate", "other primary amine" },
+    recipe = "HCO2H, toluene, reflux with water removal; also: ethyl formate reflux, acetic formic anhydride",
+    yield = { 80, 97 },
+    cautions = { "formic acid" },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "O=CNc1cccc(Cl)c1C", from = { "Nc1cccc(Cl)c1C", "OC=O" } },
+    refuse { "CN(C)C(C)=O" }, -- an acetamide
+}

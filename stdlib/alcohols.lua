@@ -1,0 +1,233 @@
+-- Alcohols, diols and epoxides: reductions, hydrations, oxidations of alkenes.
+-- Yields are typical ranges and sources stand from memory unless a source says otherwise.
+
+pack {
+    name = "alcohols",
+    version = "0.1.0",
+    licence = "CC0-1.0",
+    about = "Alcohols, diols and epoxides: reductions, hydrations, oxidations of alkenes",
+    needs = { "synthons" },
+}
+
+interconversion "secondary-alcohol-from-ketone" {
+    about = "Ketone reduction with sodium borohydride; hydride from the less hindered face; racemic in open chains; ester survives",
+    target = "[C;X4;H1:1]([#6:3])([#6:4])[O;X2;H1:2]",
+    from = "[C;X3;H0:1](=[O;X1;H0:2])([#6:3])[#6:4]",
+    conditions = "nabh4",
+    also_attacks = { "aldehyde", "ketone", "acyl halide" },
+    recipe = "NaBH4, MeOH, 0 °C to rt; also: LiBH4, L-Selectride (axial alcohol)",
+    yield = { 85, 98 },
+    cautions = { "sodium borohydride" },
+    source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
+    example { "COC(=O)c1ccc(cc1)C(C)O", from = { "COC(=O)c1ccc(cc1)C(C)=O" } },
+    refuse { "CCC(C)(C)O" }, -- tertiary alcohol has no H on the carbinol carbon
+}
+
+interconversion "primary-alcohol-from-aldehyde" {
+    about = "Aldehyde reduction with sodium borohydride; aldehyde before ketone at low temperature; nitro and ester survive",
+    target = "[C;X4;H2:1]([#6:3])[O;X2;H1:2]",
+    from = "[C;X3;H1:1]([#6:3])=[O;X1;H0:2]",
+    conditions = "nabh4",
+    also_attacks = { "aldehyde", "ketone", "acyl halide" },
+    recipe = "NaBH4, EtOH, 0 °C",
+    yield = { 85, 98 },
+    cautions = { "sodium borohydride" },
+    source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
+    example { "OCc1ccc(cc1)[N+](=O)[O-]", from = { "O=Cc1ccc(cc1)[N+](=O)[O-]" } },
+    refuse { "CC(O)c1ccccc1" }, -- secondary alcohol comes from a ketone
+}
+
+interconversion "primary-alcohol-from-acid" {
+    about = "Carboxylic acid to primary alcohol reduction (borane); acid before ester and nitro",
+    rxno = "RXNO:0000431",
+    target = "[C;X4;H2:1]([#6:3])[O;X2;H1:2]",
+    from = "[C;X3;H0:1]([#6:3])(=[O;X1;H0:2])[O;H1]",
+    conditions = "borane",
+    also_attacks = { "alkene", "alkyne", "aldehyde", "ketone", "amide", "nitrile", "imine" },
+    recipe = "BH3·THF, THF, 0 °C to rt; also: BH3·SMe2; mixed anhydride then NaBH4",
+    yield = { 75, 95 },
+    cautions = { "borane-tetrahydrofuran complex" },
+    source = "Carey and Sundberg, Advanced Organic Chemistry, Part B; from memory",
+    example { "OCc1cccc(c1)C(=O)OC", from = { "OC(=O)c1cccc(c1)C(=O)OC" } },
+    refuse { "CC(C)O" }, -- secondary alcohol cannot come from an acid without a new C-C bond
+}
+
+interconversion "primary-alcohol-from-ester" {
+    about = "Ester reduction with lithium aluminium hydride; goes through to the alcohol; isolated C=C survives",
+    target = "[C;X4;H2:1]([#6:3])[O;X2;H1:2]",
+    from = "[C;X3;H0:1]([#6:3])(=[O;X1;H0:2])[O;X2;H0][C;H3]",
+    conditions = "lialh4",
+    also_attacks = { "aldehyde", "ketone", "ester", "free acid", "amide", "nitrile", "epoxide", "acyl halide",
+        "alkyl halide", "nitro", "azide" },
+    recipe = "LiAlH4, THF, 0 °C to reflux; also: ethyl ester; LiBH4 (spares amide, acid)",
+    yield = { 80, 97 },
+    cautions = { "lithium aluminium hydride" },
+    source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
+    example { "OCc1cc2ccccc2[nH]1", from = { "COC(=O)c1cc2ccccc2[nH]1" } },
+    refuse { "OC(C)(C)c1cc2ccccc2[nH]1" }, -- tertiary alcohol from an ester needs a carbon nucleophile
+}
+
+interconversion "luche-reduction" {
+    about = "Luche reduction; 1,2 (not 1,4) reduction; equatorial alcohol in cyclohexenones",
+    rxno = "RXNO:0000286",
+    target = "[C;X4;H1:1]([#6:5])([C;X3:3]=[C;X3:4])[O;X2;H1:2]",
+    from = "[C;X3;H0:1]([#6:5])([C;X3:3]=[C;X3:4])=[O;X1;H0:2]",
+    conditions = "nabh4",
+    also_attacks = { "ketone", "acyl halide" },
+    recipe = "NaBH4, CeCl3·7H2O, MeOH, 0 °C",
+    yield = { 85, 98 },
+    cautions = { "sodium borohydride" },
+    source = "J.-L. Luche, J. Am. Chem. Soc. 1978, 100, 2226; from memory",
+    example { "CC1=CC[C@@H](CC1O)C(C)=C", from = { "CC1=CC[C@@H](CC1=O)C(C)=C" } },
+    refuse { "OC1CCCCC1" }, -- no C=C next to the carbinol carbon
+}
+
+interconversion "oxymercuration-demercuration" {
+    about = "Oxymercuration-demercuration; Markovnikov, no rearrangement",
+    target = "[CX4;H0,H1;!$(C[!#6;!#1;!$([OX2H])]):1]([OX2H:3])[CX4;!H0;!$(C[!#6;!#1]):2]",
+    from = "[C:1]=[C:2]",
+    when = function(m) return m.atom[1].carbons > m.atom[2].carbons end,
+    prefer = function(product, m) return m.atom[1].carbons end,
+    conditions = "oxymercuration",
+    also_attacks = { "alkene", "alkyne" },
+    recipe = "Hg(OAc)2, THF-H2O, then NaBH4, NaOH",
+    yield = { 75, 95 },
+    cautions = { "mercury(II) acetate", "sodium borohydride", "sodium hydroxide" },
+    source = "H. C. Brown and P. J. Geoghegan, oxymercuration-demercuration papers; from memory",
+    example { "CC(O)C(C)(C)C", from = { "C=CC(C)(C)C" } },
+    refuse { "OCCC(C)(C)C" }, -- anti-Markovnikov alcohol: use hydroboration
+}
+
+interconversion "acid-hydration-of-alkene" {
+    about = "Acid-catalysed hydration of an alkene; Markovnikov; only where the cation is tertiary",
+    target = "[CX4;H0;!$(C[!#6;!#1;!$([OX2H])]):1]([OX2H:3])[CX4;!H0;!$(C[!#6;!#1]):2]",
+    from = "[C:1]=[C:2]",
+    when = function(m) return m.atom[1].carbons > m.atom[2].carbons end,
+    prefer = function(product, m) return m.atom[1].carbons end,
+    conditions = "acid-aq-strong",
+    also_attacks = { "alkene", "epoxide", "acetal", "silyl ether", "free alcohol", "Boc amine",
+        "tert-butyl ester" },
+    recipe = "H2SO4 (aq, 50-65 %), 0-25 °C; also: the internal alkene isomer",
+    yield = { 50, 80 },
+    cautions = { "sulfuric acid" },
+    source = "March's Advanced Organic Chemistry; from memory",
+    example { "CC1(O)CCN(CC1)C(=O)c1ccccc1", from = { "C=C1CCN(CC1)C(=O)c1ccccc1" } },
+    refuse { "CC(O)C(C)(C)C" }, -- secondary cation beside a quaternary carbon rearranges (gives 2,3-dimethylbutan-2-ol)
+}
+
+interconversion "hydroboration-oxidation" {
+    about = "Hydroboration-oxidation; anti-Markovnikov",
+    rxno = "RXNO:0000293",
+    also = { "hydroboration-oxidation-trisubstituted" },
+    target = "[CX4;H1,H2;!$(C[!#6;!#1;!$([OX2H])]):1]([OX2H:3])[CX4;!H0;!$(C[!#6;!#1]):2]",
+    from = "[C:1]=[C:2]",
+    when = function(m) return m.atom[1].carbons < m.atom[2].carbons end,
+    prefer = function(product, m) return -m.atom[1].carbons end,
+    conditions = "borane",
+    also_attacks = { "alkene", "alkyne", "aldehyde", "ketone", "free acid" },
+    recipe = "9-BBN or BH3·THF, THF, then H2O2, NaOH; also: BH3·SMe2, Cy2BH",
+    yield = { 75, 95 },
+    cautions = { "borane-tetrahydrofuran complex", "hydrogen peroxide", "sodium hydroxide" },
+    source = "H. C. Brown, hydroboration papers; from memory",
+    example { "OCCC1CCN(CC1)C(=O)OC(C)(C)C", from = { "C=CC1CCN(CC1)C(=O)OC(C)(C)C" } },
+    refuse { "OCC(C)(C)C" }, -- carbon beside the carbinol carbon carries no H, so no alkene precursor
+}
+
+interconversion "benzylic-halide-hydrolysis" {
+    about = "Hydrolysis of a benzylic halide; substitution at the benzylic carbon",
+    target = "[C;X4;H2:1]([c:3])[O;X2;H1]",
+    from = "[C;X4;H2:1]([c:3])[Br;X1]",
+    conditions = "base-aq-mild",
+    also_attacks = { "alkyl halide", "acyl halide" },
+    recipe = "CaCO3, dioxane-H2O, reflux; also: Cl, I; NaOAc then K2CO3, MeOH",
+    yield = { 70, 95 },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "OCc1ccc(cc1)C#N", from = { "BrCc1ccc(cc1)C#N" } },
+    refuse { "OCCc1ccccc1" }, -- not benzylic: hydroxide would eliminate as well
+}
+
+interconversion "syn-dihydroxylation" {
+    about = "Osmium-catalysed dihydroxylation (Upjohn); syn addition: cis diol in a ring; from the less hindered face",
+    target = "[C;X4;H1;R:1]([#6;R:5])([O;X2;H1])[C;X4;H1;R:3]([#6;R:6])[O;X2;H1]",
+    from = "[C;X3;H1;R:1]([#6;R:5])=[C;X3;H1;R:3][#6;R:6]",
+    conditions = "oso4",
+    also_attacks = { "alkene", "thiol", "thioether" },
+    recipe = "OsO4 (cat), NMO, acetone-H2O, rt; also: K2OsO4",
+    yield = { 75, 95 },
+    cautions = { "osmium tetroxide" },
+    source = "V. VanRheenen, R. C. Kelly and D. Y. Cha, Tetrahedron Lett. 1976, 1973; from memory",
+    example { "O[C@H]1CN(C[C@H]1O)C(=O)OCc1ccccc1", from = { "C1C=CCN1C(=O)OCc1ccccc1" } },
+    refuse { "O[C@@H]1CCCC[C@H]1O" }, -- trans diol of a ring is not formed by syn addition
+}
+
+interconversion "terminal-dihydroxylation" {
+    about = "Dihydroxylation of a terminal alkene; racemic; terminal before trisubstituted only by sterics, electron-rich alkene first",
+    target = "[C;X4;H1:1]([#6;!$(C=[O,N]):5])([O;X2;H1])[C;X4;H2:3][O;X2;H1]",
+    from = "[C;X3;H1:1]([#6:5])=[C;X3;H2:3]",
+    conditions = "oso4",
+    also_attacks = { "alkene", "thiol", "thioether" },
+    recipe = "OsO4 (cat), NMO, acetone-H2O, rt; also: K2OsO4, K3Fe(CN)6",
+    yield = { 75, 95 },
+    cautions = { "osmium tetroxide" },
+    source = "V. VanRheenen, R. C. Kelly and D. Y. Cha, Tetrahedron Lett. 1976, 1973; from memory",
+    example { "OCC(O)CCC(=O)OC(C)(C)C", from = { "C=CCCC(=O)OC(C)(C)C" } },
+    refuse { "OCCCO" }, -- 1,3-diol
+}
+
+interconversion "prilezhaev-epoxidation" {
+    about = "Prilezhaev epoxidation; syn, stereospecific; the more electron-rich alkene first",
+    rxno = "RXNO:0000405",
+    target = "[C;X4;r3;!$(C[C,S]=O);!$(CC#N):1]1[O;X2;r3][C;X4;r3;!$(C[C,S]=O);!$(CC#N):3]1",
+    from = "[C;X3:1]=[C;X3:3]",
+    conditions = "mcpba",
+    also_attacks = { "alkene", "primary amine", "secondary amine", "tertiary amine", "thiol", "thioether",
+        "imine", "aldehyde" },
+    recipe = "mCPBA, NaHCO3, CH2Cl2, 0 °C; also: dimethyldioxirane",
+    yield = { 75, 95 },
+    cautions = { "3-chloroperbenzoic acid" },
+    source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
+    example { "CC(=O)OC/C=C(\\C)CCC1OC1(C)C", from = { "CC(=O)OC/C=C(\\C)CCC=C(C)C" } },
+    refuse { "CC1OC1C(C)=O" }, -- alkene conjugated to C=O is too electron-poor for a peracid (use H2O2, NaOH)
+}
+
+interconversion "chlorohydrin-formation" {
+    about = "Chlorohydrin from an alkene; anti addition; OH on the carbon that bears positive charge better",
+    target = "[C;X4;H2:1]([Cl;X1])[C;X4;H1:3]([c:5])[O;X2;H1]",
+    from = "[C;X3;H2:1]=[C;X3;H1:3][c:5]",
+    conditions = "acid-aq-mild",
+    also_attacks = { "alkene", "phenol", "aniline", "thiol", "thioether", "primary amine",
+        "secondary amine" },
+    recipe = "NCS, H2O-acetone, rt; also: NaOCl, AcOH; NBS, H2O-DMSO for the bromohydrin",
+    yield = { 60, 85 },
+    cautions = { "N-chlorosuccinimide" },
+    source = "March's Advanced Organic Chemistry; from memory",
+    example { "OC(CCl)c1ccc(Cl)cc1", from = { "C=Cc1ccc(Cl)cc1" } },
+    refuse { "OCC(Cl)c1ccccc1" }, -- water attacks the more substituted (benzylic) carbon, halogen ends terminal
+}
+
+interconversion "anti-diol-from-epoxide" {
+    about = "Epoxide hydrolysis to an anti diol; inversion at the attacked carbon: trans diol in a ring",
+    target = "[O;X2;H1:2][C;X4;H1:1]([#6:5])[C@@;X4;H1:3]([#6:6])[O;X2;H1]",
+    from = "[O;X2;H0:2]1[C;X4;H1:1]([#6:5])[C@@;X4;H1:3]1[#6:6]",
+    conditions = "acid-aq-mild",
+    also_attacks = { "epoxide", "acetal", "silyl ether", "alkene" },
+    recipe = "H2SO4 (cat) or HClO4, H2O-THF; also: KOH, DMSO-H2O, heat",
+    yield = { 70, 90 },
+    cautions = { "sulfuric acid" },
+    source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
+    example { "O[C@@H]1CCCC[C@H]1O", from = { "C1CC[C@H]2O[C@H]2C1" } },
+    refuse { "O[C@@H]1CCCC[C@@H]1O" }, -- cis diol of a ring is not formed by back-side opening
+}
+
+interconversion "alcohol-from-ester-hydrolysis" {
+    about = "Ester hydrolysis giving an alcohol; C-O bond of the alcohol and its configuration kept",
+    target = "[C;X4;H1;R:1]([C;X4:3])([C;X4:4])[O;X2;H1:2]",
+    from = "[C;X4;H1;R:1]([C;X4:3])([C;X4:4])[O;X2;H0:2][C;X3](=O)c1ccccc1",
+    conditions = "base-aq-mild",
+    also_attacks = { "ester", "acyl halide", "anhydride" },
+    recipe = "K2CO3, MeOH, rt; also: LiOH, THF-H2O; acetate, formate",
+    yield = { 85, 98 },
+    source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
+    example { "OC1CCN(CC1)c1ncccn1", from = { "O=C(OC1CCN(CC1)c1ncccn1)c1ccccc1" } },
+    refuse { "Oc1ccccc1" }, -- phenol, not an alcohol on sp3 carbon
+}
