@@ -1,0 +1,211 @@
+/* Knuth's algorithm with a lazy binary heap, and settling again where costs are not superior. */
+#include "search/cheapest.h"
+
+#include <math.h>
+#include <string.h>
+
+/*
+ * A molecule is settled again only if it becomes cheaper by more than this part of its value, or
+ * of the smallest price: a circle that gives more than it takes would go on for ever.
+ */
+#define LEAST_GAIN 1e-13
+
+/* Bound on settling again, in rounds through the whole graph. */
+#define MOST_ROUNDS 1024.0
+
+static void *take(const bs_graph *graph, size_t count, size_t size)
+{
+    return bs_gate_alloc(graph->cx->gate, count * size);
+}
+
+bs_status bs_cheapest__init(bs_cheapest *work, const bs_graph *graph, bs_cost_mode mode)
+{
+    size_t n = graph->mol_count;
+
+    *work = (bs_cheapest){.graph = graph, .mode = mode};
+    work->value = take(graph, n, sizeof *work->value);
+    work->choice = take(graph, n, sizeof *work->choice);
+    work->missing = take(graph, graph->way_count, sizeof *work->missing);
+    work->settled = take(graph, n, sizeof *work->settled);
+    work->only = take(graph, n, sizeof *work->only);
+    work->barred = take(graph, graph->step_count, sizeof *work->barred);
+    work->no_buy = take(graph, n, sizeof *work->no_buy);
+    if (!work->value || !work->choice || !work->missing || !work->settled || !work->only ||
+        !work->barred || !work->no_buy) {
+        bs_cheapest__free(work);
+        return bs_fail_memory(graph->cx);
+    }
+    for (size_t i = 0; i < n; i++)
+        work->only[i] = BS_GRAPH_NONE;
+    return BS_OK;
+}
+
+void bs_cheapest__free(bs_cheapest *work)
+{
+    const bs_graph *graph = work->graph;
+    bs_gate *gate;
+    size_t n;
+
+    if (!graph)
+        return;
+    gate = graph->cx->gate;
+    n = graph->mol_count;
+    bs_gate_free(gate, work->value, n * sizeof *work->value);
+    bs_gate_free(gate, work->choice, n * sizeof *work->choice);
+    bs_gate_free(gate, work->missing, graph->way_count * sizeof *work->missing);
+    bs_gate_free(gate, work->settled, n * sizeof *work->settled);
+    bs_gate_free(gate, work->only, n * sizeof *work->only);
+    bs_gate_free(gate, work->barred, graph->step_count * sizeof *work->barred);
+    bs_gate_free(gate, work->no_buy, n * sizeof *work->no_buy);
+    bs_gate_free(gate, work->heap, work->heap_room * sizeof *work->heap);
+    *work = (bs_cheapest){.graph = NULL};
+}
+
+/* Cheaper first; among equals the molecule that was added first. */
+static bool before(bs_cheapest_entry a, bs_cheapest_entry b)
+{
+    return a.value != b.value ? a.value < b.value : a.mol < b.mol;
+}
+
+static bs_status push(bs_cheapest *work, double value, uint32_t mol)
+{
+    bs_cheapest_entry entry = {value, mol};
+    size_t at = work->heap_count;
+    bs_status st = bs_graph__reserve(work->graph->cx, &work->heap, &work->heap_room, at + 1,
+                                     sizeof *work->heap);
+
+    if (st != BS_OK)
+        return st;
+    work->heap_count++;
+    for (; at > 0 && before(entry, work->heap[(at - 1) / 2]); at = (at - 1) / 2)
+        work->heap[at] = work->heap[(at - 1) / 2];
+    work->heap[at] = entry;
+    return BS_OK;
+}
+
+static bs_cheapest_entry pop(bs_cheapest *work)
+{
+    bs_cheapest_entry top = work->heap[0], last = work->heap[--work->heap_count];
+    size_t at = 0, child;
+
+    while ((child = 2 * at + 1) < work->heap_count) {
+        if (child + 1 < work->heap_count && before(work->heap[child + 1], work->heap[child]))
+            child++;
+        if (!before(work->heap[child], last))
+            break;
+        work->heap[at] = work->heap[child];
+        at = child;
+    }
+    if (work->heap_count > 0)
+        work->heap[at] = last;
+    return top;
+}
+
+/* Offers a molecule a new choice; it is taken if it is cheaper. */
+static bs_status improve(bs_cheapest *work, uint32_t mol, double value, uint32_t choice)
+{
+    double old = work->value[mol];
+
+    if (!(value < old) ||
+        (work->settled[mol] && old - value <= LEAST_GAIN * fmax(old, work->unit)))
+        return BS_OK;
+    work->value[mol] = value;
+    work->choice[mol] = choice;
+    return push(work, value, mol);
+}
+
+/* Whether the bars leave this way open. */
+static bool is_open(const bs_cheapest *work, const bs_graph_way *way)
+{
+    uint32_t only = work->only[way->product];
+
+    return !work->barred[way->step] && (only == BS_GRAPH_NONE || only == way->step);
+}
+
+/* The smallest number above 0 that costs are made of: the measure of what is negligible. */
+static double least_number(const bs_graph *graph)
+{
+    double least = INFINITY;
+
+    for (uint32_t mol = 0; mol < graph->mol_count; mol++) {
+        if (graph->mols[mol].price > 0)
+            least = fmin(least, graph->mols[mol].price);
+    }
+    for (uint32_t way = 0; way < graph->way_count; way++) {
+        if (graph->ways[way].cost > 0)
+            least = fmin(least, graph->ways[way].cost);
+    }
+    return isfinite(least) ? least : 1;
+}
+
+static bs_status start(bs_cheapest *work, const double *leaf)
+{
+    const bs_graph *graph = work->graph;
+    bs_status st = BS_OK;
+
+    work->heap_count = 0;
+    work->converged = true;
+    work->unit = bs_graph__is_superior(graph, work->mode) ? 0 : least_number(graph);
+    memset(work->settled, 0, graph->mol_count * sizeof *work->settled);
+    for (uint32_t way = 0; way < graph->way_count; way++)
+        work->missing[way] = graph->ways[way].count;
+    for (uint32_t mol = 0; mol < graph->mol_count; mol++) {
+        work->value[mol] = INFINITY;
+        work->choice[mol] = BS_GRAPH_NONE;
+    }
+    for (uint32_t mol = 0; st == BS_OK && mol < graph->mol_count; mol++) {
+        double price = leaf ? leaf[mol] : graph->mols[mol].price;
+
+        if (work->no_buy[mol] ||
+            (work->only[mol] != BS_GRAPH_NONE && work->only[mol] != BS_GRAPH_BUY))
+            continue;
+        st = improve(work, mol, price, BS_GRAPH_BUY);
+    }
+    return st;
+}
+
+/* Tells the ways that use a molecule that it has a new value. */
+static bs_status spread(bs_cheapest *work, uint32_t mol)
+{
+    const bs_graph *graph = work->graph;
+    bool first = !work->settled[mol];
+    bs_status st = BS_OK;
+
+    work->settled[mol] = true;
+    for (uint32_t use = graph->mols[mol].first_use; st == BS_OK && use != BS_GRAPH_NONE;
+         use = graph->uses[use].next) {
+        uint32_t way = graph->uses[use].way;
+        const bs_graph_way *w = &graph->ways[way];
+
+        if (first)
+            work->missing[way]--;
+        if (work->missing[way] > 0 || !is_open(work, w))
+            continue;
+        st = improve(work, w->product, bs_graph__way_cost(graph, way, work->mode, work->value),
+                     way);
+    }
+    return st;
+}
+
+bs_status bs_cheapest__run(bs_cheapest *work, const double *leaf, uint32_t target)
+{
+    const bs_graph *graph = work->graph;
+    bool superior = bs_graph__is_superior(graph, work->mode);
+    double budget = MOST_ROUNDS * ((double)graph->mol_count + 16);
+    bs_status st = start(work, leaf);
+
+    while (st == BS_OK && work->heap_count > 0) {
+        bs_cheapest_entry top = pop(work);
+
+        if (top.value > work->value[top.mol] || (superior && work->settled[top.mol]))
+            continue; /* it became cheaper after this entry was made */
+        if (budget-- <= 0) {
+            work->converged = false;
+            break;
+        }
+        st = spread(work, top.mol);
+        if (superior && top.mol == target)
+            break;
+    }
+    return st;
+}
