@@ -65,6 +65,14 @@ typedef struct bs_route_step {
     bool checked; /* run forwards, it gave the product */
     char **rivals; /* what else it could give: SMILES, products of one run joined by dots */
     int rival_count;
+    /*
+     * Of the longest linear sequence that ends with this step: its steps, and its overall yields
+     * in per cent, at the low end, as used for the cost, and at the high end; where several are
+     * longest, the lowest. A way without a range counts with the yield used for its cost.
+     */
+    int line;
+    double line_low, line_yield, line_high;
+    double runs; /* steps of the unfolded tree that ends with this one */
 } bs_route_step;
 
 typedef struct bs_route {
@@ -82,9 +90,9 @@ typedef struct bs_route {
 /*
  * Makes a route from molecules and steps in any order. Of a molecule `smiles`, `price` and
  * `offer` are read, of a step all but `ways` beyond `way_count`; a molecule without step is
- * bought. Fills cost, moles, bought, step and rank, puts the target first, then the others as the
- * steps first need them from the target backwards, and the steps in bench order. In additive mode
- * `moles` still heeds equivalents and yields.
+ * bought. Fills cost, moles, bought, step, the lines and the rank, puts the target first, then the
+ * others as the steps first need them from the target backwards, the steps in bench order and
+ * their ways by cost. In additive mode `moles` still heeds equivalents and yields.
  *
  *   target  index of the target in `molecules`
  *   errors  BS_EVALUE  no molecules, an index out of range, a molecule that two steps make, a
@@ -102,20 +110,14 @@ bs_status bs_route_copy(bs_ctx *cx, bs_arena *home, const bs_route *route, bs_ro
 
 typedef struct bs_route_measures {
     int steps;   /* distinct steps */
-    int runs;    /* steps in the unfolded tree, each use of an intermediate counted */
+    double runs; /* steps in the unfolded tree, each use of an intermediate counted */
     int longest; /* longest linear sequence: most steps from an offer to the target */
     int leaves;  /* bought molecules */
     double cost;
-    /*
-     * Overall yield along the longest linear sequence: product of the step yields at the low end,
-     * as used for the cost, and at the high end; where several are longest, the lowest. A step
-     * without a range counts with the yield used for its cost. 100 for a route of no steps.
-     */
-    double yield_low, yield, yield_high;
+    double yield_low, yield, yield_high; /* along the longest line, per cent; 100 without steps */
     bool checked; /* every step was run forwards or is a known step */
 } bs_route_measures;
 
-/* Cannot fail; O(molecules + steps). */
 void bs_route_measure(const bs_route *route, bs_route_measures *out);
 
 /*

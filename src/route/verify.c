@@ -1,0 +1,64 @@
+/* Running the steps of a route again, with no regard to how they were found. */
+#include "backsaw/format.h"
+#include "backsaw/route.h"
+
+#include <string.h>
+
+/* Whether a step that a rule proposes has the precursors of the route's step. */
+static bool has_precursors(const bs_route *route, const bs_route_step *step, const bs_step *found)
+{
+    if (found->precursor_count != step->precursor_count)
+        return false;
+    for (int i = 0; i < found->precursor_count; i++) {
+        int j = 0;
+
+        while (j < step->precursor_count &&
+               strcmp(found->smiles[i], route->molecules[step->precursors[j]].smiles) != 0)
+            j++;
+        if (j == step->precursor_count)
+            return false;
+    }
+    return true;
+}
+
+static bs_status verify_step(bs_ctx *cx, const bs_route *route, const bs_route_step *step,
+                             const bs_rules *rules, const bs_rule_hooks *hooks, bool *good)
+{
+    const char *smiles = route->molecules[step->product].smiles;
+    bs_mark temp = bs_arena_mark(&cx->scratch);
+    bs_steps found = {NULL, 0};
+    bs_mol *product;
+    int rule = step->ways[0].transform ? bs_rules_find(rules, step->ways[0].transform) : -1;
+    bs_status st;
+
+    *good = false;
+    if (rule < 0)
+        return BS_OK;
+    st = bs_smiles_read(cx, &cx->scratch, smiles, strlen(smiles), NULL, &product);
+    if (st == BS_OK)
+        st = bs_rules_back(cx, &cx->scratch, rules, rule, product, hooks, 0, &found);
+    for (int i = 0; st == BS_OK && i < found.count; i++)
+        *good = *good || has_precursors(route, step, &found.items[i]);
+    bs_arena_rewind(&cx->scratch, temp);
+    return st;
+}
+
+bs_status bs_route_verify(bs_ctx *cx, const bs_route *route, const bs_rules *rules,
+                          const bs_rule_hooks *hooks, int *failed)
+{
+    *failed = -1;
+    for (int i = 0; i < route->step_count; i++) {
+        bool good = true;
+        bs_status st = BS_OK;
+
+        if (!route->steps[i].known)
+            st = verify_step(cx, route, &route->steps[i], rules, hooks, &good);
+        if (st != BS_OK)
+            return st;
+        if (!good) {
+            *failed = i;
+            return BS_OK;
+        }
+    }
+    return BS_OK;
+}
