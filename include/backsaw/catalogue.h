@@ -30,24 +30,36 @@ typedef struct bs_offers {
 typedef struct bs_import_report {
     long lines, offers, refused;
     long first_refused_line; /* 0 if none */
-    char first_refused[BS_MESSAGE_MAX];
+    char first_refused[BS_MESSAGE_MAX]; /* with the names of file and line */
 } bs_import_report;
 
 /*
  * Builds a catalogue file from lists: .smi (SMILES, blank, name), .tsv, .csv with a header line
  * that names its columns (smiles; code, name, price_per_gram[_eur], pack_g or container_g,
- * lead_days, all but smiles optional), each also with .gz. The file is written beside `output`
- * and renamed into place, so a failure leaves an older one whole.
+ * lead_days, all but smiles optional, in any order and case, others ignored), each also with .gz.
+ * In a .csv fields may be quoted as in RFC 4180, and semicolons or tabs may stand for the commas;
+ * a .tsv knows no quotes. The file is written beside `output` and renamed into place, so a failure
+ * leaves an older one whole; a file that is there and is no catalogue is not overwritten.
+ *
+ *   A line that is no use is counted in the report and left out: its structure cannot be read or
+ *   weighed, a number is none, it has too many fields or more than 1 MiB.
  *
  *   errors  BS_EFILE   an input that cannot be read, an output that cannot be written
  *           BS_ESYNTAX no header with a smiles column, an unclosed quote; error.line is set
+ *           BS_EVALUE  not one line could be used
+ *           BS_ELIMIT  one input has more than 4 GiB of text
  *           BS_ESTOPPED
- *   A line whose structure cannot be read is counted in the report and left out.
+ *   The report is filled up to the error.
  */
 bs_status bs_catalogue_build(bs_ctx *cx, const char *const *inputs, int input_count,
                              const char *output, bs_import_report *report);
 
-/* Opens a catalogue file for reading. Several may be open. */
+/*
+ * Opens a catalogue file for reading. Several may be open; one thread at a time uses each.
+ *
+ *   errors  BS_EFILE  not there, no catalogue, damaged, or written by a version whose format or
+ *                     canonical SMILES differ
+ */
 bs_status bs_catalogue_open(bs_ctx *cx, const char *path, bs_catalogue **out);
 
 /* NULL is allowed. */
@@ -56,7 +68,10 @@ void bs_catalogue_close(bs_catalogue *catalogue);
 /* Number of offers. */
 long bs_catalogue_count(const bs_catalogue *catalogue);
 
-/* Offers for a molecule, the cheapest per gram first; no offer is BS_OK with count 0. */
+/*
+ * Offers for a molecule, the cheapest per gram first, those without price last; no offer is BS_OK
+ * with count 0. At most 1000 are given.
+ */
 bs_status bs_catalogue_find(bs_ctx *cx, bs_arena *home, bs_catalogue *catalogue, const bs_mol *mol,
                             bs_offers *out);
 
@@ -73,8 +88,11 @@ void bs_shelf_free(bs_shelf *shelf);
 bs_status bs_shelf_add_catalogue(bs_ctx *cx, bs_shelf *shelf, bs_catalogue *catalogue);
 
 /*
- * Puts one compound into list number `list` of the shelf at a price in € per mole. Lists and
- * catalogues are asked in the order in which they were begun; bs_shelf_add_list() begins one.
+ * Puts one compound into list number `list` of the shelf at a price in € per mole; put twice, it
+ * costs the lower price. Lists and catalogues are asked in the order in which they were begun;
+ * bs_shelf_add_list() begins one.
+ *
+ *   errors  BS_ERANGE  no such list, or a price that is negative or no number
  */
 bs_status bs_shelf_add_list(bs_ctx *cx, bs_shelf *shelf, int *list);
 bs_status bs_shelf_put(bs_ctx *cx, bs_shelf *shelf, int list, const bs_mol *mol, double per_mole);
@@ -84,8 +102,9 @@ bs_status bs_shelf_at_hand(bs_ctx *cx, bs_shelf *shelf, const bs_mol *mol);
 
 /*
  * Price of a molecule in € per mole from the first source that has it, the price per gram times
- * the molar mass. A molecule without carbon that no source has is free. `found` is false if it
- * cannot be had; `offer` (or NULL) is filled, with strings in `home`, for an offer of a
+ * the molar mass; an offer without price counts as 1 € per mole. What is at hand, and any
+ * molecule without carbon and unknown atoms, is free if no source prices it. `found` is false if
+ * it cannot be had; `offer` (or NULL) is filled, with strings in `home`, for an offer of a
  * catalogue; else its smiles is NULL. `smiles` is the canonical SMILES of `mol`.
  */
 bs_status bs_shelf_price(bs_ctx *cx, bs_arena *home, bs_shelf *shelf, const bs_mol *mol,
