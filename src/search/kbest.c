@@ -6,7 +6,10 @@
 #include <math.h>
 #include <string.h>
 
-#define DEFAULT_SOLVES 1000000L
+/* By default so many problems are solved that about this many ways and uses are looked at. */
+#define DEFAULT_WORK 1e9
+#define LEAST_SOLVES 1000.0
+#define MOST_SOLVES 1e6
 
 /* One decision: how a molecule is had. */
 typedef struct decision {
@@ -456,12 +459,21 @@ bool bs_kbest__cut(const bs_kbest *k)
 
 /* ---- Life ------------------------------------------------------------------------------------- */
 
+static long default_solves(const bs_graph *part)
+{
+    double size = 100.0 + part->mol_count + part->way_count + part->use_count;
+
+    return (long)fmin(MOST_SOLVES, fmax(LEAST_SOLVES, DEFAULT_WORK / size));
+}
+
 static bs_status prepare(bs_kbest *k, const bs_graph *graph, uint32_t target)
 {
     bs_status st = take_part(k, graph, target);
 
     if (st != BS_OK || k->target == BS_GRAPH_NONE)
         return st;
+    if (k->solves <= 0)
+        k->solves = default_solves(&k->part);
     if ((st = bs_cheapest__init(&k->work, &k->part, k->mode)) != BS_OK)
         return st;
     st = bs_graph__reserve(k->cx, &k->seen, &k->seen_room, k->part.mol_count, sizeof *k->seen);
@@ -484,7 +496,7 @@ bs_status bs_kbest__new(const bs_graph *graph, bs_cost_mode mode, uint32_t targe
     k->cx = cx;
     k->mode = mode;
     k->target = BS_GRAPH_NONE;
-    k->solves = solves > 0 ? solves : DEFAULT_SOLVES;
+    k->solves = solves;
     bs_graph__init(&k->part, cx);
     if ((st = prepare(k, graph, target)) != BS_OK)
         bs_kbest__free(k);

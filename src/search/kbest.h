@@ -29,7 +29,8 @@ typedef struct bs_kbest bs_kbest;
 /*
  * Prepares the enumeration. The graph must not change while it lasts.
  *
- *   solves  how many problems may be solved, 0 for one million
+ *   solves  how many problems may be solved; 0 for a default by the size of the graph, at most a
+ *           million, at least a thousand
  */
 bs_status bs_kbest__new(const bs_graph *graph, bs_cost_mode mode, uint32_t target, long solves,
                         bs_kbest **out);
