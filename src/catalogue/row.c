@@ -266,7 +266,12 @@ bs_status bs_rows__next(bs_rows *rows, bs_row *row, bool *more)
 {
     bs_status st = bs_records__next(&rows->records, more);
 
-    *row = (bs_row){.price_per_gram = -1, .container_g = -1, .lead_days = -1};
+    *row = (bs_row){.smiles = {"", 0},
+                    .code = {"", 0},
+                    .name = {"", 0},
+                    .price_per_gram = -1,
+                    .container_g = -1,
+                    .lead_days = -1};
     if (st != BS_OK || !*more)
         return st;
     row->line = rows->records.line;

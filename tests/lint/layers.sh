@@ -1,4 +1,5 @@
 #!/bin/sh
+# shellcheck disable=SC2016 # $0 is for awk
 # usage: layers.sh SOURCE_DIR
 # Fails if a layer includes one above it, if script or cli include more than the public headers,
 # or if Lua, a terminal or the standard streams appear in a layer that must not know them.
