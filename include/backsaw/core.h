@@ -83,7 +83,8 @@ typedef struct bs_arena_chunk bs_arena_chunk;
 typedef struct bs_arena {
     bs_gate *gate;
     bs_arena_chunk *top;
-    size_t live; /* bytes handed out and not rewound */
+    bs_arena_chunk *spare; /* a chunk that a rewind emptied, kept for the next request */
+    size_t live;           /* bytes handed out and not rewound */
 } bs_arena;
 
 /* A place in an arena to go back to. Valid until an earlier mark is rewound. */

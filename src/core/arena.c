@@ -78,7 +78,14 @@ void bs_arena_init(bs_arena *arena, bs_gate *gate)
 {
     arena->gate = gate;
     arena->top = NULL;
+    arena->spare = NULL;
     arena->live = 0;
+}
+
+static void release(bs_arena *arena, bs_arena_chunk *chunk)
+{
+    if (chunk)
+        bs_gate_free(arena->gate, chunk, header_bytes() + chunk->room);
 }
 
 static void drop_top(bs_arena *arena)
@@ -86,14 +93,34 @@ static void drop_top(bs_arena *arena)
     bs_arena_chunk *chunk = arena->top;
 
     arena->top = chunk->below;
-    bs_gate_free(arena->gate, chunk, header_bytes() + chunk->room);
+    release(arena, chunk);
 }
 
 void bs_arena_free(bs_arena *arena)
 {
     while (arena->top)
         drop_top(arena);
+    release(arena, arena->spare);
+    arena->spare = NULL;
     arena->live = 0;
+}
+
+/*
+ * Takes the top chunk off and keeps the larger of it and the spare one: a loop of marks and rewinds
+ * at the end of a chunk would else ask the gate for a new chunk each time.
+ */
+static void retire_top(bs_arena *arena)
+{
+    bs_arena_chunk *chunk = arena->top;
+
+    arena->top = chunk->below;
+    if (BS_ARENA_DEBUG || chunk->room > CHUNK_BYTES * 64 ||
+        (arena->spare && arena->spare->room >= chunk->room)) {
+        release(arena, chunk);
+        return;
+    }
+    release(arena, arena->spare);
+    arena->spare = chunk;
 }
 
 /* Chunks double up to 1 MiB, so that a large result does not need many. */
@@ -108,11 +135,16 @@ static bool add_chunk(bs_arena *arena, size_t size)
         room = size;
     if (room > SIZE_MAX - header_bytes())
         return false;
-    chunk = bs_gate_alloc(arena->gate, header_bytes() + room);
-    if (!chunk)
-        return false;
+    if (arena->spare && arena->spare->room >= size) {
+        chunk = arena->spare;
+        arena->spare = NULL;
+    } else {
+        chunk = bs_gate_alloc(arena->gate, header_bytes() + room);
+        if (!chunk)
+            return false;
+        chunk->room = room;
+    }
     chunk->below = arena->top;
-    chunk->room = room;
     chunk->used = 0;
     arena->top = chunk;
     return true;
@@ -153,7 +185,7 @@ void bs_arena_rewind(bs_arena *arena, bs_mark mark)
             arena->live = 0;
             return;
         }
-        drop_top(arena);
+        retire_top(arena);
     }
     if (arena->top)
         arena->top->used = mark.used;

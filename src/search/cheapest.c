@@ -26,17 +26,20 @@ bs_status bs_cheapest__init(bs_cheapest *work, const bs_graph *graph, bs_cost_mo
     work->value = take(graph, n, sizeof *work->value);
     work->choice = take(graph, n, sizeof *work->choice);
     work->missing = take(graph, graph->way_count, sizeof *work->missing);
+    work->counts = take(graph, graph->way_count, sizeof *work->counts);
     work->settled = take(graph, n, sizeof *work->settled);
     work->only = take(graph, n, sizeof *work->only);
     work->barred = take(graph, graph->step_count, sizeof *work->barred);
     work->no_buy = take(graph, n, sizeof *work->no_buy);
-    if (!work->value || !work->choice || !work->missing || !work->settled || !work->only ||
+    if (!work->value || !work->choice || !work->missing || !work->counts || !work->settled || !work->only ||
         !work->barred || !work->no_buy) {
         bs_cheapest__free(work);
         return bs_fail_memory(graph->cx);
     }
     for (size_t i = 0; i < n; i++)
         work->only[i] = BS_GRAPH_NONE;
+    for (uint32_t way = 0; way < graph->way_count; way++)
+        work->counts[way] = graph->ways[way].count;
     return BS_OK;
 }
 
@@ -53,6 +56,7 @@ void bs_cheapest__free(bs_cheapest *work)
     bs_gate_free(gate, work->value, n * sizeof *work->value);
     bs_gate_free(gate, work->choice, n * sizeof *work->choice);
     bs_gate_free(gate, work->missing, graph->way_count * sizeof *work->missing);
+    bs_gate_free(gate, work->counts, graph->way_count * sizeof *work->counts);
     bs_gate_free(gate, work->settled, n * sizeof *work->settled);
     bs_gate_free(gate, work->only, n * sizeof *work->only);
     bs_gate_free(gate, work->barred, graph->step_count * sizeof *work->barred);
@@ -147,8 +151,8 @@ static bs_status start(bs_cheapest *work, const double *leaf)
     work->converged = true;
     work->unit = bs_graph__is_superior(graph, work->mode) ? 0 : least_number(graph);
     memset(work->settled, 0, graph->mol_count * sizeof *work->settled);
-    for (uint32_t way = 0; way < graph->way_count; way++)
-        work->missing[way] = graph->ways[way].count;
+    if (graph->way_count > 0)
+        memcpy(work->missing, work->counts, graph->way_count * sizeof *work->missing);
     for (uint32_t mol = 0; mol < graph->mol_count; mol++) {
         work->value[mol] = INFINITY;
         work->choice[mol] = BS_GRAPH_NONE;

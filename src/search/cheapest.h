@@ -25,6 +25,7 @@ typedef struct bs_cheapest {
     double *value;    /* by molecule; INFINITY if it cannot be had */
     uint32_t *choice; /* by molecule: a way, BS_GRAPH_BUY or BS_GRAPH_NONE */
     uint32_t *missing; /* by way: precursors that have no value yet */
+    uint32_t *counts;  /* by way: its precursors */
     bool *settled;
     uint32_t *only; /* by molecule: BS_GRAPH_NONE, or the only step or BS_GRAPH_BUY allowed */
     bool *barred;   /* by step */
