@@ -12,7 +12,7 @@
  * reason: that is no error. No route is a list of none.
  *
  * Callbacks get the payload of the options and may fail: their status ends the plan and is passed
- * on, but for BS_ESTOPPED, which ends the search only. They run on the calling thread.
+ * on, but for BS_ESTOPPED, which ends the search only. All but hooks run on the calling thread.
  */
 #ifndef BACKSAW_SEARCH_H
 #define BACKSAW_SEARCH_H
@@ -65,6 +65,15 @@ typedef struct bs_plan_progress {
 typedef struct bs_plan_opts {
     const bs_rules *rules; /* or NULL */
     const bs_rule_hooks *hooks; /* or NULL */
+    /*
+     * Threads that expand molecules; 0: 1. The routes do not depend on it. Hooks that are not
+     * safe for several threads need one set a lane, `lane_count` of them, in `lane_hooks`: a lane
+     * is served by one thread at a time, and which molecule comes to which lane is fixed. With
+     * hooks but no `lane_hooks` one thread works.
+     */
+    int threads;
+    const bs_rule_hooks *lane_hooks;
+    int lane_count;
     const int *transforms; /* indices of the rules to use; NULL: all */
     int transform_count;   /* 0 with `transforms` set: the rules are off */
     bs_shelf *shelf;       /* or NULL: nothing is sold, only carbon-free compounds are at hand */

@@ -75,6 +75,7 @@ typedef struct list {
     bs_arena *home;
     bs_proposals *out;
     int room;
+    const bs_rule_hooks *hooks;
 } list;
 
 static bs_status add(list *l, const bs_proposal *p)
@@ -149,7 +150,7 @@ static bs_status ask_rules(const bs_plan_state *plan, list *l, const bs_mol *mol
 {
     const bs_plan_opts *opts = plan->opts;
     bs_steps steps = {NULL, 0};
-    bs_status st = bs_rules_back(l->cx, l->home, opts->rules, transform, mol, opts->hooks, 0,
+    bs_status st = bs_rules_back(l->cx, l->home, opts->rules, transform, mol, l->hooks, 0,
                                  &steps);
 
     return st == BS_OK ? add_steps(plan, l, &steps) : st;
@@ -173,11 +174,17 @@ static bs_status add_ruled(const bs_plan_state *plan, list *l, const bs_mol *mol
     return st;
 }
 
-bs_status bs_plan__expand(void *payload, bs_ctx *cx, bs_arena *home, const char *smiles,
-                          bool closed, bs_proposals *out)
+bs_status bs_plan__expand(void *payload, bs_ctx *cx, bs_arena *home, int lane,
+                          const char *smiles, bool closed, bs_proposals *out)
 {
     const bs_plan_state *plan = payload;
-    list l = {.cx = cx, .home = home, .out = out};
+    const bs_plan_opts *opts = plan->opts;
+    list l = {
+        .cx = cx,
+        .home = home,
+        .out = out,
+        .hooks = opts->lane_hooks ? &opts->lane_hooks[lane] : opts->hooks,
+    };
     bs_mol *mol;
     bs_status st = add_known(plan, &l, smiles);
 

@@ -2,6 +2,7 @@
 #include "search/explore.h"
 
 #include "search/frontier.h"
+#include "search/lane.h"
 
 #include <math.h>
 #include <stdlib.h>
@@ -227,24 +228,21 @@ static bs_status merge(bs_explore *x, uint32_t mol, bs_proposals *found)
     return st;
 }
 
-static bs_status expand(bs_explore *x, uint32_t mol)
+/* Merges the answer of a job; one of BS_ELIMIT is counted and passed over. */
+static bs_status take_answer(bs_explore *x, uint32_t mol, bs_lane_job *job)
 {
-    bs_explore_node *node = &x->nodes[mol];
-    bs_proposals found = {NULL, 0};
-    bs_arena home;
-    bs_status st;
+    bs_status st = job->status;
 
-    bs_arena_init(&home, x->cx->gate);
-    node->expanded = true;
+    x->nodes[mol].expanded = true;
     x->expanded++;
-    st = x->calls.expand(x->calls.payload, x->cx, &home, node->smiles, node->closed, &found);
-    if (st == BS_OK)
-        st = merge(x, mol, &found);
+    if (st != BS_OK)
+        x->cx->error = job->error;
+    else
+        st = merge(x, mol, &job->found);
     if (st == BS_ELIMIT) {
         x->failed++;
         st = BS_OK;
     }
-    bs_arena_free(&home);
     return st;
 }
 
@@ -299,6 +297,40 @@ static void report(const bs_explore *x, const bs_frontier *front)
         x->calls.progress(x->calls.payload, &now);
 }
 
+/*
+ * Expands a batch. With one thread each molecule is merged before the next is expanded, so that a
+ * limit of time is heeded between them; what is merged is the same.
+ */
+static bs_status expand_batch(bs_explore *x, bs_arena *home, const bs_frontier *front, bool *over)
+{
+    bs_lane_job *jobs;
+    bs_status st = bs_new(x->cx, home, front->picked_count, &jobs);
+
+    if (st != BS_OK)
+        return st;
+    for (int i = 0; i < front->picked_count; i++) {
+        const bs_explore_node *node = &x->nodes[front->picked[i]];
+
+        jobs[i].smiles = node->smiles;
+        jobs[i].closed = node->closed;
+        jobs[i].lane = i % x->limits.lanes;
+        bs_arena_init(&jobs[i].home, x->cx->gate);
+    }
+    if (x->limits.threads > 1)
+        st = bs_lane__run_all(x, jobs, front->picked_count);
+    for (int i = 0; st == BS_OK && !*over && i < front->picked_count; i++) {
+        if (!jobs[i].ran && x->limits.threads <= 1)
+            bs_lane__run(x, x->cx, &jobs[i]);
+        if (jobs[i].ran)
+            st = take_answer(x, front->picked[i], &jobs[i]);
+        *over = st == BS_OK && is_over(x);
+        bs_arena_free(&jobs[i].home);
+    }
+    for (int i = 0; i < front->picked_count; i++)
+        bs_arena_free(&jobs[i].home);
+    return st;
+}
+
 /* One round: look, perhaps end, expand a batch. */
 static bs_status go_round(bs_explore *x, bs_arena *home, bool *over)
 {
@@ -322,19 +354,18 @@ static bs_status go_round(bs_explore *x, bs_arena *home, bool *over)
         *over = true;
         return BS_OK;
     }
-    for (int i = 0; st == BS_OK && !*over && i < front.picked_count; i++) {
-        st = expand(x, front.picked[i]);
-        *over = st == BS_OK && is_over(x);
-    }
-    return st;
+    return expand_batch(x, home, &front, over);
 }
 
 bs_status bs_explore__run(bs_explore *x, const bs_mol *target, const char *smiles)
 {
     uint32_t mol;
     bool over = false;
-    bs_status st = meet(x, target, smiles, &mol);
+    bs_status st;
 
+    if (x->limits.batch < 1 || x->limits.lanes < 1 || x->limits.threads < 1)
+        return bs_fail(x->cx, BS_EBUG, "batch, lanes and threads must be 1 or more");
+    st = meet(x, target, smiles, &mol);
     if (st == BS_OK)
         x->nodes[mol].closed = false; /* the target is always worth it */
     while (st == BS_OK && !over) {

@@ -43,10 +43,11 @@ typedef struct bs_explore_calls {
     void *payload;
     /*
      * The ways to make a molecule, in a fixed order. BS_ELIMIT means that there is no answer for
-     * this molecule; the search goes on without.
+     * this molecule; the search goes on without. With several threads the calls of different
+     * lanes may come at the same time, each with a context of its own.
      */
-    bs_status (*expand)(void *payload, bs_ctx *cx, bs_arena *home, const char *smiles, bool closed,
-                        bs_proposals *out);
+    bs_status (*expand)(void *payload, bs_ctx *cx, bs_arena *home, int lane, const char *smiles,
+                        bool closed, bs_proposals *out);
     /* May refuse a proposal or set its cost; NULL admits all. */
     bs_status (*admit)(void *payload, bs_ctx *cx, const char *product, bs_proposal *proposal,
                        bool *admitted);
@@ -66,6 +67,8 @@ typedef struct bs_explore_limits {
     double seconds;     /* 0: none */
     size_t memory;      /* bytes of the gate; 0: none */
     int batch;
+    int lanes;          /* 1 or more; the lane of a molecule is its place in the batch modulo it */
+    int threads;        /* 1 or more */
     double least_step;  /* no step costs less */
 } bs_explore_limits;
 

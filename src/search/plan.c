@@ -12,6 +12,8 @@
 #define DEFAULT_BEST 10
 #define DEFAULT_BATCH 16
 #define DEFAULT_GAPS 10
+#define DEFAULT_LANES 8
+#define MOST_THREADS 256
 #define MOST_BEST 100000
 #define MOST_MOLECULES 50000000L
 #define RANK_POOL 10  /* so many times `best` routes are ranked ... */
@@ -31,7 +33,9 @@ static bs_status check_options(bs_ctx *cx, const bs_plan_opts *o)
         return bs_fail(cx, BS_EVALUE, "best: must be 1 to %d", MOST_BEST);
     if (o->has_step_cost && !(isfinite(o->step_cost) && o->step_cost >= 0))
         return bs_fail(cx, BS_EVALUE, "cost: the step cost must be a number of 0 or more");
-    if (o->batch < 0 || o->transform_count < 0)
+    if (o->threads < 0 || o->threads > MOST_THREADS)
+        return bs_fail(cx, BS_EVALUE, "threads: must be 1 to %d", MOST_THREADS);
+    if (o->batch < 0 || o->transform_count < 0 || (o->lane_hooks && o->lane_count < 1))
         return bs_fail(cx, BS_EVALUE, "a count must be 0 or more");
     for (int i = 0; o->transforms && i < o->transform_count; i++) {
         if (!o->rules || o->transforms[i] < 0 || o->transforms[i] >= bs_rules_count(o->rules))
@@ -121,6 +125,8 @@ static bs_status explore(bs_plan_state *plan, const bs_mol *target, const char *
         .seconds = o->limits.seconds,
         .memory = o->limits.memory,
         .batch = o->batch > 0 ? o->batch : DEFAULT_BATCH,
+        .lanes = o->lane_hooks ? o->lane_count : DEFAULT_LANES,
+        .threads = o->threads > 1 && (!o->hooks || o->lane_hooks) ? o->threads : 1,
         .least_step = least_step(plan),
     };
 

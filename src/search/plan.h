@@ -56,8 +56,8 @@ const bs_known *bs_known__next(const bs_plan_state *plan, const char *product, s
                                int *index);
 
 /* The calls of the exploration; the payload is the plan. */
-bs_status bs_plan__expand(void *payload, bs_ctx *cx, bs_arena *home, const char *smiles,
-                          bool closed, bs_proposals *out);
+bs_status bs_plan__expand(void *payload, bs_ctx *cx, bs_arena *home, int lane,
+                          const char *smiles, bool closed, bs_proposals *out);
 bs_status bs_plan__admit(void *payload, bs_ctx *cx, const char *product, bs_proposal *proposal,
                          bool *admitted);
 bs_status bs_plan__meet(void *payload, bs_ctx *cx, const bs_mol *mol, const char *smiles,

@@ -14,7 +14,9 @@
 #include "search/explore.h"
 
 typedef struct numbers {
-    int met, expanded, refused, asked;
+    int met, asked;
+    _Atomic int expanded;
+    bool threaded;
     double guess_factor; /* 1: the exact cost */
     int stop_after;      /* expansions; 0: never */
     int lure;            /* this number is guessed to be 30 cheaper than it is */
@@ -23,8 +25,8 @@ typedef struct numbers {
     char order[400];     /* what was expanded */
 } numbers;
 
-static bs_status expand(void *payload, bs_ctx *cx, bs_arena *home, const char *smiles, bool closed,
-                        bs_proposals *out)
+static bs_status expand(void *payload, bs_ctx *cx, bs_arena *home, int lane,
+                        const char *smiles, bool closed, bs_proposals *out)
 {
     static const double ones[] = {1, 1};
     static const double two[] = {2};
@@ -33,9 +35,12 @@ static bs_status expand(void *payload, bs_ctx *cx, bs_arena *home, const char *s
     bs_status st;
 
     assert_false(closed);
+    assert_true(lane >= 0 && lane < 3);
     n->expanded++;
-    strcat(n->order, smiles);
-    strcat(n->order, " ");
+    if (!n->threaded) {
+        strcat(n->order, smiles);
+        strcat(n->order, " ");
+    }
     if (n->stop_after && n->expanded >= n->stop_after)
         atomic_store(cx->stop, true);
     if (number == n->fail_at)
@@ -112,7 +117,7 @@ static double cheapest(fixture *f, const bs_explore *x)
     return value;
 }
 
-static const bs_explore_limits wide = {.depth = 100, .molecules = 1000, .batch = 4};
+static const bs_explore_limits wide = {.depth = 100, .molecules = 1000, .batch = 4, .lanes = 3, .threads = 1};
 
 static void explore__ends_when_all_is_expanded(void **state)
 {
@@ -134,7 +139,7 @@ static void explore__ends_when_all_is_expanded(void **state)
 static void explore__the_order_is_fixed(void **state)
 {
     fixture *f = *state;
-    bs_explore_limits one = {.depth = 100, .molecules = 1000, .batch = 1};
+    bs_explore_limits one = {.depth = 100, .molecules = 1000, .batch = 1, .lanes = 1, .threads = 1};
     numbers first = {.guess_factor = 1}, again = {.guess_factor = 1};
     bs_explore x;
 
@@ -151,7 +156,7 @@ static void explore__the_order_is_fixed(void **state)
 static void explore__the_guess_leads(void **state)
 {
     fixture *f = *state;
-    bs_explore_limits one = {.depth = 100, .molecules = 1000, .batch = 1};
+    bs_explore_limits one = {.depth = 100, .molecules = 1000, .batch = 1, .lanes = 1, .threads = 1};
     numbers n = {.guess_factor = 1, .lure = 5}, plain = {.guess_factor = 1};
     bs_explore x;
 
@@ -167,10 +172,10 @@ static void explore__the_guess_leads(void **state)
 static void explore__stops_at_each_limit(void **state)
 {
     fixture *f = *state;
-    bs_explore_limits few = {.depth = 100, .molecules = 5, .batch = 1};
-    bs_explore_limits tight = {.depth = 100, .molecules = 1000, .batch = 1, .memory = 1};
-    bs_explore_limits brief = {.depth = 100, .molecules = 1000, .batch = 1, .seconds = 1e-9};
-    bs_explore_limits flat = {.depth = 1, .molecules = 1000, .batch = 1};
+    bs_explore_limits few = {.depth = 100, .molecules = 5, .batch = 1, .lanes = 1, .threads = 1};
+    bs_explore_limits tight = {.depth = 100, .molecules = 1000, .batch = 1, .lanes = 1, .threads = 1, .memory = 1};
+    bs_explore_limits brief = {.depth = 100, .molecules = 1000, .batch = 1, .lanes = 1, .threads = 1, .seconds = 1e-9};
+    bs_explore_limits flat = {.depth = 1, .molecules = 1000, .batch = 1, .lanes = 1, .threads = 1};
     const struct { const bs_explore_limits *limits; bs_explore_end end; uint32_t molecules; } want[] = {
         {&few, BS_END_MOLECULES, 5},
         {&tight, BS_END_MEMORY, 12},
@@ -242,7 +247,7 @@ static void explore__ends_when_nothing_open_can_be_cheaper(void **state)
         numbers n = {.guess_factor = 1};
         bs_explore_calls calls = {.payload = &n, .expand = expand, .meet = meet, .enough = enough};
         bs_explore_limits limits = {.depth = 100, .molecules = 1000, .batch = 1,
-                                    .least_step = free_steps ? 0 : 200};
+                                    .lanes = 1, .threads = 1, .least_step = free_steps ? 0 : 200};
         bs_explore x;
 
         bs_explore__init(&x, &f->cx, &calls, &limits, BS_COST_PER_MOLE);
@@ -254,6 +259,37 @@ static void explore__ends_when_nothing_open_can_be_cheaper(void **state)
         assert_int_equal(n.expanded < 11, !free_steps);
         bs_explore__free(&x);
     }
+}
+
+/* The graph is the same, molecule for molecule and way for way, whatever the number of threads. */
+static void explore__threads_change_nothing(void **state)
+{
+    fixture *f = *state;
+    bs_explore_limits limits = wide;
+    numbers n = {.guess_factor = 0.5};
+    bs_explore one;
+
+    limits.molecules = 38;
+    explore(f, &one, &n, &limits, "40");
+    for (int threads = 2; threads <= 5; threads++) {
+        numbers m = {.guess_factor = 0.5, .threaded = true};
+        bs_explore x;
+
+        limits.threads = threads;
+        explore(f, &x, &m, &limits, "40");
+        assert_int_equal(x.end, one.end);
+        assert_int_equal(x.graph.mol_count, one.graph.mol_count);
+        assert_int_equal(x.graph.way_count, one.graph.way_count);
+        for (uint32_t i = 0; i < one.graph.mol_count; i++)
+            assert_string_equal(x.nodes[i].smiles, one.nodes[i].smiles);
+        for (uint32_t i = 0; i < one.graph.way_count; i++) {
+            assert_int_equal(x.graph.ways[i].product, one.graph.ways[i].product);
+            assert_int_equal(x.graph.uses[x.graph.ways[i].first].mol,
+                             one.graph.uses[one.graph.ways[i].first].mol);
+        }
+        bs_explore__free(&x);
+    }
+    bs_explore__free(&one);
 }
 
 static void explore__every_failed_allocation_leaks_nothing(void **state)
@@ -288,6 +324,7 @@ int main(void)
         check_case(explore__a_molecule_without_answer_is_counted),
         check_case(explore__an_error_of_the_owner_is_passed_on),
         check_case(explore__ends_when_nothing_open_can_be_cheaper),
+        check_case(explore__threads_change_nothing),
         check_case(explore__every_failed_allocation_leaks_nothing),
     };
 
