@@ -41,8 +41,9 @@ typedef struct bs_import_report {
  * a .tsv knows no quotes. The file is written beside `output` and renamed into place, so a failure
  * leaves an older one whole; a file that is there and is no catalogue is not overwritten.
  *
- *   A line that is no use is counted in the report and left out: its structure cannot be read or
- *   weighed, a number is none, it has too many fields or more than 1 MiB.
+ *   A line that is no use is counted in the report and left out: its SMILES cannot be read or
+ *   weighed or has more than 16 KiB, a number is none, there are too many fields or more than
+ *   1 MiB.
  *
  *   errors  BS_EFILE   an input that cannot be read, an output that cannot be written
  *           BS_ESYNTAX no header with a smiles column, an unclosed quote; error.line is set

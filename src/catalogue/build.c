@@ -15,6 +15,9 @@
 #include <sys/stat.h>
 #include <unistd.h>
 
+/* No compound that is sold needs a longer SMILES. */
+#define SMILES_BYTES ((size_t)16 * 1024)
+
 /* ---- One row --------------------------------------------------------------------------- */
 
 /* Length of the well-formed UTF-8 character at `text` (RFC 3629), or 0. */
@@ -77,6 +80,9 @@ static bs_status read_offer(bs_ctx *cx, const bs_row *row, bs_offer *out)
 
     if (row->fault)
         return bs_fail(cx, BS_EVALUE, "%s", row->fault);
+    if (row->smiles.length > SMILES_BYTES)
+        return bs_fail(cx, BS_ELIMIT, "a SMILES of %zu bytes; at most %zu are read",
+                       row->smiles.length, SMILES_BYTES);
     st = bs_smiles_read(cx, &cx->scratch, row->smiles.text, row->smiles.length, &used, &mol);
     if (st != BS_OK)
         return st;

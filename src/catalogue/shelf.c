@@ -106,7 +106,7 @@ bs_status bs_shelf_add_list(bs_ctx *cx, bs_shelf *shelf, int *list)
 
 static uint64_t key_of(int list, const char *smiles)
 {
-    return bs_hash_bytes(smiles, strlen(smiles), (uint64_t)(list + 1));
+    return bs_hash_bytes(smiles, strlen(smiles), (uint64_t)list + 1);
 }
 
 static entry *find_entry(bs_shelf *shelf, int list, const char *smiles)

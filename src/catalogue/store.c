@@ -6,6 +6,7 @@
 
 #include <errno.h>
 #include <math.h>
+#include <stdio.h>
 #include <string.h>
 #include <sys/stat.h>
 
@@ -36,12 +37,11 @@ static sqlite3_int64 key_of(const char *smiles)
 
 bs_status bs_store__path(bs_ctx *cx, bs_arena *home, const char *path, char **out)
 {
-    bs_status st = bs_new(cx, home, strlen(path) + 3, out);
+    size_t room = strlen(path) + 3;
+    bs_status st = bs_new(cx, home, room, out);
 
-    if (st == BS_OK) {
-        strcpy(*out, *path == '/' ? "" : "./");
-        strcat(*out, path);
-    }
+    if (st == BS_OK)
+        snprintf(*out, room, "%s%s", *path == '/' ? "" : "./", path);
     return st;
 }
 
@@ -301,7 +301,7 @@ bs_status bs_catalogue_open(bs_ctx *cx, const char *path, bs_catalogue **out)
         return bs_fail_memory(cx);
     catalogue->gate = cx->gate;
     catalogue->bytes = bytes;
-    strcpy(catalogue->path, path);
+    memcpy(catalogue->path, path, bytes - sizeof *catalogue);
     if ((st = fill_catalogue(cx, catalogue)) != BS_OK) {
         bs_catalogue_close(catalogue);
         return st;
