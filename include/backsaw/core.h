@@ -143,6 +143,21 @@ bs_status bs_fail_at(bs_ctx *cx, bs_status code, size_t offset, const char *form
 /* The one way to report that memory ran out. */
 bs_status bs_fail_memory(bs_ctx *cx);
 
+/*
+ * That these never return BS_OK is out of the compiler's sight; the macros show it, so that it
+ * walks no path that does not exist. They evaluate `code` twice.
+ */
+static inline bs_status bs_fail__code(bs_status reported, bs_status code)
+{
+    (void)reported;
+    return code;
+}
+
+#define bs_fail(cx, code, ...) bs_fail__code((bs_fail)((cx), (code), __VA_ARGS__), (code))
+#define bs_fail_at(cx, code, offset, ...)                                                          \
+    bs_fail__code((bs_fail_at)((cx), (code), (offset), __VA_ARGS__), (code))
+#define bs_fail_memory(cx) bs_fail__code((bs_fail_memory)(cx), BS_ENOMEM)
+
 /* BS_ESTOPPED with a message if the stop flag is set, else BS_OK. Cheap. */
 bs_status bs_poll(bs_ctx *cx);
 

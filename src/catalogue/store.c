@@ -371,8 +371,8 @@ static bs_status read_offers(bs_ctx *cx, bs_arena *home, bs_catalogue *catalogue
 {
     sqlite3_stmt *s = catalogue->find;
     bs_offer *found;
-    char *copy;
-    int code;
+    char *copy = NULL;
+    int code = SQLITE_DONE;
     bs_status st = bs_new(cx, &cx->scratch, limit, &found);
 
     while (st == BS_OK && (code = sqlite3_step(s)) == SQLITE_ROW && out->count < limit) {

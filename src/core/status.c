@@ -64,7 +64,7 @@ static void set_error(bs_ctx *cx, bs_status code, long offset, const char *forma
     add_escaped(cx->error.message, sizeof cx->error.message, raw);
 }
 
-bs_status bs_fail(bs_ctx *cx, bs_status code, const char *format, ...)
+bs_status (bs_fail)(bs_ctx *cx, bs_status code, const char *format, ...)
 {
     va_list args;
 
@@ -74,7 +74,7 @@ bs_status bs_fail(bs_ctx *cx, bs_status code, const char *format, ...)
     return code;
 }
 
-bs_status bs_fail_at(bs_ctx *cx, bs_status code, size_t offset, const char *format, ...)
+bs_status (bs_fail_at)(bs_ctx *cx, bs_status code, size_t offset, const char *format, ...)
 {
     va_list args;
 
@@ -84,7 +84,7 @@ bs_status bs_fail_at(bs_ctx *cx, bs_status code, size_t offset, const char *form
     return code;
 }
 
-bs_status bs_fail_memory(bs_ctx *cx)
+bs_status (bs_fail_memory)(bs_ctx *cx)
 {
     return bs_fail(cx, BS_ENOMEM, "out of memory");
 }
