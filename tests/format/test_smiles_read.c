@@ -49,7 +49,7 @@ static void read__errors_have_a_place(void **state)
     } cases[] = {
         {"CC(C", 2}, {"CC)C", 2}, {"C1CC", 1},  {"C==C", 2}, {"CCX", 2},  {"C[Xq]", 2},
         {"C(=)C", 3}, {"CC.", 3},  {"CC..C", 3}, {"C%1C", 3}, {"C11", 2}, {"[CH4", 4},
-        {"Cc1cccc1", 1}, {"C12CC12", 1}, {"C=1CC-1", 5},
+        {"Cc1cccc1", 1}, {"C12CC12", 4}, {"C=1CC-1", 5},
     };
     fixture *f = *state;
 
