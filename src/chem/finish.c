@@ -5,6 +5,7 @@
  * its rings. Nitrogen written with five bonds (nitro, azide, N-oxide) becomes the usual form with
  * charges, so that both spellings are one molecule.
  */
+#include "chem/canon.h"
 #include "chem/draft.h"
 #include "chem/ring.h"
 #include "chem/valence.h"
@@ -368,7 +369,9 @@ static bs_status perceive(finish *f)
     count_rings(f);
     if ((st = bs_aromatic__mark(f->cx, f->mol, &f->rings)) != BS_OK)
         return st;
-    return bs_stereo__place(f->cx, f->draft, f->order, &f->rings, f->mol);
+    if ((st = bs_stereo__place(f->cx, f->draft, f->order, &f->rings, f->mol)) != BS_OK)
+        return st;
+    return bs_mol__strip_meaningless_stereo(f->cx, f->mol);
 }
 
 bs_status bs_draft_finish(bs_draft *draft, bs_arena *home, uint32_t **order, bs_mol **out)
