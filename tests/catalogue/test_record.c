@@ -247,10 +247,87 @@ static void read__stops_when_asked(void **state)
                      BS_ESTOPPED);
 }
 
+/* Numbers from 0 to `below` - 1, the same on every machine (Knuth's 64-bit LCG). */
+static unsigned next_random(uint64_t *seed, unsigned below)
+{
+    *seed = *seed * 6364136223846793005u + 1442695040888963407u;
+    return (unsigned)(*seed >> 33) % below;
+}
+
+/* Adds a random field as RFC 4180 writes it to `text`, and as read_list() shows it to `want`. */
+static void add_field(uint64_t *seed, char *text, char *want)
+{
+    char field[16] = "", quoted[40] = "";
+    unsigned length = next_random(seed, 8);
+
+    for (unsigned i = 0; i < length; i++) {
+        char c[2] = { "aC1,;\n\r\t\" "[next_random(seed, 10)], '\0' };
+
+        strcat(field, c);
+        strcat(quoted, *c == '"' ? "\"\"" : c);
+    }
+    sprintf(text + strlen(text), "\"%s\"", quoted);
+    sprintf(want + strlen(want), "<%s>", field);
+}
+
+static void csv__what_is_written_is_read(void **state)
+{
+    folder *d = *state;
+    uint64_t seed = 4180;
+
+    for (int round = 0; round < 300; round++) {
+        char text[2000] = "head,line\n", want[2000] = "1<head><line>|2";
+        unsigned count = 2 + next_random(&seed, 20);
+
+        for (unsigned i = 0; i < count; i++) {
+            if (i > 0)
+                strcat(text, ",");
+            add_field(&seed, text, want);
+        }
+        strcat(text, round % 2 ? "\r\n" : "");
+        check_list(d, text, ',', true, want);
+    }
+}
+
+/* Whatever the bytes, the fields make up the text of the record and the lines count up. */
+static void read__random_bytes_do_no_harm(void **state)
+{
+    folder *d = *state;
+    bs_records *r = calloc(1, sizeof *r);
+    uint64_t seed = 7;
+
+    assert_non_null(r);
+    for (int round = 0; round < 600; round++) {
+        char bytes[300];
+        unsigned length = next_random(&seed, sizeof bytes);
+        long line = 0;
+        bool more = true;
+
+        for (unsigned i = 0; i < length; i++)
+            bytes[i] = "aC1,;\n\r\t\"\0 \xEF\xBB\xBF"[next_random(&seed, 14)];
+        check_ok(d->f, bs_records__open(&d->f->cx, folder_write(d, "list", bytes, length),
+                                        round % 3 ? ',' : -1, round % 3 == 2, r));
+        while (bs_records__next(r, &more) == BS_OK && more) {
+            size_t sum = 0;
+
+            assert_true(r->line > line);
+            line = r->line;
+            for (int i = 0; i < r->field_count && i < BS_RECORD_FIELDS; i++) {
+                assert_int_equal(r->fields[i].at, sum);
+                sum += r->fields[i].length;
+            }
+            assert_true(r->field_count > BS_RECORD_FIELDS || sum == r->text.length);
+        }
+        bs_records__close(r);
+    }
+    free(r);
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
         folder_case(csv__quotes_as_in_the_standard),
+        folder_case(csv__what_is_written_is_read),
         folder_case(csv__separator_of_the_first_line),
         folder_case(csv__text_behind_a_quote_is_a_fault),
         folder_case(csv__open_quote_is_an_error),
@@ -264,6 +341,7 @@ int main(void)
         folder_case(gzip__reads_as_plain_text),
         folder_case(gzip__cut_or_damaged_is_an_error),
         folder_case(open__what_is_no_file),
+        folder_case(read__random_bytes_do_no_harm),
         folder_case(read__stops_when_asked),
     };
 
