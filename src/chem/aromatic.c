@@ -390,7 +390,7 @@ static bs_status extend(aromatic *a, int have, int size)
     bs_status st = BS_OK;
     uint32_t first = a->set[0];
 
-    if (have == size) {
+    if (have >= size || have >= MAX_SET) {
         try_set(a, size);
         return bs_poll(a->cx);
     }

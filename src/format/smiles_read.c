@@ -185,7 +185,7 @@ static bs_status read_ring(smiles_reader *r)
 {
     uint32_t at = r->at;
     smiles_ring *ring;
-    int number;
+    int number = 0;
     char symbol;
     uint32_t first;
     bs_status st = read_ring_number(r, &number);
