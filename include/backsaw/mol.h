@@ -12,7 +12,8 @@
  * lone pair first if there is one, then the neighbours in the order of bs_mol_neighbour(). Seen
  * from the first, the others run anticlockwise (`@`) or clockwise (`@@`), as in OpenSMILES. A
  * double bond is cis or trans with regard to the first neighbour of each end, in the same order,
- * the other end left out. Only marks that mean something are kept.
+ * the other end left out; for an odd chain of double bonds the middle one says it for the two ends
+ * of the chain. Only marks that mean something are kept.
  */
 #ifndef BACKSAW_MOL_H
 #define BACKSAW_MOL_H

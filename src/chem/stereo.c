@@ -245,16 +245,46 @@ static bool read_end(const bs_mol *mol, uint32_t end, uint32_t other, uint32_t n
     return named == BS_DRAFT_HYDROGEN || bs_mol_bond_between(mol, (int)end, (int)named) >= 0;
 }
 
+/*
+ * The bond that carries the geometry of two ends: the one between them, or the middle one of the
+ * odd chain of double bonds that joins them; -1 if there is none. inner[] gets the atoms beside
+ * the ends on the chain.
+ */
+static int geometry_bond(const bs_mol *mol, const uint32_t end[2], uint32_t inner[2])
+{
+    const bs_bond *bonds = bs_mol__bonds(mol);
+    const bs_link *links = bs_mol__links(mol, end[0]);
+
+    for (uint32_t k = 0; k < mol->atoms[end[0]].degree; k++) {
+        uint32_t reached, from = end[0], at = links[k].atom;
+        uint32_t steps = walk_chain(mol, from, at, &inner[1], &reached);
+
+        if (bonds[links[k].bond].order != 2 || reached != end[1] || steps % 2 == 0)
+            continue;
+        inner[0] = at;
+        for (uint32_t step = 0; step < steps / 2; step++) {
+            const bs_link *onward = bs_mol__links(mol, at);
+            uint32_t next = onward[0].atom == from ? onward[1].atom : onward[0].atom;
+
+            from = at;
+            at = next;
+        }
+        return bs_mol_bond_between(mol, (int)from, (int)at);
+    }
+    return -1;
+}
+
 static bs_status place_double(placing *p, const bs_draft_stereo *element)
 {
-    uint32_t a = mapped(p, element->centre);
-    uint32_t b = mapped(p, element->second);
+    uint32_t end[2] = {mapped(p, element->centre), mapped(p, element->second)};
+    uint32_t inner[2];
     bool crossed = element->perm == 2;
     bs_bond *line;
     int bond;
     bs_status st;
 
-    if (a == UINT32_MAX || b == UINT32_MAX || (bond = bs_mol_bond_between(p->mol, (int)a, (int)b)) < 0)
+    if (end[0] == UINT32_MAX || end[1] == UINT32_MAX ||
+        (bond = geometry_bond(p->mol, end, inner)) < 0)
         return BS_OK;
     line = bs_mol__bonds_mutable(p->mol) + bond;
     if (line->order != 2 || (line->flags & BS_BOND_AROMATIC))
@@ -265,9 +295,9 @@ static bs_status place_double(placing *p, const bs_draft_stereo *element)
         if (p->bond_ring[bond] < SMALLEST_TRANS_RING)
             return BS_OK;
     }
-    if (!read_end(p->mol, a, b, mapped(p, element->around[0]), &crossed) ||
-        !read_end(p->mol, b, a, mapped(p, element->around[1]), &crossed))
-        return BS_OK;
+    for (int k = 0; k < 2; k++)
+        if (!read_end(p->mol, end[k], inner[k], mapped(p, element->around[k]), &crossed))
+            return BS_OK;
     line->flags &= (unsigned)~(BS_BOND_CIS | BS_BOND_TRANS) & 0xff;
     line->flags |= crossed ? BS_BOND_TRANS : BS_BOND_CIS;
     return BS_OK;
@@ -312,15 +342,16 @@ bool bs_stereo__of_atom(const bs_mol *mol, uint32_t atom, bs_draft_stereo *out)
 bool bs_stereo__of_bond(const bs_mol *mol, uint32_t bond, bs_draft_stereo *out)
 {
     const bs_bond *b = bs_mol__bonds(mol) + bond;
+    uint32_t inner[2];
 
     if (!(b->flags & (BS_BOND_CIS | BS_BOND_TRANS)))
         return false;
     memset(out, 0, sizeof *out);
     out->kind = BS_DRAFT_DOUBLE;
     out->perm = b->flags & BS_BOND_CIS ? 1 : 2;
-    out->centre = b->a;
-    out->second = b->b;
-    out->around[0] = bs_stereo__reference(mol, b->a, b->b);
-    out->around[1] = bs_stereo__reference(mol, b->b, b->a);
+    walk_chain(mol, b->b, b->a, &inner[0], &out->centre);
+    walk_chain(mol, b->a, b->b, &inner[1], &out->second);
+    out->around[0] = bs_stereo__reference(mol, out->centre, inner[0]);
+    out->around[1] = bs_stereo__reference(mol, out->second, inner[1]);
     return true;
 }

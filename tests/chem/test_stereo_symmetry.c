@@ -60,6 +60,9 @@ static void marks__number_that_is_kept(void **state)
         {"FC(Cl)=C1CC(=C(F)Cl)C1", 0},
         {"C[C@]12CC[C@](C)(CC1)CC2", 2}, /* in and out, however strained */
         {"[2H][C@H](C)O", 1},
+        {"C/C=C=C=C/C", 1},
+        {"C/C=C=C=C(C)C", 0},
+        {"C/C=C=C/C", 0},
         {"C[S@](=O)C", 0},
         {"C[S@](=O)CC", 1},
     };
