@@ -120,7 +120,7 @@ static int open_neighbours(const kekule *k, uint32_t atom, uint32_t *first)
 /* Matches an atom, then every atom that is left with one choice; the queue holds those to try. */
 static void match_from(kekule *k, uint32_t atom)
 {
-    uint32_t partner;
+    uint32_t partner = NOBODY;
 
     k->tail = 0;
     k->queue[k->tail++] = atom;
