@@ -132,7 +132,11 @@ int bs_element_number(const char *symbol, size_t length);
  */
 bs_status bs_mol_canonical_order(bs_ctx *cx, bs_arena *home, const bs_mol *mol, int **rank);
 
-/* Classes of atoms that are alike by symmetry, 0-based; alike atoms share a number. */
+/*
+ * Classes of atoms that are alike by symmetry, 0-based; alike atoms share a number. Exact: orbits
+ * of the automorphisms that keep stereo, so the two halves of a meso compound, which are mirror
+ * images, are not alike.
+ */
 bs_status bs_mol_symmetry(bs_ctx *cx, bs_arena *home, const bs_mol *mol, int **classes);
 
 #endif

@@ -499,6 +499,31 @@ static void symmetry__known_classes(void **state)
     }
 }
 
+static void order__of_nothing_is_empty(void **state)
+{
+    fixture *f = *state;
+    bs_draft draft;
+    bs_mol *mol = NULL;
+    int *rank, *classes;
+
+    bs_draft_init(&draft, &f->cx, &f->home);
+    check_ok(f, bs_draft_finish(&draft, &f->home, NULL, &mol));
+    check_ok(f, bs_mol_canonical_order(&f->cx, &f->home, mol, &rank));
+    check_ok(f, bs_mol_symmetry(&f->cx, &f->home, mol, &classes));
+}
+
+static void order__can_live_in_the_scratch_arena(void **state)
+{
+    fixture *f = *state;
+    bs_mark temp = bs_arena_mark(&f->cx.scratch);
+    bs_mol *mol = parse(f, "OCC");
+    int *rank;
+
+    check_ok(f, bs_mol_canonical_order(&f->cx, &f->cx.scratch, mol, &rank));
+    assert_int_equal(rank[0] + rank[1] + rank[2], 0 + 1 + 2);
+    bs_arena_rewind(&f->cx.scratch, temp);
+}
+
 static void order__no_memory_is_reported(void **state)
 {
     fixture *f = *state;
@@ -527,6 +552,8 @@ int main(void)
         check_case(order__agrees_with_brute_force),
         check_case(symmetry__agrees_with_brute_force),
         check_case(order__large_and_symmetrical_molecules_are_fast),
+        check_case(order__of_nothing_is_empty),
+        check_case(order__can_live_in_the_scratch_arena),
         check_case(order__no_memory_is_reported),
         check_case(symmetry__known_classes),
     };

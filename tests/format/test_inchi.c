@@ -1,4 +1,6 @@
 /* InChI and InChIKey against reference values. */
+#include <pthread.h>
+
 #include "support/check.h"
 #include "support/table.h"
 
@@ -103,6 +105,61 @@ static void inchi__cumulenes_keep_their_geometry(void **state)
     assert_string_equal(inchi(f, "C/C=C=C=C/C", false), inchi(f, "C(\\C)=C=C=C/C", false));
 }
 
+static void inchi__no_memory_is_reported(void **state)
+{
+    fixture *f = *state;
+    bs_mol *mol = parse(f, "C[C@H](N)C(=O)O");
+    bs_status st = BS_ENOMEM;
+    char *text;
+
+    for (long n = 0; st != BS_OK; n++) {
+        atomic_store(&f->cx.own_gate.fail_after, n);
+        st = bs_inchi(&f->cx, &f->home, mol, true, &text);
+        atomic_store(&f->cx.own_gate.fail_after, -1);
+        assert_true(st == BS_OK || st == BS_ENOMEM);
+        assert_int_equal(f->cx.scratch.live, 0);
+    }
+    /* The lock was given back each time. */
+    assert_string_equal(text, "QNAYBMKLOCPYGJ-REOHCLBHSA-N");
+}
+
+/* One thread's work: the key of one molecule, many times; counts the wrong ones. */
+static void *make_keys(void *wrong)
+{
+    fixture own;
+
+    bs_ctx_init(&own.cx, NULL);
+    bs_arena_init(&own.home, own.cx.gate);
+    for (int i = 0; i < 100; i++) {
+        bs_mark mark = bs_arena_mark(&own.home);
+        bs_mol *mol;
+        char *text;
+
+        if (bs_smiles_read(&own.cx, &own.home, "CCO", 3, NULL, &mol) != BS_OK ||
+            bs_inchi(&own.cx, &own.home, mol, true, &text) != BS_OK ||
+            strcmp(text, "LFQSCWFLJHTTHZ-UHFFFAOYSA-N") != 0)
+            ++*(int *)wrong;
+        bs_arena_rewind(&own.home, mark);
+    }
+    bs_arena_free(&own.home);
+    bs_ctx_free(&own.cx);
+    return NULL;
+}
+
+static void inchi__threads_wait_for_each_other(void **state)
+{
+    pthread_t thread[4];
+    int wrong[4] = {0};
+
+    (void)state;
+    for (int i = 0; i < 4; i++)
+        assert_int_equal(pthread_create(&thread[i], NULL, make_keys, &wrong[i]), 0);
+    for (int i = 0; i < 4; i++) {
+        assert_int_equal(pthread_join(thread[i], NULL), 0);
+        assert_int_equal(wrong[i], 0);
+    }
+}
+
 static void inchi__what_it_cannot_say_is_refused(void **state)
 {
     fixture *f = *state;
@@ -127,6 +184,8 @@ int main(void)
         check_case(inchi__known_molecules),
         check_case(inchi__allenes_keep_their_hand),
         check_case(inchi__cumulenes_keep_their_geometry),
+        check_case(inchi__no_memory_is_reported),
+        check_case(inchi__threads_wait_for_each_other),
         check_case(inchi__what_it_cannot_say_is_refused),
     };
 
