@@ -181,32 +181,33 @@ static bs_status add_centre(around *a, uint32_t atom)
 
 /* ---- Double bonds ---------------------------------------------------------------------------- */
 
-/*
- * Reads the marks beside one end of a double bond. *named is a marked neighbour, *below whether it
- * stands below the end; *named is UINT32_MAX if there is no mark.
- */
-static bs_status read_marks(const around *a, uint32_t end, uint32_t *named, bool *below)
+/* What the marks beside one end of a double bond say. */
+typedef struct marks {
+    uint32_t named; /* a marked neighbour, or UINT32_MAX if there is no mark */
+    bool below;     /* whether it stands below the end */
+    bool torn;      /* both neighbours are on the same side */
+} marks;
+
+static marks read_marks(const around *a, uint32_t end)
 {
     const bs_draft *d = &a->r->draft;
+    marks m = {.named = UINT32_MAX};
 
-    *named = UINT32_MAX;
     for (uint32_t k = a->offsets[end]; k < a->offsets[end + 1]; k++) {
         uint32_t bond = a->bonds[k];
         char mark = a->r->bonds[bond].mark;
-        bool is_below = (mark == '/') == (d->bonds[bond].b == end);
+        bool below = (mark == '/') == (d->bonds[bond].b == end);
 
         if (mark == 0)
             continue;
-        if (*named != UINT32_MAX && is_below == *below)
-            return bs_fail_at(a->r->cx, BS_EVALUE, a->r->atoms[end].at,
-                              "both neighbours of this atom are marked on one side of its double "
-                              "bond");
-        if (*named == UINT32_MAX) {
-            *named = other_end(a, bond, end);
-            *below = is_below;
+        if (m.named != UINT32_MAX) {
+            m.torn |= below == m.below;
+            continue;
         }
+        m.named = other_end(a, bond, end);
+        m.below = below;
     }
-    return BS_OK;
+    return m;
 }
 
 static int double_bonds(const around *a, uint32_t atom)
@@ -223,25 +224,25 @@ static bs_status add_geometry(around *a, uint32_t end, uint32_t next)
 {
     uint32_t before;
     uint32_t far;
-    uint32_t near_named;
-    uint32_t far_named;
-    bool near_below = false;
-    bool far_below = false;
-    bs_status st;
+    marks near;
+    marks distant;
 
     if (double_bonds(a, end) != 1 || walk_chain(a, end, next, &before, &far) % 2 == 0 || far < end)
         return BS_OK;
-    if ((st = read_marks(a, end, &near_named, &near_below)) != BS_OK ||
-        (st = read_marks(a, far, &far_named, &far_below)) != BS_OK)
-        return st;
-    if (near_named == UINT32_MAX || far_named == UINT32_MAX)
+    near = read_marks(a, end);
+    distant = read_marks(a, far);
+    /* Marks at one end only belong to other double bonds, as in dibenzylideneacetone. */
+    if (near.named == UINT32_MAX || distant.named == UINT32_MAX)
         return BS_OK;
+    if (near.torn || distant.torn)
+        return bs_fail_at(a->r->cx, BS_EVALUE, a->r->atoms[near.torn ? end : far].at,
+                          "both neighbours of this atom are marked on one side of its double bond");
     return bs_draft_add_stereo(&a->r->draft,
                                (bs_draft_stereo){.kind = BS_DRAFT_DOUBLE,
-                                                 .perm = near_below == far_below ? 1 : 2,
+                                                 .perm = near.below == distant.below ? 1 : 2,
                                                  .centre = end,
                                                  .second = far,
-                                                 .around = {near_named, far_named}});
+                                                 .around = {near.named, distant.named}});
 }
 
 bs_status smiles_read_stereo(smiles_reader *r)

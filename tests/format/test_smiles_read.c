@@ -64,11 +64,28 @@ static void read__errors_have_a_place(void **state)
     }
 }
 
+/* Dibenzylideneacetone: the marks on both sides of the carbonyl group are those of its neighbours. */
+static void read__slants_beside_a_carbonyl_group(void **state)
+{
+    fixture *f = *state;
+    bs_mol *mol = read_mol(f, "O=C(/C=C/c1ccccc1)/C=C/c1ccccc1");
+    bs_mol *bad;
+
+    assert_int_equal(bs_mol_bond_geometry(mol, bs_mol_bond_between(mol, 0, 1)), BS_GEOMETRY_NONE);
+    assert_int_equal(bs_mol_bond_geometry(mol, bs_mol_bond_between(mol, 2, 3)), BS_GEOMETRY_TRANS);
+    assert_int_equal(bs_mol_bond_geometry(mol, bs_mol_bond_between(mol, 10, 11)),
+                     BS_GEOMETRY_TRANS);
+    assert_int_equal(bs_smiles_read(&f->cx, &f->home, "C(/Cl)(/C)=C", 12, NULL, &bad), BS_OK);
+    assert_int_equal(bs_smiles_read(&f->cx, &f->home, "C/C(\\Cl)=C/F", 12, NULL, &bad), BS_EVALUE);
+    assert_int_equal(f->cx.error.offset, 2);
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
         check_case(read__ethanol),
         check_case(read__both_kekule_forms_are_aromatic),
+        check_case(read__slants_beside_a_carbonyl_group),
         check_case(read__errors_have_a_place),
     };
 
