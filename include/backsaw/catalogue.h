@@ -101,6 +101,15 @@ bs_status bs_shelf_put(bs_ctx *cx, bs_shelf *shelf, int list, const bs_mol *mol,
 /* Puts a compound that is free and always at hand, if no source prices it. */
 bs_status bs_shelf_at_hand(bs_ctx *cx, bs_shelf *shelf, const bs_mol *mol);
 
+/* Whether the shelf holds lists only, which bs_shelf_listed() names in full. */
+bool bs_shelf_is_listed(const bs_shelf *shelf);
+
+/*
+ * The canonical SMILES of what is in lists or at hand, in the order in which it was put there,
+ * counted from 0; NULL behind the last. It lives as long as the shelf.
+ */
+const char *bs_shelf_listed(const bs_shelf *shelf, size_t at);
+
 /*
  * Price of a molecule in € per mole from the first source that has it, the price per gram times
  * the molar mass; an offer without price counts as 1 € per mole. What is at hand, and any

@@ -117,9 +117,13 @@ typedef struct bs_plan_opts {
 bs_status bs_plan(bs_ctx *cx, const bs_mol *target, const bs_plan_opts *opts, bs_routes **out);
 
 /*
- * The default guess: what it may cost, in step costs, to make a molecule. It grows with the heavy
- * atoms (one step for each six beyond six), rings, stereocentres and hetero atoms; 0 to 40. For
- * tests and tools.
+ * The default guess: how many steps it may take to make a molecule, 0 to 40. One for each four
+ * heavy atoms beyond six, half a one for each ring beyond the first, three quarters for each
+ * stereo mark. The plan multiplies it by the cost of a step.
+ *
+ * With a shelf of lists alone that holds at most 200 compounds the plan guesses otherwise: three
+ * tenths of this number, and a third of a step for each atom that stands in surroundings which no
+ * atom of the shelf has.
  */
 double bs_guess_steps(const bs_mol *mol);
 

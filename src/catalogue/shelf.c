@@ -102,6 +102,20 @@ bs_status bs_shelf_add_list(bs_ctx *cx, bs_shelf *shelf, int *list)
     return st;
 }
 
+bool bs_shelf_is_listed(const bs_shelf *shelf)
+{
+    for (size_t i = 0; i < shelf->source_count; i++) {
+        if (shelf->sources[i].catalogue)
+            return false;
+    }
+    return true;
+}
+
+const char *bs_shelf_listed(const bs_shelf *shelf, size_t at)
+{
+    return at < shelf->entry_count ? shelf->entries[at].smiles : NULL;
+}
+
 /* ---- Entries --------------------------------------------------------------------------- */
 
 static uint64_t key_of(int list, const char *smiles)

@@ -327,7 +327,7 @@ bs_status bs_plan__meet(void *payload, bs_ctx *cx, const bs_mol *mol, const char
         return st;
     out->urgent = bs_known__next(plan, smiles, &cursor, NULL) != NULL;
     out->closed = !plan->rules_on || out->price == 0 || !has_carbon(mol);
-    out->guess = fmax(1, bs_guess_steps(mol)) * guess_unit(plan);
+    out->guess = fmax(1, bs_guess__steps(&plan->guess, mol)) * guess_unit(plan);
     if (opts->guess && isinf(out->price)) {
         st = opts->guess(opts->payload, cx, mol, smiles, &out->guess);
         if (st == BS_OK && !(isfinite(out->guess) && out->guess >= 0))

@@ -283,6 +283,7 @@ static void drop(bs_plan_state *plan)
 {
     if (plan->x.cx)
         bs_explore__free(&plan->x);
+    bs_guess__free(&plan->guess);
     bs_map_free(&plan->known_index);
     bs_map_free(&plan->detail_index);
     bs_gate_free(plan->cx->gate, plan->details, plan->detail_room * sizeof *plan->details);
@@ -304,6 +305,7 @@ bs_status bs_plan(bs_ctx *cx, const bs_mol *target, const bs_plan_opts *opts, bs
     bs_map_init(&plan.detail_index, cx);
     read_options(&plan);
     if ((st = bs_known__read(&plan)) == BS_OK &&
+        (st = bs_guess__init(&plan.guess, cx, opts->shelf)) == BS_OK &&
         (st = bs_smiles_canonical(cx, &plan.arena, target, 0, &smiles)) == BS_OK &&
         (st = bs_smiles_read(cx, &plan.arena, smiles, strlen(smiles), NULL, &mol)) == BS_OK &&
         (st = explore(&plan, mol, smiles)) == BS_OK)

@@ -4,6 +4,7 @@
 
 #include "backsaw/search.h"
 #include "search/explore.h"
+#include "search/guess.h"
 
 /* The tag of a way: the index of a rule, or of a known step with this bit. */
 #define BS_PLAN_KNOWN ((uint32_t)1 << 31)
@@ -43,6 +44,7 @@ typedef struct bs_plan_state {
     double step_cost;
     double admitted_cost; /* sum over the steps admitted so far, for the unit of guesses */
     double admitted_count;
+    bs_guess guess;
     bs_explore x;
     bool kbest_cut;
     uint32_t target;
