@@ -59,6 +59,6 @@ bs_status bs_pattern_find(bs_ctx *cx, bs_arena *home, const bs_pattern *pattern,
                           const bs_match_opts *opts, bs_matches *out);
 
 /* Whether there is a match. */
-bs_status bs_pattern_has(bs_ctx *cx, const bs_pattern *pattern, const bs_mol *mol, bool *found);
+bs_status bs_pattern_has(bs_ctx *cx, const bs_pattern *pattern, const bs_mol *mol, bool *yes);
 
 #endif

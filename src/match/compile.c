@@ -1,368 +1,261 @@
-/* From a query to a program: expressions, masks of bonds, the order of visits, stereo checks. */
+/* Compiles queries to patterns. */
 #include "match/program.h"
 
 #include <string.h>
 
-/* An expression nested deeper than this is refused; generating code recurses on it. */
-#define MAX_NESTING 400
-
-/* ---- Expressions ----------------------------------------------------------------------- */
-
-typedef struct generator {
+typedef struct compiling {
     bs_ctx *cx;
-    const bs_query_expr *expr;
-    const int *size;
-    const int *sub_number; /* recursive part of the query -> of the whole pattern */
-    bs_code *code;
-    int count;
-} generator;
+    bs_arena *home;
+    bs_pattern *pattern;
+    bs_nodes nodes;
+    int part_room;
+} compiling;
 
-/* Generates the tree that ends at test `at`, backwards, so that jumps go to what is there. */
-static bs_status generate(generator *g, int at, int yes, int no, int depth, int *entry)
+static bs_status add_part(compiling *c, const bs_query *query, int *index)
 {
-    const bs_test *test = &g->expr->tests[at];
-    int right = at - 1, second;
-    bs_status st;
+    bs_pattern *pattern = c->pattern;
 
-    if (depth > MAX_NESTING)
-        return bs_fail(g->cx, BS_ELIMIT, "an expression of the pattern is nested too deep");
-    if (test->kind == BS_TEST_NOT)
-        return generate(g, right, no, yes, depth + 1, entry);
-    if (test->kind == BS_TEST_AND || test->kind == BS_TEST_OR) {
-        bool both = test->kind == BS_TEST_AND;
+    if (pattern->part_count >= INT16_MAX)
+        return bs_fail(c->cx, BS_ELIMIT, "too many recursive parts in a pattern");
+    if (pattern->part_count == c->part_room) {
+        int room = c->part_room ? c->part_room * 2 : 4;
+        bs_part *wide;
+        bs_status st = bs_new(c->cx, c->home, room, &wide);
 
-        if ((st = generate(g, right, yes, no, depth + 1, &second)) != BS_OK)
+        if (st != BS_OK)
             return st;
-        return generate(g, right - g->size[right], both ? second : yes, both ? no : second,
-                        depth + 1, entry);
+        if (pattern->part_count > 0)
+            memcpy(wide, pattern->parts, (size_t)pattern->part_count * sizeof *wide);
+        pattern->parts = wide;
+        c->part_room = room;
     }
-    *entry = g->count;
-    g->code[g->count++] = (bs_code){
-        .kind = test->kind,
-        .value = test->kind == BS_TEST_RECURSE ? (int16_t)g->sub_number[test->value] : test->value,
-        .yes = yes,
-        .no = no,
-    };
+    *index = pattern->part_count;
+    pattern->parts[pattern->part_count++].query = query;
     return BS_OK;
 }
 
-static bs_status compile_expr(bs_ctx *cx, bs_arena *home, const bs_query_expr *expr,
-                              const int *sub_number, bs_program_expr *out)
-{
-    bs_mark mark = bs_arena_mark(&cx->scratch);
-    generator g = {.cx = cx, .expr = expr, .sub_number = sub_number};
-    int *size;
-    bs_status st = bs_query_sizes(cx, &cx->scratch, expr, &size);
+/* ---- Checks at the end of a match ------------------------------------------------------ */
 
-    if (st == BS_OK)
-        st = bs_new(cx, home, expr->count, &g.code);
-    if (st == BS_OK) {
-        g.size = size;
-        st = generate(&g, expr->count - 1, BS_CODE_PASS, BS_CODE_FAIL, 0, &out->entry);
-        out->code = g.code;
-    }
-    bs_arena_rewind(&cx->scratch, mark);
-    return st;
+static bs_status add_centre(compiling *c, bs_part *part, int index, const int *parts)
+{
+    const bs_query_atom *atom = &part->query->atoms[index];
+    bs_centre *centre = &part->centres[part->centre_count];
+
+    if (atom->around_count > 4)
+        return bs_fail_at(c->cx, BS_EVALUE, atom->offset,
+                          "a chirality test on an atom with more than four neighbours");
+    centre->atom = index;
+    centre->around_count = atom->around_count;
+    for (int k = 0; k < atom->around_count; k++)
+        centre->around[k] = atom->around[k];
+    part->centre_count++;
+    return bs_nodes__add(&c->nodes, &atom->expr, parts, &centre->entry);
 }
 
-/* ---- Order of visits ------------------------------------------------------------------- */
-
-/* How much a test narrows the choice; elements that are rare in organic molecules narrow most. */
-static int test_weight(const bs_test *test)
+/* The direction that a bond demands: 1 for '/', -1 for '\', 0 for none. */
+static int direction(const bs_query_bond *bond, int *or_unspecified)
 {
-    switch (test->kind) {
-    case BS_TEST_ELEMENT:
-    case BS_TEST_ALIPHATIC_ELEM:
-    case BS_TEST_AROMATIC_ELEM:
-        return test->value == 6 ? 2 : test->value == 8 || test->value == 7 ? 8 : 16;
-    case BS_TEST_CHARGE:
-        return test->value != 0 ? 12 : 0;
-    case BS_TEST_ISOTOPE:
-        return 20;
-    case BS_TEST_RECURSE:
-        return 3;
-    case BS_TEST_ANY:
-        return 0;
-    default:
+    if (bs_query_demands(&bond->expr, BS_TEST_BOND_UP, or_unspecified))
         return 1;
-    }
-}
-
-static int atom_weight(const bs_query_expr *expr)
-{
-    int weight = 0;
-
-    for (int i = 0; i < expr->count; i++) {
-        int kind = expr->tests[i].kind, value;
-
-        if (kind > BS_TEST_OR && bs_query_demands(expr, (bs_test_kind)kind, &value))
-            weight += test_weight(&expr->tests[i]);
-    }
-    return weight;
-}
-
-typedef struct planner {
-    const bs_query *query;
-    bs_pattern *pattern;
-    int *weight;
-    bool *placed;
-    int visit_count, closure_count;
-} planner;
-
-/* Puts an atom at the end of the order, with its bonds to atoms that are there. */
-static void place(planner *p, int atom)
-{
-    bs_visit *visit = &p->pattern->visits[p->visit_count++];
-
-    *visit = (bs_visit){.atom = atom,
-                        .parent = -1,
-                        .first_closure = p->closure_count,
-                        .group = p->query->atoms[atom].component};
-    for (int i = 0; i < p->query->bond_count; i++) {
-        const bs_query_bond *bond = &p->query->bonds[i];
-        int other = bond->a == atom ? bond->b : bond->a;
-
-        if ((bond->a != atom && bond->b != atom) || !p->placed[other])
-            continue;
-        if (visit->parent < 0) {
-            visit->parent = other;
-            visit->bond_mask = p->pattern->bond_masks[i];
-        } else {
-            p->pattern->closures[p->closure_count++] =
-                (bs_closure){other, p->pattern->bond_masks[i]};
-            visit->closure_count++;
-        }
-    }
-    p->placed[atom] = true;
-}
-
-/* The heaviest atom that hangs on one that is placed; -1 if there is none. */
-static int next_neighbour(const planner *p)
-{
-    int best = -1;
-
-    for (int i = 0; i < p->query->bond_count; i++) {
-        int a = p->query->bonds[i].a, b = p->query->bonds[i].b;
-        int open = p->placed[a] && !p->placed[b] ? b : p->placed[b] && !p->placed[a] ? a : -1;
-
-        if (open >= 0 && (best < 0 || p->weight[open] > p->weight[best] ||
-                          (p->weight[open] == p->weight[best] && open < best)))
-            best = open;
-    }
-    return best;
-}
-
-static int heaviest(const planner *p)
-{
-    int best = -1;
-
-    for (int i = 0; i < p->query->atom_count; i++)
-        if (!p->placed[i] && (best < 0 || p->weight[i] > p->weight[best]))
-            best = i;
-    return best;
-}
-
-/* A recursive part starts with its first atom, which the outer atom stands for. */
-static bs_status plan_visits(bs_ctx *cx, bs_arena *home, bs_pattern *pattern, bool recursive)
-{
-    const bs_query *query = pattern->query;
-    bs_mark mark = bs_arena_mark(&cx->scratch);
-    planner p = {.query = query, .pattern = pattern};
-    bs_status st = bs_new(cx, home, query->atom_count, &pattern->visits);
-
-    if (st == BS_OK)
-        st = bs_new(cx, home, query->bond_count, &pattern->closures);
-    if (st == BS_OK)
-        st = bs_new(cx, &cx->scratch, query->atom_count, &p.weight);
-    if (st == BS_OK)
-        st = bs_new(cx, &cx->scratch, query->atom_count, &p.placed);
-    for (int i = 0; st == BS_OK && i < query->atom_count; i++)
-        p.weight[i] = atom_weight(&query->atoms[i].expr);
-    while (st == BS_OK && p.visit_count < query->atom_count) {
-        int atom = next_neighbour(&p);
-
-        if (atom < 0)
-            atom = recursive && p.visit_count == 0 ? 0 : heaviest(&p);
-        place(&p, atom);
-    }
-    bs_arena_rewind(&cx->scratch, mark);
-    return st;
-}
-
-/* ---- Stereo ---------------------------------------------------------------------------- */
-
-static bs_status plan_hands(bs_ctx *cx, bs_arena *home, bs_pattern *pattern, const int *sub_number)
-{
-    const bs_query *query = pattern->query;
-    bs_status st = bs_new(cx, home, query->atom_count, &pattern->hands);
-
-    for (int i = 0; st == BS_OK && i < query->atom_count; i++) {
-        bs_hand_check *check = &pattern->hands[pattern->hand_count];
-
-        if (!bs_query_mentions(&query->atoms[i].expr, BS_TEST_CHIRAL))
-            continue;
-        check->atom = i;
-        st = compile_expr(cx, home, &query->atoms[i].expr, sub_number, &check->whole);
-        pattern->hand_count++;
-    }
-    return st;
+    return bs_query_demands(&bond->expr, BS_TEST_BOND_DOWN, or_unspecified) ? -1 : 0;
 }
 
 /*
- * How a bond leaves `from`: 1 up, -1 down, 0 without direction. '/' goes up from its first atom,
- * so seen from the second it goes down.
+ * A neighbour of an end of a double bond that has a direction: whether it lies above (1) or below
+ * (-1) that end; 0 if there is none.
  */
-static int direction(const bs_query_bond *bond, int from, bool *or_none)
+static int find_side(const bs_query *q, int skip, int end, int *neighbour, int *or_unspecified)
 {
-    int value, up = 0;
+    for (int i = 0; i < q->bond_count; i++) {
+        const bs_query_bond *bond = &q->bonds[i];
+        int up;
 
-    if (bs_query_demands(&bond->expr, BS_TEST_BOND_UP, &value))
-        up = 1;
-    else if (bs_query_demands(&bond->expr, BS_TEST_BOND_DOWN, &value))
-        up = -1;
-    else
-        return 0;
-    *or_none = *or_none || value == 1;
-    return bond->a == from ? up : -up;
+        if (i == skip || (bond->a != end && bond->b != end))
+            continue;
+        if ((up = direction(bond, or_unspecified)) == 0)
+            continue;
+        *neighbour = bond->a == end ? bond->b : bond->a;
+        return bond->a == end ? up : -up;
+    }
+    return 0;
 }
 
-/* All pairs of directed bonds at the two ends of one bond. */
-static void add_geometries(bs_pattern *pattern, const bs_query_bond *middle, int *count, bool write)
+static bool has_directions(const bs_query *q)
 {
-    const bs_query *query = pattern->query;
+    for (int i = 0; i < q->bond_count; i++)
+        if (direction(&q->bonds[i], NULL) != 0)
+            return true;
+    return false;
+}
 
-    for (int i = 0; i < query->bond_count; i++) {
-        const bs_query_bond *at_a = &query->bonds[i];
+static void add_turns(bs_part *part)
+{
+    const bs_query *q = part->query;
 
-        if (at_a == middle || (at_a->a != middle->a && at_a->b != middle->a))
+    for (int i = 0; i < q->bond_count; i++) {
+        const bs_query_bond *bond = &q->bonds[i];
+        bs_turn turn = {.first = bond->a, .second = bond->b};
+        int free_a = 0, free_b = 0, left = -1, right = -1, up_a, up_b;
+
+        if (!bs_query_mentions(&bond->expr, BS_TEST_BOND_DOUBLE))
             continue;
-        for (int k = 0; k < query->bond_count; k++) {
-            const bs_query_bond *at_b = &query->bonds[k];
-            bool or_none = false;
-            int up_a, up_b;
-
-            if (at_b == middle || (at_b->a != middle->b && at_b->b != middle->b))
-                continue;
-            up_a = direction(at_a, middle->a, &or_none);
-            up_b = direction(at_b, middle->b, &or_none);
-            if (up_a == 0 || up_b == 0)
-                continue;
-            if (write)
-                pattern->geometries[*count] = (bs_geometry_check){
-                    .end_a = middle->a,
-                    .end_b = middle->b,
-                    .beside_a = at_a->a == middle->a ? at_a->b : at_a->a,
-                    .beside_b = at_b->a == middle->b ? at_b->b : at_b->a,
-                    .cis = up_a == up_b,
-                    .or_none = or_none,
-                };
-            ++*count;
-        }
+        up_a = find_side(q, i, bond->a, &left, &free_a);
+        up_b = find_side(q, i, bond->b, &right, &free_b);
+        if (up_a == 0 || up_b == 0)
+            continue;
+        turn.left = left;
+        turn.right = right;
+        turn.cis = up_a == up_b;
+        turn.or_unspecified = free_a || free_b;
+        part->turns[part->turn_count++] = turn;
     }
 }
 
-static bs_status plan_geometries(bs_ctx *cx, bs_arena *home, bs_pattern *pattern)
+static bs_status add_checks(compiling *c, bs_part *part, const int *parts)
 {
-    const bs_query *query = pattern->query;
+    const bs_query *q = part->query;
+    bool any_centre = false, any_turn = has_directions(q);
     bs_status st = BS_OK;
 
-    for (int pass = 0; st == BS_OK && pass < 2; pass++) {
-        pattern->geometry_count = 0;
-        for (int i = 0; i < query->bond_count; i++) {
-            const bs_query_bond *middle = &query->bonds[i];
-
-            if (bs_query_demands(&middle->expr, BS_TEST_BOND_DOUBLE, NULL))
-                add_geometries(pattern, middle, &pattern->geometry_count, pass == 1);
-        }
-        if (pass == 0)
-            st = bs_new(cx, home, pattern->geometry_count, &pattern->geometries);
-    }
+    for (int i = 0; i < q->atom_count; i++)
+        any_centre |= bs_query_mentions(&q->atoms[i].expr, BS_TEST_CHIRAL);
+    if (any_centre)
+        st = bs_new(c->cx, c->home, q->atom_count, &part->centres);
+    if (st == BS_OK && any_turn)
+        st = bs_new(c->cx, c->home, q->bond_count, &part->turns);
+    if (st == BS_OK && any_turn)
+        add_turns(part);
+    for (int i = 0; i < q->atom_count && any_centre && st == BS_OK; i++)
+        if (bs_query_mentions(&q->atoms[i].expr, BS_TEST_CHIRAL))
+            st = add_centre(c, part, i, parts);
     return st;
 }
 
-/* ---- The whole ------------------------------------------------------------------------- */
+/* ---- Parts ----------------------------------------------------------------------------- */
 
-static int count_subs(const bs_query *query)
+/* Chirality needs the neighbours, so an atom is placed without it. */
+static bs_status add_entry(compiling *c, const bs_query_expr *expr, const int *parts,
+                           int32_t *entry)
 {
-    int count = query->sub_count;
+    bs_query_expr relaxed = *expr;
+    bs_status st = BS_OK;
 
-    for (int i = 0; i < query->sub_count; i++)
-        count += count_subs(query->subs[i]);
-    return count;
+    if (bs_query_mentions(expr, BS_TEST_CHIRAL))
+        st = bs_query_relax_expr(c->cx, &c->cx->scratch, expr, BS_RELAX_CHIRAL, &relaxed);
+    return st == BS_OK ? bs_nodes__add(&c->nodes, &relaxed, parts, entry) : st;
 }
 
-/* Compiles one query; its recursive parts get the next numbers of the whole. */
-static bs_status compile_part(bs_ctx *cx, bs_arena *home, const bs_query *query, bool recursive,
-                              bs_pattern **subs, int *next_sub, bs_pattern **out)
+static bs_status fill_part(compiling *c, bs_part *part, const int *parts, bool recursive)
 {
-    bs_mark mark = bs_arena_mark(&cx->scratch);
-    bs_pattern *pattern = NULL;
-    int *sub_number;
-    bs_status st = bs_new(cx, &cx->scratch, query->sub_count, &sub_number);
+    const bs_query *q = part->query;
+    bs_status st;
 
-    if (st == BS_OK)
-        st = bs_new(cx, home, 1, &pattern);
-    for (int i = 0; st == BS_OK && i < query->sub_count; i++) {
-        sub_number[i] = (*next_sub)++;
-        st = compile_part(cx, home, query->subs[i], true, subs, next_sub, &subs[sub_number[i]]);
+    if (q->atom_count == 0)
+        return bs_fail(c->cx, BS_EVALUE, "a pattern without atoms");
+    if ((st = bs_new(c->cx, c->home, q->atom_count, &part->entries)) != BS_OK ||
+        (st = bs_new(c->cx, c->home, q->atom_count, &part->rarity)) != BS_OK ||
+        (st = bs_new(c->cx, c->home, q->bond_count, &part->sorts)) != BS_OK)
+        return st;
+    for (int i = 0; i < q->atom_count && st == BS_OK; i++) {
+        st = add_entry(c, &q->atoms[i].expr, parts, &part->entries[i]);
+        part->grouped |= q->atoms[i].component != 0;
     }
-    if (st == BS_OK) {
-        *pattern = (bs_pattern){.query = query, .atom_count = query->atom_count, .subs = subs};
-        st = bs_new(cx, home, query->atom_count, &pattern->exprs);
-    }
-    for (int i = 0; st == BS_OK && i < query->atom_count; i++) {
-        bs_query_expr plain;
-
-        pattern->has_groups = pattern->has_groups || query->atoms[i].component != 0;
-        st = bs_query_relax_expr(cx, &cx->scratch, &query->atoms[i].expr, BS_RELAX_CHIRAL, &plain);
-        if (st == BS_OK)
-            st = compile_expr(cx, home, &plain, sub_number, &pattern->exprs[i]);
-    }
+    for (int i = 0; i < q->bond_count && st == BS_OK; i++)
+        st = bs_query_bond_mask(c->cx, &q->bonds[i].expr, &part->sorts[i]);
     if (st == BS_OK)
-        st = bs_new(cx, home, query->bond_count, &pattern->bond_masks);
-    for (int i = 0; st == BS_OK && i < query->bond_count; i++)
-        st = bs_query_bond_mask(cx, &query->bonds[i].expr, &pattern->bond_masks[i]);
+        st = add_checks(c, part, parts);
     if (st == BS_OK)
-        st = plan_visits(cx, home, pattern, recursive);
+        st = bs_screen__rarity(c->cx, q, part->rarity);
     if (st == BS_OK)
-        st = plan_hands(cx, home, pattern, sub_number);
-    if (st == BS_OK)
-        st = plan_geometries(cx, home, pattern);
-    bs_arena_rewind(&cx->scratch, mark);
-    *out = pattern;
+        st = bs_order__find(c->cx, c->home, part, recursive ? 0 : -1, &part->order);
+    part->slot = c->pattern->slot_count;
+    c->pattern->slot_count += q->atom_count;
+    c->pattern->grouped |= part->grouped;
     return st;
+}
+
+/* Parts are numbered as they are met; the recursion is counted. */
+static bs_status add_query(compiling *c, const bs_query *query, int depth, int *index)
+{
+    bs_part part = {.query = query};
+    int *parts;
+    bs_status st;
+
+    if (depth > BS_QUERY_MAX_DEPTH)
+        return bs_fail(c->cx, BS_ELIMIT, "recursion nested deeper than %d", BS_QUERY_MAX_DEPTH);
+    if ((st = add_part(c, query, index)) != BS_OK ||
+        (st = bs_new(c->cx, &c->cx->scratch, query->sub_count, &parts)) != BS_OK)
+        return st;
+    for (int i = 0; i < query->sub_count && st == BS_OK; i++)
+        st = add_query(c, query->subs[i], depth + 1, &parts[i]);
+    if (st == BS_OK)
+        st = fill_part(c, &part, parts, depth > 0);
+    c->pattern->parts[*index] = part;
+    return st;
+}
+
+/* Rings that a match makes in any molecule: bonds that close one, with components counted. */
+static int count_rings(const bs_part *part)
+{
+    int components = 0;
+
+    for (int i = 0; i < part->order.count; i++)
+        components += part->order.moves[i].from < 0;
+    return part->query->bond_count - part->query->atom_count + components;
+}
+
+static bs_status finish(compiling *c)
+{
+    bs_pattern *pattern = c->pattern;
+    bs_status st = bs_new(c->cx, c->home, c->nodes.count, &pattern->nodes);
+
+    if (st != BS_OK)
+        return st;
+    if (c->nodes.count > 0)
+        memcpy(pattern->nodes, c->nodes.items, (size_t)c->nodes.count * sizeof *pattern->nodes);
+    pattern->node_count = c->nodes.count;
+    pattern->min_atoms = pattern->query->atom_count;
+    pattern->min_bonds = pattern->query->bond_count;
+    pattern->min_rings = count_rings(&pattern->parts[0]);
+    return bs_screen__needs(c->cx, pattern->query, &pattern->needs);
+}
+
+/* Compiles a query that lies in `home` and stays. */
+static bs_status compile(bs_ctx *cx, bs_arena *home, const bs_query *query, bs_pattern **out)
+{
+    bs_mark temp = bs_arena_mark(&cx->scratch);
+    compiling c = {.cx = cx, .home = home, .nodes = {.cx = cx}};
+    char *text = NULL;
+    int root;
+    bs_status st;
+
+    if ((st = bs_new(cx, home, 1, &c.pattern)) != BS_OK)
+        return st;
+    c.pattern->query = query;
+    st = add_query(&c, query, 0, &root);
+    if (st == BS_OK)
+        st = finish(&c);
+    if (st == BS_OK && !query->text)
+        st = bs_query_write(cx, home, query, &text);
+    if (home != &cx->scratch)
+        bs_arena_rewind(&cx->scratch, temp);
+    if (st != BS_OK)
+        return st;
+    c.pattern->text = query->text ? query->text : text;
+    *out = c.pattern;
+    return BS_OK;
 }
 
 bs_status bs_query_compile(bs_ctx *cx, bs_arena *home, const bs_query *query, bs_pattern **out)
 {
     bs_mark kept = bs_arena_mark(home);
-    int sub_count = count_subs(query), next_sub = 0;
-    bs_pattern **subs, *pattern = NULL;
     bs_query *copy;
-    char *text;
-    bs_status st;
+    bs_status st = bs_query_copy(cx, home, query, &copy);
 
-    if (query->atom_count == 0)
-        return bs_fail_at(cx, BS_ESYNTAX, 0, "expected an atom, found the end of the text");
-    if (sub_count > INT16_MAX)
-        return bs_fail(cx, BS_ELIMIT, "too many recursive parts in a pattern");
-    if ((st = bs_query_copy(cx, home, query, &copy)) != BS_OK ||
-        (st = bs_new(cx, home, sub_count, &subs)) != BS_OK ||
-        (st = compile_part(cx, home, copy, false, subs, &next_sub, &pattern)) != BS_OK)
-        goto done;
-    for (int i = 0; i < sub_count; i++)
-        subs[i]->sub_count = sub_count;
-    pattern->sub_count = sub_count;
-    pattern->text = copy->text;
-    if (!pattern->text) {
-        st = bs_query_write(cx, home, copy, &text);
-        pattern->text = text;
-    }
-done:
+    if (st == BS_OK)
+        st = compile(cx, home, copy, out);
     if (st != BS_OK)
         bs_arena_rewind(home, kept);
-    else
-        *out = pattern;
     return st;
 }
 
@@ -374,7 +267,7 @@ bs_status bs_pattern_read(bs_ctx *cx, bs_arena *home, const char *text, size_t l
     bs_status st = bs_query_read(cx, home, text, length, 0, &query);
 
     if (st == BS_OK)
-        st = bs_query_compile(cx, home, query, out);
+        st = compile(cx, home, query, out);
     if (st != BS_OK)
         bs_arena_rewind(home, kept);
     return st;
@@ -387,7 +280,7 @@ const char *bs_pattern_text(const bs_pattern *pattern)
 
 int bs_pattern_atom_count(const bs_pattern *pattern)
 {
-    return pattern->atom_count;
+    return pattern->query->atom_count;
 }
 
 int bs_pattern_map(const bs_pattern *pattern, int atom)
@@ -398,9 +291,4 @@ int bs_pattern_map(const bs_pattern *pattern, int atom)
 const bs_query *bs_pattern__query(const bs_pattern *pattern)
 {
     return pattern->query;
-}
-
-bool bs_pattern__bond_passes(const bs_pattern *pattern, int bond, const bs_mol *mol, uint32_t where)
-{
-    return pattern->bond_masks[bond] >> bs_bond__state(&bs_mol__bonds(mol)[where]) & 1;
 }

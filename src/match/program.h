@@ -1,82 +1,120 @@
 /*
- * The compiled form of a pattern: what the compiler makes and the matcher runs.
+ * Compiled patterns.
  *
- * An expression becomes a list of tests with two jumps each, so that evaluation stops at the first
- * test that decides. A bond expression becomes a mask with one bit for each state a bond can be
- * in. Atoms are visited in an order in which each one but the first of a connected part hangs on
- * an earlier one; bonds that close a ring are tested when their later end is placed.
+ * A pattern is a list of parts: part 0 is the query itself, the others are its recursive parts at
+ * every depth. A part has a move for each of its atoms, in the order in which they are placed:
+ * the first on any atom of the molecule, the others over a bond from an atom placed before.
+ *
+ * An atom expression is a graph of nodes, each with two ways on, for yes and no, so that nothing
+ * is asked twice and no stack is needed. Most tests compare fields of the 16 bytes of `bs_atom`;
+ * one node compares several of them at once, as two masked words.
  */
 #ifndef MATCH_PROGRAM_H
 #define MATCH_PROGRAM_H
 
+#include "chem/features.h"
 #include "match/query.h"
 
-#include "chem/mol.h"
+typedef enum bs_node_kind {
+    BS_NODE_FIELDS,
+    BS_NODE_CONNECTIONS, /* X */
+    BS_NODE_IMPLICIT_H,  /* h; -1: some */
+    BS_NODE_HYBRID,
+    BS_NODE_RECURSE, /* argument: part */
+    BS_NODE_CHIRAL
+} bs_node_kind;
 
-enum { BS_CODE_PASS = -1, BS_CODE_FAIL = -2 };
+enum { BS_NODE_YES = -1, BS_NODE_NO = -2 };
 
-/* A test and where to go from it: the number of a test, or BS_CODE_PASS or BS_CODE_FAIL. */
-typedef struct bs_code {
+typedef struct bs_node {
+    uint64_t mask[2], value[2];
+    int32_t yes, no; /* next node, BS_NODE_YES or BS_NODE_NO */
+    int16_t argument;
     uint8_t kind;
-    int16_t value; /* of BS_TEST_RECURSE: the number of the recursive part in `subs` of the whole */
-    int32_t yes, no;
-} bs_code;
+} bs_node;
 
-typedef struct bs_program_expr {
-    bs_code *code;
-    int entry;
-} bs_program_expr;
-
-/* One atom in the order of visits. */
-typedef struct bs_visit {
-    int atom;
-    int parent; /* an earlier pattern atom, or -1 where a connected part begins */
-    uint32_t bond_mask;
-    int first_closure, closure_count; /* bonds to other earlier atoms */
-    int group;                        /* of a component-level parenthesis */
-} bs_visit;
-
+/* A bond to an atom placed before, other than the one over which a move goes. */
 typedef struct bs_closure {
-    int other; /* pattern atom */
-    uint32_t bond_mask;
+    int32_t move; /* that placed the other atom */
+    uint32_t sorts;
 } bs_closure;
 
-/* A centre whose hand is asked: the whole expression is tested again when all atoms are placed. */
-typedef struct bs_hand_check {
-    int atom;
-    bs_program_expr whole;
-} bs_hand_check;
+typedef struct bs_move {
+    int32_t atom;   /* of the query */
+    int32_t from;   /* move that placed the atom before, -1 for the first of a component */
+    uint32_t sorts; /* of bond, see bs_query_bond_mask() */
+    int32_t entry;  /* first node, or an end */
+    int32_t closure_first, closure_count;
+    int32_t group; /* component-level group, 0 for none */
+} bs_move;
 
-/* Two neighbours of a double bond, on the same side or not. */
-typedef struct bs_geometry_check {
-    int end_a, end_b, beside_a, beside_b; /* pattern atoms */
+/* An order of the atoms of a part. */
+typedef struct bs_order {
+    bs_move *moves;
+    bs_closure *closures;
+    int32_t *place; /* move of each atom */
+    int count;
+} bs_order;
+
+/* An atom whose expression has a chirality test; asked again when all atoms are placed. */
+typedef struct bs_centre {
+    int32_t atom;
+    int32_t entry;
+    int32_t around[4]; /* atoms in the order of the text, -1 for the one not written */
+    int32_t around_count;
+} bs_centre;
+
+/* A double bond with directions at both ends: left - first = second - right. */
+typedef struct bs_turn {
+    int32_t left, first, second, right;
     bool cis;
-    bool or_none; /* no geometry will do */
-} bs_geometry_check;
+    bool or_unspecified;
+} bs_turn;
+
+typedef struct bs_part {
+    const bs_query *query;
+    bs_order order;
+    int32_t *entries;  /* of each atom, chirality left out */
+    int32_t *rarity;   /* of each atom: how many a usual molecule has, scaled */
+    uint32_t *sorts;   /* of each bond */
+    bs_centre *centres;
+    bs_turn *turns;
+    int centre_count, turn_count;
+    int slot; /* where its places begin in the slots of a search */
+    bool grouped;
+} bs_part;
 
 struct bs_pattern {
     const bs_query *query;
     const char *text;
-    int atom_count;
-    bs_program_expr *exprs; /* by pattern atom, without chirality */
-    uint32_t *bond_masks;   /* by pattern bond */
-    bs_visit *visits;
-    bs_closure *closures;
-    bs_hand_check *hands;
-    int hand_count;
-    bs_geometry_check *geometries;
-    int geometry_count;
-    bool has_groups;
-    /* All recursive parts at any depth, the same array for the whole and each part. */
-    bs_pattern **subs;
-    int sub_count;
+    bs_part *parts;
+    bs_node *nodes;
+    int part_count, node_count;
+    int slot_count;
+    int min_atoms, min_bonds, min_rings;
+    bool grouped;
+    bs_features needs;
 };
 
-/* The state of a bond, as the bits of bs_query_bond_mask() count them. */
-static inline int bs_bond__state(const bs_bond *bond)
-{
-    return (int)bond->order | (bond->flags & BS_BOND_AROMATIC ? 8 : 0) |
-           (bond->flags & BS_BOND_RING ? 16 : 0);
-}
+/* What a pattern demands of a molecule, and how rare each atom of a query is. */
+bs_status bs_screen__needs(bs_ctx *cx, const bs_query *query, bs_features *needs);
+bs_status bs_screen__rarity(bs_ctx *cx, const bs_query *query, int32_t *rarity);
+
+/* The nodes of a pattern while they are made, in scratch. */
+typedef struct bs_nodes {
+    bs_ctx *cx;
+    bs_node *items;
+    int count, room;
+} bs_nodes;
+
+/* Compiles an expression; `parts` tells the part of each recursive part. */
+bs_status bs_nodes__add(bs_nodes *nodes, const bs_query_expr *expr, const int *parts,
+                        int32_t *entry);
+
+/*
+ * Finds an order of the atoms that starts at `root`, or at the rarest atom for -1, and goes on
+ * along bonds to the atom with the most bonds to those placed, then the rarest, then the first.
+ */
+bs_status bs_order__find(bs_ctx *cx, bs_arena *home, const bs_part *part, int root, bs_order *out);
 
 #endif

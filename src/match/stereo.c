@@ -1,121 +1,185 @@
-/* Hands and geometries of a match whose atoms are all placed. */
-#include "match/run.h"
+/* Tests on the shape of a match: hands, double bonds, hybridisation. */
+#include "match/search.h"
 
-#define AROUND 4
-#define IMPLIED UINT32_MAX /* the hydrogen or lone pair of a centre */
+/* ---- Hands ----------------------------------------------------------------------------- */
 
-/* The four places around a centre in the molecule's order. */
-static bool molecule_around(const bs_mol *mol, uint32_t centre, uint32_t around[AROUND])
+/* The place of a neighbour among the four of a centre, the implied one first; -1 for none. */
+static int place_of(const bs_search *s, uint32_t centre, uint32_t neighbour)
 {
-    const bs_link *links = bs_mol__links(mol, centre);
-    int degree = mol->atoms[centre].degree, count = 0;
+    const bs_link *links = s->links + s->offsets[centre];
+    int degree = s->atoms[centre].degree;
 
-    if (degree != 3 && degree != 4)
-        return false;
-    if (degree == 3)
-        around[count++] = IMPLIED;
     for (int k = 0; k < degree; k++)
-        around[count++] = links[k].atom;
-    return true;
+        if (links[k].atom == neighbour)
+            return k + (degree == 3);
+    return -1;
+}
+
+/* Whether the places are an odd permutation of 0 to 3. */
+static bool is_odd(const int place[4])
+{
+    int swaps = 0;
+
+    for (int i = 0; i < 4; i++)
+        for (int k = i + 1; k < 4; k++)
+            swaps += place[i] > place[k];
+    return swaps % 2 != 0;
 }
 
 /*
- * The same places in the order of the pattern; the one that the pattern does not name is what is
- * left. False if the pattern leaves more than one open.
+ * The places of the pattern's neighbours around the atom; the one that is not written takes the
+ * place that is left. False unless this makes all four.
  */
-static bool pattern_around(const bs_match_search *search, const bs_query_atom *atom,
-                           const uint32_t have[AROUND], uint32_t around[AROUND])
+static bool find_places(const bs_search *s, const bs_centre *centre, const bs_frame *f,
+                        uint32_t atom, int place[4])
 {
-    int open = -1;
+    int left = 0 + 1 + 2 + 3, unwritten = -1;
 
-    if (atom->around_count != AROUND)
+    if (centre->around_count != 4)
         return false;
-    for (int k = 0; k < AROUND; k++) {
-        if (atom->around[k] >= 0)
-            around[k] = search->placed[atom->around[k]];
-        else if (open < 0)
-            open = k;
-        else
+    for (int i = 0; i < 4; i++) {
+        if (centre->around[i] < 0) {
+            unwritten = i;
+            continue;
+        }
+        place[i] = place_of(s, atom, f->placed[f->order->place[centre->around[i]]]);
+        if (place[i] < 0)
             return false;
+        left -= place[i];
     }
-    for (int i = 0; i < AROUND && open >= 0; i++) {
-        bool named = false;
+    if (unwritten >= 0)
+        place[unwritten] = left;
+    return true;
+}
 
-        for (int k = 0; k < AROUND; k++)
-            named = named || (k != open && around[k] == have[i]);
-        if (!named)
-            around[open] = have[i];
+bool bs_search__hand_fits(const bs_search *s, const bs_centre *centre, const bs_frame *f, int test)
+{
+    uint32_t atom = f->placed[f->order->place[centre->atom]];
+    const bs_atom *a = &s->atoms[atom];
+    int place[4], seen;
+
+    if (a->stereo != BS_STEREO_TETRAHEDRAL || a->degree < 3 || a->degree > 4)
+        return test > 2;
+    /* With fewer neighbours than tell the hands apart, any hand will do. */
+    if (!find_places(s, centre, f, atom, place))
+        return true;
+    seen = is_odd(place) ? 3 - a->perm : a->perm;
+    return seen == (test > 2 ? test - 2 : test);
+}
+
+/* ---- Double bonds ---------------------------------------------------------------------- */
+
+static const bs_bond *bond_between(const bs_search *s, uint32_t a, uint32_t b)
+{
+    const bs_link *links = s->links + s->offsets[a];
+
+    for (int k = 0; k < s->atoms[a].degree; k++)
+        if (links[k].atom == b)
+            return &s->bonds[links[k].bond];
+    return NULL;
+}
+
+/* The neighbour of an end to which the geometry of its double bond refers. */
+static uint32_t first_beside(const bs_search *s, uint32_t end, uint32_t other_end)
+{
+    const bs_link *links = s->links + s->offsets[end];
+
+    return links[0].atom != other_end ? links[0].atom
+           : s->atoms[end].degree > 1 ? links[1].atom
+                                      : BS_FREE;
+}
+
+static bool turn_fits(const bs_search *s, const bs_turn *turn, const bs_frame *f)
+{
+    const int32_t *place = f->order->place;
+    uint32_t first = f->placed[place[turn->first]], second = f->placed[place[turn->second]];
+    uint32_t left = f->placed[place[turn->left]], right = f->placed[place[turn->right]];
+    const bs_bond *bond = bond_between(s, first, second);
+    bool cis;
+
+    if (!bond || bond->order != 2 || bond->flags & BS_BOND_AROMATIC)
+        return true;
+    if (!(bond->flags & (BS_BOND_CIS | BS_BOND_TRANS)))
+        return turn->or_unspecified;
+    cis = (bond->flags & BS_BOND_CIS) != 0;
+    cis ^= first_beside(s, first, second) != left;
+    cis ^= first_beside(s, second, first) != right;
+    return cis == turn->cis;
+}
+
+bool bs_search__stereo_fits(bs_search *s, const bs_frame *f)
+{
+    const bs_part *part = f->part;
+
+    for (int i = 0; i < part->turn_count; i++)
+        if (!turn_fits(s, &part->turns[i], f))
+            return false;
+    for (int i = 0; i < part->centre_count; i++) {
+        const bs_centre *centre = &part->centres[i];
+        uint32_t atom = f->placed[f->order->place[centre->atom]];
+
+        if (!bs_search__passes(s, centre->entry, atom, centre, f))
+            return false;
     }
     return true;
 }
 
-static bool permutation_is_odd(const uint32_t a[AROUND], const uint32_t b[AROUND])
-{
-    int place[AROUND];
-    bool odd = false;
+/* ---- Hybridisation --------------------------------------------------------------------- */
 
-    for (int i = 0; i < AROUND; i++) {
-        place[i] = 0;
-        for (int k = 0; k < AROUND; k++)
-            if (b[k] == a[i])
-                place[i] = k;
-    }
-    for (int i = 0; i < AROUND; i++)
-        for (int k = i + 1; k < AROUND; k++)
-            odd ^= place[i] > place[k];
-    return odd;
+/* Electrons in the outer shell of a main-group element, 0 for others. */
+static int outer_electrons(int element)
+{
+    static const uint8_t noble[] = {2, 10, 18, 36, 54, 86, 118};
+    int below = 0;
+
+    if (element <= 2)
+        return element;
+    for (int i = 0; noble[i] < element; i++)
+        below = noble[i];
+    element -= below;
+    /* Below argon each row has ten, then fourteen more elements between its blocks. */
+    if (below >= 54 && element > 2 + 24)
+        return element - 24;
+    if (below >= 18 && below < 54 && element > 2 + 10)
+        return element - 10;
+    return element <= 2 || below < 18 ? element : 0;
 }
 
-/* The hand of a placed centre as the pattern would write it: 1 @, 2 @@, 0 none. */
-static int hand_of(const bs_match_search *search, int atom)
+/* Whether a lone pair of the atom lies beside a double, triple or aromatic bond. */
+static bool is_conjugated(const bs_search *s, uint32_t atom)
 {
-    const bs_mol *mol = search->run->mol;
-    const bs_query_atom *query = &search->pattern->query->atoms[atom];
-    uint32_t centre = search->placed[atom], have[AROUND], asked[AROUND];
-    const bs_atom *found = &mol->atoms[centre];
+    const bs_link *links = s->links + s->offsets[atom];
 
-    if (found->stereo != BS_STEREO_TETRAHEDRAL || !molecule_around(mol, centre, have) ||
-        !pattern_around(search, query, have, asked))
+    for (int k = 0; k < s->atoms[atom].degree; k++) {
+        uint32_t other = links[k].atom;
+        const bs_link *more = s->links + s->offsets[other];
+
+        if (s->atoms[other].element > 9 && !(s->atoms[other].flags & BS_ATOM_AROMATIC))
+            continue;
+        for (int j = 0; j < s->atoms[other].degree; j++) {
+            const bs_bond *bond = &s->bonds[more[j].bond];
+
+            if (more[j].atom != atom && (bond->order > 1 || bond->flags & BS_BOND_AROMATIC))
+                return true;
+        }
+    }
+    return false;
+}
+
+/* Neighbours and lone pairs (VSEPR), less one where a lone pair is conjugated. */
+int bs_search__hybridisation(const bs_search *s, uint32_t atom)
+{
+    const bs_atom *a = &s->atoms[atom];
+    int folded = a->hydrogens - (s->spelt_hydrogens ? a->label : 0);
+    int connections = a->degree + folded, outer = outer_electrons(a->element);
+    int pairs = outer > 0 ? (outer - a->charge - a->valence) / 2 : 0, steric;
+
+    if (a->flags & BS_ATOM_AROMATIC)
+        return 2;
+    steric = connections + (pairs > 0 ? pairs : 0);
+    if (connections == 0 || steric < 2)
         return 0;
-    return permutation_is_odd(have, asked) ? 3 - found->perm : found->perm;
-}
-
-/* Whether a neighbour of an end of a double bond is the one that its geometry refers to. */
-static bool is_reference(const bs_mol *mol, uint32_t end, uint32_t other, uint32_t neighbour)
-{
-    const bs_link *links = bs_mol__links(mol, end);
-
-    return (links[0].atom == other ? links[1].atom : links[0].atom) == neighbour;
-}
-
-static bool geometry_fits(const bs_match_search *search, const bs_geometry_check *check)
-{
-    const bs_mol *mol = search->run->mol;
-    uint32_t a = search->placed[check->end_a], b = search->placed[check->end_b];
-    int number = bs_mol_bond_between(mol, (int)a, (int)b);
-    int flags = (int)bs_mol__bonds(mol)[number].flags;
-    bool cis = flags & BS_BOND_CIS;
-
-    if (!(flags & (BS_BOND_CIS | BS_BOND_TRANS)))
-        return check->or_none;
-    cis ^= !is_reference(mol, a, b, search->placed[check->beside_a]);
-    cis ^= !is_reference(mol, b, a, search->placed[check->beside_b]);
-    return cis == check->cis;
-}
-
-bool bs_match__stereo(const bs_match_search *search)
-{
-    const bs_pattern *pattern = search->pattern;
-
-    for (int i = 0; i < pattern->geometry_count; i++)
-        if (!geometry_fits(search, &pattern->geometries[i]))
-            return false;
-    for (int i = 0; i < pattern->hand_count; i++) {
-        const bs_hand_check *check = &pattern->hands[i];
-
-        if (!bs_match__atom(search->run, &check->whole, search->placed[check->atom],
-                            hand_of(search, check->atom)))
-            return false;
-    }
-    return true;
+    if (steric == 4 && pairs > 0 && a->element >= 7 && a->element <= 8 && is_conjugated(s, atom))
+        steric = 3;
+    return steric - 1 > 5 ? 5 : steric - 1;
 }
