@@ -7,6 +7,7 @@
  */
 #include "chem/canon.h"
 #include "chem/draft.h"
+#include "chem/features.h"
 #include "chem/ring.h"
 #include "chem/valence.h"
 
@@ -346,6 +347,7 @@ static bs_status pack(finish *f, bs_arena *home, bs_mol **out)
         memcpy((char *)mol + mol->rings_at, f->rings.offsets, (rings + 1) * sizeof(uint32_t));
         memcpy((char *)mol + mol->ring_atoms_at, f->rings.atoms, ring_atoms * sizeof(uint32_t));
     }
+    bs_mol__features(mol);
     *out = mol;
     return BS_OK;
 }

@@ -1,5 +1,6 @@
 /* The connected pieces of a molecule. */
 #include "chem/draft.h"
+#include "chem/features.h"
 
 #include <string.h>
 
@@ -148,6 +149,8 @@ bs_status bs_mol_fragments(bs_ctx *cx, bs_arena *home, const bs_mol *mol, bs_mol
     if (st == BS_OK) {
         fill_graph(&c);
         fill_rings(&c);
+        for (uint32_t i = 0; i < found; i++)
+            bs_mol__features(c.out[i]);
         *pieces = c.out;
         *count = (int)found;
     }

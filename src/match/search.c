@@ -99,8 +99,8 @@ void bs_search__frame(const bs_search *s, const bs_order *order, uint32_t anchor
 {
     f->part = &s->pattern->parts[0];
     f->order = order ? order : &f->part->order;
-    f->placed = s->placed;
-    f->iter = s->iter;
+    f->placed = s->placed + f->part->slot;
+    f->iter = s->iter + f->part->slot;
     f->anchor = anchor;
     f->depth = 0;
     f->iter[0] = 0;
