@@ -1,4 +1,4 @@
-/* Knuth's algorithm with a lazy binary heap, and settling again where costs are not superior. */
+/* Knuth's algorithm with a heap that is cleaned late, and settling again where costs are not superior. */
 #include "search/cheapest.h"
 
 #include <math.h>
@@ -61,48 +61,8 @@ void bs_cheapest__free(bs_cheapest *work)
     bs_gate_free(gate, work->only, n * sizeof *work->only);
     bs_gate_free(gate, work->barred, graph->step_count * sizeof *work->barred);
     bs_gate_free(gate, work->no_buy, n * sizeof *work->no_buy);
-    bs_gate_free(gate, work->heap, work->heap_room * sizeof *work->heap);
+    bs_heap__free(&work->heap, graph->cx);
     *work = (bs_cheapest){.graph = NULL};
-}
-
-/* Cheaper first; among equals the molecule that was added first. */
-static bool before(bs_cheapest_entry a, bs_cheapest_entry b)
-{
-    return a.value != b.value ? a.value < b.value : a.mol < b.mol;
-}
-
-static bs_status push(bs_cheapest *work, double value, uint32_t mol)
-{
-    bs_cheapest_entry entry = {value, mol};
-    size_t at = work->heap_count;
-    bs_status st = bs_graph__reserve(work->graph->cx, &work->heap, &work->heap_room, at + 1,
-                                     sizeof *work->heap);
-
-    if (st != BS_OK)
-        return st;
-    work->heap_count++;
-    for (; at > 0 && before(entry, work->heap[(at - 1) / 2]); at = (at - 1) / 2)
-        work->heap[at] = work->heap[(at - 1) / 2];
-    work->heap[at] = entry;
-    return BS_OK;
-}
-
-static bs_cheapest_entry pop(bs_cheapest *work)
-{
-    bs_cheapest_entry top = work->heap[0], last = work->heap[--work->heap_count];
-    size_t at = 0, child;
-
-    while ((child = 2 * at + 1) < work->heap_count) {
-        if (child + 1 < work->heap_count && before(work->heap[child + 1], work->heap[child]))
-            child++;
-        if (!before(work->heap[child], last))
-            break;
-        work->heap[at] = work->heap[child];
-        at = child;
-    }
-    if (work->heap_count > 0)
-        work->heap[at] = last;
-    return top;
 }
 
 /* Offers a molecule a new choice; it is taken if it is cheaper. */
@@ -115,7 +75,7 @@ static bs_status improve(bs_cheapest *work, uint32_t mol, double value, uint32_t
         return BS_OK;
     work->value[mol] = value;
     work->choice[mol] = choice;
-    return push(work, value, mol);
+    return bs_heap__push(&work->heap, work->graph->cx, value, mol);
 }
 
 /* Whether the bars leave this way open. */
@@ -147,7 +107,7 @@ static bs_status start(bs_cheapest *work, const double *leaf)
     const bs_graph *graph = work->graph;
     bs_status st = BS_OK;
 
-    work->heap_count = 0;
+    work->heap.count = 0;
     work->converged = true;
     work->unit = bs_graph__is_superior(graph, work->mode) ? 0 : least_number(graph);
     memset(work->settled, 0, graph->mol_count * sizeof *work->settled);
@@ -198,17 +158,17 @@ bs_status bs_cheapest__run(bs_cheapest *work, const double *leaf, uint32_t targe
     double budget = MOST_ROUNDS * ((double)graph->mol_count + 16);
     bs_status st = start(work, leaf);
 
-    while (st == BS_OK && work->heap_count > 0) {
-        bs_cheapest_entry top = pop(work);
+    while (st == BS_OK && work->heap.count > 0) {
+        bs_heap_entry top = bs_heap__pop(&work->heap);
 
-        if (top.value > work->value[top.mol] || (superior && work->settled[top.mol]))
+        if (top.key > work->value[top.item] || (superior && work->settled[top.item]))
             continue; /* it became cheaper after this entry was made */
         if (budget-- <= 0) {
             work->converged = false;
             break;
         }
-        st = spread(work, top.mol);
-        if (superior && top.mol == target)
+        st = spread(work, top.item);
+        if (superior && top.item == target)
             break;
     }
     return st;

@@ -12,11 +12,7 @@
 #define SEARCH_CHEAPEST_H
 
 #include "search/graph.h"
-
-typedef struct bs_cheapest_entry {
-    double value;
-    uint32_t mol;
-} bs_cheapest_entry;
+#include "search/heap.h"
 
 /* Working room and result; made once for a graph that no longer grows, and used again. */
 typedef struct bs_cheapest {
@@ -30,8 +26,7 @@ typedef struct bs_cheapest {
     uint32_t *only; /* by molecule: BS_GRAPH_NONE, or the only step or BS_GRAPH_BUY allowed */
     bool *barred;   /* by step */
     bool *no_buy;   /* by molecule */
-    bs_cheapest_entry *heap;
-    size_t heap_count, heap_room;
+    bs_heap heap;
     double unit; /* changes of a small part of it do not count */
     bool converged; /* false if the bound on settling again was hit */
 } bs_cheapest;

@@ -6,11 +6,6 @@
 #include <math.h>
 #include <stdlib.h>
 
-typedef struct entry {
-    double key;
-    uint32_t mol;
-} entry;
-
 /* The top-down half: the cheapest route through each molecule. */
 typedef struct look {
     bs_explore *x;
@@ -19,8 +14,7 @@ typedef struct look {
     double *through; /* cost of the cheapest route through the molecule */
     double *moles;   /* of it that this route needs for a mole of target */
     bool *done;
-    entry *heap;
-    size_t heap_count, heap_room;
+    bs_heap heap;
 } look;
 
 static bool is_open(const bs_explore *x, uint32_t mol)
@@ -69,42 +63,9 @@ static bs_status find_depths(bs_explore *x)
 
 /* ---- Through ------------------------------------------------------------------------------- */
 
-static bool before(entry a, entry b)
+static bs_status push(look *l, double key, uint32_t mol)
 {
-    return a.key != b.key ? a.key < b.key : a.mol < b.mol;
-}
-
-static bs_status push(look *l, entry e)
-{
-    size_t at = l->heap_count;
-    bs_status st =
-        bs_graph__reserve(l->x->cx, &l->heap, &l->heap_room, at + 1, sizeof *l->heap);
-
-    if (st != BS_OK)
-        return st;
-    l->heap_count++;
-    for (; at > 0 && before(e, l->heap[(at - 1) / 2]); at = (at - 1) / 2)
-        l->heap[at] = l->heap[(at - 1) / 2];
-    l->heap[at] = e;
-    return BS_OK;
-}
-
-static entry pop(look *l)
-{
-    entry top = l->heap[0], last = l->heap[--l->heap_count];
-    size_t at = 0, child;
-
-    while ((child = 2 * at + 1) < l->heap_count) {
-        if (child + 1 < l->heap_count && before(l->heap[child + 1], l->heap[child]))
-            child++;
-        if (!before(l->heap[child], last))
-            break;
-        l->heap[at] = l->heap[child];
-        at = child;
-    }
-    if (l->heap_count > 0)
-        l->heap[at] = last;
-    return top;
+    return bs_heap__push(&l->heap, l->x->cx, key, mol);
 }
 
 /* Passes the best way down to `mol` on to what its ways need. */
@@ -129,7 +90,7 @@ static bs_status pass_down(look *l, uint32_t mol)
             l->moles[need] = l->moles[mol];
             if (l->x->mode == BS_COST_PER_MOLE)
                 l->moles[need] *= graph->uses[use].equivalents / way->yield;
-            st = push(l, (entry){key, need});
+            st = push(l, key, need);
         }
     }
     return st;
@@ -143,14 +104,14 @@ static bs_status find_through(look *l)
         return BS_OK;
     l->through[0] = l->work.value[0];
     l->moles[0] = 1;
-    st = push(l, (entry){l->through[0], 0});
-    while (st == BS_OK && l->heap_count > 0) {
-        entry top = pop(l);
+    st = push(l, l->through[0], 0);
+    while (st == BS_OK && l->heap.count > 0) {
+        bs_heap_entry top = bs_heap__pop(&l->heap);
 
-        if (l->done[top.mol])
+        if (l->done[top.item])
             continue;
-        l->done[top.mol] = true;
-        st = pass_down(l, top.mol);
+        l->done[top.item] = true;
+        st = pass_down(l, top.item);
     }
     return st;
 }
@@ -159,11 +120,11 @@ static bs_status find_through(look *l)
 
 static int by_key(const void *a, const void *b)
 {
-    const entry *x = a, *y = b;
+    const bs_heap_entry *x = a, *y = b;
 
     if (x->key != y->key)
         return x->key < y->key ? -1 : 1;
-    return (x->mol > y->mol) - (x->mol < y->mol);
+    return (x->item > y->item) - (x->item < y->item);
 }
 
 /*
@@ -174,7 +135,7 @@ static bs_status pick(look *l, bs_arena *home, bs_frontier *out)
 {
     bs_explore *x = l->x;
     bs_arena *scratch = &x->cx->scratch;
-    entry *open;
+    bs_heap_entry *open;
     bs_status st = bs_new(x->cx, scratch, x->graph.mol_count, &open);
 
     if (st != BS_OK)
@@ -191,7 +152,7 @@ static bs_status pick(look *l, bs_arena *home, bs_frontier *out)
         }
         if (isfinite(x->graph.mols[m].price))
             key += l->moles[m] * fmax(0, node->guess - x->graph.mols[m].price);
-        open[out->open++] = (entry){node->urgent ? -1 : key, m};
+        open[out->open++] = (bs_heap_entry){node->urgent ? -1 : key, m};
     }
     qsort(open, out->open, sizeof *open, by_key);
     out->picked_count = x->limits.batch;
@@ -200,7 +161,7 @@ static bs_status pick(look *l, bs_arena *home, bs_frontier *out)
     if ((st = bs_new(x->cx, home, out->picked_count, &out->picked)) != BS_OK)
         return st;
     for (int i = 0; i < out->picked_count; i++)
-        out->picked[i] = open[i].mol;
+        out->picked[i] = open[i].item;
     return BS_OK;
 }
 
@@ -223,7 +184,7 @@ static bs_status take_room(look *l)
 static void drop_room(look *l)
 {
     bs_cheapest__free(&l->work);
-    bs_gate_free(l->x->cx->gate, l->heap, l->heap_room * sizeof *l->heap);
+    bs_heap__free(&l->heap, l->x->cx);
 }
 
 bs_status bs_frontier__look(bs_explore *x, bs_arena *home, bs_frontier *out)
@@ -275,7 +236,7 @@ static bs_status pass_up(look *l, uint32_t mol)
         if (!(cost + more < l->through[product]))
             continue;
         l->through[product] = cost + more;
-        st = push(l, (entry){cost + more, product});
+        st = push(l, cost + more, product);
     }
     return st;
 }
@@ -302,14 +263,14 @@ bs_status bs_frontier__bound(bs_explore *x, double *bound)
         if (!is_open(x, m))
             continue;
         l.through[m] = x->limits.least_step;
-        st = push(&l, (entry){l.through[m], m});
+        st = push(&l, l.through[m], m);
     }
-    while (st == BS_OK && l.heap_count > 0) {
-        entry top = pop(&l);
+    while (st == BS_OK && l.heap.count > 0) {
+        bs_heap_entry top = bs_heap__pop(&l.heap);
 
-        if (top.key == l.through[top.mol] && !l.done[top.mol]) {
-            l.done[top.mol] = true;
-            st = pass_up(&l, top.mol);
+        if (top.key == l.through[top.item] && !l.done[top.item]) {
+            l.done[top.item] = true;
+            st = pass_up(&l, top.item);
         }
     }
     *bound = l.through[0];

@@ -41,12 +41,12 @@ struct bs_kbest {
     problem *problems;
     uint32_t *bars; /* steps or BS_GRAPH_BUY */
     decision *decisions;
-    uint32_t *heap; /* of problems */
+    bs_heap heap; /* of problems */
     uint32_t *seen; /* by molecule: the last walk that met it */
     uint32_t *ways; /* of the route given last */
     uint32_t walk;
-    size_t problem_count, bar_count, decision_count, heap_count;
-    size_t problem_room, bar_room, decision_room, heap_room, ways_room, origin_room, seen_room;
+    size_t problem_count, bar_count, decision_count;
+    size_t problem_room, bar_room, decision_room, ways_room, origin_room, seen_room;
     long solves;
     bool cut;
 };
@@ -175,48 +175,12 @@ done:
     return st;
 }
 
-/* ---- The heap of problems ------------------------------------------------------------------ */
+/* ---- Problems -------------------------------------------------------------------------------- */
 
-/* Lower bound first; a solved problem before an open one; the older first. */
-static bool before(const bs_kbest *k, uint32_t a, uint32_t b)
+/* Puts a problem into the heap: lower bound first, the older first among equals. */
+static bs_status push(bs_kbest *k, uint32_t index)
 {
-    const problem *p = &k->problems[a], *q = &k->problems[b];
-
-    if (p->bound != q->bound)
-        return p->bound < q->bound;
-    return a < b;
-}
-
-static bs_status push(bs_kbest *k, uint32_t entry)
-{
-    size_t at = k->heap_count;
-    bs_status st = bs_graph__reserve(k->cx, &k->heap, &k->heap_room, at + 1, sizeof *k->heap);
-
-    if (st != BS_OK)
-        return st;
-    k->heap_count++;
-    for (; at > 0 && before(k, entry, k->heap[(at - 1) / 2]); at = (at - 1) / 2)
-        k->heap[at] = k->heap[(at - 1) / 2];
-    k->heap[at] = entry;
-    return BS_OK;
-}
-
-static uint32_t pop(bs_kbest *k)
-{
-    uint32_t top = k->heap[0], last = k->heap[--k->heap_count];
-    size_t at = 0, child;
-
-    while ((child = 2 * at + 1) < k->heap_count) {
-        if (child + 1 < k->heap_count && before(k, k->heap[child + 1], k->heap[child]))
-            child++;
-        if (!before(k, k->heap[child], last))
-            break;
-        k->heap[at] = k->heap[child];
-        at = child;
-    }
-    if (k->heap_count > 0)
-        k->heap[at] = last;
-    return top;
+    return bs_heap__push(&k->heap, k->cx, k->problems[index].bound, index);
 }
 
 static bs_status add_problem(bs_kbest *k, problem p)
@@ -431,15 +395,15 @@ bs_status bs_kbest__next(bs_kbest *k, bool *found, bs_kbest_route *route)
     bs_status st = BS_OK;
 
     *found = false;
-    while (st == BS_OK && k->heap_count > 0 && !k->cut) {
+    while (st == BS_OK && k->heap.count > 0 && !k->cut) {
         uint32_t index;
 
-        index = k->heap[0];
+        index = k->heap.entries[0].item;
         if (atomic_load(k->cx->stop) || (k->solves <= 0 && !k->problems[index].solved)) {
             k->cut = true;
             break;
         }
-        pop(k);
+        bs_heap__pop(&k->heap);
         if (!k->problems[index].solved) {
             st = solve(k, index);
             continue;
@@ -518,7 +482,7 @@ void bs_kbest__free(bs_kbest *k)
     bs_gate_free(gate, k->problems, k->problem_room * sizeof *k->problems);
     bs_gate_free(gate, k->bars, k->bar_room * sizeof *k->bars);
     bs_gate_free(gate, k->decisions, k->decision_room * sizeof *k->decisions);
-    bs_gate_free(gate, k->heap, k->heap_room * sizeof *k->heap);
+    bs_heap__free(&k->heap, k->cx);
     bs_gate_free(gate, k->seen, k->seen_room * sizeof *k->seen);
     bs_gate_free(gate, k->ways, k->ways_room * sizeof *k->ways);
     bs_gate_free(gate, k, sizeof *k);
