@@ -175,8 +175,9 @@ typedef struct bs_rule_hooks {
 
 /*
  * One use of a transform on a product. Precursors are distinct compounds, each with its canonical
- * SMILES and its moles a mole of product, in the order of their SMILES. `rivals` are the other
- * product sets of the forward run.
+ * SMILES and its moles a mole of product, in the order of their SMILES. A salt is one compound.
+ * `rivals` are the other product sets of the forward run. With `stereo_open` the reaction does not
+ * settle stereo that the product states (or settles some that it leaves open).
  */
 typedef struct bs_step {
     int transform;
@@ -186,6 +187,7 @@ typedef struct bs_step {
     int precursor_count;
     bs_site site;
     bs_outcomes rivals;
+    bool stereo_open;
 } bs_step;
 
 typedef struct bs_steps {

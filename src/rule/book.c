@@ -1,0 +1,481 @@
+/* The rule book: definitions, names, and compiling them into cases. */
+#include "rule/book.h"
+
+#include <stdio.h>
+#include <stdlib.h>
+#include <string.h>
+
+bs_status bs_blame(bs_ctx *cx, bs_status status, const char *field)
+{
+    char message[BS_MESSAGE_MAX];
+    size_t used;
+
+    snprintf(message, sizeof message, "%s: ", field);
+    used = strlen(message);
+    snprintf(message + used, sizeof message - used, "%.*s", (int)(sizeof message - used - 1),
+             cx->error.message);
+    memcpy(cx->error.message, message, sizeof message);
+    return status;
+}
+
+/* ---- Life -------------------------------------------------------------------------------------- */
+
+bs_status bs_rules_new(bs_ctx *cx, bs_rules **out)
+{
+    bs_rules *rules = bs_gate_alloc(cx->gate, sizeof *rules);
+
+    *out = rules;
+    if (!rules)
+        return bs_fail_memory(cx);
+    rules->gate = cx->gate;
+    bs_arena_init(&rules->arena, cx->gate);
+    return BS_OK;
+}
+
+void bs_rules_free(bs_rules *rules)
+{
+    if (!rules)
+        return;
+    bs_arena_free(&rules->arena);
+    bs_gate_free(rules->gate, rules, sizeof *rules);
+}
+
+/* ---- Names --------------------------------------------------------------------------------------- */
+
+/* A name as names are compared: no case, spaces and hyphens. */
+static bs_status fold_name(bs_ctx *cx, bs_arena *home, const char *name, char **out)
+{
+    size_t length = 0;
+    bs_status st = bs_new(cx, home, strlen(name) + 1, out);
+
+    for (const char *c = name; *c && st == BS_OK; c++) {
+        if (*c == ' ' || *c == '-' || *c == '\t')
+            continue;
+        (*out)[length++] = (char)(*c >= 'A' && *c <= 'Z' ? *c + ('a' - 'A') : *c);
+    }
+    return st;
+}
+
+static const bs_synthon *find_synthon(const bs_rules *rules, const char *key)
+{
+    for (int i = 0; i < rules->synthon_count; i++) {
+        if (strcmp(rules->synthons[i]->key, key) == 0)
+            return rules->synthons[i];
+    }
+    return NULL;
+}
+
+static int find_key(const bs_rules *rules, const char *key)
+{
+    for (int i = 0; i < rules->transform_count; i++) {
+        const bs_transform *tr = rules->transforms[i];
+
+        for (int k = 0; k < tr->key_count; k++) {
+            if (strcmp(tr->keys[k], key) == 0)
+                return i;
+        }
+    }
+    return -1;
+}
+
+/* The next byte of a name that counts, folded; 0 at the end. */
+static int next_byte(const char **name)
+{
+    while (**name == ' ' || **name == '-' || **name == '\t')
+        (*name)++;
+    if (**name == 0)
+        return 0;
+    return **name >= 'A' && **name <= 'Z' ? *(*name)++ + ('a' - 'A') : *(*name)++;
+}
+
+int bs_rules_find(const bs_rules *rules, const char *name)
+{
+    for (int i = 0; i < rules->transform_count; i++) {
+        const bs_transform *tr = rules->transforms[i];
+
+        for (int k = 0; k < tr->key_count; k++) {
+            const char *a = name, *b = tr->keys[k];
+            int x, y;
+
+            do {
+                x = next_byte(&a);
+                y = next_byte(&b);
+            } while (x == y && x != 0);
+            if (x == y)
+                return i;
+        }
+    }
+    return -1;
+}
+
+int bs_rules_count(const bs_rules *rules)
+{
+    return rules->transform_count;
+}
+
+const bs_transform_def *bs_rules_transform(const bs_rules *rules, int index)
+{
+    return &rules->transforms[index]->def;
+}
+
+/* ---- Copies of definitions ----------------------------------------------------------------------- */
+
+static bs_status copy_string(bs_ctx *cx, bs_arena *home, const char **string)
+{
+    char *copy;
+    bs_status st;
+
+    if (!*string)
+        return BS_OK;
+    if ((st = bs_copy_text(cx, home, *string, strlen(*string), &copy)) == BS_OK)
+        *string = copy;
+    return st;
+}
+
+static bs_status copy_words(bs_ctx *cx, bs_arena *home, bs_words *words)
+{
+    const char **items;
+    bs_status st;
+
+    if (words->count <= 0 || !words->items) {
+        *words = (bs_words){0};
+        return BS_OK;
+    }
+    if ((st = bs_new(cx, home, words->count, &items)) != BS_OK)
+        return st;
+    for (int i = 0; i < words->count && st == BS_OK; i++) {
+        items[i] = words->items[i];
+        st = copy_string(cx, home, &items[i]);
+    }
+    words->items = items;
+    return st;
+}
+
+static bs_status copy_transform(bs_ctx *cx, bs_arena *home, bs_transform_def *def)
+{
+    const char **strings[] = {&def->name,   &def->target,     &def->from,   &def->acceptor,
+                              &def->donor,  &def->conditions, &def->recipe, &def->source,
+                              &def->rxno,   &def->pack,       &def->origin};
+    bs_words *lists[] = {&def->also,     &def->spares,   &def->also_attacks,
+                         &def->cautions, &def->reagents};
+    bs_status st = BS_OK;
+
+    for (size_t i = 0; i < sizeof strings / sizeof *strings && st == BS_OK; i++)
+        st = copy_string(cx, home, strings[i]);
+    for (size_t i = 0; i < sizeof lists / sizeof *lists && st == BS_OK; i++)
+        st = copy_words(cx, home, lists[i]);
+    return st;
+}
+
+/* ---- Synthons ------------------------------------------------------------------------------------- */
+
+static bs_status copy_equivalents(bs_ctx *cx, bs_arena *home, bs_synthon_def *def)
+{
+    bs_equivalent_def *items;
+    bs_status st = bs_new(cx, home, def->equivalent_count + 1, &items);
+
+    for (int i = 0; i < def->equivalent_count && st == BS_OK; i++) {
+        items[i] = def->equivalents[i];
+        if ((items[i].attach != NULL) == (items[i].rewrite != NULL))
+            return bs_fail(cx, BS_EVALUE,
+                           "equivalents: number %d needs either attach or rewrite", i + 1);
+        if ((st = copy_string(cx, home, &items[i].attach)) == BS_OK &&
+            (st = copy_string(cx, home, &items[i].rewrite)) == BS_OK)
+            st = copy_string(cx, home, &items[i].name);
+    }
+    def->equivalents = items;
+    return st;
+}
+
+/* Compiles every equivalent once against a bare bond, so that mistakes are found here. */
+static bs_status try_synthon(bs_ctx *cx, bs_arena *home, const bs_synthon *synthon)
+{
+    static const bs_equivalent_def hydrogen = {.attach = "[H]"};
+    bs_synthon other = {.def = {.equivalents = &hydrogen, .equivalent_count = 1}};
+    bs_transform_def def = {.cut = {1, 2}, .acceptor_map = 1, .donor_map = 2};
+    bs_query *target;
+    bs_case *cases;
+    int count;
+    bs_status st = bs_query_read(cx, home, "[*:1]~[*:2]", 11, 0, &target);
+
+    if (st != BS_OK)
+        return st;
+    return bs_compose__cut(cx, home, target, &def, synthon, &other, &cases, &count);
+}
+
+static bs_status make_synthon(bs_ctx *cx, bs_rules *rules, const bs_synthon_def *def,
+                              bs_synthon **out)
+{
+    bs_synthon *synthon;
+    bs_mark trial;
+    bs_status st;
+
+    if (!def->name || !*def->name)
+        return bs_fail(cx, BS_EVALUE, "a synthon needs a name");
+    if (def->equivalent_count < 1)
+        return bs_fail(cx, BS_EVALUE, "equivalents: expected at least one");
+    if ((st = bs_new(cx, &rules->arena, 1, out)) != BS_OK)
+        return st;
+    synthon = *out;
+    synthon->def = *def;
+    if ((st = fold_name(cx, &rules->arena, def->name, &synthon->key)) != BS_OK)
+        return st;
+    if (find_synthon(rules, synthon->key))
+        return bs_fail(cx, BS_EVALUE, "the synthon \"%s\" is there already", def->name);
+    if ((st = copy_string(cx, &rules->arena, &synthon->def.name)) != BS_OK ||
+        (st = copy_string(cx, &rules->arena, &synthon->def.origin)) != BS_OK ||
+        (st = copy_equivalents(cx, &rules->arena, &synthon->def)) != BS_OK)
+        return st;
+    trial = bs_arena_mark(&rules->arena);
+    st = try_synthon(cx, &rules->arena, synthon);
+    if (st == BS_ESYNTAX || st == BS_EVALUE) {
+        /* The trial blames a side of its cut; the synthon's own field says it better. */
+        char *colon = strstr(cx->error.message, "acceptor: ");
+
+        if (colon == cx->error.message)
+            memmove(colon, colon + 10, strlen(colon + 10) + 1);
+        bs_blame(cx, st, "equivalents");
+    }
+    bs_arena_rewind(&rules->arena, trial);
+    return st;
+}
+
+/* Room for one more pointer in a list of the book; what was there moves. */
+static bs_status make_room(bs_ctx *cx, bs_rules *rules, void *list, int count, int *room)
+{
+    int wanted = *room ? *room * 2 : 64;
+    void **old;
+    void **wide;
+    bs_status st;
+
+    if (count < *room)
+        return BS_OK;
+    if ((st = bs_new(cx, &rules->arena, wanted, &wide)) != BS_OK)
+        return st;
+    memcpy(&old, list, sizeof old);
+    if (count > 0)
+        memcpy(wide, old, (size_t)count * sizeof *wide);
+    memcpy(list, &wide, sizeof wide);
+    *room = wanted;
+    return BS_OK;
+}
+
+bs_status bs_rules_add_synthon(bs_ctx *cx, bs_rules *rules, const bs_synthon_def *def)
+{
+    bs_mark temp = bs_arena_mark(&cx->scratch);
+    bs_synthon *synthon;
+    bs_mark kept;
+    bs_status st = make_room(cx, rules, &rules->synthons, rules->synthon_count,
+                             &rules->synthon_room);
+
+    if (st != BS_OK)
+        return st;
+    kept = bs_arena_mark(&rules->arena);
+    if ((st = make_synthon(cx, rules, def, &synthon)) == BS_OK)
+        rules->synthons[rules->synthon_count++] = synthon;
+    else
+        bs_arena_rewind(&rules->arena, kept);
+    bs_arena_rewind(&cx->scratch, temp);
+    return st;
+}
+
+/* ---- Transforms ----------------------------------------------------------------------------------- */
+
+bs_status bs_case__make(bs_ctx *cx, bs_arena *home, const bs_query *target, const bs_query *source,
+                        bs_case *out)
+{
+    bs_status st;
+
+    *out = (bs_case){0};
+    if ((st = bs_side__read(cx, home, target, &out->target)) != BS_OK ||
+        (st = bs_side__compile(cx, home, &out->target)) != BS_OK)
+        return bs_blame(cx, st, "target");
+    if ((st = bs_side__read(cx, home, source, &out->source)) != BS_OK ||
+        (st = bs_side__compile(cx, home, &out->source)) != BS_OK)
+        return bs_blame(cx, st, "from");
+    st = bs_reading__make(cx, home, &out->target, &out->source, false, &out->back);
+    if (st != BS_OK)
+        return bs_blame(cx, st, "from");
+    st = bs_reading__make(cx, home, &out->source, &out->target, true, &out->forth);
+    if (st != BS_OK)
+        return bs_blame(cx, st, "target");
+    if ((st = bs_new(cx, home, out->source.part_count + 1, &out->equivalents)) != BS_OK)
+        return st;
+    for (int i = 0; i < out->source.part_count; i++)
+        out->equivalents[i] = 1;
+    return BS_OK;
+}
+
+/* Every mapped atom of the precursors has to be one of the target. */
+static bs_status check_maps(bs_ctx *cx, const bs_case *kase)
+{
+    for (int i = 0; i < kase->source.atom_count; i++) {
+        int map = kase->source.atoms[i].map;
+
+        if (map > 0 && bs_side__find(&kase->target, map) < 0)
+            return bs_fail_at(cx, BS_EVALUE, kase->source.query->atoms[i].offset,
+                              "from: map number %d is not in the target", map);
+    }
+    return BS_OK;
+}
+
+static bs_status compile_from(bs_ctx *cx, bs_arena *home, const bs_query *target, bs_transform *tr)
+{
+    const char *from = tr->def.from;
+    bs_query *source;
+    bs_status st = bs_query_read(cx, home, from, strlen(from), 0, &source);
+
+    if (st != BS_OK)
+        return bs_blame(cx, st, "from");
+    if ((st = bs_new(cx, home, 1, &tr->cases)) != BS_OK ||
+        (st = bs_case__make(cx, home, target, source, tr->cases)) != BS_OK)
+        return st;
+    tr->case_count = 1;
+    return check_maps(cx, tr->cases);
+}
+
+static bs_status named_synthon(bs_ctx *cx, const bs_rules *rules, const char *name,
+                               bs_synthon_kind kind, const char *field, const bs_synthon **out)
+{
+    bs_mark temp = bs_arena_mark(&cx->scratch);
+    char *key;
+    bs_status st;
+
+    if (!name)
+        return bs_fail(cx, BS_EVALUE, "%s: expected the name of a synthon", field);
+    if ((st = fold_name(cx, &cx->scratch, name, &key)) != BS_OK)
+        return st;
+    *out = find_synthon(rules, key);
+    bs_arena_rewind(&cx->scratch, temp);
+    if (!*out)
+        return bs_fail(cx, BS_ENOTFOUND, "%s: there is no synthon \"%s\"", field, name);
+    if ((*out)->def.kind != kind)
+        return bs_fail(cx, BS_EVALUE, "%s: the synthon \"%s\" is a%s", field, name,
+                       kind == BS_DONOR ? "n acceptor" : " donor");
+    return BS_OK;
+}
+
+static bs_status compile_cut(bs_ctx *cx, bs_rules *rules, const bs_query *target, bs_transform *tr)
+{
+    const bs_synthon *acceptor, *donor;
+    bs_status st;
+
+    st = named_synthon(cx, rules, tr->def.acceptor, BS_ACCEPTOR, "acceptor", &acceptor);
+    if (st == BS_OK)
+        st = named_synthon(cx, rules, tr->def.donor, BS_DONOR, "donor", &donor);
+    if (st != BS_OK)
+        return st;
+    return bs_compose__cut(cx, &rules->arena, target, &tr->def, acceptor, donor, &tr->cases,
+                           &tr->case_count);
+}
+
+/* The author's map numbers in ascending order. */
+static bs_status list_maps(bs_ctx *cx, bs_arena *home, const bs_query *target, bs_transform *tr)
+{
+    bs_status st;
+
+    if ((st = bs_new(cx, home, target->atom_count + 1, &tr->maps)) != BS_OK ||
+        (st = bs_new(cx, home, target->atom_count + 1, &tr->map_atoms)) != BS_OK)
+        return st;
+    for (int i = 0; i < target->atom_count; i++) {
+        int map = target->atoms[i].map, at = tr->map_count;
+
+        if (map == 0)
+            continue;
+        if (map >= BS_OWN_MAPS)
+            return bs_fail_at(cx, BS_EVALUE, target->atoms[i].offset,
+                              "target: map numbers go up to %d", BS_OWN_MAPS - 1);
+        for (; at > 0 && tr->maps[at - 1] > map; at--) {
+            tr->maps[at] = tr->maps[at - 1];
+            tr->map_atoms[at] = tr->map_atoms[at - 1];
+        }
+        tr->maps[at] = map;
+        tr->map_atoms[at] = i;
+        tr->map_count++;
+    }
+    return BS_OK;
+}
+
+static bs_status compile(bs_ctx *cx, bs_rules *rules, bs_transform *tr)
+{
+    const char *text = tr->def.target;
+    bs_query *target;
+    bs_status st;
+
+    if (!text)
+        return bs_fail(cx, BS_EVALUE, "target: expected SMARTS");
+    if ((tr->def.from != NULL) == (tr->def.cut[0] != 0))
+        return bs_fail(cx, BS_EVALUE, "a transform needs either from or cut");
+    st = bs_query_read(cx, &rules->arena, text, strlen(text), 0, &target);
+    if (st != BS_OK)
+        return bs_blame(cx, st, "target");
+    if ((st = list_maps(cx, &rules->arena, target, tr)) != BS_OK)
+        return st;
+    st = tr->def.from ? compile_from(cx, &rules->arena, target, tr)
+                      : compile_cut(cx, rules, target, tr);
+    if (st != BS_OK)
+        return st;
+    for (int i = 0; i < tr->case_count; i++) {
+        if (tr->cases[i].target.part_count != 1)
+            return bs_fail(cx, BS_EVALUE, "target: expected the pattern of one molecule");
+    }
+    return BS_OK;
+}
+
+static bs_status take_names(bs_ctx *cx, bs_rules *rules, bs_transform *tr)
+{
+    const bs_transform_def *def = &tr->def;
+    bs_status st;
+
+    if (!def->name || !*def->name)
+        return bs_fail(cx, BS_EVALUE, "a transform needs a name");
+    if ((st = bs_new(cx, &rules->arena, def->also.count + 1, &tr->keys)) != BS_OK)
+        return st;
+    for (int i = 0; i < def->also.count + 1; i++) {
+        const char *name = i == 0 ? def->name : def->also.items[i - 1];
+
+        if ((st = fold_name(cx, &rules->arena, name, &tr->keys[i])) != BS_OK)
+            return st;
+        if (find_key(rules, tr->keys[i]) >= 0)
+            return bs_fail(cx, BS_EVALUE, "the transform \"%s\" is there already", name);
+    }
+    tr->key_count = def->also.count + 1;
+    return BS_OK;
+}
+
+static bs_status make_transform(bs_ctx *cx, bs_rules *rules, const bs_transform_def *def,
+                                bs_transform **out)
+{
+    bs_status st = bs_new(cx, &rules->arena, 1, out);
+
+    if (st != BS_OK)
+        return st;
+    (*out)->def = *def;
+    if ((st = copy_transform(cx, &rules->arena, &(*out)->def)) != BS_OK ||
+        (st = take_names(cx, rules, *out)) != BS_OK)
+        return st;
+    return compile(cx, rules, *out);
+}
+
+bs_status bs_rules_add_transform(bs_ctx *cx, bs_rules *rules, const bs_transform_def *def,
+                                 int *index)
+{
+    bs_mark temp = bs_arena_mark(&cx->scratch);
+    bs_transform *transform;
+    bs_mark kept;
+    bs_status st = make_room(cx, rules, &rules->transforms, rules->transform_count,
+                             &rules->transform_room);
+
+    if (st != BS_OK)
+        return st;
+    kept = bs_arena_mark(&rules->arena);
+    if ((st = make_transform(cx, rules, def, &transform)) == BS_OK) {
+        if (index)
+            *index = rules->transform_count;
+        rules->transforms[rules->transform_count++] = transform;
+    } else {
+        bs_arena_rewind(&rules->arena, kept);
+    }
+    bs_arena_rewind(&cx->scratch, temp);
+    return st;
+}

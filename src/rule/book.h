@@ -1,0 +1,147 @@
+/*
+ * The inside of a rule book.
+ *
+ * Every transform is compiled into cases. A case is a rewriting between the target and one set of
+ * precursors: one for a transform with `from`, one for each pair of equivalents for a
+ * disconnection by synthons.
+ */
+#ifndef RULE_BOOK_H
+#define RULE_BOOK_H
+
+#include "rule/run.h"
+
+typedef struct bs_case {
+    bs_side target; /* one part */
+    bs_side source; /* the precursors */
+    bs_reading back, forth;
+    double *equivalents; /* for each part of `source` */
+} bs_case;
+
+typedef struct bs_synthon {
+    bs_synthon_def def;
+    char *key; /* the name as names are compared */
+} bs_synthon;
+
+typedef struct bs_transform {
+    bs_transform_def def;
+    char **keys; /* the name and the other names, as names are compared */
+    int key_count;
+    bs_case *cases;
+    int case_count;
+    /* The author's map numbers, ascending, and the atoms of the target that carry them. */
+    int *maps;
+    int *map_atoms;
+    int map_count;
+} bs_transform;
+
+struct bs_rules {
+    bs_gate *gate;
+    bs_arena arena;
+    bs_synthon **synthons;
+    bs_transform **transforms;
+    int synthon_count, synthon_room;
+    int transform_count, transform_room;
+};
+
+/* Map numbers from here on are the compiler's; the author's are smaller. */
+enum { BS_OWN_MAPS = 1000 };
+
+/* Reads both sides of a reaction SMARTS; `*right_at` is the offset of the right one. */
+bs_status bs_rewrite__read_sides(bs_ctx *cx, bs_arena *home, const char *text, size_t length,
+                                 bs_query **left, bs_query **right, size_t *right_at);
+
+/* Makes a case of two queries, which must live as long. */
+bs_status bs_case__make(bs_ctx *cx, bs_arena *home, const bs_query *target, const bs_query *source,
+                        bs_case *out);
+
+/*
+ * Compiles a disconnection: all cases for the equivalents of both synthons, those of the acceptor
+ * in the outer loop.
+ *
+ *   errors  as bs_rules_add_transform(), with the field in the message
+ */
+bs_status bs_compose__cut(bs_ctx *cx, bs_arena *home, const bs_query *target,
+                          const bs_transform_def *def, const bs_synthon *acceptor,
+                          const bs_synthon *donor, bs_case **cases, int *count);
+
+/*
+ * Where the atoms of a small query lie in a target: `ours` is bound to `anchor`; the others are
+ * looked for among the neighbours, not across the bond to `barred`. Each result has for each atom
+ * of the query the atom of the target, or -1 where the target names no such atom.
+ */
+bs_status bs_overlay__find(bs_ctx *cx, bs_arena *home, const bs_query *query, int ours,
+                           const bs_query *target, int anchor, int barred, int ***out, int *count);
+
+/* Puts "field: " before the message of the error at hand and returns its code. */
+bs_status bs_blame(bs_ctx *cx, bs_status status, const char *field);
+
+/* ---- Pieces of molecules ------------------------------------------------------------------- */
+
+/* A connected piece; atoms[i] is the atom of the whole that atom i was. */
+typedef struct bs_piece {
+    const bs_mol *mol;
+    uint32_t *atoms;
+} bs_piece;
+
+bs_status bs_piece__split(bs_ctx *cx, bs_arena *home, const bs_mol *mol, bs_piece **out,
+                          int *count);
+
+/* ---- Running rules --------------------------------------------------------------------------- */
+
+/* The atoms of a product under the author's map numbers; `atom_of[k]` for atom k of the target. */
+bs_status bs_site__fill(bs_ctx *cx, bs_arena *home, const bs_transform *tr, const uint32_t *atom_of,
+                        bs_site *out);
+
+/* One set of products of a forward run. */
+typedef struct bs_made {
+    bs_outcome outcome;
+    bs_spot *spots; /* of the atoms of the target */
+    bool expected;
+    double score;
+} bs_made;
+
+typedef struct bs_made_list {
+    bs_made *items;
+    int count, room;
+} bs_made_list;
+
+/* A forward run of one transform, over as many cases and reactants as needed. */
+typedef struct bs_forward {
+    const bs_transform *tr;
+    const bs_rule_hooks *hooks; /* NULL: nothing is judged */
+    bool judge;                 /* find out which products are expected, and their scores */
+    bs_arena *home;
+    bs_seen seen;
+    bs_made_list made;
+    /* of the run at hand */
+    const bs_case *kase;
+    const uint32_t *reactant;
+} bs_forward;
+
+/* Starts and ends a forward run. */
+void bs_forward__init(bs_forward *run, bs_ctx *cx, bs_arena *home, const bs_transform *tr,
+                      const bs_rule_hooks *hooks, bool judge);
+void bs_forward__free(bs_forward *run);
+
+/* Runs one case on one molecule a part; new product sets are added. */
+bs_status bs_forward__run(bs_ctx *cx, bs_forward *run, const bs_case *kase,
+                          const bs_mol *const *mols, const uint32_t *reactant);
+
+/* What a forward check found. */
+typedef struct bs_verdict {
+    bool passed;
+    bool stereo_open; /* the reaction leaves open what the product says about stereo */
+    bs_outcomes rivals;
+} bs_verdict;
+
+/*
+ * Runs the precursors of one case forwards and looks for the product.
+ *
+ *   parts   one molecule for each part of the case's source
+ *   where   the atom of the product for each atom of the target
+ */
+bs_status bs_check__step(bs_ctx *cx, bs_arena *home, const bs_transform *tr, const bs_case *kase,
+                         bs_mol *const *parts, char *const *smiles, const bs_mol *product,
+                         const char *product_smiles, const uint32_t *where, bs_verdict *out);
+
+#endif

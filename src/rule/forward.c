@@ -1,0 +1,162 @@
+/*
+ * Running a transform forwards: the bonds of the target are made wherever the precursors fit, and
+ * the tests of the target tell afterwards which products are the wanted ones.
+ */
+#include <string.h>
+
+#include "rule/book.h"
+
+enum { MAX_PLACES = 400, MAX_MADE = 1000, MAX_STEPS = 1000000 };
+
+void bs_forward__init(bs_forward *run, bs_ctx *cx, bs_arena *home, const bs_transform *tr,
+                      const bs_rule_hooks *hooks, bool judge)
+{
+    *run = (bs_forward){.tr = tr, .hooks = hooks, .judge = judge, .home = home};
+    bs_seen__init(&run->seen, cx);
+}
+
+void bs_forward__free(bs_forward *run)
+{
+    bs_seen__free(&run->seen);
+}
+
+bs_status bs_site__fill(bs_ctx *cx, bs_arena *home, const bs_transform *tr, const uint32_t *atom_of,
+                        bs_site *out)
+{
+    uint32_t *atoms;
+    bs_status st = bs_new(cx, home, tr->map_count + 1, &atoms);
+
+    for (int i = 0; i < tr->map_count && st == BS_OK; i++)
+        atoms[i] = atom_of[tr->map_atoms[i]];
+    *out = (bs_site){tr->maps, atoms, tr->map_count};
+    return st;
+}
+
+/* ---- Judging -------------------------------------------------------------------------------- */
+
+/* Whether every atom and bond of the target passes its tests where the reaction has put it. */
+static bs_status target_passes(bs_ctx *cx, const bs_case *kase, const bs_mol *product,
+                               const bs_spot *spots, bool *passes)
+{
+    const bs_side *target = &kase->target;
+    const bs_pattern *pattern = target->patterns[0];
+    bs_status st;
+
+    *passes = false;
+    for (int i = 0; i < target->atom_count; i++) {
+        bool yes = false;
+
+        if (spots[i].atom == BS_NOWHERE)
+            return BS_OK;
+        st = bs_pattern__atom_passes(cx, pattern, i, product, spots[i].atom, &yes);
+        if (st != BS_OK || !yes)
+            return st;
+    }
+    for (int i = 0; i < target->bond_count; i++) {
+        int bond = bs_mol_bond_between(product, (int)spots[target->bonds[i].a].atom,
+                                       (int)spots[target->bonds[i].b].atom);
+
+        if (bond < 0 || !bs_pattern__bond_passes(pattern, i, product, (uint32_t)bond))
+            return BS_OK;
+    }
+    *passes = true;
+    return BS_OK;
+}
+
+static bs_status fill_site(bs_ctx *cx, const bs_forward *run, const bs_spot *spots, bs_site *site)
+{
+    uint32_t *atom_of;
+    bs_status st = bs_new(cx, &cx->scratch, run->kase->target.atom_count + 1, &atom_of);
+
+    if (st != BS_OK)
+        return st;
+    for (int i = 0; i < run->kase->target.atom_count; i++)
+        atom_of[i] = spots[i].atom;
+    return bs_site__fill(cx, &cx->scratch, run->tr, atom_of, site);
+}
+
+static bs_status judge(bs_ctx *cx, const bs_forward *run, const bs_result *result, bool *expected,
+                       double *score)
+{
+    const bs_transform_def *def = &run->tr->def;
+    const bs_rule_hooks *hooks = run->hooks;
+    bs_mark temp = bs_arena_mark(&cx->scratch);
+    const bs_mol *product = result->products[0];
+    bs_site site;
+    bs_status st = target_passes(cx, run->kase, product, result->spots, expected);
+
+    if (st == BS_OK && hooks && (def->hook_when >= 0 || def->hook_prefer >= 0)) {
+        st = fill_site(cx, run, result->spots, &site);
+        if (st == BS_OK && *expected && hooks->when && def->hook_when >= 0)
+            st = hooks->when(hooks->payload, cx, def->hook_when, product, &site, expected);
+        if (st == BS_OK && hooks->prefer && def->hook_prefer >= 0)
+            st = hooks->prefer(hooks->payload, cx, def->hook_prefer, product, &site, score);
+    }
+    bs_arena_rewind(&cx->scratch, temp);
+    return st;
+}
+
+/* ---- Collecting ------------------------------------------------------------------------------- */
+
+static bs_status make_room(bs_ctx *cx, bs_forward *run)
+{
+    bs_made_list *list = &run->made;
+    int room = list->room ? list->room * 2 : 8;
+    bs_made *items;
+    bs_status st;
+
+    if (list->count < list->room)
+        return BS_OK;
+    if ((st = bs_new(cx, run->home, room, &items)) != BS_OK)
+        return st;
+    if (list->count > 0)
+        memcpy(items, list->items, (size_t)list->count * sizeof *items);
+    list->items = items;
+    list->room = room;
+    return BS_OK;
+}
+
+static bs_status add_made(void *payload, bs_ctx *cx, const uint32_t *where,
+                          const bs_result *result, bool *keep)
+{
+    bs_forward *run = payload;
+    bool expected = false;
+    double score = 0;
+    char **smiles;
+    bs_made *made;
+    int index;
+    bs_status st;
+
+    if (run->made.count >= MAX_MADE)
+        return BS_OK;
+    if ((st = bs_result__smiles(cx, run->home, result, &smiles)) != BS_OK ||
+        (st = bs_seen__add(cx, &run->seen, smiles, result->product_count, &index, keep)) != BS_OK)
+        return st;
+    if (!*keep && (!run->judge || run->made.items[index].expected))
+        return BS_OK;
+    if (run->judge && (st = judge(cx, run, result, &expected, &score)) != BS_OK)
+        return st;
+    if (!*keep) {
+        if (!expected)
+            return BS_OK;
+        run->made.items[index].expected = true;
+        run->made.items[index].score = score;
+        return BS_OK;
+    }
+    if ((st = make_room(cx, run)) != BS_OK)
+        return st;
+    made = &run->made.items[run->made.count++];
+    *made = (bs_made){.spots = result->spots, .expected = expected, .score = score};
+    return bs_result__outcome(cx, run->home, run->kase->forth.from, where, run->reactant, result,
+                              smiles, &made->outcome);
+}
+
+bs_status bs_forward__run(bs_ctx *cx, bs_forward *run, const bs_case *kase,
+                          const bs_mol *const *mols, const uint32_t *reactant)
+{
+    bs_run_opts opts = {.limit = MAX_PLACES, .steps = MAX_STEPS};
+
+    run->kase = kase;
+    run->reactant = reactant;
+    return bs_run__all(cx, run->home, &kase->forth, mols, &opts, add_made, run);
+}
