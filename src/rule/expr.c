@@ -3,7 +3,8 @@
 
 #include "backsaw/draft.h"
 
-static const bs_facts no_facts = {BS_UNSAID, BS_UNSAID, BS_UNSAID, BS_UNSAID, BS_UNSAID, BS_UNSAID};
+static const bs_facts no_facts = {BS_UNSAID, BS_UNSAID, BS_UNSAID, BS_UNSAID,
+                                 BS_UNSAID, BS_UNSAID, BS_UNSAID};
 static const bs_bond_facts no_bond_facts = {BS_UNSAID, BS_UNSAID, BS_UNSAID};
 
 /* In a conjunction the side that says something is heard; the first one if both do. */
@@ -49,6 +50,9 @@ static bs_facts leaf_facts(const bs_test *test)
     case BS_TEST_CHARGE:
         f.charge = test->value;
         break;
+    case BS_TEST_CONNECTIONS:
+        f.connections = test->value;
+        break;
     case BS_TEST_CHIRAL:
         f.mark = test->value > 2 ? test->value - 2 : test->value;
         break;
@@ -60,9 +64,13 @@ static bs_facts leaf_facts(const bs_test *test)
 
 static bs_facts join_facts(bs_facts a, bs_facts b, int (*join)(int, int))
 {
-    return (bs_facts){join(a.element, b.element),     join(a.aromatic, b.aromatic),
-                      join(a.charge, b.charge),       join(a.hydrogens, b.hydrogens),
-                      join(a.isotope, b.isotope),     join(a.mark, b.mark)};
+    return (bs_facts){.element = join(a.element, b.element),
+                      .aromatic = join(a.aromatic, b.aromatic),
+                      .charge = join(a.charge, b.charge),
+                      .hydrogens = join(a.hydrogens, b.hydrogens),
+                      .isotope = join(a.isotope, b.isotope),
+                      .mark = join(a.mark, b.mark),
+                      .connections = join(a.connections, b.connections)};
 }
 
 bs_status bs_expr__atom_facts(bs_ctx *cx, const bs_query_expr *expr, bs_facts *out)

@@ -19,6 +19,7 @@ typedef struct bs_facts {
     int hydrogens; /* all of them */
     int isotope;
     int mark; /* 1: @, 2: @@ */
+    int connections;
 } bs_facts;
 
 /* Order of a bond of which nothing is written: single, or aromatic between aromatic atoms. */

@@ -58,7 +58,7 @@ static bs_status can_be_one(bs_ctx *cx, const bs_query_expr *a, const bs_query_e
         return st;
     *yes = !differ(f.element, g.element) && !differ(f.aromatic, g.aromatic) &&
            !differ(f.charge, g.charge) && !differ(f.hydrogens, g.hydrogens) &&
-           !demands_differ(a, b, BS_TEST_CONNECTIONS) && !demands_differ(a, b, BS_TEST_DEGREE);
+           !differ(f.connections, g.connections) && !demands_differ(a, b, BS_TEST_DEGREE);
     return BS_OK;
 }
 

@@ -36,14 +36,15 @@ static int number_pieces(const bs_mol *mol, int *piece, uint32_t *stack)
 static bs_status list_atoms(bs_ctx *cx, bs_arena *home, const bs_mol *mol, const int *piece,
                             bs_piece *pieces, int count)
 {
-    bs_mark temp = bs_arena_mark(&cx->scratch);
     uint32_t *filled;
+    bs_mark temp;
     bs_status st;
 
     for (int i = 0; i < count; i++) {
         if ((st = bs_new(cx, home, pieces[i].mol->atom_count + 1, &pieces[i].atoms)) != BS_OK)
             return st;
     }
+    temp = bs_arena_mark(&cx->scratch);
     if ((st = bs_new(cx, &cx->scratch, count + 1, &filled)) != BS_OK)
         return st;
     for (uint32_t i = 0; i < mol->atom_count; i++)

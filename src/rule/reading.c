@@ -30,6 +30,14 @@ static int changed(int from, int to)
     return from == to ? BS_UNSAID : to;
 }
 
+/* What the tests of H or X say about the hydrogens of an atom with two bonds. */
+static int hydrogen_hint(const bs_facts *says)
+{
+    if (says->hydrogens != BS_UNSAID)
+        return says->hydrogens;
+    return says->connections == 2 || says->connections == 3 ? says->connections - 2 : BS_UNSAID;
+}
+
 static bs_atom_edit persisting_edit(const bs_reading *r, int slot, int to_atom, bool reverse)
 {
     const bs_facts *a = &r->from->atoms[slot].says;
@@ -41,7 +49,7 @@ static bs_atom_edit persisting_edit(const bs_reading *r, int slot, int to_atom, 
     edit.charge = changed(a->charge, b->charge);
     edit.isotope = changed(a->isotope, b->isotope);
     edit.hydrogens = reverse ? BS_UNSAID : b->hydrogens;
-    edit.hydrogen_hint = b->hydrogens;
+    edit.hydrogen_hint = hydrogen_hint(b);
     if (reverse) {
         /* What the one side set, the other unsets. */
         if (b->charge == BS_UNSAID && a->charge != BS_UNSAID && a->charge != 0)
@@ -62,7 +70,7 @@ static bs_atom_edit created_edit(const bs_reading *r, int to_atom)
     edit.charge = b->charge == BS_UNSAID ? 0 : b->charge;
     edit.isotope = b->isotope == BS_UNSAID ? 0 : b->isotope;
     edit.hydrogens = b->hydrogens;
-    edit.hydrogen_hint = b->hydrogens;
+    edit.hydrogen_hint = hydrogen_hint(b);
     return edit;
 }
 
@@ -113,6 +121,12 @@ static bool says_aromatic(const bs_side *side, const bs_side_bond *bond, int val
            side->atoms[bond->b].says.aromatic == value;
 }
 
+/* Whether one end is written as aliphatic, so that the bond cannot be aromatic. */
+static bool is_aliphatic(const bs_side *side, const bs_side_bond *bond)
+{
+    return side->atoms[bond->a].says.aromatic == 0 || side->atoms[bond->b].says.aromatic == 0;
+}
+
 /*
  * The order that a bond of `to` gives, BS_UNSAID if it leaves the bond as it is. `f` is the bond
  * of `from` between the same atoms, or NULL.
@@ -122,6 +136,10 @@ static int bond_order(const bs_reading *r, const bs_side_bond *t, const bs_side_
     int written = t->says.order;
     bool ring = t->in_ring && says_aromatic(r->to, t, 1);
 
+    /* A bond of which only the ring is asked, beside a multiple one: a single bond. */
+    if (written == BS_UNSAID && f && t->says.ring != BS_UNSAID && f->says.order > 1 &&
+        f->says.order <= 4)
+        return 1;
     if (written == BS_UNSAID)
         return f ? BS_UNSAID : 1;
     if (written != BS_ORDER_DEFAULT)
@@ -136,7 +154,7 @@ static int bond_order(const bs_reading *r, const bs_side_bond *t, const bs_side_
     if (f->says.order == 2 || f->says.order == 3 || f->says.order == 4)
         return 1;
     if (f->says.order == BS_DRAFT_ORDER_AROMATIC || says_aromatic(r->from, f, 1))
-        return says_aromatic(r->to, t, 0) ? 1 : BS_UNSAID;
+        return is_aliphatic(r->to, t) ? 1 : BS_UNSAID;
     return BS_UNSAID;
 }
 

@@ -18,7 +18,7 @@ typedef struct bs_atom_edit {
     int slot;
     bool created;
     int element, aromatic, charge, hydrogens, isotope;
-    int hydrogen_hint; /* hydrogens that a new aromatic nitrogen shall have */
+    int hydrogen_hint; /* hydrogens of a nitrogen with two bonds in a new aromatic ring */
 } bs_atom_edit;
 
 /* The bond between two slots gets an order: 1 to 4 or BS_DRAFT_ORDER_AROMATIC; 0 cuts it. */

@@ -235,7 +235,7 @@ static void rewrite__errors_tell_the_place(void **state)
     fixture *f = *state;
 
     check_error(f, "[C:1]", BS_ESYNTAX, 5);
-    check_error(f, "[C:1]>>[C:1", BS_ESYNTAX, 11);
+    check_error(f, "[C:1]>>[C:1", BS_ESYNTAX, 7);
     check_error(f, "[C:1][C:1]>>[C:1]", BS_EVALUE, 5);
     check_error(f, "[C:1]>>[C:1][*]", BS_EVALUE, 12);
 }
