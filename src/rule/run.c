@@ -106,8 +106,6 @@ static bs_status find_places(bs_ctx *cx, const bs_reading *r, int part, const bs
         return st;
     out->found = found.atoms;
     out->count = found.count;
-    if (opts->strict && found.count > opts->limit)
-        return bs_fail(cx, BS_ELIMIT, "the rewriting fits at more than %d places", opts->limit);
     return opts->every_place ? BS_OK : drop_repeats(cx, r, out);
 }
 
@@ -159,12 +157,8 @@ static bs_status try_all(run *r, const bs_bench *bench)
 
         if ((st = bs_poll(r->cx)) != BS_OK)
             return st;
-        if (tried++ >= r->opts->limit) {
-            return r->opts->strict ? bs_fail(r->cx, BS_ELIMIT,
-                                             "the rewriting fits at more than %d places",
-                                             r->opts->limit)
-                                   : BS_OK;
-        }
+        if (tried++ >= r->opts->limit)
+            return BS_OK;
         fill_where(r);
         st = bs_bench__apply(r->cx, r->home, bench, r->where, &result, &possible);
         if (st == BS_OK && possible)
@@ -181,6 +175,7 @@ static bs_status run_all(run *r, const bs_mol *const *mols)
 {
     const bs_side *from = r->reading->from;
     bs_ctx *cx = r->cx;
+    double total = 1;
     bs_bench bench;
     bs_status st;
 
@@ -192,7 +187,10 @@ static bs_status run_all(run *r, const bs_mol *const *mols)
         st = find_places(cx, r->reading, i, mols[i], r->opts, &r->parts[i]);
         if (st != BS_OK || r->parts[i].count == 0)
             return st;
+        total *= r->parts[i].count;
     }
+    if (r->opts->strict && total > r->opts->limit)
+        return bs_fail(cx, BS_ELIMIT, "the rewriting fits at more than %d places", r->opts->limit);
     if ((st = bs_bench__lay(cx, &cx->scratch, r->reading, mols, &bench)) != BS_OK)
         return st;
     return try_all(r, &bench);
