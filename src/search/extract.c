@@ -275,12 +275,14 @@ static bs_status consider(bs_plan_state *plan, bs_arena *home, const bs_kbest_ro
     return st;
 }
 
-bs_status bs_plan__take_routes(bs_plan_state *plan, bs_arena *home, bs_route ***routes, int *count)
+bs_status bs_plan__take_routes(bs_plan_state *plan, bs_arena *home, long tries, bs_route ***routes,
+                               int *count)
 {
     bs_kbest *kbest = NULL;
     bs_status st = bs_new(plan->cx, home, plan->pool, routes);
 
     *count = 0;
+    plan->kbest_cut = false;
     if (st != BS_OK)
         return st;
     st = bs_kbest__new(&plan->x.graph, plan->opts->mode, plan->target, 0, &kbest);
@@ -292,11 +294,15 @@ bs_status bs_plan__take_routes(bs_plan_state *plan, bs_arena *home, bs_route ***
         st = bs_kbest__next(kbest, &found, &answer);
         if (st != BS_OK || !found)
             break;
+        if (tries-- <= 0) {
+            plan->kbest_cut = true;
+            break;
+        }
         st = consider(plan, home, &answer, &route);
         if (st == BS_OK && route)
             (*routes)[(*count)++] = route;
     }
-    plan->kbest_cut = kbest && bs_kbest__cut(kbest);
+    plan->kbest_cut = plan->kbest_cut || (kbest && bs_kbest__cut(kbest));
     bs_kbest__free(kbest);
     return st;
 }

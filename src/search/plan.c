@@ -16,6 +16,8 @@
 #define MOST_THREADS 256
 #define MOST_BEST 100000
 #define MOST_MOLECULES 50000000L
+#define ASK_TRIES 100   /* routes looked at beyond the pool, while the search goes on ... */
+#define LAST_TRIES 5000 /* ... and at its end */
 #define RANK_POOL 10  /* so many times `best` routes are ranked ... */
 #define RANK_MOST 200 /* ... but not more than this, unless `best` is */
 
@@ -93,7 +95,7 @@ static bs_status is_enough(void *payload, bs_ctx *cx, double open_bound, bool *d
     *done = false;
     plan->target = 0;
     bs_arena_init(&home, cx->gate);
-    st = bs_plan__take_routes(plan, &home, &routes, &count);
+    st = bs_plan__take_routes(plan, &home, 2L * plan->pool + ASK_TRIES, &routes, &count);
     if (st == BS_OK)
         *done = count == plan->pool && routes[count - 1]->cost <= open_bound;
     bs_arena_free(&home);
@@ -159,7 +161,8 @@ static bs_status say_why(bs_plan_state *plan, bs_routes *list)
     case BS_END_EXHAUSTED:
     case BS_END_ENOUGH:
         if (plan->kbest_cut)
-            st = bs_text_puts(&text, "the count of the cheapest routes ran out of its budget");
+            st = bs_text_puts(&text, "limits or keep leave out too many routes to find all the "
+                                     "others");
         else if (plan->x.failed > 0)
             st = bs_text_printf(&text, "%lu molecules were too much for the rules",
                                 (unsigned long)plan->x.failed);
@@ -225,7 +228,8 @@ static bs_status fill_list(bs_plan_state *plan, bs_arena *home, bs_routes **out)
     int gaps = plan->opts->gaps ? plan->opts->gaps : DEFAULT_GAPS, count;
     bs_routes *list = NULL;
     bs_route **routes;
-    bs_status st = bs_plan__take_routes(plan, home, &routes, &count);
+    bs_status st = bs_plan__take_routes(plan, home, 20L * plan->pool + LAST_TRIES,
+                                        &routes, &count);
 
     if (st != BS_OK)
         return st;

@@ -74,9 +74,11 @@ bs_status bs_plan__rivals(bs_ctx *cx, bs_arena *home, const bs_outcomes *rivals,
 
 /*
  * The routes of the explored graph that limits and `keep` leave, cheapest first, at most the size
- * of the pool. They lie in `home`.
+ * of the pool. They lie in `home`. At most `tries` are looked at; plan->kbest_cut tells whether
+ * the enumeration ended early.
  */
-bs_status bs_plan__take_routes(bs_plan_state *plan, bs_arena *home, bs_route ***routes, int *count);
+bs_status bs_plan__take_routes(bs_plan_state *plan, bs_arena *home, long tries, bs_route ***routes,
+                               int *count);
 
 /* Finds the gaps of the explored graph: at most `most`, strings in `home`. */
 bs_status bs_plan__find_gaps(const bs_explore *x, bs_arena *home, uint32_t target, int most,
