@@ -162,10 +162,18 @@ static uint32_t mapped(const placing *p, uint32_t draft_atom)
     return draft_atom == BS_DRAFT_HYDROGEN ? BS_DRAFT_HYDROGEN : p->order[draft_atom];
 }
 
+static bool shares_atom(const uint32_t a[2], const uint32_t b[2])
+{
+    for (int i = 0; i < 2; i++)
+        if (a[i] != BS_DRAFT_HYDROGEN && (a[i] == b[0] || a[i] == b[1]))
+            return true;
+    return false;
+}
+
 /* The two pairs of an allene may come in either order, and each may hold an implied hydrogen. */
 static int allene_perm(int perm, const uint32_t from[4], const uint32_t to[4])
 {
-    bool crossed = from[0] != to[0] && from[0] != to[1] && from[1] != to[0] && from[1] != to[1];
+    bool crossed = !shares_atom(from, to);
 
     for (int pair = 0; pair < 2; pair++) {
         const uint32_t *f = from + 2 * (crossed ? 1 - pair : pair);

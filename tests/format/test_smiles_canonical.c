@@ -2,6 +2,7 @@
 #include "support/check.h"
 #include "support/table.h"
 
+#include "backsaw/draft.h"
 #include "backsaw/format.h"
 #include "backsaw/mol.h"
 
@@ -152,6 +153,31 @@ static void canonical__isomers_of_rings_are_counted(void **state)
     }
 }
 
+/* Finishing a copy must not lose the mark of an allene whose ends both carry a hydrogen. */
+static void canonical__allene_is_kept_by_a_turned_draft(void **state)
+{
+    fixture *f = *state;
+    bs_mol *mol = parse(f, "CC=[C@]=CC"), *turned = NULL;
+    char *one, *other;
+    bs_draft from, to;
+
+    bs_draft_init(&from, &f->cx, &f->home);
+    bs_draft_init(&to, &f->cx, &f->home);
+    check_ok(f, bs_draft_from_mol(&from, mol));
+    for (uint32_t i = 0; i < from.atom_count; i++)
+        check_ok(f, bs_draft_add_atom(&to, from.atoms[i], NULL));
+    for (uint32_t i = from.bond_count; i-- > 0;)
+        check_ok(f, bs_draft_add_bond(&to, from.bonds[i].a, from.bonds[i].b, from.bonds[i].order,
+                                      NULL));
+    for (uint32_t i = 0; i < from.stereo_count; i++)
+        check_ok(f, bs_draft_add_stereo(&to, from.stereo[i]));
+    check_ok(f, bs_draft_finish(&to, &f->home, NULL, &turned));
+    check_ok(f, bs_smiles_canonical(&f->cx, &f->home, mol, 0, &one));
+    check_ok(f, bs_smiles_canonical(&f->cx, &f->home, turned, 0, &other));
+    assert_string_equal(one, other);
+    assert_non_null(strchr(one, '@'));
+}
+
 /* Square, bipyramidal and octahedral centres: isomers counted by hand; common practice. */
 static void canonical__isomers_of_complexes(void **state)
 {
@@ -185,6 +211,7 @@ int main(void)
         check_case(canonical__spellings_of_one_molecule_agree),
         check_case(canonical__is_a_fixed_point),
         check_case(canonical__pairs_are_told_apart_or_not),
+        check_case(canonical__allene_is_kept_by_a_turned_draft),
         check_case(canonical__isomers_of_complexes),
         check_case(canonical__isomers_of_rings_are_counted),
     };
