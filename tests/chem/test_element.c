@@ -23,10 +23,10 @@ static void element__symbols_and_numbers_agree(void **state)
     assert_null(bs_element_symbol(-1));
 }
 
-/* tests/data/atomic-weights.tsv: abridged standard atomic weights 2021, IUPAC CIAAW. */
+/* tests/data/checks/atomic-weights.tsv: abridged standard atomic weights 2021, IUPAC CIAAW. */
 static void element__weights_are_the_abridged_ones(void **state)
 {
-    FILE *file = fopen(BACKSAW_TEST_DATA "/atomic-weights.tsv", "r");
+    FILE *file = fopen(BACKSAW_TEST_DATA "/checks/atomic-weights.tsv", "r");
     char line[300];
     int count = 0;
 
