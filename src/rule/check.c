@@ -3,7 +3,8 @@
  *
  * A reaction that makes a stereocentre without saying which hand gives the product without the
  * mark. That counts as the product too, and the verdict says that its stereo is left open: the
- * marks that differ must all be at atoms of the site, on one side only.
+ * marks that differ must all be at atoms of the site, on one side only. Centres that the rule does
+ * make with a mark say how they stand to each other; the product may have all of them turned.
  */
 #include <string.h>
 
@@ -135,6 +136,67 @@ static bs_status same_but_stereo(bs_ctx *cx, const bs_case *kase, const bs_made 
     return st;
 }
 
+/* ---- The other hand ------------------------------------------------------------------------------ */
+
+/*
+ * The product of a forward run with all centres turned that the rule makes: what the mirror image
+ * of the reagent gives, or an attack from the other face. `*out` is NULL if the rule makes none.
+ */
+static bs_status turned_product(bs_ctx *cx, const bs_case *kase, const bs_made *made, bs_mol **out)
+{
+    const bs_mol *mol = made->outcome.products[0];
+    const bs_reading *forth = &kase->forth;
+    int turned = 0;
+    bs_draft draft;
+    bs_status st;
+
+    *out = NULL;
+    bs_draft_init(&draft, cx, &cx->scratch);
+    if ((st = bs_draft_from_mol(&draft, mol)) != BS_OK)
+        return st;
+    for (int i = 0; i < forth->hand_edits; i++) {
+        for (int k = 0; k < forth->to->atom_count; k++) {
+            if (forth->hands[i].way != BS_HAND_MAKE || forth->to_slot[k] != forth->hands[i].slot)
+                continue;
+            for (uint32_t n = 0; n < draft.stereo_count; n++) {
+                bs_draft_stereo *element = &draft.stereo[n];
+
+                if (element->kind != BS_STEREO_TETRAHEDRAL ||
+                    element->centre != made->spots[k].atom)
+                    continue;
+                element->perm = (uint8_t)(3 - element->perm);
+                turned++;
+            }
+        }
+    }
+    return turned > 0 ? bs_draft_finish(&draft, &cx->scratch, NULL, out) : BS_OK;
+}
+
+/* Whether the forward product with its new centres turned is the product. */
+static bs_status same_but_turned(bs_ctx *cx, const bs_case *kase, const bs_made *made,
+                                 const bs_mol *product, const char *product_smiles,
+                                 const uint32_t *where, bool *same, bool *open)
+{
+    bs_mark temp = bs_arena_mark(&cx->scratch);
+    bs_made turned = *made;
+    bs_mol *mol;
+    char *smiles;
+    bs_status st = turned_product(cx, kase, made, &mol);
+
+    *same = *open = false;
+    if (st == BS_OK && mol && (st = bs_smiles_canonical(cx, &cx->scratch, mol, 0, &smiles)) == BS_OK) {
+        turned.outcome.products = &mol;
+        turned.outcome.smiles = &smiles;
+        *same = strcmp(smiles, product_smiles) == 0;
+        if (!*same) {
+            st = same_but_stereo(cx, kase, &turned, product, product_smiles, where, open);
+            *same = *open;
+        }
+    }
+    bs_arena_rewind(&cx->scratch, temp);
+    return st;
+}
+
 /* ---- Running -------------------------------------------------------------------------------------- */
 
 /* The next order of `count` numbers in the manner of a dictionary; false after the last. */
@@ -207,6 +269,14 @@ static bs_status find_product(bs_ctx *cx, const bs_forward *run, const bs_case *
     for (int i = 0; i < run->made.count && *found < 0 && st == BS_OK; i++) {
         st = same_but_stereo(cx, kase, &run->made.items[i], product, product_smiles, where, open);
         if (*open)
+            *found = i;
+    }
+    for (int i = 0; i < run->made.count && *found < 0 && st == BS_OK; i++) {
+        bool same;
+
+        st = same_but_turned(cx, kase, &run->made.items[i], product, product_smiles, where, &same,
+                             open);
+        if (same)
             *found = i;
     }
     return st;

@@ -182,6 +182,23 @@ static void lindlar__makes_the_z_alkene_only(void **state)
     bs_rules_free(b.rules);
 }
 
+/* Osmylation is syn: a ring alkene gives the cis diol, whichever face is attacked. */
+static void osmylation__makes_cis_diols_only(void **state)
+{
+    book b = new_book(state);
+    int index = add_from(&b, "osmylation", "[#6;R:5][C@;X4;H1;R:1]([OX2H1])[C@;X4;H1;R:3]([OX2H1])[#6;R:6]",
+                         "[#6;R:5][CX3;H1;R:1]=[CX3;H1;R:3][#6;R:6]");
+
+    assert_int_equal(back(&b, index, "O[C@@H]1CCCC[C@@H]1O").count, 1);
+    assert_int_equal(back(&b, index, "O[C@@H]1CCCC[C@H]1O").count, 0);
+    assert_int_equal(back(&b, index, "OC1CCCCC1O").count, 1);
+    /* With another centre in the ring the two faces give two diastereomers; both are cis. */
+    assert_int_equal(back(&b, index, "O[C@@H]1C[C@H](C)CC[C@@H]1O").count, 1);
+    assert_int_equal(back(&b, index, "O[C@@H]1C[C@@H](C)CC[C@@H]1O").count, 1);
+    assert_int_equal(back(&b, index, "O[C@@H]1C[C@H](C)CC[C@H]1O").count, 0);
+    bs_rules_free(b.rules);
+}
+
 /* Mitsunobu: inversion, whichever hand the alcohol has. */
 static void mitsunobu__turns_either_hand(void **state)
 {
@@ -498,6 +515,7 @@ int main(void)
         check_case(ketone_reduction__leaves_the_new_centre_open),
         check_case(hydration__lists_the_other_regioisomer_as_rival),
         check_case(lindlar__makes_the_z_alkene_only),
+        check_case(osmylation__makes_cis_diols_only),
         check_case(mitsunobu__turns_either_hand),
         check_case(cyanide__displaces_a_primary_halide),
         check_case(williamson__gives_ethers_from_both_sides),
