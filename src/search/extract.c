@@ -30,13 +30,15 @@ static bs_status run_again(bs_plan_state *plan, uint32_t w, bs_plan_detail *deta
     const bs_graph_way *way = &plan->x.graph.ways[w];
     const char *smiles = plan->x.nodes[way->product].smiles;
     bs_ctx *cx = plan->cx;
-    bs_mark temp = bs_arena_mark(&cx->scratch);
     bs_steps found = {NULL, 0};
+    bs_arena home; /* not the scratch arena, which the callee rewinds */
     bs_mol *mol;
-    bs_status st = bs_smiles_read(cx, &cx->scratch, smiles, strlen(smiles), NULL, &mol);
+    bs_status st;
 
+    bs_arena_init(&home, cx->gate);
+    st = bs_smiles_read(cx, &home, smiles, strlen(smiles), NULL, &mol);
     if (st == BS_OK)
-        st = bs_rules_back(cx, &cx->scratch, plan->opts->rules, (int)way->tag, mol,
+        st = bs_rules_back(cx, &home, plan->opts->rules, (int)way->tag, mol,
                            plan->opts->hooks, 0, &found);
     for (int i = 0; st == BS_OK && !detail->checked && i < found.count; i++) {
         if (!same_precursors(plan, way, &found.items[i]))
@@ -45,7 +47,7 @@ static bs_status run_again(bs_plan_state *plan, uint32_t w, bs_plan_detail *deta
         st = bs_plan__rivals(cx, &plan->arena, &found.items[i].rivals, &detail->rivals,
                              &detail->rival_count);
     }
-    bs_arena_rewind(&cx->scratch, temp);
+    bs_arena_free(&home);
     return st == BS_ELIMIT ? BS_OK : st;
 }
 
