@@ -1,0 +1,75 @@
+-- help() and help "topic": short texts for the prompt.
+local core = ...
+local check = core.module "check"
+
+local topics = {
+molecules = [[
+m = mol "CCOC(=O)c1ccc(N)cc1"        a molecule from SMILES; print(m) gives its canonical SMILES
+m:formula() m:mass() m:exact_mass()  Hill formula, g/mol, u
+m:charge() m:inchi() m:inchikey() m:smiles()
+m:has(p) m:count(p) m:find(p)        p is a pattern or SMARTS; find gives lists of atom numbers
+m:atoms() m:bonds() m:rings() m:fragments()
+a == b                               the same compound, however it was written]],
+patterns = [[
+p = pattern "[NX3;H2]"               a pattern from SMARTS; print(p) gives the SMARTS
+p:count(m) p:find(m) p:has(m)        matches are unique by their set of atoms
+r = rewrite "[C:1]=[O:2]>>[C:1]-[O:2]"
+r:apply(m, ...)                      a list of outcomes, each a list of molecules]],
+transforms = [[
+t = transform "name"                 by name; case, spaces and hyphens make no difference
+t:back(m)                            the steps that make m by this transform
+t:forth(m, ...)                      what it makes of these: sets with products and expected
+t:check()                            its self-tests: true, or false and the failures
+back(m)  forth(m, ...)               the same with every transform in use
+A step has product, precursors, equivalents, transform, conditions, recipe, yield, rivals,
+and uses(reagent).]],
+packs = [[
+use "./ours.lua"                     a pack by file, or use "ours" by name: beside the script,
+                                     on BACKSAW_PATH, in the standard library
+pack { name =, version =, licence =, about =, needs = }
+synthon "name" { kind = "donor" or "acceptor", equivalents = { { attach = "Cl" }, ... } }
+disconnection "name" { target =, cut = { 1, 2 }, acceptor = { 1, "..." }, donor = { 2, "..." } }
+interconversion "name" { target =, from = }
+example { "product", from = { ... } }   refuse { "product" }     inside the tables
+Further fields: conditions recipe yield reagents cautions spares also_attacks source rxno also
+when prefer step_cost about]],
+catalogues = [[
+catalogue.build { from = "list.tsv", into = "list.catalogue" }
+c = catalogue.open "list.catalogue"
+c:find(m)                            offers, the cheapest first: code name molecule
+                                     price_per_gram container_g lead_days ground
+c:has(m)  #c]],
+plan = [[
+routes = plan { target = mol "...", catalogue = c, ... }
+catalogue   a catalogue, or a list in order of preference; a plain list of SMILES serves too
+limits      { depth =, steps =, molecules =, seconds =, memory = }
+cost        cost.per_mole { step = 50 }, cost.additive { step = }, or function(step)
+allow       function(step): may the step be used?      keep  function(route): does it count?
+rank        function(route): the lowest first          best  how many routes
+known       { { product =, from = { ... }, yield =, cost =, equiv =, name = }, ... }
+transforms  names of those to use; {} switches them off     at_hand, quiet]],
+routes = [[
+print(routes)                        a table, one line a route
+#routes  routes[1]  routes:where(f)  routes:sort(f)  routes:gaps()  routes.complete  routes.reason
+print(routes[1])                     the route as an indented tree
+r.cost  r:steps()  r:leaves()  r:measure()      steps longest leaves cost yield_low yield yield_high]],
+}
+
+local order = { "molecules", "patterns", "transforms", "packs", "catalogues", "plan", "routes" }
+
+-- help() lists the topics; help "plan" explains one.
+return function(topic)
+    if topic == nil then
+        print("backsaw is Lua 5.4 with chemistry inside. help \"topic\" explains one of these:")
+        print("  " .. table.concat(order, "  "))
+        return
+    end
+    if type(topic) ~= "string" then check.fail("help: a topic is expected, such as \"plan\"") end
+    local text = topics[topic] or topics[topic .. "s"]
+    if not text then
+        local meant = check.meant(topic, order)
+        core.fail("not found", string.format("no help on '%s'%s", topic,
+            meant ~= "" and meant or "; topics are: " .. table.concat(order, ", ")))
+    end
+    print(text)
+end

@@ -1,0 +1,273 @@
+-- plan { ... }: checks what is wanted, makes plain options of it, and hands them to the search.
+-- Also what lists of routes answer beyond what the host gives them.
+local core = ...
+local check = core.module "check"
+local transforms = core.module "transform"
+local planning = {}
+
+local fields = { target = "any", catalogue = "any", limits = "any", cost = "any", allow = "code",
+    keep = "code", rank = "code", guess = "code", known = "any", transforms = "any",
+    best = "count", at_hand = "any", quiet = "flag", threads = "count" }
+
+local limit_fields = { depth = "count", steps = "count", molecules = "count", seconds = "amount",
+    memory = "count" }
+
+local known_fields = { product = "any", from = "any", equiv = "any", cost = "amount",
+    yield = "any", name = "text" }
+
+-- A molecule from a molecule or SMILES, with a message that says where it stands.
+local function molecule(what, value)
+    if core.is_molecule(value) then return value end
+    if type(value) ~= "string" then
+        check.fail("%s: a molecule or SMILES is expected, not a %s", what, type(value))
+    end
+    return core.mol(value)
+end
+
+-- An entry of a list: a molecule at a price of 1 a mole, or { molecule, per_mole = ... }.
+local function offer(what, entry)
+    if type(entry) ~= "table" then return { molecule(what, entry), 1 } end
+    local given = check.fields(what, entry, { per_mole = "amount" })
+    local list = check.entries(what, entry)
+    if #list ~= 1 then check.fail("%s: one molecule is expected", what) end
+    return { molecule(what, list[1]), given.per_mole or 1 }
+end
+
+local function offers(what, list)
+    local result = {}
+    check.fields(what, list, {})
+    for i, entry in ipairs(check.entries(what, list)) do
+        result[i] = offer(string.format("%s: entry %d", what, i), entry)
+    end
+    return result
+end
+
+-- Has a table entries only, and no fields?
+local function is_list(t)
+    for key in next, t do
+        if type(key) == "string" then return false end
+    end
+    return true
+end
+
+-- The sources of a plan, in order of preference. Entries for single compounds that stand side by
+-- side make one source.
+local function sources(given)
+    if given == nil then return {} end
+    if core.is_catalogue(given) then return { given } end
+    if type(given) ~= "table" then
+        check.fail("plan: 'catalogue' must be a catalogue or a list, not a %s", type(given))
+    end
+    check.fields("plan: catalogue", given, {})
+    local result, open = {}, nil
+    for i, entry in ipairs(check.entries("plan: catalogue", given)) do
+        local what = string.format("plan: catalogue: entry %d", i)
+        if core.is_catalogue(entry) then
+            result[#result + 1], open = entry, nil
+        elseif type(entry) == "table" and is_list(entry) then
+            result[#result + 1], open = offers(what, entry), nil
+        else
+            if not open then
+                open = {}
+                result[#result + 1] = open
+            end
+            open[#open + 1] = offer(what, entry)
+        end
+    end
+    return result
+end
+
+local function known_step(what, given)
+    local step = check.fields(what, given, known_fields)
+    if step.product == nil then check.fail("%s: 'product' is missing", what) end
+    if step.from == nil then check.fail("%s: 'from' is missing", what) end
+    step.product = tostring(molecule(what .. ": product", step.product))
+    local from = step.from
+    if type(from) ~= "table" then from = { from } end
+    step.from = {}
+    for i, entry in ipairs(check.entries(what .. ": from", from)) do
+        step.from[i] = tostring(molecule(string.format("%s: from %d", what, i), entry))
+    end
+    if step.equiv ~= nil then
+        local list = type(step.equiv) == "table" and check.entries(what .. ": equiv", step.equiv)
+        if not list or #list ~= #step.from then
+            check.fail("%s: 'equiv' must be a list of numbers, one for each entry of 'from'", what)
+        end
+        for _, number in ipairs(list) do
+            if type(number) ~= "number" or not (number > 0 and number < math.huge) then
+                check.fail("%s: 'equiv' must be numbers above 0", what)
+            end
+        end
+        step.equiv = list
+    end
+    local yield = step.yield
+    if type(yield) == "table" and type(yield[1]) == "number" and type(yield[2]) == "number" then
+        yield = (yield[1] + yield[2]) / 2
+    end
+    if yield ~= nil and not (type(yield) == "number" and yield > 0 and yield <= 100) then
+        check.fail("%s: 'yield' must be above 0 and at most 100 per cent", what)
+    end
+    step.yield = yield
+    return step
+end
+
+local function known_steps(given)
+    local list = {}
+    if given == nil then return list end
+    if type(given) ~= "table" then check.fail("plan: 'known' must be a list of steps") end
+    for i, step in ipairs(check.entries("plan: known", given)) do
+        list[i] = known_step(string.format("plan: known step %d", i), step)
+    end
+    return list
+end
+
+local function chosen_transforms(given)
+    if given == nil then return nil end
+    if type(given) ~= "table" then check.fail("plan: 'transforms' must be a list of transforms") end
+    local list = {}
+    for i, entry in ipairs(check.entries("plan: transforms", given)) do
+        list[i] = core.transform_index(transforms.fetch(entry))
+    end
+    return list
+end
+
+local function at_hand(given)
+    local list = {}
+    if given == nil then return list end
+    if type(given) ~= "table" then given = { given } end
+    for i, entry in ipairs(check.entries("plan: at_hand", given)) do
+        list[i] = molecule(string.format("plan: at_hand: entry %d", i), entry)
+    end
+    return list
+end
+
+-- Cost models are tables known by this one.
+local models = setmetatable({}, { __mode = "k" })
+
+local function cost_model(mode)
+    return function(given)
+        local model = check.fields("cost." .. mode, given or {}, { step = "any" })
+        local step = model.step
+        if step ~= nil and type(step) ~= "function"
+            and not (type(step) == "number" and step >= 0 and step < math.huge) then
+            check.fail("cost.%s: 'step' must be a number of 0 or more, or a function", mode)
+        end
+        model = { mode = mode, step = step }
+        models[model] = true
+        return model
+    end
+end
+
+planning.cost = { per_mole = cost_model "per_mole", additive = cost_model "additive" }
+
+local function set_cost(options, cost)
+    local step = cost
+    if cost == nil then return end
+    if type(cost) ~= "function" then
+        if type(cost) ~= "table" or not models[cost] then
+            check.fail("plan: 'cost' must be cost.per_mole{...}, cost.additive{...} or a function")
+        end
+        step = cost.step
+        if cost.mode == "additive" then options.additive = true end
+    end
+    if type(step) == "function" then
+        options.cost = step
+    else
+        options.step_cost = step
+    end
+end
+
+-- routes = plan { target =, catalogue =, ... }
+function planning.plan(given)
+    local options = check.fields("plan", given, fields)
+    if #check.entries("plan", given) > 0 then
+        check.fail("plan: named fields are expected, such as target = ...")
+    end
+    if options.target == nil then check.fail("plan: 'target' is missing") end
+    options.target = molecule("plan: target", options.target)
+    options.sources = sources(options.catalogue)
+    for name, value in next, check.fields("plan: limits", options.limits or {}, limit_fields) do
+        options[name] = value
+    end
+    options.known = known_steps(options.known)
+    options.transforms = chosen_transforms(options.transforms)
+    options.at_hand = at_hand(options.at_hand)
+    if options.quiet == false then options.quiet = nil end
+    local cost = options.cost
+    options.cost = nil
+    set_cost(options, cost)
+    return core.plan(options)
+end
+
+-- ---- Lists of routes ---------------------------------------------------------------------
+
+-- rs:where(f): those for which f(route) is true
+function core.routes_methods.where(routes, f)
+    if type(f) ~= "function" then check.fail("where: a function is expected, not a %s", type(f)) end
+    local kept = {}
+    for _, route in ipairs(routes) do
+        if f(route) then kept[#kept + 1] = route end
+    end
+    return core.pick_routes(kept, routes)
+end
+
+-- Sorts a list by `before`, keeping the order of equals; sound whatever `before` answers.
+local function merge_sort(list, before)
+    if #list < 2 then return list end
+    local half = #list // 2
+    local a = merge_sort(table.move(list, 1, half, 1, {}), before)
+    local b = merge_sort(table.move(list, half + 1, #list, 1, {}), before)
+    local i, j, merged = 1, 1, {}
+    while i <= #a and j <= #b do
+        if before(b[j], a[i]) then
+            merged[#merged + 1], j = b[j], j + 1
+        else
+            merged[#merged + 1], i = a[i], i + 1
+        end
+    end
+    table.move(a, i, #a, #merged + 1, merged)
+    return table.move(b, j, #b, #merged + 1, merged)
+end
+
+-- rs:sort(f): a new list; f(route) gives a number or a string, the lowest first, or f(a, b) says
+-- whether a comes before b
+function core.routes_methods.sort(routes, f)
+    if type(f) ~= "function" then check.fail("sort: a function is expected, not a %s", type(f)) end
+    local list = {}
+    for i, route in ipairs(routes) do list[i] = route end
+    if debug.getinfo(f, "u").nparams == 2 then
+        return core.pick_routes(merge_sort(list, f), routes)
+    end
+    local keys = {}
+    for _, route in ipairs(list) do
+        local key = f(route)
+        if type(key) ~= "number" and type(key) ~= "string" or key ~= key then
+            check.fail("sort: the function must give a number or a string, not a %s", type(key))
+        end
+        if next(keys) and type(select(2, next(keys))) ~= type(key) then
+            check.fail("sort: the function gave both numbers and strings")
+        end
+        keys[route] = key
+    end
+    return core.pick_routes(merge_sort(list, function(a, b) return keys[a] < keys[b] end), routes)
+end
+
+core.offer_type = {
+    __tostring = function(offer)
+        return string.format("%s  %s  %s", offer.code or "-", offer.name or "-",
+            tostring(offer.molecule))
+    end,
+    __metatable = false,
+}
+
+-- A leaf answers for its offer, too.
+core.leaf_type = {
+    __index = function(leaf, key)
+        local offer = rawget(leaf, "offer")
+        return offer and offer[key]
+    end,
+    __tostring = function(leaf) return tostring(leaf.molecule) end,
+    __metatable = false,
+}
+
+return planning

@@ -1,0 +1,34 @@
+-- The globals of scripts. In the pack state there are none: packs get theirs from `sandbox`.
+local core = ...
+
+core.module "step"
+local transforms = core.module "transform"
+local words = core.module "pack"
+if core.packed then return end
+
+local planning = core.module "plan"
+local catalogues = core.module "catalogue"
+
+-- mol "SMILES" and mol.read(path)
+mol = setmetatable({}, {
+    __call = function(_, value)
+        local m = core.mol(value) -- no tail call, so that messages name it
+        return m
+    end,
+    __metatable = false,
+})
+pattern, rewrite = core.pattern, core.rewrite
+transform, back, forth = transforms.fetch, core.back, core.forth
+pack, synthon, disconnection, interconversion = words.pack, words.synthon, words.disconnection,
+    words.interconversion
+example, refuse = words.example, words.refuse
+catalogue, plan, cost = catalogues, planning.plan, planning.cost
+help = core.module "help"
+
+function use(name)
+    if type(name) ~= "string" then
+        core.fail("bad value", "use: the name or the file of a pack is expected, not a "
+            .. type(name))
+    end
+    core.use(name)
+end

@@ -1,0 +1,81 @@
+-- Steps: what they answer, and how they print. Steps of routes hold their molecules as text under
+-- the key `core` until someone asks.
+local core = ...
+local methods = {}
+
+local function read_all(list)
+    local mols = {}
+    for i, smiles in ipairs(list) do mols[i] = core.mol(smiles) end
+    return mols
+end
+
+local readers = {
+    product = function(text) return core.mol(text.product) end,
+    precursors = function(text) return read_all(text.precursors) end,
+    rivals = function(text)
+        local rivals = {}
+        for i, smiles in ipairs(text.rivals) do
+            rivals[i] = core.mol(smiles):fragments()
+        end
+        return rivals
+    end,
+}
+
+function core.step_type.__index(step, key)
+    local text = rawget(step, core)
+    if text and readers[key] then
+        local value = readers[key](text)
+        rawset(step, key, value)
+        return value
+    end
+    return methods[key]
+end
+
+-- Does `word` stand at the beginning of a word in `text`, whatever the case?
+local function names(text, word)
+    text, word = string.lower(text), string.lower(word)
+    local at = string.find(text, word, 1, true)
+    while at do
+        if at == 1 or not string.find(string.sub(text, at - 1, at - 1), "%a") then return true end
+        at = string.find(text, word, at + 1, true)
+    end
+    return false
+end
+
+local function any_names(list, word)
+    for _, text in ipairs(list or {}) do
+        if names(text, word) then return true end
+    end
+    return false
+end
+
+-- used = step:uses(reagent): a word of its reagents, cautions, recipe, conditions or name; or a
+-- molecule among its precursors; or a pattern that fits one of them
+function methods.uses(step, reagent)
+    if type(reagent) == "string" then
+        return any_names(step.reagents, reagent) or any_names(step.cautions, reagent)
+            or any_names({ step.recipe or "", step.conditions or "", step.transform or "" }, reagent)
+    end
+    for _, precursor in ipairs(step.precursors) do
+        if precursor == reagent then return true end
+    end
+    if core.is_pattern(reagent) then
+        for _, precursor in ipairs(step.precursors) do
+            if precursor:has(reagent) then return true end
+        end
+    elseif not core.is_molecule(reagent) then
+        core.fail("bad value", "uses: a word, a molecule or a pattern is expected, not a "
+            .. type(reagent))
+    end
+    return false
+end
+
+-- "A + B -> P  (transform)"
+function core.step_type.__tostring(step)
+    local text = {}
+    for i, precursor in ipairs(step.precursors) do text[i] = tostring(precursor) end
+    return string.format("%s -> %s  (%s)", table.concat(text, " + "), tostring(step.product),
+        step.transform or "known")
+end
+
+return methods

@@ -1,0 +1,404 @@
+/*
+ * Planning from Lua. The embedded module `plan` checks what the user wrote and hands over a table
+ * of plain fields; here it becomes the options of the search, and the user's functions become its
+ * callbacks. A callback runs protected; what it raised is kept and raised again after the search.
+ */
+#include "script/host.h"
+
+#include <math.h>
+#include <string.h>
+#include <unistd.h>
+
+#define SHELF_TYPE "backsaw.shelf"
+#define LANES 8
+
+typedef struct shelf_box {
+    bs_shelf *shelf; /* NULL once freed */
+} shelf_box;
+
+/* What callbacks need: the running state, where the options lie on its stack, the first failure. */
+typedef struct planner {
+    lua_State *L;
+    bsl_host *host;
+    int options;
+    bool failed;
+    bsl_fault fault;
+} planner;
+
+typedef struct question {
+    const char *function;
+    const bs_route *route;
+    bool as_step;
+    const bs_mol *mol;
+    const char *smiles;
+    bool yes;
+    double number;
+    bool wants_number;
+} question;
+
+static int shelf_gc(lua_State *L)
+{
+    shelf_box *box = luaL_checkudata(L, 1, SHELF_TYPE);
+
+    bs_shelf_free(box->shelf);
+    box->shelf = NULL;
+    return 0;
+}
+
+/* ---- Callbacks ------------------------------------------------------------------------- */
+
+/* The protected part: arguments are the function and the question. */
+static int run_question(lua_State *L)
+{
+    question *ask = lua_touserdata(L, 2);
+
+    lua_settop(L, 2);
+    lua_pushvalue(L, 1);
+    if (ask->mol)
+        bsl_pushmol(L, ask->mol, ask->smiles);
+    else if (ask->as_step)
+        bsl_push_route_step(L, ask->route, 0);
+    else
+        bsl_push_route(L, ask->route);
+    lua_call(L, 1, 1);
+    ask->yes = lua_toboolean(L, -1);
+    if (!ask->wants_number)
+        return 0;
+    if (lua_type(L, -1) != LUA_TNUMBER || isnan(lua_tonumber(L, -1)))
+        return bsl_error(L, BS_EVALUE, "plan: '%s' must give a number, not %s", ask->function,
+                         lua_type(L, -1) == LUA_TNUMBER ? "NaN" : luaL_typename(L, -1));
+    ask->number = lua_tonumber(L, -1);
+    return 0;
+}
+
+static bs_status put_question(planner *p, bs_ctx *cx, question *ask)
+{
+    lua_State *L = p->L;
+
+    if (!lua_checkstack(L, 8))
+        return bs_fail_memory(cx);
+    lua_pushcfunction(L, run_question);
+    lua_pushstring(L, ask->function);
+    lua_rawget(L, p->options);
+    lua_pushlightuserdata(L, ask);
+    if (bsl_call(p->host, L, 2, 0, 0) == LUA_OK)
+        return BS_OK;
+    bsl_take_fault(L, &p->fault);
+    p->failed = p->fault.code != BS_ESTOPPED;
+    return bsl_fail_fault(cx, &p->fault);
+}
+
+static bs_status ask_allow(void *payload, bs_ctx *cx, const bs_route *step, bool *allowed)
+{
+    question ask = { .function = "allow", .route = step, .as_step = true };
+    bs_status st = put_question(payload, cx, &ask);
+
+    *allowed = ask.yes;
+    return st;
+}
+
+static bs_status ask_cost(void *payload, bs_ctx *cx, const bs_route *step, double *cost)
+{
+    question ask = { .function = "cost", .route = step, .as_step = true, .wants_number = true };
+    bs_status st = put_question(payload, cx, &ask);
+
+    *cost = ask.number;
+    return st;
+}
+
+static bs_status ask_guess(void *payload, bs_ctx *cx, const bs_mol *mol, const char *smiles,
+                           double *cost)
+{
+    question ask = { .function = "guess", .mol = mol, .smiles = smiles, .wants_number = true };
+    bs_status st = put_question(payload, cx, &ask);
+
+    *cost = ask.number;
+    return st;
+}
+
+static bs_status ask_keep(void *payload, bs_ctx *cx, const bs_route *route, bool *kept)
+{
+    question ask = { .function = "keep", .route = route };
+    bs_status st = put_question(payload, cx, &ask);
+
+    *kept = ask.yes;
+    return st;
+}
+
+static bs_status ask_rank(void *payload, bs_ctx *cx, const bs_route *route, double *rank)
+{
+    question ask = { .function = "rank", .route = route, .wants_number = true };
+    bs_status st = put_question(payload, cx, &ask);
+
+    *rank = ask.number;
+    return st;
+}
+
+static void show_progress(void *payload, const bs_plan_progress *now)
+{
+    const bs_session *session = ((planner *)payload)->host->session;
+
+    session->opts.progress(session->opts.payload, now);
+}
+
+/* ---- Options --------------------------------------------------------------------------- */
+
+static double number_option(lua_State *L, int i, const char *field)
+{
+    double value;
+
+    lua_getfield(L, i, field);
+    value = lua_tonumber(L, -1);
+    lua_pop(L, 1);
+    return value;
+}
+
+static bool has_option(lua_State *L, int i, const char *field)
+{
+    bool there = lua_getfield(L, i, field) != LUA_TNIL;
+
+    lua_pop(L, 1);
+    return there;
+}
+
+/* Puts the list { { molecule, price }, ... } at the top of the stack on the shelf. */
+static void add_list(lua_State *L, bs_shelf *shelf)
+{
+    bs_ctx *cx = bsl_host_of(L)->cx;
+    int count = (int)lua_rawlen(L, -1), list;
+
+    if (bs_shelf_add_list(cx, shelf, &list) != BS_OK)
+        bsl_raise(L, NULL, 0);
+    for (int i = 0; i < count; i++) {
+        lua_rawgeti(L, -1, i + 1);
+        lua_rawgeti(L, -1, 1);
+        lua_rawgeti(L, -2, 2);
+        if (bs_shelf_put(cx, shelf, list, bsl_checkmol(L, -2), lua_tonumber(L, -1)) != BS_OK)
+            bsl_raise(L, NULL, 0);
+        lua_pop(L, 3);
+    }
+}
+
+/* Makes the shelf of the options at `i` and pushes its box, whose uservalue keeps the options. */
+static bs_shelf *push_shelf(lua_State *L, int i)
+{
+    bs_ctx *cx = bsl_host_of(L)->cx;
+    shelf_box *box = lua_newuserdatauv(L, sizeof *box, 0);
+    int count;
+
+    box->shelf = NULL;
+    luaL_setmetatable(L, SHELF_TYPE);
+    if (bs_shelf_new(cx, &box->shelf) != BS_OK)
+        bsl_raise(L, NULL, 0);
+    lua_getfield(L, i, "sources");
+    count = (int)lua_rawlen(L, -1);
+    for (int k = 0; k < count; k++) {
+        bs_catalogue *catalogue;
+
+        lua_rawgeti(L, -1, k + 1);
+        catalogue = bsl_testcatalogue(L, -1);
+        if (!catalogue)
+            add_list(L, box->shelf);
+        else if (bs_shelf_add_catalogue(cx, box->shelf, catalogue) != BS_OK)
+            bsl_raise(L, NULL, 0);
+        lua_pop(L, 1);
+    }
+    lua_getfield(L, i, "at_hand");
+    count = (int)lua_rawlen(L, -1);
+    for (int k = 0; k < count; k++) {
+        lua_rawgeti(L, -1, k + 1);
+        if (bs_shelf_at_hand(cx, box->shelf, bsl_checkmol(L, -1)) != BS_OK)
+            bsl_raise(L, NULL, 0);
+        lua_pop(L, 1);
+    }
+    lua_pop(L, 2);
+    return box->shelf;
+}
+
+/* One known step from the table at the top of the stack, which keeps its strings alive. */
+static void read_known(lua_State *L, bs_known_step *known)
+{
+    bsl_host *host = bsl_host_of(L);
+    const char **from;
+    double *equivalents;
+
+    lua_getfield(L, -1, "product");
+    known->product = lua_tostring(L, -1);
+    lua_getfield(L, -2, "name");
+    known->name = lua_tostring(L, -1);
+    lua_pop(L, 2);
+    known->has_cost = has_option(L, -1, "cost");
+    known->cost = number_option(L, -1, "cost");
+    known->yield = number_option(L, -1, "yield");
+    lua_getfield(L, -1, "from");
+    lua_getfield(L, -2, "equiv");
+    known->from_count = (int)lua_rawlen(L, -2);
+    if (bs_new(host->cx, &host->results, known->from_count + 1, &from) != BS_OK ||
+        bs_new(host->cx, &host->results, known->from_count + 1, &equivalents) != BS_OK)
+        bsl_raise(L, NULL, 0);
+    for (int i = 0; i < known->from_count; i++) {
+        lua_rawgeti(L, -2, i + 1);
+        from[i] = lua_tostring(L, -1);
+        lua_pop(L, 1);
+        if (!lua_istable(L, -1))
+            continue;
+        lua_rawgeti(L, -1, i + 1);
+        equivalents[i] = lua_tonumber(L, -1);
+        lua_pop(L, 1);
+    }
+    known->from = from;
+    known->equivalents = lua_istable(L, -1) ? equivalents : NULL;
+    lua_pop(L, 2);
+}
+
+static void read_known_steps(lua_State *L, int i, bs_plan_opts *opts)
+{
+    bsl_host *host = bsl_host_of(L);
+    bs_known_step *known;
+
+    lua_getfield(L, i, "known");
+    opts->known_count = (int)lua_rawlen(L, -1);
+    if (bs_new(host->cx, &host->results, opts->known_count + 1, &known) != BS_OK)
+        bsl_raise(L, NULL, 0);
+    for (int k = 0; k < opts->known_count; k++) {
+        lua_rawgeti(L, -1, k + 1);
+        read_known(L, &known[k]);
+        lua_pop(L, 1);
+    }
+    opts->known = known;
+    lua_pop(L, 1);
+}
+
+static void read_transforms(lua_State *L, int i, bs_plan_opts *opts)
+{
+    bsl_host *host = bsl_host_of(L);
+    int *indices;
+
+    if (lua_getfield(L, i, "transforms") == LUA_TTABLE) {
+        opts->transform_count = (int)lua_rawlen(L, -1);
+        if (bs_new(host->cx, &host->results, opts->transform_count + 1, &indices) != BS_OK)
+            bsl_raise(L, NULL, 0);
+        for (int k = 0; k < opts->transform_count; k++) {
+            lua_rawgeti(L, -1, k + 1);
+            indices[k] = (int)lua_tointeger(L, -1);
+            lua_pop(L, 1);
+        }
+        opts->transforms = indices;
+    }
+    lua_pop(L, 1);
+}
+
+static void read_limits(lua_State *L, int i, bs_plan_opts *opts)
+{
+    opts->limits.depth = (int)number_option(L, i, "depth");
+    opts->limits.steps = (int)number_option(L, i, "steps");
+    opts->limits.molecules = (long)number_option(L, i, "molecules");
+    opts->limits.seconds = number_option(L, i, "seconds");
+    opts->limits.memory = (size_t)number_option(L, i, "memory");
+    opts->best = (int)number_option(L, i, "best");
+    opts->has_step_cost = has_option(L, i, "step_cost");
+    opts->step_cost = number_option(L, i, "step_cost");
+    opts->mode = has_option(L, i, "additive") ? BS_COST_ADDITIVE : BS_COST_PER_MOLE;
+}
+
+static void read_callbacks(lua_State *L, int i, bs_plan_opts *opts, planner *p)
+{
+    const bs_session *session = p->host->session;
+
+    opts->payload = p;
+    opts->allow = has_option(L, i, "allow") ? ask_allow : NULL;
+    opts->cost = has_option(L, i, "cost") ? ask_cost : NULL;
+    opts->guess = has_option(L, i, "guess") ? ask_guess : NULL;
+    opts->keep = has_option(L, i, "keep") ? ask_keep : NULL;
+    opts->rank = has_option(L, i, "rank") ? ask_rank : NULL;
+    if (session->opts.progress && !has_option(L, i, "quiet"))
+        opts->progress = show_progress;
+}
+
+/* Lends the catalogues of the options to the search (or takes them back), so that a callback
+   cannot close them. */
+static void lend_catalogues(lua_State *L, int i, int change)
+{
+    lua_getfield(L, i, "sources");
+    for (int k = (int)lua_rawlen(L, -1); k > 0; k--) {
+        lua_rawgeti(L, -1, k);
+        bsl_lend_catalogue(L, -1, change);
+        lua_pop(L, 1);
+    }
+    lua_pop(L, 1);
+}
+
+/* Threads, and lanes for the functions of packs; the user's own functions need the main state, so
+   with such one thread works. */
+static void set_lanes(lua_State *L, bs_plan_opts *opts, bsl_lane *lanes, bs_rule_hooks *hooks)
+{
+    bs_session *session = bsl_host_of(L)->session;
+    long processors = sysconf(_SC_NPROCESSORS_ONLN);
+    int threads = (int)number_option(L, 1, "threads");
+
+    for (int i = 0; i < LANES; i++) {
+        lanes[i] = (bsl_lane){ .session = session };
+        hooks[i] = bsl_lane_hooks(&lanes[i]);
+    }
+    if (bsl_has_own_hooks(session))
+        return;
+    opts->lane_hooks = hooks;
+    opts->lane_count = LANES;
+    if (threads == 0)
+        threads = processors > 1 ? (int)processors : 1;
+    opts->threads = threads < LANES ? threads : LANES;
+}
+
+/* routes = core.plan(options) */
+static int core_plan(lua_State *L)
+{
+    bsl_host *host = bsl_host_of(L);
+    bs_session *session = host->session;
+    bs_mark mark = bs_arena_mark(&host->results);
+    bs_rule_hooks hooks = bsl_session_hooks(session);
+    planner plan = { .L = L, .host = host, .options = 1 };
+    bs_plan_opts opts = { .rules = session->rules, .hooks = &hooks };
+    bs_rule_hooks lane_hooks[LANES];
+    bsl_lane lanes[LANES];
+    bs_routes *routes = NULL;
+    const bs_mol *target;
+    bs_status st;
+
+    luaL_checktype(L, 1, LUA_TTABLE);
+    luaL_checkstack(L, 20, "plan");
+    lua_settop(L, 1);
+    lua_getfield(L, 1, "target");
+    target = bsl_checkmol(L, 2);
+    opts.shelf = push_shelf(L, 1);
+    read_known_steps(L, 1, &opts);
+    read_transforms(L, 1, &opts);
+    read_limits(L, 1, &opts);
+    read_callbacks(L, 1, &opts, &plan);
+    set_lanes(L, &opts, lanes, lane_hooks);
+    lend_catalogues(L, 1, 1);
+    st = bs_plan(host->cx, target, &opts, &routes);
+    lend_catalogues(L, 1, -1);
+    for (int i = 0; i < LANES; i++)
+        bsl_lane_free(&lanes[i]);
+    if (opts.progress)
+        session->opts.progress(session->opts.payload, NULL);
+    bs_arena_rewind(&host->results, mark);
+    if (atomic_load(host->cx->stop)) {
+        /* The first Ctrl-C ends the search, whose routes are kept; the script goes on. */
+        atomic_store(host->cx->stop, false);
+        bsl_calm(host);
+    }
+    if (st != BS_OK)
+        return plan.failed ? bsl_raise_fault(L, &plan.fault) : bsl_raise(L, NULL, 0);
+    bsl_push_routes(L, routes);
+    return 1;
+}
+
+void bsl_open_plan(lua_State *L)
+{
+    static const luaL_Reg meta[] = { { "__gc", shelf_gc }, { NULL, NULL } };
+
+    bsl_new_type(L, SHELF_TYPE, NULL, meta);
+    lua_pushcfunction(L, core_plan);
+    lua_setfield(L, -2, "plan");
+}

@@ -1,0 +1,298 @@
+/*
+ * Transforms in Lua, and what they give: steps backwards and product sets forwards. A transform
+ * is known by its index in the rule book of the session, which never forgets one.
+ */
+#include "script/host.h"
+
+#include <math.h>
+
+#define TRANSFORM_TYPE "backsaw.transform"
+#define STEP_TYPE "backsaw.step"
+
+/* The rule book's index of the transform at `i`; -1 for nil or none if `all`. */
+static int check_transform(lua_State *L, int i)
+{
+    const int *index = luaL_testudata(L, i, TRANSFORM_TYPE);
+
+    if (!index)
+        bsl_type_error(L, i, "transform");
+    return *index;
+}
+
+static void push_transform(lua_State *L, int index)
+{
+    int *box = lua_newuserdatauv(L, sizeof *box, 0);
+
+    *box = index;
+    luaL_setmetatable(L, TRANSFORM_TYPE);
+}
+
+/* t = core.find_transform(name), or nil */
+static int core_find_transform(lua_State *L)
+{
+    const char *name = luaL_checkstring(L, 1);
+    int index = bs_rules_find(bsl_host_of(L)->session->rules, name);
+
+    if (index < 0)
+        return 0;
+    push_transform(L, index);
+    return 1;
+}
+
+/* t = core.nth_transform(index), 0-based, or nil */
+static int core_nth_transform(lua_State *L)
+{
+    lua_Integer index = luaL_checkinteger(L, 1);
+
+    if (index < 0 || index >= bs_rules_count(bsl_host_of(L)->session->rules))
+        return 0;
+    push_transform(L, (int)index);
+    return 1;
+}
+
+/* index = core.transform_index(t), 0-based */
+static int core_transform_index(lua_State *L)
+{
+    lua_pushinteger(L, check_transform(L, 1));
+    return 1;
+}
+
+void bsl_push_number(lua_State *L, double value)
+{
+    if (value == floor(value) && fabs(value) < 1e15)
+        lua_pushinteger(L, (lua_Integer)value);
+    else
+        lua_pushnumber(L, value);
+}
+
+void bsl_push_words(lua_State *L, const char *const *items, int count)
+{
+    lua_createtable(L, count, 0);
+    for (int i = 0; i < count; i++) {
+        lua_pushstring(L, items[i]);
+        lua_rawseti(L, -2, i + 1);
+    }
+}
+
+static void set_text(lua_State *L, const char *field, const char *text)
+{
+    if (!text)
+        return;
+    lua_pushstring(L, text);
+    lua_setfield(L, -2, field);
+}
+
+static void set_pair(lua_State *L, const char *field, double low, double high)
+{
+    if (low == 0 && high == 0)
+        return;
+    lua_createtable(L, 2, 0);
+    bsl_push_number(L, low);
+    lua_rawseti(L, -2, 1);
+    bsl_push_number(L, high);
+    lua_rawseti(L, -2, 2);
+    lua_setfield(L, -2, field);
+}
+
+/* table = core.describe(t): what its author wrote */
+static int core_describe(lua_State *L)
+{
+    int index = check_transform(L, 1);
+    const bs_transform_def *def = bs_rules_transform(bsl_host_of(L)->session->rules, index);
+
+    lua_createtable(L, 0, 16);
+    set_text(L, "name", def->name);
+    set_text(L, "kind", def->kind == BS_DISCONNECTION ? "disconnection" : "interconversion");
+    set_text(L, "target", def->target);
+    set_text(L, "from", def->from);
+    set_text(L, "acceptor", def->acceptor);
+    set_text(L, "donor", def->donor);
+    set_text(L, "conditions", def->conditions);
+    set_text(L, "recipe", def->recipe);
+    set_text(L, "source", def->source);
+    set_text(L, "rxno", def->rxno);
+    set_text(L, "pack", def->pack);
+    set_text(L, "origin", def->origin);
+    set_pair(L, "yield", def->yield_low, def->yield_high);
+    bsl_push_words(L, def->also.items, def->also.count);
+    lua_setfield(L, -2, "also");
+    bsl_push_words(L, def->cautions.items, def->cautions.count);
+    lua_setfield(L, -2, "cautions");
+    bsl_push_words(L, def->reagents.items, def->reagents.count);
+    lua_setfield(L, -2, "reagents");
+    return 1;
+}
+
+/* name = tostring(t) */
+static int transform_tostring(lua_State *L)
+{
+    int index = check_transform(L, 1);
+
+    lua_pushstring(L, bs_rules_transform(bsl_host_of(L)->session->rules, index)->name);
+    return 1;
+}
+
+static int transform_eq(lua_State *L)
+{
+    const int *a = luaL_testudata(L, 1, TRANSFORM_TYPE), *b = luaL_testudata(L, 2, TRANSFORM_TYPE);
+
+    lua_pushboolean(L, a && b && *a == *b);
+    return 1;
+}
+
+/* Sets the fields of a step that its transform knows. */
+static void set_definition(lua_State *L, const bs_transform_def *def)
+{
+    set_text(L, "transform", def->name);
+    set_text(L, "pack", def->pack);
+    set_text(L, "conditions", def->conditions);
+    set_text(L, "recipe", def->recipe);
+    set_text(L, "source", def->source);
+    set_pair(L, "yield", def->yield_low, def->yield_high);
+    bsl_push_words(L, def->cautions.items, def->cautions.count);
+    lua_setfield(L, -2, "cautions");
+    bsl_push_words(L, def->reagents.items, def->reagents.count);
+    lua_setfield(L, -2, "reagents");
+}
+
+void bsl_push_step(lua_State *L, int product, const bs_step *step)
+{
+    bs_session *session = bsl_host_of(L)->session;
+
+    luaL_checkstack(L, 8, "step");
+    product = lua_absindex(L, product);
+    lua_createtable(L, 0, 14);
+    lua_pushvalue(L, product);
+    lua_setfield(L, -2, "product");
+    bsl_push_mols(L, step->precursors, step->smiles, step->precursor_count);
+    lua_setfield(L, -2, "precursors");
+    lua_createtable(L, step->precursor_count, 0);
+    for (int i = 0; i < step->precursor_count; i++) {
+        bsl_push_number(L, step->equivalents[i]);
+        lua_rawseti(L, -2, i + 1);
+    }
+    lua_setfield(L, -2, "equivalents");
+    lua_createtable(L, step->rivals.count, 0);
+    for (int i = 0; i < step->rivals.count; i++) {
+        const bs_outcome *rival = &step->rivals.items[i];
+
+        bsl_push_mols(L, rival->products, rival->smiles, rival->product_count);
+        lua_rawseti(L, -2, i + 1);
+    }
+    lua_setfield(L, -2, "rivals");
+    set_definition(L, bs_rules_transform(session->rules, step->transform));
+    luaL_setmetatable(L, STEP_TYPE);
+}
+
+/* Steps of one transform (or of all, with -1) on the molecule at index `i`. */
+static int push_back(lua_State *L, int transform, int i)
+{
+    bsl_host *host = bsl_host_of(L);
+    const bs_mol *mol = bsl_tomol(L, i);
+    bs_rule_hooks hooks = bsl_session_hooks(host->session);
+    bs_mark mark = bs_arena_mark(&host->results);
+    bs_steps steps;
+
+    if (bs_rules_back(host->cx, &host->results, host->session->rules, transform, mol, &hooks, 0,
+                      &steps) != BS_OK)
+        return bsl_raise_from(L, mark, NULL, 0);
+    lua_createtable(L, steps.count, 0);
+    for (int k = 0; k < steps.count; k++) {
+        bsl_push_step(L, i, &steps.items[k]);
+        lua_rawseti(L, -2, k + 1);
+    }
+    bs_arena_rewind(&host->results, mark);
+    return 1;
+}
+
+/* Product sets of one transform (or of all) from the molecules from index `first` on. */
+static int push_forth(lua_State *L, int transform, int first)
+{
+    bsl_host *host = bsl_host_of(L);
+    bs_rules *rules = host->session->rules;
+    bs_rule_hooks hooks = bsl_session_hooks(host->session);
+    bs_mark mark = bs_arena_mark(&host->results);
+    bs_product_sets sets;
+    int count;
+    const bs_mol **mols = bsl_collect_mols(L, first, &count);
+
+    if (bs_rules_forth(host->cx, &host->results, rules, transform, mols, count, &hooks, &sets) !=
+        BS_OK)
+        return bsl_raise_from(L, mark, NULL, 0);
+    luaL_checkstack(L, 8, "product sets");
+    lua_createtable(L, sets.count, 0);
+    for (int i = 0; i < sets.count; i++) {
+        const bs_product_set *set = &sets.items[i];
+
+        lua_createtable(L, 0, 4);
+        bsl_push_mols(L, set->outcome.products, set->outcome.smiles, set->outcome.product_count);
+        lua_setfield(L, -2, "products");
+        lua_pushboolean(L, set->expected);
+        lua_setfield(L, -2, "expected");
+        set_text(L, "transform", bs_rules_transform(rules, set->transform)->name);
+        lua_rawseti(L, -2, i + 1);
+    }
+    bs_arena_rewind(&host->results, mark);
+    return 1;
+}
+
+/* steps = t:back(m) */
+static int transform_back(lua_State *L)
+{
+    return push_back(L, check_transform(L, 1), 2);
+}
+
+/* sets = t:forth(m, ...) */
+static int transform_forth(lua_State *L)
+{
+    int index = check_transform(L, 1);
+
+    if (lua_gettop(L) < 2)
+        return bsl_type_error(L, 2, "molecule or SMILES");
+    return push_forth(L, index, 2);
+}
+
+/* steps = core.back(m): of every transform in use */
+static int core_back(lua_State *L)
+{
+    return push_back(L, -1, 1);
+}
+
+/* sets = core.forth(m, ...) */
+static int core_forth(lua_State *L)
+{
+    if (lua_gettop(L) < 1)
+        return bsl_type_error(L, 1, "molecule or SMILES");
+    return push_forth(L, -1, 1);
+}
+
+void bsl_open_transform(lua_State *L)
+{
+    static const luaL_Reg methods[] = {
+        { "back", transform_back },
+        { "forth", transform_forth },
+        { NULL, NULL },
+    };
+    static const luaL_Reg meta[] = {
+        { "__tostring", transform_tostring },
+        { "__eq", transform_eq },
+        { NULL, NULL },
+    };
+    static const luaL_Reg functions[] = {
+        { "find_transform", core_find_transform },
+        { "nth_transform", core_nth_transform },
+        { "transform_index", core_transform_index },
+        { "describe", core_describe },
+        { "back", core_back },
+        { "forth", core_forth },
+        { NULL, NULL },
+    };
+
+    bsl_new_type(L, TRANSFORM_TYPE, methods, meta);
+    bsl_new_type(L, STEP_TYPE, NULL, NULL);
+    luaL_setfuncs(L, functions, 0);
+    luaL_getmetatable(L, TRANSFORM_TYPE);
+    lua_setfield(L, -2, "transform_type");
+    luaL_getmetatable(L, STEP_TYPE);
+    lua_setfield(L, -2, "step_type");
+}
