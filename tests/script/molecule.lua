@@ -1,0 +1,45 @@
+-- Molecules. Formulas and masses are textbook values (molar masses from the abridged standard
+-- atomic weights of 2021); atom numbers follow the text.
+local benzocaine = mol "CCOC(=O)c1ccc(N)cc1"
+print(benzocaine:formula(), string.format("%.2f", benzocaine:mass())) --> C9H11NO2	165.19
+print(string.format("%.4f", benzocaine:exact_mass())) --> 165.0790
+print(benzocaine:charge(), mol("[NH4+]"):charge(), mol("[O-]S(=O)(=O)[O-]"):charge()) --> 0	1	-2
+
+-- equal however they are written, and a fixed point of reading and writing
+print(mol "OCC" == mol "CCO", mol "C(C)O" == mol "CCO", mol "CCO" == mol "COC") --> true	true	false
+print(mol(benzocaine:smiles()) == benzocaine, benzocaine:smiles() == tostring(benzocaine)) --> true	true
+print(mol "c1ccccc1C" == mol "CC1=CC=CC=C1") --> true
+print(mol "C[C@H](N)O" == mol "C[C@@H](N)O", mol "F/C=C/F" == mol "F/C=C\\F") --> false	false
+print(mol "C" == "C", mol(benzocaine) == benzocaine) --> false	true
+print(#mol("[CH3:7]O"):smiles "labels" > #mol("[CH3:7]O"):smiles()) --> true
+print(mol("C[C@H](N)O"):smiles "plain" == mol("CC(N)O"):smiles()) --> true
+
+-- InChI of ethanol and its key are those of the standard
+print(mol("OCC"):inchi()) --> InChI=1S/C2H6O/c1-2-3/h3H,2H2,1H3
+print(mol("OCC"):inchikey()) --> LFQSCWFLJHTTHZ-UHFFFAOYSA-N
+
+-- atoms: in the order of the input, hydrogens counted
+local atoms = mol("C[NH2+:3]c1ccccc1"):atoms()
+print(#atoms, atoms[1].element, atoms[1].hydrogens, atoms[1].degree) --> 8	C	3	1
+print(atoms[2].element, atoms[2].charge, atoms[2].hydrogens, atoms[2].carbons, atoms[2].label) --> N	1	2	2	3
+print(atoms[3].aromatic, atoms[1].aromatic, atoms[3].ring, atoms[1].ring) --> true	false	true	false
+print(mol("[13CH4]"):atoms()[1].isotope, mol("C"):atoms()[1].isotope) --> 13	0
+
+-- bonds and rings
+local bonds = mol("C=CC#N"):bonds()
+print(#bonds, bonds[1][1], bonds[1][2], bonds[1].order, bonds[2].order, bonds[3].order) --> 3	1	2	2	1	3
+print(mol("F/C=C/F"):bonds()[2].geometry, mol("FC=CF"):bonds()[2].geometry) --> trans	nil
+print(#mol("c1ccc2ccccc2c1"):rings(), #mol("c1ccc2ccccc2c1"):rings()[1], #mol("CC"):rings()) --> 2	6	0
+
+-- fragments
+local pieces = mol("[Na+].[C-]#N.O"):fragments()
+print(#pieces, pieces[1] == mol "[Na+]", pieces[2] == mol "N#[C-]", pieces[3] == mol "O") --> 3	true	true	true
+
+-- matches
+print(benzocaine:has "[NX3;H2]", benzocaine:has(pattern "S"), benzocaine:count "[CX3](=O)[OX2]") --> true	false	1
+print(table.concat(mol("OCCO"):find("CO")[2], " "), #mol("CC"):find "N") --> 3 4	0
+
+-- locked, and deaf to strangers
+print(getmetatable(benzocaine)) --> false
+print(fails(benzocaine.formula)) --> argument 1: molecule expected, got nothing
+print(fails(mol)) --> mol: argument 1: molecule or SMILES expected, got nil

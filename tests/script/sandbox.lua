@@ -1,0 +1,55 @@
+-- Packs: by name and by file, and what they cannot do.
+use "quay"
+use "quay"
+local rule = transform "quay ether"
+print(rule.pack, (rule:check())) --> quay	true
+print(#rule:back(mol "CCOc1ccccc1"), #rule:back(mol "CC(C)Oc1ccccc1")) --> 1	0
+
+-- Writes a pack, uses it, and gives the message without the name of the file.
+local count = 0
+local function try(text)
+    count = count + 1
+    local path = os.tmpname()
+    os.remove(path)
+    path = path .. ".lua"
+    local file = assert(io.open(path, "w"))
+    file:write(text)
+    file:close()
+    local ok, problem = pcall(use, path)
+    os.remove(path)
+    if ok then return "fine" end
+    local text = tostring(problem):gsub(path:gsub("%p", "%%%0"), "PACK")
+    return (text:gsub("\n.*", ""))
+end
+
+print(try "pack { name = 'try-1' }") --> fine
+print(try "while true do end") --> PACK:1: the limit of instructions for a pack is reached
+print(try "local t = {} for i = 1, 1e9 do t[i] = { i } end") --> PACK: the memory limit of 256 MiB for packs is reached
+print(try "local t = 'x' while true do t = t .. t end") --> PACK: the memory limit of 256 MiB for packs is reached
+print(try "assert(not io and not os and not load and not pcall and not getmetatable and not debug and not require)") --> fine
+print(try "assert(not coroutine and not setmetatable and not rawset and not next and not dofile and not math.random)") --> fine
+print(try "assert(not ('x').gsub and not ('x').find and not string.dump and not plan and not catalogue)") --> fine
+print(try "string.upper = 1 table.sort = nil math = nil x = 5") --> fine
+print(try "assert(x == nil and ('a'):upper() == 'A' and table.sort and math.floor(1.5) == 1)") --> fine
+print(try "use './quay.lua'") --> PACK:1: './quay.lua' is no name of a pack; letters, digits, '-', '_' and '.' are expected
+print(try "pack { name = 'x', needs = { '../../etc/passwd' } }") --> PACK:1: '../../etc/passwd' is no name of a pack; letters, digits, '-', '_' and '.' are expected
+print(try "mol.read 'x'") --> PACK:1: attempt to index a function value (global 'mol')
+print(try "('x'):rep(1e9)") --> PACK:1: string.rep: more than a million bytes
+print(try "assert(tostring({}) == 'table' and ('%s'):format(print) == 'function')") --> fine
+print(try "local s = '' for k in pairs { b = 1, a = 2, 30, 20 } do s = s .. tostring(k) end assert(s == '12ab')") --> fine
+print(try "pack { name = 'quay' }") --> PACK:1: a pack named 'quay' is already in use
+print(try "pack { name = 'try-2', licens = 'x' }") --> PACK:1: pack: unknown field 'licens'; did you mean 'licence'?
+print(try "interconversion 'try 3' { target = '[C:1', from = '[C:1]' }":match "^PACK:1: try 3: target") --> PACK:1: try 3: target
+print(try "local x = = 3":match "^PACK:1: ") --> PACK:1: 
+print(try "error {}") --> PACK: the error is no text but a table
+print(try "\27Lua") --> PACK: this is no text; a pack in Lua is expected
+print(try "x = '\0'") --> PACK: this is no text; a pack in Lua is expected
+print(fails(use, "no-such-pack")) --> no pack 'no-such-pack' beside the script, on BACKSAW_PATH or in the standard library
+print(fails(use, "./no-such-pack.lua")) --> no pack in file './no-such-pack.lua'
+print(fails(use, 3)) --> use: the name or the file of a pack is expected, not a number
+
+-- a function of a rule that never ends is stopped, and the session goes on
+print(try "interconversion 'try endless' { target = '[CX4:1][OX2H:2]', from = '[C:1]Br.[O:2]', when = function() while true do end end }") --> fine
+local endless = transform "try endless"
+print((fails(endless.back, endless, mol "CCO"):gsub("^.*:%d+: ", ""))) --> the limit of instructions for a pack is reached
+print(#rule:back(mol "CCOc1ccccc1")) --> 1
