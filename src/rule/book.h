@@ -86,6 +86,18 @@ typedef struct bs_piece {
 bs_status bs_piece__split(bs_ctx *cx, bs_arena *home, const bs_mol *mol, bs_piece **out,
                           int *count);
 
+/* ---- Azoles ------------------------------------------------------------------------------- */
+
+/* A tautomer with the same atom numbers; `nitrogen` is where the hydrogen went. */
+typedef struct bs_azole_form {
+    bs_mol *mol;
+    uint32_t nitrogen;
+} bs_azole_form;
+
+/* The other forms of a molecule in which one azole hydrogen has moved, at most `room`. */
+bs_status bs_azole__forms(bs_ctx *cx, bs_arena *home, const bs_mol *mol, bs_azole_form *out,
+                          int room, int *count);
+
 /* ---- Running rules --------------------------------------------------------------------------- */
 
 /* The atoms of a product under the author's map numbers; `atom_of[k]` for atom k of the target. */
@@ -116,6 +128,8 @@ typedef struct bs_forward {
     /* of the run at hand */
     const bs_case *kase;
     const uint32_t *reactant;
+    int moved_part;    /* part that is another form of an azole, or -1; */
+    uint32_t moved_to; /* results count only if this atom of it reacts */
 } bs_forward;
 
 /* Starts and ends a forward run. */
@@ -123,7 +137,10 @@ void bs_forward__init(bs_forward *run, bs_ctx *cx, bs_arena *home, const bs_tran
                       const bs_rule_hooks *hooks, bool judge);
 void bs_forward__free(bs_forward *run);
 
-/* Runs one case on one molecule a part; new product sets are added. */
+/*
+ * Runs one case on one molecule a part, and on other forms of azoles where these react; new
+ * product sets are added.
+ */
 bs_status bs_forward__run(bs_ctx *cx, bs_forward *run, const bs_case *kase,
                           const bs_mol *const *mols, const uint32_t *reactant);
 

@@ -6,7 +6,7 @@
 
 #include "rule/book.h"
 
-enum { MAX_PLACES = 400, MAX_MADE = 1000, MAX_STEPS = 1000000 };
+enum { MAX_PLACES = 400, MAX_MADE = 1000, MAX_STEPS = 1000000, MAX_FORMS = 4 };
 
 void bs_forward__init(bs_forward *run, bs_ctx *cx, bs_arena *home, const bs_transform *tr,
                       const bs_rule_hooks *hooks, bool judge)
@@ -116,6 +116,19 @@ static bs_status make_room(bs_ctx *cx, bs_forward *run)
     return BS_OK;
 }
 
+/* Whether an atom that the reaction changes lies on the nitrogen that got the hydrogen. */
+static bool moved_reacts(const bs_forward *run, const uint32_t *where)
+{
+    const bs_side *from = run->kase->forth.from;
+
+    for (int i = 0; i < from->atom_count; i++) {
+        if (from->atoms[i].part == run->moved_part && where[i] == run->moved_to &&
+            run->kase->forth.active[i])
+            return true;
+    }
+    return run->moved_part < 0;
+}
+
 static bs_status add_made(void *payload, bs_ctx *cx, const uint32_t *where,
                           const bs_result *result, bool *keep)
 {
@@ -127,7 +140,7 @@ static bs_status add_made(void *payload, bs_ctx *cx, const uint32_t *where,
     int index;
     bs_status st;
 
-    if (run->made.count >= MAX_MADE)
+    if (run->made.count >= MAX_MADE || !moved_reacts(run, where))
         return BS_OK;
     if ((st = bs_result__smiles(cx, run->home, result, &smiles)) != BS_OK ||
         (st = bs_seen__add(cx, &run->seen, smiles, result->product_count, &index, keep)) != BS_OK)
@@ -151,12 +164,42 @@ static bs_status add_made(void *payload, bs_ctx *cx, const uint32_t *where,
                               smiles, &made->outcome);
 }
 
+/* The same with each part in turn in the other forms of its azole. */
+static bs_status run_forms(bs_ctx *cx, bs_forward *run, const bs_mol *const *mols,
+                           const bs_run_opts *opts)
+{
+    bs_mark temp = bs_arena_mark(&cx->scratch);
+    int parts = run->kase->source.part_count;
+    const bs_mol **other;
+    bs_status st = bs_new(cx, &cx->scratch, parts + 1, &other);
+
+    for (int p = 0; p < parts && st == BS_OK; p++) {
+        bs_azole_form forms[MAX_FORMS];
+        int count;
+
+        st = bs_azole__forms(cx, &cx->scratch, mols[p], forms, MAX_FORMS, &count);
+        for (int k = 0; k < count && st == BS_OK; k++) {
+            memcpy(other, mols, (size_t)parts * sizeof *other);
+            other[p] = forms[k].mol;
+            run->moved_part = p;
+            run->moved_to = forms[k].nitrogen;
+            st = bs_run__all(cx, run->home, &run->kase->forth, other, opts, add_made, run);
+        }
+    }
+    bs_arena_rewind(&cx->scratch, temp);
+    return st;
+}
+
 bs_status bs_forward__run(bs_ctx *cx, bs_forward *run, const bs_case *kase,
                           const bs_mol *const *mols, const uint32_t *reactant)
 {
     bs_run_opts opts = {.limit = MAX_PLACES, .steps = MAX_STEPS};
+    bs_status st;
 
     run->kase = kase;
     run->reactant = reactant;
-    return bs_run__all(cx, run->home, &kase->forth, mols, &opts, add_made, run);
+    run->moved_part = -1;
+    if ((st = bs_run__all(cx, run->home, &kase->forth, mols, &opts, add_made, run)) != BS_OK)
+        return st;
+    return run_forms(cx, run, mols, &opts);
 }

@@ -290,6 +290,28 @@ static void amide__comes_from_acid_chloride_and_amine(void **state)
     bs_rules_free(b.rules);
 }
 
+/* Indazole is methylated at N1 and at N2, whichever nitrogen is drawn with the hydrogen. */
+static void azole__is_alkylated_at_either_nitrogen(void **state)
+{
+    book b = new_book(state);
+    bs_steps steps;
+    int index;
+
+    add_synthon(&b, "alkyl", BS_ACCEPTOR, halides, 1);
+    add_synthon(&b, "azole", BS_DONOR, proton, 1);
+    index = add_cut(&b, "azole alkylation", "[n;r5;X3:2]-!@[CX4:1]", 1, "alkyl", 2, "azole");
+    steps = back(&b, index, "Cn1ncc2ccccc12");
+    assert_int_equal(steps.count, 1);
+    assert_true(has_step(&b, &steps, "CBr", "c1ccc2[nH]ncc2c1"));
+    assert_true(has_rival(&b, &steps.items[0], "Cn1cc2ccccc2n1"));
+    /* Where the azole takes no part, its other forms are no products. */
+    index = add_from(&b, "ester hydrolysis", "[CX3:1](=[O:2])[OX2H:3]", "[C:1](=[O:2])[O:3]C");
+    steps = back(&b, index, "OC(=O)c1c[nH]cn1");
+    assert_int_equal(steps.count, 1);
+    assert_int_equal(steps.items[0].rivals.count, 0);
+    bs_rules_free(b.rules);
+}
+
 static void grignard__adds_to_a_carbonyl(void **state)
 {
     book b = new_book(state);
@@ -508,6 +530,58 @@ static void hooks__decide_and_order(void **state)
     bs_rules_free(b.rules);
 }
 
+static bs_status use_book_once(fixture *f, const bs_mol *product, const bs_mol *const *given)
+{
+    bs_synthon_def acceptor = {.name = "a", .kind = BS_ACCEPTOR, .equivalents = carbonyl,
+                               .equivalent_count = 1};
+    bs_synthon_def donor = {.name = "d", .kind = BS_DONOR, .equivalents = sodium,
+                            .equivalent_count = 1};
+    bs_transform_def def = {.name = "cyanohydrin", .target = "[CX4:1]([OX2H:3])-!@[C:2]#[N:4]",
+                            .cut = {1, 2}, .acceptor_map = 1, .donor_map = 2, .acceptor = "a",
+                            .donor = "d", .hook_when = -1, .hook_prefer = -1};
+    bs_rules *rules = NULL;
+    bs_steps steps = {0};
+    bs_product_sets sets = {0};
+    int index;
+    bs_status st = bs_rules_new(&f->cx, &rules);
+
+    if (st == BS_OK)
+        st = bs_rules_add_synthon(&f->cx, rules, &acceptor);
+    if (st == BS_OK)
+        st = bs_rules_add_synthon(&f->cx, rules, &donor);
+    if (st == BS_OK)
+        st = bs_rules_add_transform(&f->cx, rules, &def, &index);
+    if (st == BS_OK)
+        st = bs_rules_back(&f->cx, &f->home, rules, -1, product, NULL, 0, &steps);
+    if (st == BS_OK)
+        st = bs_rules_forth(&f->cx, &f->home, rules, -1, given, 2, NULL, &sets);
+    if (st == BS_OK && (steps.count != 1 || sets.count != 1))
+        fail_msg("%d steps, %d sets", steps.count, sets.count);
+    bs_rules_free(rules);
+    return st;
+}
+
+static void book__every_failed_allocation_is_rolled_back(void **state)
+{
+    fixture *f = *state;
+    const bs_mol *product = read_mol(f, "CC(C)(O)C#N");
+    const bs_mol *given[] = {read_mol(f, "CC(C)=O"), read_mol(f, "[Na+].[C-]#N")};
+    size_t live = f->home.live;
+    bs_status st = BS_ENOMEM;
+
+    for (long n = 0; n < 20000 && st == BS_ENOMEM; n++) {
+        bs_mark mark = bs_arena_mark(&f->home);
+
+        atomic_store(&f->cx.own_gate.fail_after, n);
+        st = use_book_once(f, product, given);
+        atomic_store(&f->cx.own_gate.fail_after, -1);
+        bs_arena_rewind(&f->home, mark);
+        assert_int_equal(f->home.live, live);
+        assert_int_equal(f->cx.scratch.live, 0);
+    }
+    assert_int_equal(st, BS_OK);
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
@@ -520,6 +594,7 @@ int main(void)
         check_case(cyanide__displaces_a_primary_halide),
         check_case(williamson__gives_ethers_from_both_sides),
         check_case(amide__comes_from_acid_chloride_and_amine),
+        check_case(azole__is_alkylated_at_either_nitrogen),
         check_case(grignard__adds_to_a_carbonyl),
         check_case(reductive_amination__joins_ketone_and_amine),
         check_case(wittig__cuts_a_double_bond),
@@ -529,6 +604,7 @@ int main(void)
         check_case(definitions__mistakes_name_the_field),
         check_case(synthons__mistakes_name_the_field),
         check_case(hooks__decide_and_order),
+        check_case(book__every_failed_allocation_is_rolled_back),
     };
 
     return cmocka_run_group_tests(tests, NULL, NULL);
