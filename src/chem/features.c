@@ -2,7 +2,8 @@
  * Features of molecules for the screens of match.
  *
  * Word 0: 0-14 the classes; 15-22 aromatic and aliphatic C, N, O, S; 23 any aromatic atom;
- * 24-37 with hydrogens; 38-41 charges; 42-49 rings; 50-57 neighbours; 62, 63 stereo.
+ * 24-37 with hydrogens; 38-41 charges; 42-49 rings; 50-57 neighbours; 58, 59 heavy halogens;
+ * 62, 63 stereo.
  * Word 1: 0-51 bonds; 52-63 numbers of atoms.
  */
 #include "chem/features.h"
@@ -39,6 +40,8 @@ bs_features bs_feature__atom(int class, bool aromatic)
 
     if (class <= BS_CLASS_S)
         f.word[0] |= BIT(15 + 2 * class + !aromatic);
+    if (class == BS_CLASS_CL || class == BS_CLASS_BR || class == BS_CLASS_I)
+        f.word[0] |= BIT(58) | (class == BS_CLASS_CL ? 0 : BIT(59));
     if (aromatic)
         f.word[0] |= BIT(23);
     return f;

@@ -14,13 +14,14 @@ enum {
     ALL_COUNTS = 31,                           /* 0 to 3, and 4 or more */
     ALL_CHARGES = 7,                           /* negative, none, positive */
     ALL_RINGS = 511,                           /* none, 3 to 7, 8 or more; bits 0, 3 to 8 */
+    ALL_HANDS = 3,                             /* without and with a hand */
     HIGH = 4
 };
 
 /* The states that an atom may be in. */
 typedef struct box {
     uint32_t kinds;
-    uint8_t hydrogens, charges, degrees, ring_bonds;
+    uint8_t hydrogens, charges, degrees, ring_bonds, hands;
     uint16_t rings;
 } box;
 
@@ -29,8 +30,8 @@ typedef struct sides {
     box yes, no;
 } sides;
 
-static const box everything = {ALL_KINDS, ALL_COUNTS, ALL_CHARGES, ALL_COUNTS, ALL_COUNTS,
-                               ALL_RINGS};
+static const box everything = {ALL_KINDS,  ALL_COUNTS, ALL_CHARGES, ALL_COUNTS,
+                               ALL_COUNTS, ALL_HANDS,  ALL_RINGS};
 
 static box meet(box a, box b)
 {
@@ -39,6 +40,7 @@ static box meet(box a, box b)
                  (uint8_t)(a.charges & b.charges),
                  (uint8_t)(a.degrees & b.degrees),
                  (uint8_t)(a.ring_bonds & b.ring_bonds),
+                 (uint8_t)(a.hands & b.hands),
                  (uint16_t)(a.rings & b.rings)};
 }
 
@@ -49,6 +51,7 @@ static box join(box a, box b)
                  (uint8_t)(a.charges | b.charges),
                  (uint8_t)(a.degrees | b.degrees),
                  (uint8_t)(a.ring_bonds | b.ring_bonds),
+                 (uint8_t)(a.hands | b.hands),
                  (uint16_t)(a.rings | b.rings)};
 }
 
@@ -135,6 +138,9 @@ static sides leaf_sides(const bs_test *test)
         return ring_sides(test->kind, test->value);
     case BS_TEST_CHARGE:
         return charge_sides(test->value);
+    case BS_TEST_CHIRAL:
+        s.yes.hands = test->value > 2 ? ALL_HANDS : 2;
+        return s;
     default:
         return s;
     }
@@ -241,6 +247,8 @@ static bs_features atom_needs(const box *b)
     also(&sum, degree);
     also(&sum, ring);
     also(&sum, bonds);
+    if (b->hands == 2)
+        sum.word[0] |= (uint64_t)1 << BS_FEATURE_HAND;
     return sum;
 }
 
