@@ -13,6 +13,7 @@
 
 enum {
     FIRST_SIZE = 8,
+    MANY_PATHS = 64, /* a family of more rings is represented by one */
     MAX_WORDS = 1 << 25 /* of the basis: 256 MiB */
 };
 
@@ -21,6 +22,7 @@ typedef struct candidate {
     uint32_t root, top, p, q;
     uint32_t size;
     uint32_t path; /* where its atoms stand in `path_atoms` */
+    uint32_t family; /* number of rings through other shortest paths, with this one */
     uint32_t next; /* the next candidate of the same size + 1, or 0 */
 } candidate;
 
@@ -37,6 +39,7 @@ typedef struct cycles {
     uint32_t *distance; /* UINT32_MAX where not reached */
     uint32_t *before;   /* the atom before on the path, over atoms below the root only */
     bool *low;          /* whether there is such a path */
+    uint32_t *ways;     /* how many there are, up to MANY_PATHS + 1 */
     uint32_t *queue;
     uint32_t *stamp; /* for the test whether two paths meet */
     uint32_t clock;
@@ -123,13 +126,17 @@ static uint32_t walk(cycles *c, uint32_t root, uint32_t depth)
             if (c->distance[w] == UINT32_MAX) {
                 c->distance[w] = c->distance[v] + 1;
                 c->low[w] = false;
+                c->ways[w] = 0;
                 c->queue[tail++] = w;
             }
-            if (w < root && !c->low[w] && c->distance[w] == c->distance[v] + 1 &&
-                (v == root || c->low[v])) {
-                c->low[w] = true;
+            if (w >= root || c->distance[w] != c->distance[v] + 1 || (v != root && !c->low[v]))
+                continue;
+            if (!c->low[w])
                 c->before[w] = v;
-            }
+            c->low[w] = true;
+            c->ways[w] += v == root ? 1 : c->ways[v];
+            if (c->ways[w] > MANY_PATHS)
+                c->ways[w] = MANY_PATHS + 1;
         }
     }
     return tail;
@@ -183,6 +190,7 @@ static bs_status keep_candidate(cycles *c, candidate found)
         (st = double_room(c, &c->list, c->count, &c->room, sizeof(candidate))) != BS_OK)
         return st;
     found.path = c->path_count;
+    found.family = c->ways[found.p] * c->ways[found.q];
     at = c->path_count + c->distance[found.p];
     for (uint32_t v = found.p; v != found.root; v = c->before[v])
         c->path_atoms[at--] = v;
@@ -215,7 +223,7 @@ static bs_status candidates_at(cycles *c, uint32_t root, uint32_t y, uint32_t li
             continue;
         if (c->distance[z] == d && z < y && 2 * d + 1 <= limit) {
             if (paths_are_apart(c, root, z, y))
-                st = keep_candidate(c, (candidate){root, y, z, y, 2 * d + 1, 0, 0});
+                st = keep_candidate(c, (candidate){root, y, z, y, 2 * d + 1, 0, 0, 0});
         } else if (c->distance[z] + 1 == d && 2 * d <= limit) {
             for (uint32_t j = c->offsets[y]; j < k && st == BS_OK; j++) {
                 uint32_t w = c->links[j].atom;
@@ -223,7 +231,7 @@ static bs_status candidates_at(cycles *c, uint32_t root, uint32_t y, uint32_t li
                 if (w >= root || c->distance[w] + 1 != d || !c->low[w])
                     continue;
                 if (paths_are_apart(c, root, w, z))
-                    st = keep_candidate(c, (candidate){root, y, w, z, 2 * d, 0, 0});
+                    st = keep_candidate(c, (candidate){root, y, w, z, 2 * d, 0, 0, 0});
             }
         }
     }
@@ -307,15 +315,76 @@ static bs_status emit(cycles *c, const candidate *ring, bs_rings *into)
     return st;
 }
 
+/* The `way`-th path from the root to `v`, written backwards from `to`. */
+static void write_way(const cycles *c, uint32_t root, uint32_t v, uint32_t way, uint32_t *to,
+                      int step)
+{
+    while (v != root) {
+        uint32_t k = c->offsets[v];
+
+        *to = c->global[v];
+        to += step;
+        if (c->distance[v] == 1)
+            return;
+        for (;; k++) {
+            uint32_t w = c->links[k].atom;
+
+            if (w >= root || c->distance[w] + 1 != c->distance[v] || !c->low[w])
+                continue;
+            if (way < c->ways[w])
+                break;
+            way -= c->ways[w];
+        }
+        v = c->links[k].atom;
+    }
+}
+
+/*
+ * Adds the other rings of a family: those that go through other shortest paths. They are as
+ * relevant as the candidate, and which of them that is depends on the numbers of the atoms.
+ */
+static bs_status emit_family(cycles *c, const candidate *ring, bs_rings *more)
+{
+    uint32_t reached;
+    bs_status st = BS_OK;
+
+    if (ring->family < 2 || ring->family > MANY_PATHS)
+        return BS_OK;
+    reached = walk(c, ring->root, ring->size / 2);
+    for (uint32_t i = 0; i < ring->family && st == BS_OK; i++) {
+        uint32_t d = c->distance[ring->p];
+        uint32_t *atoms;
+        bool known = true;
+
+        if ((st = bs_ring__add(more, ring->size, &atoms)) != BS_OK)
+            break;
+        atoms[0] = c->global[ring->root];
+        write_way(c, ring->root, ring->p, i % c->ways[ring->p], atoms + d, -1);
+        if (ring->q != ring->top)
+            atoms[d + 1] = c->global[ring->top];
+        write_way(c, ring->root, ring->q, i / c->ways[ring->p],
+                  atoms + d + (ring->q != ring->top ? 2 : 1), 1);
+        for (uint32_t k = 0; k < ring->size; k++)
+            known = known && atoms[k] == c->global[c->path_atoms[ring->path + k]];
+        more->count -= known;
+    }
+    for (uint32_t i = 0; i < reached; i++)
+        c->distance[c->queue[i]] = UINT32_MAX;
+    return st;
+}
+
 /* Tests one candidate; `shorter` rows come from shorter rings. */
 static bs_status consider(cycles *c, const candidate *ring, uint32_t shorter, bs_rings *set,
                           bs_rings *more)
 {
     uint32_t bond;
+    bs_status st;
 
     load_vector(c, ring);
     if (reduce(c, shorter) == UINT32_MAX)
         return BS_OK;
+    if ((st = emit_family(c, ring, more)) != BS_OK)
+        return st;
     bond = reduce(c, c->row_count);
     if (bond == UINT32_MAX)
         return emit(c, ring, more);
@@ -356,6 +425,7 @@ static bs_status prepare(cycles *c)
         (st = bs_new(c->cx, scratch, c->atoms, &c->distance)) != BS_OK ||
         (st = bs_new(c->cx, scratch, c->atoms, &c->before)) != BS_OK ||
         (st = bs_new(c->cx, scratch, c->atoms, &c->low)) != BS_OK ||
+        (st = bs_new(c->cx, scratch, c->atoms, &c->ways)) != BS_OK ||
         (st = bs_new(c->cx, scratch, c->atoms, &c->queue)) != BS_OK ||
         (st = bs_new(c->cx, scratch, c->atoms, &c->stamp)) != BS_OK ||
         (st = bs_new(c->cx, scratch, c->atoms + 1, &c->first)) != BS_OK ||

@@ -33,6 +33,12 @@ bs_status bs_stereo__place(bs_ctx *cx, const bs_draft *draft, const uint32_t *or
  */
 bs_status bs_kekule__assign(bs_ctx *cx, bs_mol *mol, const int16_t *stated, const bool *wish);
 
+/*
+ * Moves double bonds that lie inside of aromatic systems, but are not aromatic, to their rim where
+ * that can be done, so that all Kekulé forms of one compound end as one.
+ */
+bs_status bs_kekule__settle(bs_ctx *cx, bs_mol *mol);
+
 /* Sets the aromatic marks of atoms and bonds. */
 bs_status bs_aromatic__mark(bs_ctx *cx, bs_mol *mol, const struct bs_rings *rings);
 

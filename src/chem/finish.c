@@ -369,7 +369,8 @@ static bs_status perceive(finish *f)
         (st = bs_ring__find(f->cx, scratch, f->mol, &blocks, &f->rings)) != BS_OK)
         return st;
     count_rings(f);
-    if ((st = bs_aromatic__mark(f->cx, f->mol, &f->rings)) != BS_OK)
+    if ((st = bs_aromatic__mark(f->cx, f->mol, &f->rings)) != BS_OK ||
+        (st = bs_kekule__settle(f->cx, f->mol)) != BS_OK)
         return st;
     if ((st = bs_stereo__place(f->cx, f->draft, f->order, &f->rings, f->mol)) != BS_OK)
         return st;

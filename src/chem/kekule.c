@@ -75,7 +75,7 @@ static need need_of(const kekule *k, uint32_t atom)
     if (aromatic == 0)
         return NEED_NONE;
     if (a->element == 0)
-        return multiple ? NEED_NONE : NEED_EITHER;
+        return NEED_EITHER;
     if (multiple && a->element == 6)
         return NEED_NONE;
     sum += a->hydrogens;
@@ -329,7 +329,7 @@ static bs_status prepare(kekule *k)
         k->mate[i] = NOBODY;
         k->back[i] = NOBODY;
         k->base[i] = i;
-        k->needs[i] = (uint8_t)need_of(k, i);
+        k->needs[i] = (uint8_t)(k->stated ? need_of(k, i) : NEED_NONE);
         if (k->needs[i] != NEED_NONE)
             k->parts[k->part_count++] = i;
     }
@@ -409,6 +409,66 @@ bs_status bs_kekule__assign(bs_ctx *cx, bs_mol *mol, const int16_t *stated, cons
         match_greedily(&k);
         if ((st = serve_all(&k)) == BS_OK)
             write_orders(&k);
+    }
+    bs_arena_rewind(&cx->scratch, temp);
+    return st;
+}
+
+/* ---- Double bonds inside of aromatic systems -------------------------------------------------- */
+
+/* Whether a bond is double and not aromatic though it joins aromatic atoms within rings. */
+static bool lies_inside(const bs_mol *mol, const bs_bond *b)
+{
+    return b->order == 2 && (b->flags & (BS_BOND_AROMATIC | BS_BOND_RING)) == BS_BOND_RING &&
+           (mol->atoms[b->a].flags & mol->atoms[b->b].flags & BS_ATOM_AROMATIC);
+}
+
+/* Opens the aromatic bonds; their double bonds become the matching. */
+static void open_aromatic(kekule *k)
+{
+    bs_bond *bonds = bs_mol__bonds_mutable(k->mol);
+
+    for (uint32_t i = 0; i < k->mol->bond_count; i++) {
+        bs_bond *b = &bonds[i];
+
+        if (!(b->flags & BS_BOND_AROMATIC))
+            continue;
+        if (b->order == 2) {
+            k->needs[b->a] = k->needs[b->b] = NEED_DOUBLE;
+            match(k, b->a, b->b);
+        }
+        b->order = BS_DRAFT_ORDER_AROMATIC;
+    }
+}
+
+bs_status bs_kekule__settle(bs_ctx *cx, bs_mol *mol)
+{
+    kekule k = {.cx = cx, .mol = mol};
+    bs_bond *bonds = bs_mol__bonds_mutable(mol);
+    bs_mark temp = bs_arena_mark(&cx->scratch);
+    uint32_t inside = 0;
+    bs_status st;
+
+    for (uint32_t i = 0; i < mol->bond_count; i++)
+        inside += lies_inside(mol, &bonds[i]);
+    if (inside == 0)
+        return BS_OK;
+    if ((st = prepare(&k)) == BS_OK) {
+        open_aromatic(&k);
+        for (uint32_t i = 0; i < mol->bond_count && st == BS_OK; i++) {
+            bool done;
+            bs_bond *b = &bonds[i];
+
+            if (!lies_inside(mol, b))
+                continue;
+            k.needs[b->a] = k.needs[b->b] = NEED_DOUBLE;
+            st = serve(&k, b->a, &done);
+            if (done)
+                b->order = 1;
+            else
+                k.needs[b->a] = k.needs[b->b] = NEED_NONE;
+        }
+        write_orders(&k);
     }
     bs_arena_rewind(&cx->scratch, temp);
     return st;

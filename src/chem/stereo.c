@@ -20,7 +20,8 @@ static int around_end(const bs_mol *mol, uint32_t end, uint32_t chain, uint32_t 
     const bs_link *links = bs_mol__links(mol, end);
     int count = 0;
 
-    if (mol->atoms[end].degree + mol->atoms[end].hydrogens > 3 || mol->atoms[end].degree < 2)
+    /* An end with a lone pair is no end: it straightens. */
+    if (mol->atoms[end].degree + mol->atoms[end].hydrogens != 3 || mol->atoms[end].degree < 2)
         return 0;
     if (mol->atoms[end].degree == 2)
         out[count++] = BS_DRAFT_HYDROGEN;
@@ -231,6 +232,17 @@ static bs_status measure_bond_rings(placing *p)
     return st;
 }
 
+static int double_bonds(const bs_mol *mol, uint32_t atom)
+{
+    const bs_bond *bonds = bs_mol__bonds(mol);
+    const bs_link *links = bs_mol__links(mol, atom);
+    int count = 0;
+
+    for (int k = 0; k < mol->atoms[atom].degree; k++)
+        count += bonds[links[k].bond].order == 2;
+    return count;
+}
+
 /*
  * Whether an end of a double bond can have a geometry, and whether the atom named by the mark
  * stands on the other side than the reference.
@@ -241,6 +253,8 @@ static bool read_end(const bs_mol *mol, uint32_t end, uint32_t other, uint32_t n
     uint32_t reference = bs_stereo__reference(mol, end, other);
     int others = a->degree - 1;
 
+    if (double_bonds(mol, end) != 1)
+        return false;
     if (others + a->hydrogens > 2 || a->hydrogens > 1)
         return false;
     if (others == 0 && (a->hydrogens != 1 || a->element != 7))
