@@ -64,7 +64,7 @@ static void find_folded(const bs_draft *draft, uint32_t *host, uint32_t *degree)
             continue;
         degree[b->a]++;
         degree[b->b]++;
-        if (b->order == 1) {
+        if (b->order == 1 || b->order == BS_DRAFT_ORDER_AROMATIC) {
             host[b->a] = b->b;
             host[b->b] = b->a;
         }
