@@ -55,7 +55,7 @@ static bs_status sort_pieces(bs_ctx *cx, ordered_piece **pieces, size_t count)
 }
 
 static bs_status order_piece(bs_ctx *cx, const bs_mol *mol, const bs_canon_pieces *pieces,
-                             uint32_t piece, bool orbits, bs_canon_order *order)
+                             uint32_t piece, bool labelled, bool orbits, bs_canon_order *order)
 {
     bs_canon_task task = {.certificate = pieces->count > 1, .orbits = orbits};
     bs_canon_graph graph;
@@ -63,13 +63,14 @@ static bs_status order_piece(bs_ctx *cx, const bs_mol *mol, const bs_canon_piece
 
     if ((st = bs_canon__graph(cx, mol, pieces, piece, &graph)) != BS_OK)
         return st;
+    graph.labelled = labelled;
     bs_canon__set_keys(&graph, true);
     return bs_canon__search(cx, &graph, &task, order);
 }
 
 /* Orders all pieces; `list` gets them in their canonical order, in the scratch arena. */
-static bs_status order_pieces(bs_ctx *cx, const bs_mol *mol, bool orbits, bs_canon_pieces *pieces,
-                              ordered_piece **list)
+static bs_status order_pieces(bs_ctx *cx, const bs_mol *mol, bool labelled, bool orbits,
+                              bs_canon_pieces *pieces, ordered_piece **list)
 {
     bs_status st;
 
@@ -79,13 +80,13 @@ static bs_status order_pieces(bs_ctx *cx, const bs_mol *mol, bool orbits, bs_can
     for (uint32_t p = 0; p < pieces->count; p++) {
         (*list)[p].piece = p;
         (*list)[p].size = pieces->start[p + 1] - pieces->start[p];
-        if ((st = order_piece(cx, mol, pieces, p, orbits, &(*list)[p].order)) != BS_OK)
+        if ((st = order_piece(cx, mol, pieces, p, labelled, orbits, &(*list)[p].order)) != BS_OK)
             return st;
     }
     return pieces->count > 1 ? sort_pieces(cx, list, pieces->count) : BS_OK;
 }
 
-bs_status bs_mol_canonical_order(bs_ctx *cx, bs_arena *home, const bs_mol *mol, int **rank)
+bs_status bs_mol__order(bs_ctx *cx, bs_arena *home, const bs_mol *mol, bool labelled, int **rank)
 {
     bs_mark kept = bs_arena_mark(home), temp;
     bs_canon_pieces pieces;
@@ -96,7 +97,7 @@ bs_status bs_mol_canonical_order(bs_ctx *cx, bs_arena *home, const bs_mol *mol, 
     if ((st = bs_new(cx, home, mol->atom_count, rank)) != BS_OK)
         return st;
     temp = bs_arena_mark(&cx->scratch);
-    if ((st = order_pieces(cx, mol, false, &pieces, &list)) != BS_OK)
+    if ((st = order_pieces(cx, mol, labelled, false, &pieces, &list)) != BS_OK)
         goto done;
     for (uint32_t p = 0; p < pieces.count; p++) {
         const uint32_t *atoms = pieces.atoms + pieces.start[list[p].piece];
@@ -112,6 +113,11 @@ done:
         *rank = NULL;
     }
     return st;
+}
+
+bs_status bs_mol_canonical_order(bs_ctx *cx, bs_arena *home, const bs_mol *mol, int **rank)
+{
+    return bs_mol__order(cx, home, mol, false, rank);
 }
 
 /* ---- Symmetry -------------------------------------------------------------------------- */
@@ -167,7 +173,7 @@ bs_status bs_mol_symmetry(bs_ctx *cx, bs_arena *home, const bs_mol *mol, int **c
     if ((st = bs_new(cx, home, mol->atom_count, classes)) != BS_OK)
         return st;
     temp = bs_arena_mark(&cx->scratch);
-    if ((st = order_pieces(cx, mol, true, &pieces, &list)) != BS_OK)
+    if ((st = order_pieces(cx, mol, false, true, &pieces, &list)) != BS_OK)
         goto done;
     for (uint32_t p = 0; p < pieces.count; p++) {
         if (p > 0 && compare_pieces(&list[p - 1], &list[p]) != 0)

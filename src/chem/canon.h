@@ -59,6 +59,7 @@ typedef struct bs_canon_graph {
     uint32_t element_count;
     uint32_t *element_head; /* for each atom: first link, or BS_CANON_NONE */
     uint32_t *element_next; /* links 2 * element + site index */
+    bool labelled;          /* labels (atom classes) tell atoms apart */
 } bs_canon_graph;
 
 static inline bool bs_canon__is_atom(uint32_t ligand)
@@ -83,6 +84,9 @@ bs_status bs_canon__graph(bs_ctx *cx, const bs_mol *mol, const bs_canon_pieces *
 
 /* Sets the keys; with `marked` the presence of stereo elements is part of them. */
 void bs_canon__set_keys(bs_canon_graph *graph, bool marked);
+
+/* The label of an atom if the graph is labelled, else 0. */
+uint32_t bs_canon__label(const bs_canon_graph *graph, uint32_t atom);
 
 /*
  * Reads the stereo element of an atom, or of a bond, of the molecule. Ligands are atoms of the
@@ -128,7 +132,7 @@ typedef struct bs_canon_cells {
 /* Makes room in the scratch arena for a partition of `atom_count` atoms. */
 bs_status bs_canon__cells_new(bs_ctx *cx, uint32_t atom_count, bs_canon_cells *cells);
 
-/* Sorts the atoms into cells by key; all cells wait to be used as splitters. */
+/* Sorts the atoms into cells by key and label; all cells wait to be used as splitters. */
 void bs_canon__cells_start(bs_canon_cells *cells, const bs_canon_graph *graph);
 
 /* Splits cells until the partition is equitable. */
@@ -200,6 +204,12 @@ bs_status bs_canon__search(bs_ctx *cx, const bs_canon_graph *graph, const bs_can
 
 /* Compares certificates as words: negative, 0 or positive. */
 int bs_canon__compare(const bs_canon_order *a, const bs_canon_order *b);
+
+/*
+ * bs_mol_canonical_order(), where with `labelled` the labels tell atoms apart that are alike
+ * without them.
+ */
+bs_status bs_mol__order(bs_ctx *cx, bs_arena *home, const bs_mol *mol, bool labelled, int **rank);
 
 /* ---- Stereo marks ---------------------------------------------------------------------- */
 

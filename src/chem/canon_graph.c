@@ -192,6 +192,11 @@ static uint64_t atom_key(const bs_atom *atom)
     return key << 8 | (atom->flags & BS_ATOM_AROMATIC ? 0x80u : 0u);
 }
 
+uint32_t bs_canon__label(const bs_canon_graph *graph, uint32_t atom)
+{
+    return graph->labelled ? graph->mol->atoms[graph->atoms[atom]].label : 0;
+}
+
 void bs_canon__set_keys(bs_canon_graph *graph, bool marked)
 {
     for (uint32_t i = 0; i < graph->atom_count; i++)

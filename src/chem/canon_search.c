@@ -119,6 +119,7 @@ static void certify(search *s)
         *out++ = (uint32_t)key;
         *out++ = (uint32_t)(code >> 32);
         *out++ = (uint32_t)code;
+        *out++ = bs_canon__label(graph, atom);
         s->cells.sum[atom] = 0;
         first = out;
         for (uint32_t e = graph->offset[atom]; e < graph->offset[atom + 1]; e++) {
@@ -421,7 +422,7 @@ static bs_status walk(search *s)
 static bs_status make_room(search *s, const bs_canon_task *task)
 {
     bs_ctx *cx = s->cx;
-    size_t n = s->graph->atom_count, length = 4 * n + s->graph->edge_count;
+    size_t n = s->graph->atom_count, length = 5 * n + s->graph->edge_count;
     uint32_t *words;
     bs_status st;
 

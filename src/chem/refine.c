@@ -120,29 +120,6 @@ static void make_cell(bs_canon_cells *cells, uint32_t start, uint32_t size)
         cells->colour[cells->lab[i]] = start;
 }
 
-void bs_canon__cells_start(bs_canon_cells *cells, const bs_canon_graph *graph)
-{
-    uint32_t n = cells->atom_count, start = 0;
-
-    for (uint32_t i = 0; i < n; i++)
-        cells->lab[i] = i;
-    bs_canon__sort(cells->lab, n, graph->key);
-    cells->cell_count = 0;
-    cells->split_count = 0;
-    clear_queue(cells);
-    while (start < n) {
-        uint64_t key = graph->key[cells->lab[start]];
-        uint32_t end = start;
-
-        for (; end < n && graph->key[cells->lab[end]] == key; end++)
-            cells->place[cells->lab[end]] = end;
-        make_cell(cells, start, end - start);
-        enqueue(cells, start);
-        cells->cell_count++;
-        start = end;
-    }
-}
-
 static void exchange(bs_canon_cells *cells, uint32_t i, uint32_t k)
 {
     uint32_t a = cells->lab[i], b = cells->lab[k];
@@ -224,6 +201,42 @@ static void cut_cells(bs_canon_cells *cells)
             cells->sum[cells->lab[at]] = 0;
     }
     cells->hit_count = 0;
+}
+
+/* Cuts the cells by the labels of their atoms. */
+static void cut_by_label(bs_canon_cells *cells, const bs_canon_graph *graph)
+{
+    for (uint32_t at = 0; at < cells->atom_count; at++) {
+        cells->sum[at] = bs_canon__label(graph, at);
+        if (cells->sum[at] != 0)
+            meet(cells, at);
+    }
+    cut_cells(cells);
+}
+
+void bs_canon__cells_start(bs_canon_cells *cells, const bs_canon_graph *graph)
+{
+    uint32_t n = cells->atom_count, start = 0;
+
+    for (uint32_t i = 0; i < n; i++)
+        cells->lab[i] = i;
+    bs_canon__sort(cells->lab, n, graph->key);
+    cells->cell_count = 0;
+    cells->split_count = 0;
+    clear_queue(cells);
+    while (start < n) {
+        uint64_t key = graph->key[cells->lab[start]];
+        uint32_t end = start;
+
+        for (; end < n && graph->key[cells->lab[end]] == key; end++)
+            cells->place[cells->lab[end]] = end;
+        make_cell(cells, start, end - start);
+        enqueue(cells, start);
+        cells->cell_count++;
+        start = end;
+    }
+    if (graph->labelled)
+        cut_by_label(cells, graph);
 }
 
 /* Uses one cell as splitter: counts for each atom its bonds of each type into the cell. */

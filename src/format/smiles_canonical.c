@@ -3,6 +3,8 @@
 
 #include <string.h>
 
+#include "chem/canon.h"
+
 /* A copy without stereo, so that isomers that differ only there get one order. */
 static bs_status strip_stereo(bs_ctx *cx, const bs_mol *mol, const bs_mol **out)
 {
@@ -36,7 +38,8 @@ bs_status bs_smiles_canonical_order(bs_ctx *cx, bs_arena *home, const bs_mol *mo
     if (flags & BS_SMILES_NO_STEREO)
         st = strip_stereo(cx, mol, &plan.mol);
     if (st == BS_OK &&
-        (st = bs_mol_canonical_order(cx, &cx->scratch, plan.mol, &rank)) == BS_OK) {
+        (st = bs_mol__order(cx, &cx->scratch, plan.mol, flags & BS_SMILES_LABELS, &rank)) ==
+            BS_OK) {
         plan.rank = rank;
         if ((st = smiles_plan_make(&plan)) == BS_OK)
             st = smiles_write_plan(&plan, true, home, out, order, at);

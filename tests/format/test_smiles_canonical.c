@@ -153,6 +153,35 @@ static void canonical__isomers_of_rings_are_counted(void **state)
     }
 }
 
+static char *canonical_labelled(fixture *f, const char *smiles)
+{
+    char *text = NULL;
+
+    check_ok(f, bs_smiles_canonical(&f->cx, &f->home, parse(f, smiles), BS_SMILES_LABELS, &text));
+    return text;
+}
+
+static void canonical__labels_tell_alike_atoms_apart(void **state)
+{
+    static const char *const same[][2] = {
+        {"[CH3:1]C", "C[CH3:1]"},
+        {"c1cc[cH:2]cc1", "[cH:2]1ccccc1"},
+        {"C[CH3:2].CC", "CC.[CH3:2]C"},
+        {"[CH3:1]C([CH3:2])([CH3:3])C", "[CH3:3]C(C)([CH3:1])[CH3:2]"},
+        {"[cH:7]1cc[cH:300]cc1", "c1[cH:300]cc[cH:7]c1"},
+    };
+    fixture *f = *state;
+
+    for (size_t i = 0; i < sizeof same / sizeof *same; i++) {
+        assert_string_equal(canonical_labelled(f, same[i][0]), canonical_labelled(f, same[i][1]));
+        assert_string_equal(canonical(f, same[i][0]), canonical(f, same[i][1]));
+    }
+    assert_string_not_equal(canonical_labelled(f, "[CH3:1]C[CH3:2]"),
+                            canonical_labelled(f, "[CH3:1]C[CH3:1]"));
+    assert_string_not_equal(canonical_labelled(f, "[cH:1]1[cH:2]cccc1"),
+                            canonical_labelled(f, "[cH:1]1c[cH:2]ccc1"));
+}
+
 /* Finishing a copy must not lose the mark of an allene whose ends both carry a hydrogen. */
 static void canonical__allene_is_kept_by_a_turned_draft(void **state)
 {
@@ -211,6 +240,7 @@ int main(void)
         check_case(canonical__spellings_of_one_molecule_agree),
         check_case(canonical__is_a_fixed_point),
         check_case(canonical__pairs_are_told_apart_or_not),
+        check_case(canonical__labels_tell_alike_atoms_apart),
         check_case(canonical__allene_is_kept_by_a_turned_draft),
         check_case(canonical__isomers_of_complexes),
         check_case(canonical__isomers_of_rings_are_counted),
