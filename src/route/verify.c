@@ -25,7 +25,7 @@ static bs_status verify_step(bs_ctx *cx, const bs_route *route, const bs_route_s
                              const bs_rules *rules, const bs_rule_hooks *hooks, bool *good)
 {
     const char *smiles = route->molecules[step->product].smiles;
-    bs_mark temp = bs_arena_mark(&cx->scratch);
+    bs_arena home; /* not the scratch arena, which the callee rewinds */
     bs_steps found = {NULL, 0};
     bs_mol *product;
     int rule = step->ways[0].transform ? bs_rules_find(rules, step->ways[0].transform) : -1;
@@ -34,12 +34,13 @@ static bs_status verify_step(bs_ctx *cx, const bs_route *route, const bs_route_s
     *good = false;
     if (rule < 0)
         return BS_OK;
-    st = bs_smiles_read(cx, &cx->scratch, smiles, strlen(smiles), NULL, &product);
+    bs_arena_init(&home, cx->gate);
+    st = bs_smiles_read(cx, &home, smiles, strlen(smiles), NULL, &product);
     if (st == BS_OK)
-        st = bs_rules_back(cx, &cx->scratch, rules, rule, product, hooks, 0, &found);
+        st = bs_rules_back(cx, &home, rules, rule, product, hooks, 0, &found);
     for (int i = 0; st == BS_OK && i < found.count; i++)
         *good = *good || has_precursors(route, step, &found.items[i]);
-    bs_arena_rewind(&cx->scratch, temp);
+    bs_arena_free(&home);
     return st;
 }
 

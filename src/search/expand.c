@@ -285,14 +285,14 @@ static bool has_carbon(const bs_mol *mol)
 static bs_status find_price(const bs_plan_state *plan, bs_ctx *cx, const bs_mol *mol,
                             const char *smiles, double *price)
 {
-    bs_mark temp = bs_arena_mark(&cx->scratch);
     bool found = !has_carbon(mol);
     double per_mole = 0;
     bs_status st = BS_OK;
+    bs_arena home;
 
+    bs_arena_init(&home, cx->gate);
     if (plan->opts->shelf) {
-        st = bs_shelf_price(cx, &cx->scratch, plan->opts->shelf, mol, smiles, &found, &per_mole,
-                            NULL);
+        st = bs_shelf_price(cx, &home, plan->opts->shelf, mol, smiles, &found, &per_mole, NULL);
         if (st == BS_EVALUE) { /* no molar mass, so no price a mole */
             found = false;
             st = BS_OK;
@@ -301,7 +301,7 @@ static bs_status find_price(const bs_plan_state *plan, bs_ctx *cx, const bs_mol 
             found = false;
     }
     *price = found ? per_mole : INFINITY;
-    bs_arena_rewind(&cx->scratch, temp);
+    bs_arena_free(&home);
     return st;
 }
 

@@ -76,9 +76,10 @@ static bs_status find_detail(bs_plan_state *plan, uint32_t way, bs_plan_detail *
 
 /* ---- One route ---------------------------------------------------------------------------------- */
 
-/* The parts of a route while they are collected. */
+/* The parts of a route while they are collected. Structures and offers lie in `home`. */
 typedef struct parts {
     bs_plan_state *plan;
+    bs_arena home;
     bs_route_molecule *molecules;
     uint32_t *mols; /* by number in the route: the molecule of the graph */
     bs_route_step *steps;
@@ -173,9 +174,9 @@ static bs_status add_offer(parts *p, int at)
     mol->price = p->plan->x.graph.mols[p->mols[at]].price;
     if (!p->plan->opts->shelf)
         return BS_OK;
-    st = bs_smiles_read(cx, &cx->scratch, mol->smiles, strlen(mol->smiles), NULL, &structure);
+    st = bs_smiles_read(cx, &p->home, mol->smiles, strlen(mol->smiles), NULL, &structure);
     if (st == BS_OK)
-        st = bs_shelf_price(cx, &cx->scratch, p->plan->opts->shelf, structure, mol->smiles, &found,
+        st = bs_shelf_price(cx, &p->home, p->plan->opts->shelf, structure, mol->smiles, &found,
                             &price, &mol->offer);
     return st;
 }
@@ -204,6 +205,7 @@ static bs_status make_route(bs_plan_state *plan, bs_arena *home, const bs_kbest_
     size_t most = 1;
     bs_status st;
 
+    bs_arena_init(&p.home, plan->cx->gate);
     for (uint32_t i = 0; i < from->count; i++)
         most += 1 + plan->x.graph.ways[from->ways[i]].count;
     if ((st = bs_new(plan->cx, scratch, most, &p.molecules)) != BS_OK ||
@@ -219,6 +221,7 @@ static bs_status make_route(bs_plan_state *plan, bs_arena *home, const bs_kbest_
         st = bs_route_build(plan->cx, home, plan->opts->mode, p.molecules, p.molecule_count,
                             p.steps, p.step_count, 0, out);
 done:
+    bs_arena_free(&p.home);
     bs_arena_rewind(scratch, temp);
     return st;
 }

@@ -77,17 +77,19 @@ static bool is_listed(const bs_guess *guess, uint64_t hash)
 
 static bs_status add_listed(bs_guess *guess, bs_ctx *cx, const char *smiles)
 {
-    bs_mark temp = bs_arena_mark(&cx->scratch);
+    bs_arena home;
     bs_mol *mol;
-    bs_status st = bs_smiles_read(cx, &cx->scratch, smiles, strlen(smiles), NULL, &mol);
+    bs_status st;
 
+    bs_arena_init(&home, cx->gate);
+    st = bs_smiles_read(cx, &home, smiles, strlen(smiles), NULL, &mol);
     for (int i = 0; st == BS_OK && i < bs_mol_atom_count(mol); i++) {
         uint64_t hash = surroundings(mol, i);
 
         if (!is_listed(guess, hash))
             st = bs_map_add(&guess->listed, hash, 0);
     }
-    bs_arena_rewind(&cx->scratch, temp);
+    bs_arena_free(&home);
     return st;
 }
 
