@@ -17,10 +17,6 @@ function(backsaw_flags target)
     target_compile_definitions(${target} PRIVATE _POSIX_C_SOURCE=200809L _DEFAULT_SOURCE)
     target_include_directories(${target} PRIVATE ${PROJECT_SOURCE_DIR}/src
         ${PROJECT_SOURCE_DIR}/include)
-    # The installed archive must link without this compiler's plugin.
-    if(CMAKE_INTERPROCEDURAL_OPTIMIZATION AND CMAKE_C_COMPILER_ID STREQUAL "GNU")
-        target_compile_options(${target} PRIVATE -ffat-lto-objects)
-    endif()
     if(BACKSAW_SANITIZE)
         # The debug arenas pass every request to malloc, so that overruns are seen.
         target_compile_definitions(${target} PRIVATE BS_ARENA_DEBUG=1)
