@@ -15,12 +15,14 @@
 int bs_feature__class(int element)
 {
     static const uint8_t table[119] = {
-        [0] = BS_CLASS_OTHER,  [1] = BS_CLASS_H,   [3] = BS_CLASS_ALKALI,  [4] = BS_CLASS_ALKALI,
-        [5] = BS_CLASS_B,      [6] = BS_CLASS_C,   [7] = BS_CLASS_N,       [8] = BS_CLASS_O,
-        [9] = BS_CLASS_F,      [11] = BS_CLASS_ALKALI, [12] = BS_CLASS_ALKALI, [14] = BS_CLASS_SI,
-        [15] = BS_CLASS_P,     [16] = BS_CLASS_S,  [17] = BS_CLASS_CL,     [19] = BS_CLASS_ALKALI,
-        [20] = BS_CLASS_ALKALI, [34] = BS_CLASS_SE, [35] = BS_CLASS_BR,    [37] = BS_CLASS_ALKALI,
-        [38] = BS_CLASS_ALKALI, [53] = BS_CLASS_I, [55] = BS_CLASS_ALKALI, [56] = BS_CLASS_ALKALI,
+        [0] = BS_CLASS_OTHER,   [1] = BS_CLASS_H,       [3] = BS_CLASS_ALKALI,
+        [4] = BS_CLASS_ALKALI,  [5] = BS_CLASS_B,       [6] = BS_CLASS_C,
+        [7] = BS_CLASS_N,       [8] = BS_CLASS_O,       [9] = BS_CLASS_F,
+        [11] = BS_CLASS_ALKALI, [12] = BS_CLASS_ALKALI, [14] = BS_CLASS_SI,
+        [15] = BS_CLASS_P,      [16] = BS_CLASS_S,      [17] = BS_CLASS_CL,
+        [19] = BS_CLASS_ALKALI, [20] = BS_CLASS_ALKALI, [34] = BS_CLASS_SE,
+        [35] = BS_CLASS_BR,     [37] = BS_CLASS_ALKALI, [38] = BS_CLASS_ALKALI,
+        [53] = BS_CLASS_I,      [55] = BS_CLASS_ALKALI, [56] = BS_CLASS_ALKALI,
     };
     int class = element >= 0 && element < 119 ? table[element] : BS_CLASS_OTHER;
 
@@ -154,8 +156,10 @@ bs_features bs_feature__ring_bonds(int count)
 /* Carbon to something by a single bond, once for aliphatic carbon, once for aromatic. */
 static int carbon_bit(int class, bool aromatic)
 {
-    static const int8_t aliphatic[BS_CLASS_COUNT] = {0, 1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11, 11, 11, 11};
-    static const int8_t ring[BS_CLASS_COUNT] = {12, 13, 14, 15, 16, 17, 18, 19, 20, 20, 20, 20, 20, 20, 20};
+    static const int8_t aliphatic[BS_CLASS_COUNT] = {0, 1, 2,  3,  4,  5,  6, 7,
+                                                     8, 9, 10, 11, 11, 11, 11};
+    static const int8_t ring[BS_CLASS_COUNT] = {12, 13, 14, 15, 16, 17, 18, 19,
+                                                20, 20, 20, 20, 20, 20, 20};
 
     return aromatic ? ring[class] : aliphatic[class];
 }
@@ -234,8 +238,8 @@ bs_features bs_feature__bond(int class_a, bool aromatic_a, int class_b, bool aro
 
 bs_features bs_feature__counts(const int *classes, int aromatic)
 {
-    int halogens = classes[BS_CLASS_F] + classes[BS_CLASS_CL] + classes[BS_CLASS_BR] +
-                   classes[BS_CLASS_I];
+    int halogens =
+        classes[BS_CLASS_F] + classes[BS_CLASS_CL] + classes[BS_CLASS_BR] + classes[BS_CLASS_I];
     int c = classes[BS_CLASS_C], n = classes[BS_CLASS_N], o = classes[BS_CLASS_O];
     bs_features f = {{0, 0}};
 

@@ -88,8 +88,8 @@ static bs_status keep(found *all, const bs_frame *f)
 static bs_status check_opts(bs_ctx *cx, const bs_pattern *pattern, const bs_mol *mol,
                             const bs_match_opts *opts)
 {
-    if (opts->anchored && (opts->anchor_atom < 0 ||
-                           opts->anchor_atom >= pattern->query->atom_count))
+    if (opts->anchored &&
+        (opts->anchor_atom < 0 || opts->anchor_atom >= pattern->query->atom_count))
         return bs_fail(cx, BS_ERANGE, "the pattern has no atom %d", opts->anchor_atom);
     if (opts->anchored && opts->anchor >= mol->atom_count)
         return bs_fail(cx, BS_ERANGE, "the molecule has no atom %u", (unsigned)opts->anchor);
@@ -195,8 +195,7 @@ bs_status bs_pattern__atom_passes(bs_ctx *cx, const bs_pattern *pattern, int ato
     return st;
 }
 
-bool bs_pattern__bond_passes(const bs_pattern *pattern, int bond, const bs_mol *mol,
-                             uint32_t where)
+bool bs_pattern__bond_passes(const bs_pattern *pattern, int bond, const bs_mol *mol, uint32_t where)
 {
     const bs_bond *b = &bs_mol__bonds(mol)[where];
     int sort = (int)(b->order & 7) | (int)(b->flags & (BS_BOND_AROMATIC | BS_BOND_RING)) << 3;

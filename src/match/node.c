@@ -1,6 +1,7 @@
 /* Compiles atom expressions to graphs of nodes. */
 #include "match/program.h"
 
+#include <stddef.h>
 #include <string.h>
 
 static bs_status add_node(bs_nodes *nodes, const bs_node *node)
@@ -35,77 +36,75 @@ static void set_never(bs_node *node)
     node->value[0] = 1;
 }
 
-/* Tests that compare one field, or one flag. False: the test is of another sort. */
+/* Where the number of a test lies in an atom, and in how many bytes; none for other tests. */
+typedef struct field {
+    uint8_t offset, bytes;
+} field;
+
+#define FIELD(name)                                                                                \
+    {                                                                                              \
+        offsetof(bs_atom, name), sizeof((bs_atom *)0)->name                                        \
+    }
+
+static const field fields[BS_TEST_BOND_ANY] = {
+    [BS_TEST_ELEMENT] = FIELD(element),       [BS_TEST_ALIPHATIC_ELEM] = FIELD(element),
+    [BS_TEST_AROMATIC_ELEM] = FIELD(element), [BS_TEST_ISOTOPE] = FIELD(isotope),
+    [BS_TEST_DEGREE] = FIELD(degree),         [BS_TEST_HYDROGENS] = FIELD(hydrogens),
+    [BS_TEST_RING_COUNT] = FIELD(ring_count), [BS_TEST_RING_SIZE] = FIELD(min_ring),
+    [BS_TEST_VALENCE] = FIELD(valence),       [BS_TEST_RING_BONDS] = FIELD(ring_bonds),
+    [BS_TEST_CHARGE] = FIELD(charge),
+};
+
+/* Compares the number of a test with its field. */
+static void fill_number(const field *f, int value, bs_atom *mask, bs_atom *want)
+{
+    uint8_t byte = (uint8_t)value;
+    uint16_t word = (uint16_t)value;
+
+    memset((char *)mask + f->offset, 0xFF, f->bytes);
+    memcpy((char *)want + f->offset, f->bytes == 1 ? (void *)&byte : (void *)&word, f->bytes);
+}
+
+/* Tests that ask for a flag: its mask, and *set whether it must be set. 0 for others. */
+static uint8_t flag_of(int kind, int value, bool *set)
+{
+    switch (kind) {
+    case BS_TEST_AROMATIC:
+    case BS_TEST_AROMATIC_ELEM:
+        *set = true;
+        return BS_ATOM_AROMATIC;
+    case BS_TEST_ALIPHATIC:
+    case BS_TEST_ALIPHATIC_ELEM:
+        *set = false;
+        return BS_ATOM_AROMATIC;
+    case BS_TEST_RING_COUNT:
+    case BS_TEST_RING_SIZE:
+    case BS_TEST_RING_BONDS:
+        *set = true;
+        return value < 0 ? BS_ATOM_RING : 0;
+    default:
+        return 0;
+    }
+}
+
+/* Tests that compare one field, a flag, or both. False: the test is of another sort. */
 static bool fill_fields(bs_node *node, int kind, int value)
 {
+    const field *f = kind < BS_TEST_BOND_ANY ? &fields[kind] : NULL;
+    bool set = false, in_ring = value < 0 && kind != BS_TEST_CHARGE;
+    uint8_t flag = flag_of(kind, value, &set);
     bs_atom mask, want;
-    int limit = UINT8_MAX;
 
+    if (!f || (f->bytes == 0 && flag == 0 && kind != BS_TEST_ANY))
+        return false;
     memset(&mask, 0, sizeof mask);
     memset(&want, 0, sizeof want);
-    if (value < 0 && kind != BS_TEST_CHARGE) {
-        mask.flags = want.flags = BS_ATOM_RING;
-        set_fields(node, &mask, &want);
-        return kind == BS_TEST_RING_COUNT || kind == BS_TEST_RING_SIZE ||
-               kind == BS_TEST_RING_BONDS;
-    }
-    switch (kind) {
-    case BS_TEST_ANY:
-        break;
-    case BS_TEST_AROMATIC_ELEM:
-        want.flags = BS_ATOM_AROMATIC;
-        /* fall through */
-    case BS_TEST_ALIPHATIC_ELEM:
-        mask.flags = BS_ATOM_AROMATIC;
-        /* fall through */
-    case BS_TEST_ELEMENT:
-        mask.element = UINT8_MAX;
-        want.element = (uint8_t)value;
-        break;
-    case BS_TEST_AROMATIC:
-        want.flags = BS_ATOM_AROMATIC;
-        /* fall through */
-    case BS_TEST_ALIPHATIC:
-        mask.flags = BS_ATOM_AROMATIC;
-        break;
-    case BS_TEST_ISOTOPE:
-        mask.isotope = limit = UINT16_MAX;
-        want.isotope = (uint16_t)value;
-        break;
-    case BS_TEST_DEGREE:
-        mask.degree = UINT8_MAX;
-        want.degree = (uint8_t)value;
-        break;
-    case BS_TEST_HYDROGENS:
-        mask.hydrogens = UINT8_MAX;
-        want.hydrogens = (uint8_t)value;
-        break;
-    case BS_TEST_RING_COUNT:
-        mask.ring_count = UINT8_MAX;
-        want.ring_count = (uint8_t)value;
-        break;
-    case BS_TEST_RING_SIZE:
-        mask.min_ring = UINT16_MAX;
-        limit = UINT16_MAX;
-        want.min_ring = (uint16_t)value;
-        break;
-    case BS_TEST_VALENCE:
-        mask.valence = UINT8_MAX;
-        want.valence = (uint8_t)value;
-        break;
-    case BS_TEST_RING_BONDS:
-        mask.ring_bonds = UINT8_MAX;
-        want.ring_bonds = (uint8_t)value;
-        break;
-    case BS_TEST_CHARGE:
-        mask.charge = -1;
-        want.charge = (int8_t)value;
-        break;
-    default:
-        return false;
-    }
+    mask.flags = flag;
+    want.flags = set ? flag : 0;
+    if (f->bytes > 0 && !in_ring)
+        fill_number(f, value, &mask, &want);
     set_fields(node, &mask, &want);
-    if (value > limit)
+    if (f->bytes == 1 && value > UINT8_MAX)
         set_never(node);
     return true;
 }
@@ -138,8 +137,6 @@ static bs_status add_leaf(bs_nodes *nodes, const bs_test *test, const int *parts
     bs_node node = {.yes = yes, .no = no, .argument = test->value};
 
     if (!fill_fields(&node, test->kind, test->value)) {
-        memset(node.mask, 0, sizeof node.mask);
-        memset(node.value, 0, sizeof node.value);
         switch (test->kind) {
         case BS_TEST_CONNECTIONS:
             node.kind = BS_NODE_CONNECTIONS;
@@ -186,8 +183,8 @@ static void mark_costly(const bs_query_expr *expr, const int *size, bool *costly
     }
 }
 
-static void push_pair(const bs_query_expr *expr, const int *size, const bool *costly,
-                      const task *t, task *pile, int *height)
+static void push_pair(const bs_query_expr *expr, const int *size, const bool *costly, const task *t,
+                      task *pile, int *height)
 {
     int first = t->tree - 1 - size[t->tree - 1], second = t->tree - 1;
     bool is_and = expr->tests[t->tree].kind == BS_TEST_AND;
@@ -202,8 +199,8 @@ static void push_pair(const bs_query_expr *expr, const int *size, const bool *co
 }
 
 /* Works from the last test asked to the first, so that the nodes that follow are there already. */
-static bs_status emit(bs_nodes *nodes, const bs_query_expr *expr, const int *parts,
-                      const int *size, const bool *costly, task *pile)
+static bs_status emit(bs_nodes *nodes, const bs_query_expr *expr, const int *parts, const int *size,
+                      const bool *costly, task *pile)
 {
     int height = 0;
     bs_status st = BS_OK;

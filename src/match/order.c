@@ -99,8 +99,7 @@ bs_status bs_order__find(bs_ctx *cx, bs_arena *home, const bs_part *part, int ro
     out->count = 0;
     if ((st = bs_new(cx, home, count, &out->moves)) != BS_OK ||
         (st = bs_new(cx, home, part->query->bond_count, &out->closures)) != BS_OK ||
-        (st = bs_new(cx, home, count, &out->place)) != BS_OK ||
-        (st = link_bonds(cx, &o)) != BS_OK)
+        (st = bs_new(cx, home, count, &out->place)) != BS_OK || (st = link_bonds(cx, &o)) != BS_OK)
         goto done;
     for (int i = 0; i < count; i++)
         out->place[i] = -1;

@@ -480,10 +480,7 @@ static bs_status read_bare(bs_parse *p)
 
     if (c == '*' || c == 'a' || c == 'A') {
         p->at++;
-        return emit(p, c == '*'   ? BS_TEST_ANY
-                       : c == 'a' ? BS_TEST_AROMATIC
-                                  : BS_TEST_ALIPHATIC,
-                    0);
+        return emit(p, c == '*' ? BS_TEST_ANY : c == 'a' ? BS_TEST_AROMATIC : BS_TEST_ALIPHATIC, 0);
     }
     if (looks_at(p, "Cl") || looks_at(p, "Br")) {
         element = c == 'C' ? 17 : 35;

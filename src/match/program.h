@@ -74,9 +74,9 @@ typedef struct bs_turn {
 typedef struct bs_part {
     const bs_query *query;
     bs_order order;
-    int32_t *entries;  /* of each atom, chirality left out */
-    int32_t *rarity;   /* of each atom: how many a usual molecule has, scaled */
-    uint32_t *sorts;   /* of each bond */
+    int32_t *entries; /* of each atom, chirality left out */
+    int32_t *rarity;  /* of each atom: how many a usual molecule has, scaled */
+    uint32_t *sorts;  /* of each bond */
     bs_centre *centres;
     bs_turn *turns;
     int centre_count, turn_count;

@@ -189,7 +189,8 @@ bool bs_query_demands(const bs_query_expr *expr, bs_test_kind kind, int *value);
 
 /*
  * For each place in the expression the number of tests of the tree that ends there (its own
- * included), so that the right operand of `i` ends at i - 1 and the left one at i - 1 - size[i - 1].
+ * included), so that the right operand of `i` ends at i - 1 and the left one at i - 1 - size[i -
+ * 1].
  *
  *   errors  BS_EVALUE  not one tree in post order
  */
@@ -210,12 +211,12 @@ enum {
     BS_RELAX_DEGREE = 2,    /* D and X */
     BS_RELAX_VALENCE = 4,
     BS_RELAX_HYBRID = 8,
-    BS_RELAX_CHIRAL = 16,    /* @, and the directions of bonds, which become single */
-    BS_RELAX_RING = 32,      /* R, r, x and ring bonds */
+    BS_RELAX_CHIRAL = 16, /* @, and the directions of bonds, which become single */
+    BS_RELAX_RING = 32,   /* R, r, x and ring bonds */
     BS_RELAX_CHARGE = 64,
-    BS_RELAX_AROMATIC = 128, /* c and C become #6; a, A and aromatic bonds are dropped */
+    BS_RELAX_AROMATIC = 128,  /* c and C become #6; a, A and aromatic bonds are dropped */
     BS_RELAX_RECURSION = 256, /* recursive parts are dropped; else they stay as they are */
-    BS_RELAX_EDITED = 31     /* what an edit next to the atom changes at least */
+    BS_RELAX_EDITED = 31      /* what an edit next to the atom changes at least */
 };
 
 /*

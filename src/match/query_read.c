@@ -33,13 +33,13 @@ enum { RING_NUMBERS = 100 };
 typedef struct graph {
     bs_parse *p;
     bs_query *query;
-    int last;      /* atom that the next one is bonded to, or -1 */
-    bool bonded;   /* a bond was written and waits for its atom */
-    bool fresh;    /* a branch or group has just been opened */
-    bool grouped;  /* a group has just been closed */
-    bool dotted;   /* a dot waits for its atom */
-    int group;     /* open group, or 0 */
-    int groups;    /* so far */
+    int last;     /* atom that the next one is bonded to, or -1 */
+    bool bonded;  /* a bond was written and waits for its atom */
+    bool fresh;   /* a branch or group has just been opened */
+    bool grouped; /* a group has just been closed */
+    bool dotted;  /* a dot waits for its atom */
+    int group;    /* open group, or 0 */
+    int groups;   /* so far */
     size_t group_at;
     bs_query_expr bond;
     size_t bond_at;

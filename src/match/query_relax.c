@@ -162,8 +162,7 @@ bs_status bs_query_relax_expr(bs_ctx *cx, bs_arena *home, const bs_query_expr *e
             put_leaf(&w, test, what, negated[i]);
     }
     if (w.count == 0)
-        w.out[w.count++] =
-            (bs_test){(uint8_t)(is_bond(expr) ? BS_TEST_BOND_ANY : BS_TEST_ANY), 0};
+        w.out[w.count++] = (bs_test){(uint8_t)(is_bond(expr) ? BS_TEST_BOND_ANY : BS_TEST_ANY), 0};
     *out = (bs_query_expr){w.out, w.count};
 done:
     if (home != &cx->scratch)

@@ -11,16 +11,16 @@
 typedef struct plan {
     bs_writing *w;
     const bs_query *query;
-    int *order;       /* atoms as they are written */
-    int *place;       /* inverse of it */
-    int *parent;      /* bond to the atom before, -1 for the first atom of a part */
-    int *last_child;  /* of each atom, -1 for none */
-    int *path;        /* atoms from the first of the part to the last one written */
-    bool *opened;     /* a '(' stands before the atom */
+    int *order;      /* atoms as they are written */
+    int *place;      /* inverse of it */
+    int *parent;     /* bond to the atom before, -1 for the first atom of a part */
+    int *last_child; /* of each atom, -1 for none */
+    int *path;       /* atoms from the first of the part to the last one written */
+    bool *opened;    /* a '(' stands before the atom */
     int path_count;
-    int *number;      /* of each bond that is a ring number and open, 0 if not */
+    int *number; /* of each bond that is a ring number and open, 0 if not */
     bool used[100];
-    int *first;       /* bonds of each atom: adjacency in one array */
+    int *first; /* bonds of each atom: adjacency in one array */
     int *links;
 } plan;
 

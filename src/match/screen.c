@@ -161,9 +161,9 @@ static void use_connections(const bs_query_expr *expr, box *states)
     low = high == HIGH ? 0 : connections - high;
     for (int d = 0; d < HIGH; d++)
         if (d < low || d > connections)
-            states->degrees &= (uint8_t)~(1 << d);
+            states->degrees &= (uint8_t) ~(1 << d);
     if (connections < HIGH)
-        states->degrees &= (uint8_t)~(1 << HIGH);
+        states->degrees &= (uint8_t) ~(1 << HIGH);
 }
 
 static bs_status find_box(bs_ctx *cx, const bs_query_expr *expr, box *out)
@@ -265,8 +265,8 @@ static bs_features bond_needs(uint32_t sorts, uint32_t kinds_a, uint32_t kinds_b
             for (int sort = 0; sort < 32; sort++) {
                 if (!(sorts >> sort & 1) || (sort & 7) > 4)
                     continue;
-                both(&common, bs_feature__bond(a / 2, a % 2, b / 2, b % 2, sort & 7, sort & 8,
-                                               sort & 16));
+                both(&common,
+                     bs_feature__bond(a / 2, a % 2, b / 2, b % 2, sort & 7, sort & 8, sort & 16));
                 if ((common.word[0] | common.word[1]) == 0)
                     return common;
             }
@@ -340,9 +340,9 @@ static int share(unsigned set, const uint16_t *weights, int count)
 /* Rough shares among the atoms of organic molecules (common knowledge, no source), in 1/1000. */
 static int32_t box_rarity(const box *b)
 {
-    static const uint16_t kinds[2 * BS_CLASS_COUNT] = {
-        360, 370, 55, 45, 100, 3, 12, 4, 8, 0, 8, 0, 3, 0, 2, 0,
-        3,   0,   1,  0,  1,   0, 3,  0, 1, 1, 3, 0, 5, 0};
+    static const uint16_t kinds[2 * BS_CLASS_COUNT] = {360, 370, 55, 45, 100, 3, 12, 4, 8, 0,
+                                                       8,   0,   3,  0,  2,   0, 3,  0, 1, 0,
+                                                       1,   0,   3,  0,  1,   1, 3,  0, 5, 0};
     static const uint16_t hydrogens[] = {450, 300, 150, 90, 10}, charges[] = {12, 970, 18};
     static const uint16_t degrees[] = {5, 230, 450, 280, 35}, ring_bonds[] = {400, 0, 500, 95, 5};
     static const uint16_t rings[] = {400, 0, 0, 5, 5, 140, 420, 20, 10};

@@ -5,8 +5,8 @@
 
 static inline uint32_t sort_bit(const bs_bond *bond)
 {
-    return (uint32_t)1 << ((bond->order & 7) |
-                           (bond->flags & (BS_BOND_AROMATIC | BS_BOND_RING)) << 3);
+    return (uint32_t)1 << ((bond->order & 7) | (bond->flags & (BS_BOND_AROMATIC | BS_BOND_RING))
+                                                   << 3);
 }
 
 /* ---- Beginning ------------------------------------------------------------------------- */
@@ -201,8 +201,8 @@ static bool group_fits(const bs_search *s, const bs_frame *f, int depth, uint32_
     int group = moves[depth].group;
 
     for (int i = 0; i < depth && group != 0; i++)
-        if (moves[i].group != 0 && (moves[i].group == group) !=
-                                       (s->component[f->placed[i]] == s->component[atom]))
+        if (moves[i].group != 0 &&
+            (moves[i].group == group) != (s->component[f->placed[i]] == s->component[atom]))
             return false;
     return true;
 }

@@ -85,8 +85,8 @@ static bs_status put_counted(bs_text *text, char letter, int value)
 static bs_status put_atom_test(bs_writing *w, const bs_test *test, bool mirror)
 {
     static const char letters[] = {
-        [BS_TEST_DEGREE] = 'D',     [BS_TEST_HYDROGENS] = 'H',   [BS_TEST_IMPLICIT_H] = 'h',
-        [BS_TEST_RING_COUNT] = 'R', [BS_TEST_RING_SIZE] = 'r',   [BS_TEST_VALENCE] = 'v',
+        [BS_TEST_DEGREE] = 'D',      [BS_TEST_HYDROGENS] = 'H',  [BS_TEST_IMPLICIT_H] = 'h',
+        [BS_TEST_RING_COUNT] = 'R',  [BS_TEST_RING_SIZE] = 'r',  [BS_TEST_VALENCE] = 'v',
         [BS_TEST_CONNECTIONS] = 'X', [BS_TEST_RING_BONDS] = 'x', [BS_TEST_HYBRID] = '^',
     };
     bs_text *text = w->text;
@@ -277,8 +277,7 @@ static bs_status print_choice(bs_writing *w, const bs_query_expr *expr)
 
         if (!(mask >> place & 1))
             continue;
-        st = bs_text_printf(w->text, "%s%s&%s@", first ? "" : ",", orders[order],
-                            ring ? "" : "!");
+        st = bs_text_printf(w->text, "%s%s&%s@", first ? "" : ",", orders[order], ring ? "" : "!");
         first = false;
     }
     if (st == BS_OK && first)

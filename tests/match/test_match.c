@@ -166,9 +166,10 @@ static unsigned draw(unsigned *seed, unsigned below)
 static void random_pattern(unsigned *seed, char *text)
 {
     static const char *const atoms[] = {
-        "C",      "c",       "N",       "O",      "*",          "[#6]",     "[C,N]",  "[!C]",
-        "[R]",    "[!R]",    "[CH2]",   "[CH3]",  "[D2]",       "[D3;#6]",  "[#7,#8]", "[c,n;H1]",
-        "[!#6;!H0]", "[C;H2,R]", "[O,N&H2]", "[+0;#6,#8]", "[!CH3]", "[n,o]"};
+        "C",        "c",          "N",       "O",        "*",         "[#6]",
+        "[C,N]",    "[!C]",       "[R]",     "[!R]",     "[CH2]",     "[CH3]",
+        "[D2]",     "[D3;#6]",    "[#7,#8]", "[c,n;H1]", "[!#6;!H0]", "[C;H2,R]",
+        "[O,N&H2]", "[+0;#6,#8]", "[!CH3]",  "[n,o]"};
     static const char *const bonds[] = {"", "", "", "-", "=", ":", "~", "@", "!@", "-,=", "!=;~"};
     int count = 1 + (int)draw(seed, 5), open = -1;
 
@@ -217,8 +218,8 @@ static void find__agrees_with_a_slow_matcher(void **state)
                 continue; /* such as a ring number left open */
             slow = slow_count(bs_pattern__query(pattern), mol, placed, 0);
             if (count(f, pattern, mol, true) != slow)
-                fail_msg("%s on %s: %d, slow %d", text, t.field[0],
-                         count(f, pattern, mol, true), slow);
+                fail_msg("%s on %s: %d, slow %d", text, t.field[0], count(f, pattern, mol, true),
+                         slow);
             pairs++;
             hits += slow > 0;
         }
@@ -339,11 +340,20 @@ static void geometry__goes_with_the_marks(void **state)
         const char *smarts, *smiles;
         int count;
     } cases[] = {
-        {"F/C=C/F", "F/C=C/F", 1},    {"F/C=C/F", "F/C=C\\F", 0},   {"F/C=C/F", "FC=CF", 0},
-        {"F/C=C/?F", "FC=CF", 1},     {"F/C=C/?F", "F/C=C\\F", 0},  {"C(\\F)=C/F", "F/C=C/F", 1},
-        {"F\\C=C\\F", "F/C=C/F", 1},  {"F/C=CF", "FC=CF", 1},       {"F/C=C/C=C\\F", "F/C=C/C=C\\F", 1},
-        {"F/C=C/C=C/F", "F/C=C/C=C\\F", 0}, {"F/C(Cl)=C/F", "Cl/C(F)=C\\F", 1},
-        {"F/C(Cl)=C/F", "Cl/C(F)=C/F", 0},  {"C/C", "CC", 1},       {"F/C~C/F", "F/C=C\\F", 1},
+        {"F/C=C/F", "F/C=C/F", 1},
+        {"F/C=C/F", "F/C=C\\F", 0},
+        {"F/C=C/F", "FC=CF", 0},
+        {"F/C=C/?F", "FC=CF", 1},
+        {"F/C=C/?F", "F/C=C\\F", 0},
+        {"C(\\F)=C/F", "F/C=C/F", 1},
+        {"F\\C=C\\F", "F/C=C/F", 1},
+        {"F/C=CF", "FC=CF", 1},
+        {"F/C=C/C=C\\F", "F/C=C/C=C\\F", 1},
+        {"F/C=C/C=C/F", "F/C=C/C=C\\F", 0},
+        {"F/C(Cl)=C/F", "Cl/C(F)=C\\F", 1},
+        {"F/C(Cl)=C/F", "Cl/C(F)=C/F", 0},
+        {"C/C", "CC", 1},
+        {"F/C~C/F", "F/C=C\\F", 1},
     };
     fixture *f = *state;
 
@@ -360,16 +370,35 @@ static void atoms__tests_that_the_reference_set_leaves_out(void **state)
         const char *smarts, *smiles;
         int count;
     } cases[] = {
-        {"[H]", "[2H]C([2H])O", 2},     {"[2H]C", "[2H]C([2H])O", 2},  {"[CH3]", "[2H]C([2H])O", 1},
-        {"[CH3]", "[2H]CO", 1},         {"[CH2]", "[2H]CO", 0},      {"[Ch2]", "[2H]CO", 1},
-        {"[CD2]", "[2H]CO", 1},         {"[h]", "C", 1},               {"[h]", "C(F)(F)(F)F", 0},
-        {"[^1]", "C#N", 2},             {"[^2]", "C=CC", 2},           {"[^3]", "C=CC", 1},
-        {"[^2]", "CC(=O)NC", 3},        {"[^2]", "c1cc[nH]c1", 5},     {"[^3]", "CCO", 3},
-        {"[^1]", "C=C=C", 1},           {"[#0]", "*C", 1},             {"*", "*C", 2},
-        {"[0*]", "[13CH3]C", 1},        {"[r300]", "C1CC1", 0},        {"[H300]", "C", 0},
-        {"[v300]", "C", 0},             {"[-15]", "C", 0},             {"([#6].[#8])", "CO", 1},
-        {"([#6]).([#8])", "CO", 0},     {"([#6]).([#8])", "C.O", 1},   {"([#6].[#8])", "C.O", 0},
-        {"[#6].[#8]", "C.O", 1},        {"[Na+].[Cl-]", "[Na+].[Cl-]", 1},
+        {"[H]", "[2H]C([2H])O", 2},
+        {"[2H]C", "[2H]C([2H])O", 2},
+        {"[CH3]", "[2H]C([2H])O", 1},
+        {"[CH3]", "[2H]CO", 1},
+        {"[CH2]", "[2H]CO", 0},
+        {"[Ch2]", "[2H]CO", 1},
+        {"[CD2]", "[2H]CO", 1},
+        {"[h]", "C", 1},
+        {"[h]", "C(F)(F)(F)F", 0},
+        {"[^1]", "C#N", 2},
+        {"[^2]", "C=CC", 2},
+        {"[^3]", "C=CC", 1},
+        {"[^2]", "CC(=O)NC", 3},
+        {"[^2]", "c1cc[nH]c1", 5},
+        {"[^3]", "CCO", 3},
+        {"[^1]", "C=C=C", 1},
+        {"[#0]", "*C", 1},
+        {"*", "*C", 2},
+        {"[0*]", "[13CH3]C", 1},
+        {"[r300]", "C1CC1", 0},
+        {"[H300]", "C", 0},
+        {"[v300]", "C", 0},
+        {"[-15]", "C", 0},
+        {"([#6].[#8])", "CO", 1},
+        {"([#6]).([#8])", "CO", 0},
+        {"([#6]).([#8])", "C.O", 1},
+        {"([#6].[#8])", "C.O", 0},
+        {"[#6].[#8]", "C.O", 1},
+        {"[Na+].[Cl-]", "[Na+].[Cl-]", 1},
     };
     fixture *f = *state;
 
@@ -419,8 +448,7 @@ static void find__options_narrow_the_answer(void **state)
     for (int i = 0; i < 2; i++)
         assert_int_equal(found.atoms[2 * i + 1], 4);
     opts.anchor = 6;
-    assert_int_equal(bs_pattern_find(&f->cx, &f->home, pattern, benzene, &opts, &found),
-                     BS_ERANGE);
+    assert_int_equal(bs_pattern_find(&f->cx, &f->home, pattern, benzene, &opts, &found), BS_ERANGE);
 }
 
 /* An anchored search finds what a search of all finds there. */

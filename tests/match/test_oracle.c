@@ -57,8 +57,8 @@ static void read_patterns(fixture *f, oracle *o, table *t)
 
         assert_true(n < PATTERNS);
         snprintf(o->pattern_id[n], sizeof o->pattern_id[n], "%s", t->field[0]);
-        check_ok(f, bs_pattern_read(&f->cx, &f->home, t->field[2], strlen(t->field[2]),
-                                    &o->pattern[n]));
+        check_ok(
+            f, bs_pattern_read(&f->cx, &f->home, t->field[2], strlen(t->field[2]), &o->pattern[n]));
     }
 }
 

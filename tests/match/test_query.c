@@ -29,7 +29,7 @@ static const char *write_query(fixture *f, const bs_query *query)
 static void read__hydrogen_is_an_atom_or_a_count(void **state)
 {
     static const char *const atoms[] = {"[H]", "[2H]", "[H+]", "[H-]", "[H:3]", "[3H+:1]", "[H+2]"};
-    static const char *const counts[] = {"[H1]",  "[*H]",  "[H,Cl]", "[!H]",
+    static const char *const counts[] = {"[H1]",  "[*H]", "[H,Cl]", "[!H]",
                                          "[H;+]", "[HH]", "[+H]",   "[2H1]"};
     fixture *f = *state;
 
@@ -51,12 +51,14 @@ static void read__hydrogen_is_an_atom_or_a_count(void **state)
 static void read__letter_pairs_and_defaults(void **state)
 {
     static const char *const pairs[][2] = {
-        {"[Nh]", "[N&h]"},     {"[Nh1]", "[N&h1]"},     {"[Cn]", "[Cn]"},   {"[se]", "[se]"},
-        {"[te]", "[te]"},      {"[Sr]", "[Sr]"},        {"[D]", "[D1]"},    {"[CH]", "[C&H1]"},
-        {"[CH-]", "[C&H1&-]"}, {"[#6;H]", "[#6&H1]"},   {"[X]", "[X1]"},    {"[v]", "[v1]"},
-        {"[R]", "[R]"},        {"[r5]", "[r5]"},        {"[x]", "[x]"},     {"[h]", "[h]"},
-        {"[++]", "[+2]"},      {"[---]", "[-3]"},       {"[+0]", "[+0]"},   {"[12]", "[12]"},
-        {"[!!C]", "[!!C]"},    {"[C:7]", "[C:7]"},      {"[^2]", "[^2]"},   {"[C@@?]", "[C&@@?]"},
+        {"[Nh]", "[N&h]"},     {"[Nh1]", "[N&h1]"},    {"[Cn]", "[Cn]"},
+        {"[se]", "[se]"},      {"[te]", "[te]"},       {"[Sr]", "[Sr]"},
+        {"[D]", "[D1]"},       {"[CH]", "[C&H1]"},     {"[CH-]", "[C&H1&-]"},
+        {"[#6;H]", "[#6&H1]"}, {"[X]", "[X1]"},        {"[v]", "[v1]"},
+        {"[R]", "[R]"},        {"[r5]", "[r5]"},       {"[x]", "[x]"},
+        {"[h]", "[h]"},        {"[++]", "[+2]"},       {"[---]", "[-3]"},
+        {"[+0]", "[+0]"},      {"[12]", "[12]"},       {"[!!C]", "[!!C]"},
+        {"[C:7]", "[C:7]"},    {"[^2]", "[^2]"},       {"[C@@?]", "[C&@@?]"},
         {"[as]", "[as]"},      {"[Cl;+0]", "[Cl&+0]"}, {"[OX2H]", "[O&X2&H1]"},
     };
     fixture *f = *state;
@@ -69,8 +71,8 @@ static void read__logic_binds_not_and_or_and(void **state)
 {
     fixture *f = *state;
     const bs_query_expr *expr = &read_query(f, "[!C,N&R;+]")->atoms[0].expr;
-    static const int kinds[] = {BS_TEST_ALIPHATIC_ELEM, BS_TEST_NOT,        BS_TEST_ALIPHATIC_ELEM,
-                                BS_TEST_RING_COUNT,     BS_TEST_AND,        BS_TEST_OR,
+    static const int kinds[] = {BS_TEST_ALIPHATIC_ELEM, BS_TEST_NOT, BS_TEST_ALIPHATIC_ELEM,
+                                BS_TEST_RING_COUNT,     BS_TEST_AND, BS_TEST_OR,
                                 BS_TEST_CHARGE,         BS_TEST_AND};
 
     assert_int_equal(expr->count, 8);
@@ -218,12 +220,11 @@ static bool same_query(const bs_query *a, const bs_query *b)
         return false;
     for (int i = 0; i < a->atom_count; i++)
         if (!same_expr(&a->atoms[i].expr, &b->atoms[i].expr) ||
-            a->atoms[i].map != b->atoms[i].map ||
-            a->atoms[i].component != b->atoms[i].component ||
+            a->atoms[i].map != b->atoms[i].map || a->atoms[i].component != b->atoms[i].component ||
             a->atoms[i].around_count != b->atoms[i].around_count ||
             (a->atoms[i].around_count > 0 &&
              memcmp(a->atoms[i].around, b->atoms[i].around,
-                   (size_t)a->atoms[i].around_count * sizeof(int)) != 0))
+                    (size_t)a->atoms[i].around_count * sizeof(int)) != 0))
             return false;
     for (int i = 0; i < a->bond_count; i++)
         if (!same_bond(&a->bonds[i], &b->bonds[i]))
@@ -256,11 +257,26 @@ static void write__oracle_patterns_read_as_the_same(void **state)
 static void write__odd_graphs_read_as_the_same(void **state)
 {
     static const char *const texts[] = {
-        "C(C1)(C)C1",        "C1.C1",          "C(C(C)(C)C)(C(C)C)C", "(C.N).(O.F)",
-        "(C=O).N.(O)",       "C12CC1C2",       "F/C=C\\F",           "F/C=C/1CCCC1",
-        "C/?C=C/C",          "N[C@@H](C)C=O",  "[C@]12(F)CC1C2",      "C1CC1.C1CC1",
-        "C-,=;@C",           "C!-&!@C",        "[C;$(C=O),$(C#N);!R]", "[C:1]-[O:2].[Na+:3]",
-        "C=%10CCCC%10",      "[Fe+2]~[#7]",    "[13C@@H](F)Cl",       "[$([C@H](F)Cl)]",
+        "C(C1)(C)C1",
+        "C1.C1",
+        "C(C(C)(C)C)(C(C)C)C",
+        "(C.N).(O.F)",
+        "(C=O).N.(O)",
+        "C12CC1C2",
+        "F/C=C\\F",
+        "F/C=C/1CCCC1",
+        "C/?C=C/C",
+        "N[C@@H](C)C=O",
+        "[C@]12(F)CC1C2",
+        "C1CC1.C1CC1",
+        "C-,=;@C",
+        "C!-&!@C",
+        "[C;$(C=O),$(C#N);!R]",
+        "[C:1]-[O:2].[Na+:3]",
+        "C=%10CCCC%10",
+        "[Fe+2]~[#7]",
+        "[13C@@H](F)Cl",
+        "[$([C@H](F)Cl)]",
     };
     fixture *f = *state;
 
@@ -307,8 +323,8 @@ static void write__deep_bonds_keep_their_meaning(void **state)
     bs_query_expr negated;
     uint32_t before, after;
 
-    check_ok(f, bs_query_join(&f->cx, &f->home, BS_TEST_NOT, &query->bonds[0].expr, NULL,
-                              &negated));
+    check_ok(f,
+             bs_query_join(&f->cx, &f->home, BS_TEST_NOT, &query->bonds[0].expr, NULL, &negated));
     query->bonds[0].expr = negated;
     check_ok(f, bs_query_bond_mask(&f->cx, &negated, &before));
     query = read_query(f, write_query(f, query));
