@@ -1,7 +1,8 @@
 # One object library for each folder of src, all with the same strict flags.
 
 set(BACKSAW_WARNINGS -Wall -Wextra -Wpedantic -Wshadow -Wvla -Wwrite-strings
-    -Wstrict-prototypes -Wmissing-prototypes -Wpointer-arith -Wundef)
+    $<$<COMPILE_LANGUAGE:C>:-Wstrict-prototypes> $<$<COMPILE_LANGUAGE:C>:-Wmissing-prototypes>
+    -Wpointer-arith -Wundef)
 # gcc 12 sees uninitialised values on paths that do not exist; clang's analyzer looks for real ones.
 if(CMAKE_C_COMPILER_ID STREQUAL "GNU")
     list(APPEND BACKSAW_WARNINGS -Wno-maybe-uninitialized)

@@ -5,6 +5,7 @@
 #include "backsaw/core.h"
 #include "backsaw/mol.h"
 #include "backsaw/draft.h"
+#include "backsaw/layout.h"
 #include "backsaw/format.h"
 #include "backsaw/match.h"
 #include "backsaw/rule.h"
