@@ -7,6 +7,7 @@
 #include "backsaw/draft.h"
 #include "backsaw/layout.h"
 #include "backsaw/format.h"
+#include "backsaw/file.h"
 #include "backsaw/match.h"
 #include "backsaw/rule.h"
 #include "backsaw/catalogue.h"
