@@ -151,6 +151,25 @@ int bs_rules_find(const bs_rules *rules, const char *name);
 /* The definition as kept by the book. */
 const bs_transform_def *bs_rules_transform(const bs_rules *rules, int index);
 
+/*
+ * How far a book has grown. Rewinding it forgets all that was added later; the names are free
+ * again, and the memory stays with the book.
+ */
+typedef struct bs_rules_mark {
+    int synthons, transforms;
+} bs_rules_mark;
+
+bs_rules_mark bs_rules_grown(const bs_rules *rules);
+void bs_rules_rewind(bs_rules *rules, bs_rules_mark mark);
+
+/*
+ * Takes a transform or a synthon out of use, or back into it. A retired one answers to no name, and
+ * a retired transform gives no step; its index stays. Disconnections keep the synthons that
+ * they were made with. Retiring a synthon that is not there does nothing.
+ */
+void bs_rules_retire_transform(bs_rules *rules, int index, bool retired);
+void bs_rules_retire_synthon(bs_rules *rules, const char *name, bool retired);
+
 /* ---- Hooks ----------------------------------------------------------------------------- */
 
 /* Where a target pattern lies in a product: atoms by map number, ascending. */

@@ -59,7 +59,7 @@ static bs_status fold_name(bs_ctx *cx, bs_arena *home, const char *name, char **
 static const bs_synthon *find_synthon(const bs_rules *rules, const char *key)
 {
     for (int i = 0; i < rules->synthon_count; i++) {
-        if (strcmp(rules->synthons[i]->key, key) == 0)
+        if (!rules->synthons[i]->retired && strcmp(rules->synthons[i]->key, key) == 0)
             return rules->synthons[i];
     }
     return NULL;
@@ -88,20 +88,24 @@ static int next_byte(const char **name)
     return **name >= 'A' && **name <= 'Z' ? *(*name)++ + ('a' - 'A') : *(*name)++;
 }
 
+static bool same_name(const char *a, const char *b)
+{
+    int x, y;
+
+    do {
+        x = next_byte(&a);
+        y = next_byte(&b);
+    } while (x == y && x != 0);
+    return x == y;
+}
+
 int bs_rules_find(const bs_rules *rules, const char *name)
 {
     for (int i = 0; i < rules->transform_count; i++) {
         const bs_transform *tr = rules->transforms[i];
 
         for (int k = 0; k < tr->key_count; k++) {
-            const char *a = name, *b = tr->keys[k];
-            int x, y;
-
-            do {
-                x = next_byte(&a);
-                y = next_byte(&b);
-            } while (x == y && x != 0);
-            if (x == y)
+            if (same_name(name, tr->keys[k]))
                 return i;
         }
     }
@@ -116,6 +120,47 @@ int bs_rules_count(const bs_rules *rules)
 const bs_transform_def *bs_rules_transform(const bs_rules *rules, int index)
 {
     return &rules->transforms[index]->def;
+}
+
+/* ---- Taking back --------------------------------------------------------------------------------- */
+
+bs_rules_mark bs_rules_grown(const bs_rules *rules)
+{
+    return (bs_rules_mark){rules->synthon_count, rules->transform_count};
+}
+
+void bs_rules_rewind(bs_rules *rules, bs_rules_mark mark)
+{
+    if (mark.synthons < rules->synthon_count)
+        rules->synthon_count = mark.synthons;
+    if (mark.transforms < rules->transform_count)
+        rules->transform_count = mark.transforms;
+}
+
+void bs_rules_retire_transform(bs_rules *rules, int index, bool retired)
+{
+    bs_transform *tr = rules->transforms[index];
+
+    if (tr->retired == retired)
+        return;
+    if (retired) {
+        tr->kept_keys = tr->key_count;
+        tr->kept_cases = tr->case_count;
+    }
+    tr->key_count = retired ? 0 : tr->kept_keys;
+    tr->case_count = retired ? 0 : tr->kept_cases;
+    tr->retired = retired;
+}
+
+/* The newest of a name is meant: older ones were retired before it could be added. */
+void bs_rules_retire_synthon(bs_rules *rules, const char *name, bool retired)
+{
+    for (int i = rules->synthon_count - 1; i >= 0; i--) {
+        if (!same_name(name, rules->synthons[i]->key))
+            continue;
+        rules->synthons[i]->retired = retired;
+        return;
+    }
 }
 
 /* ---- Copies of definitions ----------------------------------------------------------------------- */

@@ -20,6 +20,7 @@ typedef struct bs_case {
 typedef struct bs_synthon {
     bs_synthon_def def;
     char *key; /* the name as names are compared */
+    bool retired;
 } bs_synthon;
 
 typedef struct bs_transform {
@@ -32,6 +33,8 @@ typedef struct bs_transform {
     int *maps;
     int *map_atoms;
     int map_count;
+    bool retired; /* the counts of keys and cases are 0 then, and kept here */
+    int kept_keys, kept_cases;
 } bs_transform;
 
 struct bs_rules {
