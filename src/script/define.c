@@ -159,6 +159,52 @@ static void read_equivalents(lua_State *L, int i, bs_equivalent_def *items, int 
     }
 }
 
+/*
+ * Adds a synthon. What the user's own code has defined, it may define anew, as one does at a
+ * prompt; what packs have defined stands.
+ */
+static bs_status add_synthon(lua_State *L, const bs_synthon_def *def)
+{
+    bsl_host *host = bsl_host_of(L);
+    bs_rules *rules = host->session->rules;
+    bool own;
+    bs_status st;
+
+    if (host->kind != BSL_MAIN)
+        return bs_rules_add_synthon(host->cx, rules, def);
+    lua_getfield(L, LUA_REGISTRYINDEX, "backsaw.own_synthons");
+    own = lua_getfield(L, -1, def->name) != LUA_TNIL;
+    lua_pop(L, 1);
+    if (own)
+        bs_rules_retire_synthon(rules, def->name, true);
+    st = bs_rules_add_synthon(host->cx, rules, def);
+    if (st == BS_OK) {
+        lua_pushboolean(L, 1);
+        lua_setfield(L, -2, def->name);
+    } else if (own) {
+        bs_rules_retire_synthon(rules, def->name, false);
+    }
+    lua_pop(L, 1);
+    return st;
+}
+
+/* The same for a transform. */
+static bs_status add_transform(bsl_host *host, const bs_transform_def *def, int *index)
+{
+    bs_rules *rules = host->session->rules;
+    int old = host->kind == BSL_MAIN ? bs_rules_find(rules, def->name) : -1;
+    bs_status st;
+
+    if (old >= 0 && bs_rules_transform(rules, old)->pack)
+        old = -1;
+    if (old >= 0)
+        bs_rules_retire_transform(rules, old, true);
+    st = bs_rules_add_transform(host->cx, rules, def, index);
+    if (old >= 0 && st != BS_OK)
+        bs_rules_retire_transform(rules, old, false);
+    return st;
+}
+
 /* core.synthon{ name=, kind=, origin=, equivalents={ { attach=, rewrite=, name=, ionic= } } } */
 static int core_synthon(lua_State *L)
 {
@@ -182,7 +228,7 @@ static int core_synthon(lua_State *L)
         return bsl_raise(L, NULL, 0);
     read_equivalents(L, lua_gettop(L), items, def.equivalent_count);
     def.equivalents = items;
-    if (bs_rules_add_synthon(host->cx, host->session->rules, &def) != BS_OK)
+    if (add_synthon(L, &def) != BS_OK)
         return raise_definition(L, def.name, NULL, NULL);
     bs_arena_rewind(&host->results, mark);
     return 0;
@@ -266,7 +312,7 @@ static int core_transform(lua_State *L)
         return 0;
     read_transform(L, &def);
     def.pack = pack_name(host);
-    if (bs_rules_add_transform(host->cx, host->session->rules, &def, &index) != BS_OK) {
+    if (add_transform(host, &def, &index) != BS_OK) {
         bs_arena_rewind(&host->results, mark);
         return raise_definition(L, def.name, def.target, def.from);
     }
@@ -313,4 +359,6 @@ void bsl_open_define(lua_State *L)
                                           { NULL, NULL } };
 
     luaL_setfuncs(L, functions, 0);
+    lua_newtable(L);
+    lua_setfield(L, LUA_REGISTRYINDEX, "backsaw.own_synthons");
 }

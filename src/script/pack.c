@@ -197,6 +197,22 @@ static bs_status keep_text(bs_session *session, int pack, const char *text, size
     return BS_OK;
 }
 
+/* Forgets what a pack that failed, and the packs that it needed, have defined. */
+static void forget(bs_session *session, int pack, bs_rules_mark grown)
+{
+    bsl_example **link = &session->examples;
+
+    bs_rules_rewind(session->rules, grown);
+    for (int i = pack; i < session->pack_count; i++) {
+        session->pack_list[i].path = NULL;
+        session->pack_list[i].done = false;
+    }
+    while (*link && (*link)->transform < grown.transforms)
+        link = &(*link)->next;
+    *link = NULL;
+    session->examples_end = link;
+}
+
 /* Loads the file `path`, known to messages as `shown`, into the pack state. */
 static bs_status load_pack(bs_session *session, const char *path, const char *shown, int *pack,
                            bsl_fault *fault)
@@ -204,6 +220,7 @@ static bs_status load_pack(bs_session *session, const char *path, const char *sh
     bsl_host *host = session->packs;
     bs_mark mark = bs_arena_mark(&host->results);
     int outer = host->pack, outer_hook = host->hook_next;
+    bs_rules_mark grown = bs_rules_grown(session->rules);
     bs_status st = BS_OK;
     char *text;
     size_t length;
@@ -228,7 +245,7 @@ static bs_status load_pack(bs_session *session, const char *path, const char *sh
     if (st == BS_OK)
         session->pack_list[*pack].done = true;
     else
-        session->pack_list[*pack].path = NULL; /* so that it can be tried again */
+        forget(session, *pack, grown);
     return st;
 }
 

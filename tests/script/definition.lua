@@ -71,6 +71,23 @@ local broken = interconversion "test broken" {
 }
 print(fails(broken.back, broken, mol "CCO"):match "attempt to index a nil value") --> attempt to index a nil value
 
+-- a definition of one's own may be made anew; a mistake leaves the old one
+synthon "test again" { kind = "acceptor", equivalents = { { attach = "Cl" } } }
+local function again(target)
+    return disconnection "test again" { target = target, cut = { 1, 2 }, acceptor = { 1, "test again" },
+        donor = { 2, "test cyanide" } }
+end
+again "[CX4;H2:1]-!@[C:2]#[N:3]"
+print(#transform("test again"):back "CCC#N", #transform("test again"):back "CC(C)C#N") --> 1	0
+again "[CX4;H1:1]-!@[C:2]#[N:3]"
+print(#transform("test again"):back "CCC#N", #transform("test again"):back "CC(C)C#N") --> 0	1
+print((pcall(again, "[C")), #transform("test again"):back "CC(C)C#N") --> false	1
+synthon "test again" { kind = "acceptor", equivalents = { { attach = "Cl" }, { attach = "Br" } } }
+again "[CX4;H1:1]-!@[C:2]#[N:3]"
+print(#transform("test again"):back "CC(C)C#N") --> 2
+use "quay"
+print(fails(synthon, "quay alkyl", { kind = "acceptor", equivalents = { "Cl" } }):match "there already") --> there already
+
 -- several names
 interconversion "test oxidation" { target = "[CX3H1:1]=[O:2]", from = "[C:1]-[OX2H:2]", also = "test Swern" }
 print(transform "test-swern") --> test oxidation

@@ -48,6 +48,13 @@ print(fails(use, "no-such-pack")) --> no pack 'no-such-pack' beside the script, 
 print(fails(use, "./no-such-pack.lua")) --> no pack in file './no-such-pack.lua'
 print(fails(use, 3)) --> use: the name or the file of a pack is expected, not a number
 
+-- a pack that fails leaves nothing, so it can be put right and tried again
+local good = "interconversion 'try half' { target = '[CX4:1][OX2H:2]', from = '[C:1]Br.[O:2]' } "
+print(try(good .. "error 'late'")) --> PACK:1: late
+print(fails(transform, "try half")) --> no transform named 'try half'
+print(try(good), #transform("try half"):back "CCO") --> fine	1
+print(try(good):match "there already") --> there already
+
 -- a function of a rule that never ends is stopped, and the session goes on
 print(try "interconversion 'try endless' { target = '[CX4:1][OX2H:2]', from = '[C:1]Br.[O:2]', when = function() while true do end end }") --> fine
 local endless = transform "try endless"
