@@ -88,26 +88,71 @@ static bool has_directions(const bs_query *q)
     return false;
 }
 
+/* The end of a chain of double bonds on one side of its middle bond. */
+typedef struct chain_end {
+    int atom, before; /* `before` is the next atom of the chain */
+    int side, neighbour, or_unspecified;
+    int steps;
+} chain_end;
+
+/* The other double bond at an atom that has two, or -1. */
+static int next_double(const bs_query *q, int bond, int atom)
+{
+    int next = -1;
+
+    for (int i = 0; i < q->bond_count; i++)
+        if (i != bond && (q->bonds[i].a == atom || q->bonds[i].b == atom) &&
+            bs_query_mentions(&q->bonds[i].expr, BS_TEST_BOND_DOUBLE)) {
+            if (next >= 0)
+                return -1;
+            next = i;
+        }
+    return next;
+}
+
+/* No cumulene is longer on either side; the bound keeps hostile patterns cheap. */
+enum { MAX_CHAIN = 8 };
+
+/* Walks from the middle bond to an atom beside which a direction is written. */
+static chain_end walk_chain(const bs_query *q, int bond, int atom)
+{
+    chain_end end = {.atom = atom, .neighbour = -1};
+
+    for (;; end.steps++) {
+        const bs_query_bond *b = &q->bonds[bond];
+
+        end.before = b->a == end.atom ? b->b : b->a;
+        end.side = find_side(q, bond, end.atom, &end.neighbour, &end.or_unspecified);
+        bond = next_double(q, bond, end.atom);
+        if (end.side != 0 || bond < 0 || end.steps == MAX_CHAIN)
+            return end;
+        end.atom = q->bonds[bond].a == end.atom ? q->bonds[bond].b : q->bonds[bond].a;
+    }
+}
+
+/* Each double bond is tried as the middle of a chain; most are chains of their own. */
 static void add_turns(bs_part *part)
 {
     const bs_query *q = part->query;
 
     for (int i = 0; i < q->bond_count; i++) {
         const bs_query_bond *bond = &q->bonds[i];
-        bs_turn turn = {.first = bond->a, .second = bond->b};
-        int free_a = 0, free_b = 0, left = -1, right = -1, up_a, up_b;
+        chain_end a, b;
 
         if (!bs_query_mentions(&bond->expr, BS_TEST_BOND_DOUBLE))
             continue;
-        up_a = find_side(q, i, bond->a, &left, &free_a);
-        up_b = find_side(q, i, bond->b, &right, &free_b);
-        if (up_a == 0 || up_b == 0)
+        a = walk_chain(q, i, bond->a);
+        b = walk_chain(q, i, bond->b);
+        if (a.side == 0 || b.side == 0 || a.steps != b.steps)
             continue;
-        turn.left = left;
-        turn.right = right;
-        turn.cis = up_a == up_b;
-        turn.or_unspecified = free_a || free_b;
-        part->turns[part->turn_count++] = turn;
+        part->turns[part->turn_count++] = (bs_turn){
+            .middle = {bond->a, bond->b},
+            .end = {a.atom, b.atom},
+            .before = {a.before, b.before},
+            .beside = {a.neighbour, b.neighbour},
+            .cis = a.side == b.side,
+            .or_unspecified = a.or_unspecified || b.or_unspecified,
+        };
     }
 }
 

@@ -64,9 +64,15 @@ typedef struct bs_centre {
     int32_t around_count;
 } bs_centre;
 
-/* A double bond with directions at both ends: left - first = second - right. */
+/*
+ * A double bond, or a chain of an odd number of them, with directions at both ends. The molecule
+ * keeps the geometry on the middle bond. All are atoms of the query.
+ */
 typedef struct bs_turn {
-    int32_t left, first, second, right;
+    int32_t middle[2];
+    int32_t end[2];
+    int32_t before[2]; /* neighbour of the end in the chain */
+    int32_t beside[2]; /* neighbour of the end that has the direction */
     bool cis;
     bool or_unspecified;
 } bs_turn;

@@ -92,9 +92,8 @@ static uint32_t first_beside(const bs_search *s, uint32_t end, uint32_t other_en
 static bool turn_fits(const bs_search *s, const bs_turn *turn, const bs_frame *f)
 {
     const int32_t *place = f->order->place;
-    uint32_t first = f->placed[place[turn->first]], second = f->placed[place[turn->second]];
-    uint32_t left = f->placed[place[turn->left]], right = f->placed[place[turn->right]];
-    const bs_bond *bond = bond_between(s, first, second);
+    const bs_bond *bond =
+        bond_between(s, f->placed[place[turn->middle[0]]], f->placed[place[turn->middle[1]]]);
     bool cis;
 
     if (!bond || bond->order != 2 || bond->flags & BS_BOND_AROMATIC)
@@ -102,8 +101,11 @@ static bool turn_fits(const bs_search *s, const bs_turn *turn, const bs_frame *f
     if (!(bond->flags & (BS_BOND_CIS | BS_BOND_TRANS)))
         return turn->or_unspecified;
     cis = (bond->flags & BS_BOND_CIS) != 0;
-    cis ^= first_beside(s, first, second) != left;
-    cis ^= first_beside(s, second, first) != right;
+    for (int i = 0; i < 2; i++) {
+        uint32_t end = f->placed[place[turn->end[i]]], before = f->placed[place[turn->before[i]]];
+
+        cis ^= first_beside(s, end, before) != f->placed[place[turn->beside[i]]];
+    }
     return cis == turn->cis;
 }
 
