@@ -12,6 +12,14 @@
  * each pair of equivalents (a case); run forwards, the rewriting is read from R to L. Everything
  * below (back, forth, check) works on cases only.
  *
+ * Stereo. `@` in a target is no condition: it says that the centre is turned, kept or made. Centres
+ * that only the target marks are made as written or all turned, so marks say how they stand to each
+ * other (a syn addition), and a product whose centres stand otherwise fails the forward check. `/`
+ * and `\` are conditions, and made as written. A centre that the reaction makes without a mark is
+ * left open (`stereo_open`).
+ *
+ * Forwards an azole reacts at either nitrogen, whichever carries the hydrogen.
+ *
  * A rule book (`bs_rules`) holds synthons and transforms in the order in which they were added;
  * indices are 0-based and stay. Adding is for one thread; a book that no longer grows can be used
  * by several threads, each with its own context and hooks.
