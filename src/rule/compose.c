@@ -22,13 +22,13 @@ enum {
 /* One half of a disconnection. */
 typedef struct half {
     const bs_equivalent_def *equivalent;
-    int atom; /* of the target, at the cut */
     bs_query *from, *to; /* of a rewriting */
-    int ours;            /* the atom of `from` that is the cut atom */
     int **overlays;
-    int overlay_count;
     bs_query *fragment; /* of an attachment, NULL for hydrogen */
-    int order;          /* of the bond to it, 0: that of the bond that was cut */
+    int overlay_count;
+    int atom;  /* of the target, at the cut */
+    int ours;  /* the atom of `from` that is the cut atom */
+    int order; /* of the bond to the fragment, 0: that of the bond that was cut */
 } half;
 
 /* A case being woven. */
