@@ -10,12 +10,9 @@
 
 #include <string.h>
 
-/*
- * Square: corners 0 to 3 in order around. SP1 is U (a b c d around), SP2 is 4 (a b opposite... ),
- * SP3 is Z, as the shapes of the specification run.
- */
+/* Square: corners 0 to 3 in order around; the shapes that the neighbours a, b, c, d draw. */
 static const uint8_t square[3][4] = {
-    {0, 1, 2, 3}, /* U: a, b, c, d around */
+    {0, 1, 2, 3}, /* U: one after the other */
     {0, 2, 1, 3}, /* 4: a opposite b */
     {0, 1, 3, 2}, /* Z: a opposite d */
 };
@@ -41,11 +38,11 @@ typedef struct octahedron {
 
 static const octahedron octahedra[30] = {
     {'U', 5, true},  {'U', 5, false}, {'U', 4, true},  {'Z', 5, true},  {'Z', 4, true},
-    {'U', 3, true},  {'Z', 3, true},  {'4', 5, false}, {'4', 4, false}, {'4', 5, true},
-    {'4', 4, true},  {'4', 3, false}, {'4', 3, true},  {'Z', 5, false}, {'Z', 4, false},
+    {'U', 3, true},  {'Z', 3, true},  {'4', 5, true},  {'4', 4, true},  {'4', 5, false},
+    {'4', 4, false}, {'4', 3, true},  {'4', 3, false}, {'Z', 5, false}, {'Z', 4, false},
     {'U', 4, false}, {'Z', 3, false}, {'U', 3, false}, {'U', 2, true},  {'Z', 2, true},
-    {'4', 2, false}, {'4', 2, true},  {'Z', 2, false}, {'U', 2, false}, {'U', 1, true},
-    {'Z', 1, true},  {'4', 1, false}, {'4', 1, true},  {'Z', 1, false}, {'U', 1, false},
+    {'4', 2, true},  {'4', 2, false}, {'Z', 2, false}, {'U', 2, false}, {'U', 1, true},
+    {'Z', 1, true},  {'4', 1, true},  {'4', 1, false}, {'Z', 1, false}, {'U', 1, false},
 };
 
 int bs_stereo__perm_count(int kind)
