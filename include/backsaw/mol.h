@@ -13,7 +13,8 @@
  * from the first, the others run anticlockwise (`@`) or clockwise (`@@`), as in OpenSMILES. A
  * double bond is cis or trans with regard to the first neighbour of each end, in the same order,
  * the other end left out; for an odd chain of double bonds the middle one says it for the two ends
- * of the chain. Only marks that mean something are kept.
+ * of the chain; the nitrogen of an imine without substituent has its hydrogen as the reference. Only
+ * marks that mean something are kept.
  */
 #ifndef BACKSAW_MOL_H
 #define BACKSAW_MOL_H

@@ -13,7 +13,7 @@
 enum {
     BS_ATOM_AROMATIC = 1,
     BS_ATOM_RING = 2,
-    BS_ATOM_BRACKET = 4, /* hydrogens were stated, not implied by the valence */
+    BS_ATOM_BRACKET = 4, /* hydrogens are not those that the valence would imply */
     BS_ATOM_ODD = 8      /* valence outside the usual ones; see doubts */
 };
 
