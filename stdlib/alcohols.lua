@@ -9,6 +9,21 @@ pack {
     needs = { "synthons" },
 }
 
+-- Two neighbouring ring carbons with a hydroxyl group each, on one side or on both sides of the ring.
+local CIS_DIOL = { pattern "O[C@@H]([#6;R])[C@@H]([#6;R])O", pattern "O[C@H]([#6;R])[C@H]([#6;R])O" }
+local TRANS_DIOL = { pattern "O[C@@H]([#6;R])[C@H]([#6;R])O", pattern "O[C@H]([#6;R])[C@@H]([#6;R])O" }
+
+-- Whether one of the patterns lies on the atoms with map numbers 1 and 3; its second and fourth atoms count.
+local function stands(m, patterns)
+    local a, b = m.atom[1].index, m.atom[3].index
+    for _, p in ipairs(patterns) do
+        for _, hit in ipairs(m.molecule:find(p)) do
+            if (hit[2] == a and hit[4] == b) or (hit[2] == b and hit[4] == a) then return true end
+        end
+    end
+    return false
+end
+
 interconversion "secondary-alcohol-from-ketone" {
     about = "Ketone reduction with sodium borohydride; hydride from the less hindered face; racemic in open chains; ester survives",
     target = "[C;X4;H1:1]([#6:3])([#6:4])[O;X2;H1:2]",
@@ -150,6 +165,7 @@ interconversion "syn-dihydroxylation" {
     about = "Osmium-catalysed dihydroxylation (Upjohn); syn addition: cis diol in a ring; from the less hindered face",
     target = "[C;X4;H1;R:1]([#6;R:5])([O;X2;H1])[C;X4;H1;R:3]([#6;R:6])[O;X2;H1]",
     from = "[C;X3;H1;R:1]([#6;R:5])=[C;X3;H1;R:3][#6;R:6]",
+    when = function(m) return not stands(m, TRANS_DIOL) end,
     conditions = "oso4",
     also_attacks = { "alkene", "thiol", "thioether" },
     recipe = "OsO4 (cat), NMO, acetone-H2O, rt; also: K2OsO4",
@@ -209,6 +225,7 @@ interconversion "anti-diol-from-epoxide" {
     about = "Epoxide hydrolysis to an anti diol; inversion at the attacked carbon: trans diol in a ring",
     target = "[O;X2;H1:2][C;X4;H1:1]([#6:5])[C@@;X4;H1:3]([#6:6])[O;X2;H1]",
     from = "[O;X2;H0:2]1[C;X4;H1:1]([#6:5])[C@@;X4;H1:3]1[#6:6]",
+    when = function(m) return not stands(m, CIS_DIOL) end,
     conditions = "acid-aq-mild",
     also_attacks = { "epoxide", "acetal", "silyl ether", "alkene" },
     recipe = "H2SO4 (cat) or HClO4, H2O-THF; also: KOH, DMSO-H2O, heat",

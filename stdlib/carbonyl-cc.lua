@@ -366,7 +366,7 @@ disconnection "arbuzov" {
 disconnection "double-claisen-schmidt" {
     about = "Diarylideneacetone by double Claisen-Schmidt condensation; E,E",
     rxno = "RXNO:0000595",
-    target = "[c:1]/[CX3;H1:2]=[CX3;H1:3]/[CX3:4](=[OX1:5])/[CX3;H1:6]=[CX3;H1:7]/[c:8]",
+    target = "[c:1][CX3;H1:2]=[CX3;H1:3][CX3:4](=[OX1:5])[CX3;H1:6]=[CX3;H1:7][c:8]",
     from = "[c:1][C:2]=O.[C;H3:3][C:4](=[O:5])[C;H3:6].O=[C:7][c:8]",
     when = function(m) return m.atom[1].symmetry == m.atom[8].symmetry end,
     conditions = "base-aq-mild",

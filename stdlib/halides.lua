@@ -9,6 +9,19 @@ pack {
     needs = { "synthons" },
 }
 
+-- Two bromines on one side of a ring.
+local CIS_DIBROMIDE = { pattern "Br[C@@H]([#6;R])[C@@H]([#6;R])Br", pattern "Br[C@H]([#6;R])[C@H]([#6;R])Br" }
+
+local function is_cis_dibromide(m)
+    local a, b = m.atom[1].index, m.atom[3].index
+    for _, p in ipairs(CIS_DIBROMIDE) do
+        for _, hit in ipairs(m.molecule:find(p)) do
+            if (hit[2] == a and hit[4] == b) or (hit[2] == b and hit[4] == a) then return true end
+        end
+    end
+    return false
+end
+
 interconversion "bromide-from-alcohol-pbr3" {
     about = "Alkyl bromide from alcohol with phosphorus tribromide; inversion at secondary centres; no rearrangement of primary",
     rxno = "RXNO:0000364",
@@ -87,6 +100,7 @@ interconversion "alkene-dibromination" {
     about = "Addition of bromine to an alkene; anti addition: trans dibromide in a ring",
     target = "[C;X4;H1:1]([#6:5])([Br;X1])[C;X4;H1:3]([#6:6])[Br;X1]",
     from = "[C;X3;H1:1]([#6:5])=[C;X3;H1:3][#6:6]",
+    when = function(m) return not is_cis_dibromide(m) end,
     conditions = "br2",
     also_attacks = { "alkene", "alkyne", "phenol", "aniline", "ketone", "aldehyde", "thiol", "thioether",
         "enol ether" },
