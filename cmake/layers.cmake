@@ -22,7 +22,7 @@ function(backsaw_flags target)
         # The debug arenas pass every request to malloc, so that overruns are seen.
         target_compile_definitions(${target} PRIVATE BS_ARENA_DEBUG=1)
         target_compile_options(${target} PRIVATE -fsanitize=address,undefined
-            -fno-sanitize-recover=all -fno-omit-frame-pointer)
+            -fno-sanitize-recover=all -fno-omit-frame-pointer -O1)
         target_link_options(${target} PRIVATE -fsanitize=address,undefined)
     endif()
 endfunction()
