@@ -248,3 +248,31 @@ interconversion "alcohol-from-ester-hydrolysis" {
     example { "OC1CCN(CC1)c1ncccn1", from = { "O=C(OC1CCN(CC1)c1ncccn1)c1ccccc1" } },
     refuse { "Oc1ccccc1" }, -- phenol, not an alcohol on sp3 carbon
 }
+
+interconversion "primary-alcohol-from-acid-chloride" {
+    about = "Acid chloride reduction to the primary alcohol; excess hydride, the aldehyde is passed through",
+    target = "[CX4;H2:1]([#6:3])[OX2;H1:2]",
+    from = "[C:1]([#6:3])(=[O:2])Cl",
+    conditions = "lialh4",
+    also_attacks = { "ester", "aldehyde", "ketone", "nitrile", "amide", "epoxide", "free acid" },
+    recipe = "LiAlH4, Et2O, 0 °C; or NaBH4 (excess), THF-DMF, 0 °C",
+    yield = { 80, 95 },
+    cautions = { "lithium aluminium hydride" },
+    source = "Nystrom, Brown, J. Am. Chem. Soc. 1947, 69, 1197; from memory",
+    example { "CCCCCCCCO", from = { "CCCCCCCC(=O)Cl" } },
+    refuse { "CC(C)O" }, -- a secondary alcohol
+}
+
+interconversion "primary-alcohol-from-ethyl-ester" {
+    about = "Ethyl ester reduction with lithium aluminium hydride",
+    target = "[CX4;H2:1]([#6:3])[OX2;H1:2]",
+    from = "[C:1]([#6:3])(=[O:2])O[CH2][CH3]",
+    conditions = "lialh4",
+    also_attacks = { "other ester", "aldehyde", "ketone", "nitrile", "amide", "epoxide", "free acid", "nitro" },
+    recipe = "LiAlH4, THF or Et2O, 0 °C to rt",
+    yield = { 80, 95 },
+    cautions = { "lithium aluminium hydride" },
+    source = "Nystrom, Brown, J. Am. Chem. Soc. 1947, 69, 1197; from memory",
+    example { "OCc1cccnc1", from = { "CCOC(=O)c1cccnc1" } },
+    refuse { "CC(C)O" }, -- a secondary alcohol
+}

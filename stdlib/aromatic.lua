@@ -544,3 +544,36 @@ disconnection "fc-acetylation-anhydride" {
     example { "CC(=O)c1ccc(OC)cc1", from = { "COc1ccccc1", "CC(=O)OC(C)=O" } },
     refuse { "CC(=O)c1cccc([N+](=O)[O-])c1" }, -- nitrobenzene does not react
 }
+
+-- Biphenyls take the acyl group para to the other ring.
+disconnection "fc-acylation-biphenyl" {
+    about = "Friedel-Crafts acylation of a biphenyl; para to the other ring",
+    target = "[c;$(c1:[cH]:[cH]:c(-c2:[cH]:[cH]:[cH]:[cH]:[cH]:2):[cH]:[cH]:1):1]-!@[CX3;!R:2](=[OX1:3])-[#6;!$([#6]=O):4]",
+    cut = { 2, 1 },
+    acceptor = { 2, "acyl" },
+    donor = { 1, "arene" },
+    conditions = "lewis-acid",
+    also_attacks = { "amine", "alcohol", "tert-butyl ether" },
+    recipe = "acid chloride, AlCl3, CS2 or CH2Cl2, 0 °C to reflux",
+    yield = { 70, 90 },
+    cautions = { "aluminium chloride" },
+    source = "common practice, no source",
+    example { "CC(=O)c1ccc(-c2ccccc2)cc1", from = { "c1ccc(-c2ccccc2)cc1", "CC(=O)Cl" } },
+    refuse { "CC(=O)c1cccc(-c2ccccc2)c1" }, -- meta to the other ring
+}
+
+-- What the lost amino group put in place: an ortho halogen or nitro group beside a para alkyl group.
+interconversion "deamination-para-methyl" {
+    about = "Reductive deamination of an aniline that had put a halogen ortho to itself, para to an alkyl group",
+    target = "[cH;$(c1:c(-[Cl,Br,I,$([N+](=O)[O-])]):c:c(-[CX4]):c:c:1),$(c1:c(-[Cl,Br,I,$([N+](=O)[O-])]):c:c:c(-[CX4]):c:1);" ..
+        "$(c1:c:c:c(-[CX4]):c:c:1):1]",
+    from = "[c:1]N",
+    conditions = "diazotisation",
+    also_attacks = { "other primary amine", "hydrazine" },
+    recipe = "NaNO2, H2SO4, EtOH, 0-5 °C, then Cu, warm; or H3PO2",
+    yield = { 60, 80 },
+    cautions = { "sodium nitrite" },
+    source = "Bigelow, Johnson, Sandborn, Org. Synth. Coll. Vol. 1, 133; from memory",
+    example { "Cc1cccc(Br)c1", from = { "Cc1ccc(N)c(Br)c1" } },
+    refuse { "Cc1ccccc1" }, -- no group that the amine would have directed
+}

@@ -386,3 +386,20 @@ disconnection "mitsunobu-esterification" {
         from = { "CC(C)[C@@H]1CC[C@@H](C)C[C@H]1O", "O=C(O)c1ccc([N+](=O)[O-])cc1" } },
     refuse { "CC(C)(C)OC(=O)c1ccccc1" }, -- a tertiary alcohol does not invert
 }
+
+disconnection "aryl-acetate-from-anhydride" {
+    about = "O-Acetylation of a phenol with acetic anhydride",
+    target = "[c:1][OX2:2]-!@[CX3:3](=[OX1:4])[CH3:5]",
+    cut = { 3, 2 },
+    acceptor = { 3, "acetyl" },
+    donor = { 2, "phenol" },
+    conditions = "acylation",
+    also_attacks = { "primary amine", "secondary amine", "alcohol", "thiol", "other phenol" },
+    recipe = "Ac2O, cat. H2SO4 or H3PO4, 50-80 °C; or Ac2O, pyridine, rt",
+    yield = { 75, 95 },
+    cautions = { "acetic anhydride" },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "CC(=O)Oc1ccccc1C(=O)O", from = { "O=C(O)c1ccccc1O", "CC(=O)OC(C)=O" } },
+    refuse { "CC(=O)Oc1ccccc1N" }, -- the free amine would be acylated first
+    when = function(m) return not m.molecule:has "[NX3;H1,H2;+0;!$(N[C,S]=[O,S,N])]" end,
+}

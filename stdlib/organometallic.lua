@@ -237,3 +237,17 @@ interconversion "arylboronic-acid" {
     example { "OB(O)c1ccc(OCc2ccccc2)cc1", from = { "Br[Mg]c1ccc(OCc2ccccc2)cc1", "COB(OC)OC" } },
     refuse { "CCCCB1OC(C)(C)C(C)(C)O1" }, -- an ester and an alkyl boron
 }
+
+disconnection "boronic-acid-by-halogen-metal-exchange" {
+    about = "Arylboronic acid from the bromide through the Grignard or lithium reagent in one operation",
+    target = "[c:1]-[BX3:2]([OX2H:3])-[OX2H:4]",
+    from = "[c:1]Br.[B:2]([O:3]C)([O:4]C)OC",
+    conditions = "organolithium",
+    also_attacks = { "ketone", "aldehyde", "ester", "nitrile", "alcohol", "primary amine", "free acid" },
+    recipe = "Mg, THF or BuLi, THF, -78 °C; B(OMe)3, -78 °C to rt; aqueous acid",
+    yield = { 60, 85 },
+    cautions = { "butyllithium" },
+    source = "common practice, no source",
+    example { "OB(O)c1ccccc1", from = { "Brc1ccccc1", "COB(OC)OC" } },
+    refuse { "OB(O)CCc1ccccc1" }, -- an alkylboronic acid
+}

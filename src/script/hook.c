@@ -23,17 +23,22 @@ typedef struct hook_call {
 /* Pushes { molecule =, atom = { [map] = ... } }; the molecule is at `molecule`. */
 static void push_site(lua_State *L, int molecule, const bs_mol *mol, const bs_site *site)
 {
+    bsl_host *host = bsl_host_of(L);
+    bs_mark mark = bs_arena_mark(&host->results);
+    const int *classes = bsl_symmetry(L, mol, mark);
+
     lua_createtable(L, 0, 2);
     lua_pushvalue(L, molecule);
     lua_setfield(L, -2, "molecule");
     lua_createtable(L, site->count, 0);
     for (int i = 0; i < site->count; i++) {
-        bsl_push_atom(L, mol, (int)site->atoms[i]);
+        bsl_push_atom(L, mol, classes, (int)site->atoms[i]);
         lua_pushinteger(L, (lua_Integer)site->atoms[i] + 1);
         lua_setfield(L, -2, "index");
         lua_rawseti(L, -2, site->maps[i]);
     }
     lua_setfield(L, -2, "atom");
+    bs_arena_rewind(&host->results, mark);
 }
 
 /* The protected part of a call: argument is the hook_call. */

@@ -198,8 +198,14 @@ int bsl_count_matches(lua_State *L, const bs_mol *mol, const bs_pattern *pattern
  */
 const bs_mol **bsl_collect_mols(lua_State *L, int first, int *count);
 
-/* Pushes an atom's table: element, hydrogens, charge, and so on. `atom` is 0-based. */
-void bsl_push_atom(lua_State *L, const bs_mol *mol, int atom);
+/* Symmetry classes of a molecule in the results arena; rewinds it to `mark` before it raises. */
+const int *bsl_symmetry(lua_State *L, const bs_mol *mol, bs_mark mark);
+
+/*
+ * Pushes an atom's table: element, hydrogens, charge, and so on. `atom` is 0-based, `classes` those
+ * of bsl_symmetry().
+ */
+void bsl_push_atom(lua_State *L, const bs_mol *mol, const int *classes, int atom);
 
 /* Pushes a step's table for a step of the rule book; the product's value is at `product`. */
 void bsl_push_step(lua_State *L, int product, const bs_step *step);

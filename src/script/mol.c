@@ -268,11 +268,21 @@ static int mol_find(lua_State *L)
     return bsl_push_matches(L, bsl_checkmol(L, 1), bsl_topattern(L, 2));
 }
 
-void bsl_push_atom(lua_State *L, const bs_mol *mol, int atom)
+const int *bsl_symmetry(lua_State *L, const bs_mol *mol, bs_mark mark)
+{
+    bsl_host *host = bsl_host_of(L);
+    int *classes;
+
+    if (bs_mol_symmetry(host->cx, &host->results, mol, &classes) != BS_OK)
+        bsl_raise_from(L, mark, NULL, 0);
+    return classes;
+}
+
+void bsl_push_atom(lua_State *L, const bs_mol *mol, const int *classes, int atom)
 {
     const char *symbol = bs_element_symbol(bs_mol_atom_element(mol, atom));
 
-    lua_createtable(L, 0, 9);
+    lua_createtable(L, 0, 10);
     lua_pushstring(L, symbol ? symbol : "*");
     lua_setfield(L, -2, "element");
     lua_pushinteger(L, bs_mol_atom_hydrogens(mol, atom));
@@ -291,19 +301,25 @@ void bsl_push_atom(lua_State *L, const bs_mol *mol, int atom)
     lua_setfield(L, -2, "carbons");
     lua_pushinteger(L, bs_mol_atom_label(mol, atom));
     lua_setfield(L, -2, "label");
+    lua_pushinteger(L, classes[atom] + 1);
+    lua_setfield(L, -2, "symmetry");
 }
 
 /* list = m:atoms() */
 static int mol_atoms(lua_State *L)
 {
     const bs_mol *mol = bsl_checkmol(L, 1);
+    bsl_host *host = bsl_host_of(L);
+    bs_mark mark = bs_arena_mark(&host->results);
+    const int *classes = bsl_symmetry(L, mol, mark);
     int count = bs_mol_atom_count(mol);
 
     lua_createtable(L, count, 0);
     for (int i = 0; i < count; i++) {
-        bsl_push_atom(L, mol, i);
+        bsl_push_atom(L, mol, classes, i);
         lua_rawseti(L, -2, i + 1);
     }
+    bs_arena_rewind(&host->results, mark);
     return 1;
 }
 

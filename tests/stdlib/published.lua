@@ -1,13 +1,15 @@
 -- Plans published syntheses with each entry's own start compounds as the only catalogue, and counts those whose
--- steps stand among the first 25 routes. Usage: backsaw published.lua DATA LEAST [ID]
+-- steps stand among the first 25 routes. Usage: backsaw published.lua DATA LEAST [ID...]
 --
 -- Two steps are the same if they have the same product and the same precursors, each compared once, by canonical
 -- structure. Precursors without carbon are left out on both sides, except ammonia, hydroxylamine and hydrazine; the
 -- cyanides of sodium, potassium and hydrogen are one; an organomagnesium or organolithium compound counts as its
 -- bromide, and the step that makes it is passed over.
 
-local data, least, only = arg[1], tonumber(arg[2]), arg[3]
+local data, least = arg[1], tonumber(arg[2])
 local entries = dofile(data)
+local chosen, any_chosen = {}, arg[3] ~= nil
+for i = 3, #arg do chosen[arg[i]] = true end
 
 local cyanides = {}
 for _, smiles in ipairs { "[Na+].[C-]#N", "[K+].[C-]#N", "C#N" } do
@@ -86,17 +88,18 @@ local function place(entry)
     return nil, #routes
 end
 
-local found, missing = 0, {}
+local found, tried, missing = 0, 0, {}
 for _, entry in ipairs(entries) do
-    if not only or entry.id == only then
+    if not any_chosen or chosen[entry.id] then
         local at, count = place(entry)
-        print(string.format("%-24s %s", entry.id, at and "place " .. at .. " of " .. count
+        print(string.format("%-28s %s", entry.id, at and "place " .. at .. " of " .. count
             or "not found among " .. count))
+        tried = tried + 1
         if at then found = found + 1 else missing[#missing + 1] = entry.id end
     end
 end
-print(string.format("%d of %d published syntheses found", found, #entries))
-if not only and found < least then
+print(string.format("%d of %d published syntheses found", found, tried))
+if found < least then
     io.stderr:write(string.format("expected at least %d; missing: %s\n", least, table.concat(missing, ", ")))
     os.exit(1)
 end
