@@ -27,17 +27,17 @@ typedef struct aromatic {
     bs_ctx *cx;
     bs_mol *mol;
     const bs_rings *rings;
-    uint8_t *gifts;       /* by atom */
-    uint32_t *bonds;      /* by place in rings->atoms: the bond to the next atom of the ring */
-    bool *fits;           /* by ring: all atoms take part */
-    uint32_t *near_at;    /* by ring: where its neighbours stand in `near` */
+    uint8_t *gifts;    /* by atom */
+    uint32_t *bonds;   /* by place in rings->atoms: the bond to the next atom of the ring */
+    bool *fits;        /* by ring: all atoms take part */
+    uint32_t *near_at; /* by ring: where its neighbours stand in `near` */
     uint32_t *near;
-    uint32_t *group;      /* rings of the fused system in hand */
+    uint32_t *group; /* rings of the fused system in hand */
     uint32_t group_count;
-    uint32_t open_bonds;  /* its bonds that are not aromatic yet */
-    uint8_t *atom_count;  /* how many rings of the set have the atom */
+    uint32_t open_bonds; /* its bonds that are not aromatic yet */
+    uint8_t *atom_count; /* how many rings of the set have the atom */
     uint8_t *bond_count;
-    uint32_t *barred;     /* by ring: set number that has seen it */
+    uint32_t *barred; /* by ring: set number that has seen it */
     uint32_t set[MAX_SET];
 } aromatic;
 
@@ -306,7 +306,8 @@ static bs_status find_neighbours(aromatic *a)
     return BS_OK;
 }
 
-/* ---- Sets of rings ----------------------------------------------------------------------------- */
+/* ---- Sets of rings -----------------------------------------------------------------------------
+ */
 
 /* Counts the electrons of the set in hand; atoms of three or more of its rings lie inside. */
 static bool obeys_rule(const aromatic *a, int size)

@@ -13,7 +13,7 @@
 
 enum {
     FIRST_SIZE = 8,
-    MANY_PATHS = 64, /* a family of more rings is represented by one */
+    MANY_PATHS = 64,    /* a family of more rings is represented by one */
     MAX_WORDS = 1 << 25 /* of the basis: 256 MiB */
 };
 
@@ -21,9 +21,9 @@ enum {
 typedef struct candidate {
     uint32_t root, top, p, q;
     uint32_t size;
-    uint32_t path; /* where its atoms stand in `path_atoms` */
+    uint32_t path;   /* where its atoms stand in `path_atoms` */
     uint32_t family; /* number of rings through other shortest paths, with this one */
-    uint32_t next; /* the next candidate of the same size + 1, or 0 */
+    uint32_t next;   /* the next candidate of the same size + 1, or 0 */
 } candidate;
 
 typedef struct cycles {

@@ -92,12 +92,11 @@ static void place_atoms(finish *f)
         f->origin[next] = i;
         f->stated[next] = a->hydrogens;
         f->wish[next] = a->aromatic;
-        f->mol->atoms[next] =
-            (bs_atom){.element = a->element,
-                      .charge = a->charge,
-                      .hydrogens = (uint8_t)(a->hydrogens > 0 ? a->hydrogens : 0),
-                      .isotope = a->isotope,
-                      .label = a->label};
+        f->mol->atoms[next] = (bs_atom){.element = a->element,
+                                        .charge = a->charge,
+                                        .hydrogens = (uint8_t)(a->hydrogens > 0 ? a->hydrogens : 0),
+                                        .isotope = a->isotope,
+                                        .label = a->label};
         f->mol->charge += a->charge;
         next++;
     }
@@ -288,9 +287,8 @@ static bs_status fill_valences(finish *f)
         int total;
 
         if (f->stated[i] == BS_DRAFT_IMPLIED)
-            a->hydrogens = (uint8_t)(a->hydrogens +
-                                     bs_valence__implied(a->element, a->charge,
-                                                         sum + a->hydrogens));
+            a->hydrogens = (uint8_t)(a->hydrogens + bs_valence__implied(a->element, a->charge,
+                                                                        sum + a->hydrogens));
         total = sum + a->hydrogens;
         if (total > UINT8_MAX)
             return bs_fail_at(f->cx, BS_ELIMIT, f->origin[i], "a valence is at most 255");
@@ -303,7 +301,8 @@ static bs_status fill_valences(finish *f)
     return BS_OK;
 }
 
-/* ---- Rings ------------------------------------------------------------------------------------ */
+/* ---- Rings ------------------------------------------------------------------------------------
+ */
 
 /* Counts of rings for each atom. */
 static void count_rings(finish *f)
@@ -336,8 +335,8 @@ static bs_status pack(finish *f, bs_arena *home, bs_mol **out)
     uint32_t rings = f->rings.sssr;
     uint32_t ring_atoms = rings ? f->rings.offsets[rings] : 0;
     bs_mol *mol;
-    bs_status st = bs_mol__new(f->cx, home, f->mol->atom_count, f->mol->bond_count, rings,
-                             ring_atoms, &mol);
+    bs_status st =
+        bs_mol__new(f->cx, home, f->mol->atom_count, f->mol->bond_count, rings, ring_atoms, &mol);
 
     if (st != BS_OK)
         return st;
@@ -352,7 +351,8 @@ static bs_status pack(finish *f, bs_arena *home, bs_mol **out)
     return BS_OK;
 }
 
-/* ---- All together ------------------------------------------------------------------------------ */
+/* ---- All together ------------------------------------------------------------------------------
+ */
 
 static bs_status perceive(finish *f)
 {

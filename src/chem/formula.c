@@ -28,8 +28,7 @@ static bs_status write_rest(bs_text *text, const uint32_t *counts, bool carbon_d
         for (int z = 1; z < BS_ELEMENT_COUNT; z++) {
             const char *symbol = bs_element_symbol(z);
 
-            if (counts[z] == 0 || strcmp(symbol, last) <= 0 ||
-                (carbon_done && (z == 1 || z == 6)))
+            if (counts[z] == 0 || strcmp(symbol, last) <= 0 || (carbon_done && (z == 1 || z == 6)))
                 continue;
             if (next == 0 || strcmp(symbol, bs_element_symbol(next)) < 0)
                 next = z;

@@ -20,9 +20,9 @@ typedef struct kekule {
     bs_ctx *cx;
     bs_mol *mol;
     const int16_t *stated;
-    uint8_t *needs;     /* by atom */
-    uint32_t *mate;     /* by atom: the other end of its double bond */
-    uint32_t *parts;    /* the atoms with a need, ascending */
+    uint8_t *needs;  /* by atom */
+    uint32_t *mate;  /* by atom: the other end of its double bond */
+    uint32_t *parts; /* the atoms with a need, ascending */
     uint32_t part_count;
     /* The search from one atom. */
     uint8_t *colour; /* 0 unseen, 1 outer, 2 inner */
@@ -414,7 +414,8 @@ bs_status bs_kekule__assign(bs_ctx *cx, bs_mol *mol, const int16_t *stated, cons
     return st;
 }
 
-/* ---- Double bonds inside of aromatic systems -------------------------------------------------- */
+/* ---- Double bonds inside of aromatic systems --------------------------------------------------
+ */
 
 /* Whether a bond is double and not aromatic though it joins aromatic atoms within rings. */
 static bool lies_inside(const bs_mol *mol, const bs_bond *b)

@@ -24,8 +24,8 @@ static void lay_out(bs_mol *mol, uint32_t atoms, uint32_t bonds, uint32_t rings,
     mol->bytes = at;
 }
 
-bs_status bs_mol__new(bs_ctx *cx, bs_arena *home, uint32_t atoms, uint32_t bonds,
-                      uint32_t rings, uint32_t ring_atoms, bs_mol **out)
+bs_status bs_mol__new(bs_ctx *cx, bs_arena *home, uint32_t atoms, uint32_t bonds, uint32_t rings,
+                      uint32_t ring_atoms, bs_mol **out)
 {
     uint64_t bytes = sizeof(bs_mol) + (uint64_t)atoms * (sizeof(bs_atom) + 4) +
                      (uint64_t)bonds * (sizeof(bs_bond) + 2 * sizeof(bs_link)) +

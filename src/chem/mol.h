@@ -43,12 +43,7 @@ typedef struct bs_atom {
     uint8_t perm;      /* 1-based, neighbours in adjacency order, implied hydrogen first */
 } bs_atom;
 
-enum {
-    BS_BOND_AROMATIC = 1,
-    BS_BOND_RING = 2,
-    BS_BOND_CIS = 4,
-    BS_BOND_TRANS = 8
-};
+enum { BS_BOND_AROMATIC = 1, BS_BOND_RING = 2, BS_BOND_CIS = 4, BS_BOND_TRANS = 8 };
 
 typedef struct bs_bond {
     unsigned a : 24;
@@ -70,7 +65,7 @@ struct bs_mol {
     uint32_t bonds_at;
     uint32_t offsets_at;
     uint32_t links_at;
-    uint32_t rings_at;      /* ring_count + 1 offsets into the ring atoms */
+    uint32_t rings_at; /* ring_count + 1 offsets into the ring atoms */
     uint32_t ring_atoms_at;
     int32_t charge;
     uint64_t features[2]; /* for the screens of match; filled by bs_mol__features() */

@@ -37,9 +37,8 @@ bs_status bs_smiles_canonical_order(bs_ctx *cx, bs_arena *home, const bs_mol *mo
     *out = NULL;
     if (flags & BS_SMILES_NO_STEREO)
         st = strip_stereo(cx, mol, &plan.mol);
-    if (st == BS_OK &&
-        (st = bs_mol__order(cx, &cx->scratch, plan.mol, flags & BS_SMILES_LABELS, &rank)) ==
-            BS_OK) {
+    if (st == BS_OK && (st = bs_mol__order(cx, &cx->scratch, plan.mol, flags & BS_SMILES_LABELS,
+                                           &rank)) == BS_OK) {
         plan.rank = rank;
         if ((st = smiles_plan_make(&plan)) == BS_OK)
             st = smiles_write_plan(&plan, true, home, out, order, at);

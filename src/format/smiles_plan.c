@@ -36,11 +36,11 @@ static void sort_links(const smiles_plan *plan, bs_link *links, int count)
 typedef struct tree {
     smiles_plan *plan;
     const uint32_t *offsets;
-    uint32_t *found;  /* by atom: number of discovery from 1 */
-    uint32_t *next;   /* by atom: link to follow next */
+    uint32_t *found; /* by atom: number of discovery from 1 */
+    uint32_t *next;  /* by atom: link to follow next */
     uint32_t *path;
-    uint32_t *list;   /* atoms as discovered */
-    uint32_t *size;   /* by atom: atoms of its subtree */
+    uint32_t *list; /* atoms as discovered */
+    uint32_t *size; /* by atom: atoms of its subtree */
     uint32_t count;
 } tree;
 
@@ -153,9 +153,9 @@ static void order_links(tree *t, uint32_t atom)
         for (; k > 0; k--) {
             int before = link_class(t, atom, &links[k - 1]);
 
-            if (before < class || (before == class && (class != 3 || !plan->tidy ||
-                                                       t->size[links[k - 1].atom] <=
-                                                           t->size[link.atom])))
+            if (before < class ||
+                (before == class &&
+                 (class != 3 || !plan->tidy || t->size[links[k - 1].atom] <= t->size[link.atom])))
                 break;
             links[k] = links[k - 1];
         }

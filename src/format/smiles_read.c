@@ -9,7 +9,14 @@
 #include <string.h>
 
 /* What has just been read, and so what may follow. */
-typedef enum state { AT_START, AFTER_ATOM, AFTER_BOND, AFTER_DOT, AFTER_OPEN, AFTER_OPEN_BOND } state;
+typedef enum state {
+    AT_START,
+    AFTER_ATOM,
+    AFTER_BOND,
+    AFTER_DOT,
+    AFTER_OPEN,
+    AFTER_OPEN_BOND
+} state;
 
 bs_status smiles_unexpected(smiles_reader *r, uint32_t at, const char *expected)
 {

@@ -9,8 +9,8 @@ enum { SMILES_RINGS = 100 };
 
 /* What stands beside a draft atom while reading. */
 typedef struct smiles_atom {
-    uint32_t at;     /* where its symbol or bracket starts */
-    uint8_t kind;    /* BS_STEREO_... if it has a mark; SMILES_BARE_MARK for @ and @@ */
+    uint32_t at;  /* where its symbol or bracket starts */
+    uint8_t kind; /* BS_STEREO_... if it has a mark; SMILES_BARE_MARK for @ and @@ */
     uint8_t perm;
 } smiles_atom;
 
@@ -47,8 +47,8 @@ typedef struct smiles_reader {
     smiles_bond *bonds;
     smiles_branch *branches;
     uint32_t depth;
-    uint32_t last;   /* the atom that the next one is bonded to, or UINT32_MAX */
-    char symbol;     /* bond symbol read, or 0 */
+    uint32_t last; /* the atom that the next one is bonded to, or UINT32_MAX */
+    char symbol;   /* bond symbol read, or 0 */
     uint32_t symbol_at;
     bool has_marks;  /* any @ */
     bool has_slants; /* any / or \ */

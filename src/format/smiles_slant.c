@@ -28,10 +28,10 @@ typedef struct slants {
     smiles_plan *plan;
     end *ends;
     uint32_t count;
-    uint32_t *end_of;  /* by atom: index + 1 */
-    bool *slanted;     /* by bond */
-    uint8_t *value;    /* by bond: where the atom written later stands */
-    uint32_t *queue;   /* ends whose side is known */
+    uint32_t *end_of; /* by atom: index + 1 */
+    bool *slanted;    /* by bond */
+    uint8_t *value;   /* by bond: where the atom written later stands */
+    uint32_t *queue;  /* ends whose side is known */
     uint32_t head, tail;
 } slants;
 
@@ -63,10 +63,8 @@ static bs_status collect_ends(slants *s)
         if (!bs_stereo__of_bond(mol, i, &element))
             continue;
         trans = element.perm == 2;
-        s->ends[s->count] =
-            (end){element.centre, s->count + 1, element.around[0], trans, UNKNOWN};
-        s->ends[s->count + 1] =
-            (end){element.second, s->count, element.around[1], trans, UNKNOWN};
+        s->ends[s->count] = (end){element.centre, s->count + 1, element.around[0], trans, UNKNOWN};
+        s->ends[s->count + 1] = (end){element.second, s->count, element.around[1], trans, UNKNOWN};
         s->end_of[element.centre] = s->count + 1;
         s->end_of[element.second] = s->count + 2;
         s->count += 2;

@@ -12,8 +12,8 @@ enum { MAX_RING_NUMBER = 99 };
 typedef struct writer {
     const smiles_plan *plan;
     bs_text text;
-    uint32_t *at;                      /* by place: byte at which the atom starts */
-    uint8_t *number;                   /* by bond: number of the ring closure */
+    uint32_t *at;    /* by place: byte at which the atom starts */
+    uint8_t *number; /* by bond: number of the ring closure */
     bool in_use[MAX_RING_NUMBER + 1];
     uint32_t *stack;
 } writer;
@@ -240,7 +240,8 @@ static bs_status write_atom(writer *w, uint32_t atom)
     return write_symbol(w, &w->plan->mol->atoms[atom]);
 }
 
-/* ---- Bonds ------------------------------------------------------------------------------------ */
+/* ---- Bonds ------------------------------------------------------------------------------------
+ */
 
 /* The symbol in front of an atom or ring number, 0 for none. */
 static char bond_symbol(const smiles_plan *plan, uint32_t bond)
@@ -283,7 +284,8 @@ static bs_status write_number(writer *w, int number)
     return bs_text_printf(&w->text, "%%%d", number);
 }
 
-/* Writes the ring numbers of an atom. A number that ends here is not used again on the same atom. */
+/* Writes the ring numbers of an atom. A number that ends here is not used again on the same atom.
+ */
 static bs_status write_closures(writer *w, uint32_t atom)
 {
     const smiles_plan *plan = w->plan;
@@ -315,7 +317,8 @@ static bs_status write_closures(writer *w, uint32_t atom)
     return BS_OK;
 }
 
-/* ---- The string -------------------------------------------------------------------------------- */
+/* ---- The string --------------------------------------------------------------------------------
+ */
 
 #define CLOSE_BRANCH UINT32_MAX
 

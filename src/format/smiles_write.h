@@ -18,17 +18,17 @@ typedef struct smiles_plan {
     const bs_mol *mol;
     unsigned flags;
     const int *rank;
-    bool tidy; /* start at chain ends, short branches first, double bonds within the tree */
-    uint32_t *order;    /* atoms as they are written */
-    uint32_t *place;    /* by atom: where it stands in `order` */
-    uint32_t *starts;   /* by piece: where it starts in `order`; one more at the end */
+    bool tidy;        /* start at chain ends, short branches first, double bonds within the tree */
+    uint32_t *order;  /* atoms as they are written */
+    uint32_t *place;  /* by atom: where it stands in `order` */
+    uint32_t *starts; /* by piece: where it starts in `order`; one more at the end */
     uint32_t piece_count;
-    bs_link *links;     /* as those of the molecule, in written order */
-    uint32_t *entry;    /* by atom: bond to the atom before, or UINT32_MAX */
-    uint8_t *closings;  /* by atom: ring closures that end there */
-    uint8_t *openings;  /* and that begin there */
-    char *slants;       /* by bond: / or \ in written direction, or 0 */
-    char *hydrogen;     /* by atom: slant of a hydrogen that has to be shown, or 0 */
+    bs_link *links;    /* as those of the molecule, in written order */
+    uint32_t *entry;   /* by atom: bond to the atom before, or UINT32_MAX */
+    uint8_t *closings; /* by atom: ring closures that end there */
+    uint8_t *openings; /* and that begin there */
+    char *slants;      /* by bond: / or \ in written direction, or 0 */
+    char *hydrogen;    /* by atom: slant of a hydrogen that has to be shown, or 0 */
 } smiles_plan;
 
 /* Plans the string in the scratch arena. */

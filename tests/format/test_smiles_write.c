@@ -182,11 +182,19 @@ static void written__leaves_unmarked_double_bonds_alone(void **state)
 static void written__puts_brackets_only_where_needed(void **state)
 {
     static const char *const texts[] = {
-        "C",          "[CH3]",       "[NH4+]",    "c1cc[nH]c1",  "[2H]C",      "[Fe+2]",
-        "Cl",         "[Cl-]",       "*",         "[13CH4]",     "c1ccsc1",    "[O-][n+]1ccccc1",
-        "[H][H]",     "[H+]",        "CS(=O)C",   "FS(F)(F)F",   "C[S+](C)C",  "c1cc[se]c1",
-        "B1C=CC=C1",  "[CH2]",       "O=[N+]",    "[U]",         "*c1ccccc1",  "CC(=O)[O-]",
-        "[BH4-]",     "c1ccccc1-c1ccccc1",
+        "C",         "[CH3]",
+        "[NH4+]",    "c1cc[nH]c1",
+        "[2H]C",     "[Fe+2]",
+        "Cl",        "[Cl-]",
+        "*",         "[13CH4]",
+        "c1ccsc1",   "[O-][n+]1ccccc1",
+        "[H][H]",    "[H+]",
+        "CS(=O)C",   "FS(F)(F)F",
+        "C[S+](C)C", "c1cc[se]c1",
+        "B1C=CC=C1", "[CH2]",
+        "O=[N+]",    "[U]",
+        "*c1ccccc1", "CC(=O)[O-]",
+        "[BH4-]",    "c1ccccc1-c1ccccc1",
     };
     fixture *f = *state;
 
@@ -202,8 +210,8 @@ static void written__labels_and_stereo_are_a_choice(void **state)
 
     check_ok(f, bs_smiles_write(&f->cx, &f->home, mol, 0, &out));
     assert_string_equal(out, "C/C=C/[C@H](F)Cl");
-    check_ok(f, bs_smiles_write(&f->cx, &f->home, mol, BS_SMILES_LABELS | BS_SMILES_NO_STEREO,
-                                &out));
+    check_ok(f,
+             bs_smiles_write(&f->cx, &f->home, mol, BS_SMILES_LABELS | BS_SMILES_NO_STEREO, &out));
     assert_string_equal(out, "[CH3:5]C=CC(F)Cl");
     check_ok(f, bs_smiles_canonical(&f->cx, &f->home, mol, BS_SMILES_NO_STEREO, &out));
     assert_string_equal(out, canonical(f, "CC=CC(F)Cl"));
