@@ -12,7 +12,7 @@
 #include <string.h>
 
 enum {
-    FIRST_SIZE = 8,
+    FIRST_SIZE = 6,
     MANY_PATHS = 64,    /* a family of more rings is represented by one */
     MAX_WORDS = 1 << 25 /* of the basis: 256 MiB */
 };
@@ -238,6 +238,16 @@ static bs_status candidates_at(cycles *c, uint32_t root, uint32_t y, uint32_t li
     return st;
 }
 
+/* The last atom of a ring has two neighbours before it; atoms that lack them need no walk. */
+static bool can_be_last(const cycles *c, uint32_t atom)
+{
+    uint32_t before = 0;
+
+    for (uint32_t k = c->offsets[atom]; k < c->offsets[atom + 1]; k++)
+        before += c->links[k].atom < atom;
+    return before >= 2;
+}
+
 static bs_status collect(cycles *c, uint32_t limit)
 {
     bs_status st = BS_OK;
@@ -246,8 +256,11 @@ static bs_status collect(cycles *c, uint32_t limit)
     c->path_count = 0;
     memset(c->first, 0, (c->atoms + 1) * sizeof *c->first);
     for (uint32_t root = 2; root < c->atoms && st == BS_OK; root++) {
-        uint32_t reached = walk(c, root, limit / 2);
+        uint32_t reached;
 
+        if (!can_be_last(c, root))
+            continue;
+        reached = walk(c, root, limit / 2);
         for (uint32_t i = 1; i < reached && st == BS_OK; i++) {
             if (c->low[c->queue[i]])
                 st = candidates_at(c, root, c->queue[i], limit);
