@@ -139,7 +139,7 @@ static int allene_perm(const smiles_plan *plan, uint32_t atom, const uint32_t ar
     int perm = plan->mol->atoms[atom].perm;
 
     for (int k = 0; k < 2; k++) {
-        uint32_t before;
+        uint32_t before = atom;
         uint32_t end = chain_end(plan->mol, atom, links[k].atom, &before);
         uint32_t pair[2];
         const uint32_t *known;

@@ -190,7 +190,7 @@ bs_status bs_plan__expand(void *payload, bs_ctx *cx, bs_arena *home, int lane,
 
     if (st != BS_OK || closed || !plan->rules_on)
         return st;
-    if ((st = bs_smiles_read(cx, home, smiles, strlen(smiles), NULL, &mol)) != BS_OK)
+    if (bs_smiles_read(cx, home, smiles, strlen(smiles), NULL, &mol) != BS_OK)
         return bs_fail(cx, BS_EBUG, "the canonical SMILES %s cannot be read again", smiles);
     return add_ruled(plan, &l, mol);
 }

@@ -52,7 +52,7 @@ static uint64_t surroundings(const bs_mol *mol, int atom)
 {
     uint64_t hash = describe(mol, atom), sum = 0;
 
-    hash = bs_hash_mix(hash, (uint64_t)(bs_mol_atom_charge(mol, atom) + 64));
+    hash = bs_hash_mix(hash, (uint64_t)bs_mol_atom_charge(mol, atom) + 64);
     hash = bs_hash_mix(hash, bs_mol_atom_is_aromatic(mol, atom));
     for (int k = 0; k < bs_mol_atom_degree(mol, atom); k++) {
         uint64_t next;

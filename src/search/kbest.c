@@ -209,7 +209,7 @@ static void set_bars(bs_kbest *k, const problem *p, bool on)
     const decision *kept =
         p->parent == BS_GRAPH_NONE ? NULL : &k->decisions[k->problems[p->parent].first_decision];
 
-    for (uint32_t i = 0; i < p->kept; i++)
+    for (uint32_t i = 0; kept && i < p->kept; i++)
         k->work.only[kept[i].mol] = on ? step_of(k, kept[i].way) : BS_GRAPH_NONE;
     for (uint32_t i = 0; i < p->bar_count; i++) {
         uint32_t bar = k->bars[p->first_bar + i];
