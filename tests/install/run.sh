@@ -16,6 +16,12 @@ export PKG_CONFIG_PATH
 "$compiler" -std=c17 -Wall -Wextra -Wpedantic -Werror "$@" "$source/examples/c/formula.c" \
     $(pkg-config --define-variable=prefix="$prefix" --cflags --libs backsaw) -o "$prefix/formula"
 
+# The whole of the library links with what pkg-config names, not only what the example uses.
+# shellcheck disable=SC2046
+echo 'int main(void) { return 0; }' | "$compiler" "$@" -x c - -x none \
+    -Wl,--whole-archive "$prefix/$libdir/libbacksaw.a" -Wl,--no-whole-archive \
+    $(pkg-config --define-variable=prefix="$prefix" --libs backsaw) -o "$prefix/whole"
+
 # Caffeine; formula and mass as in IUPAC's atomic weights of 2021 (8 C, 10 H, 4 N, 2 O).
 answer=$("$prefix/formula" 'Cn1c(=O)c2c(ncn2C)n(C)c1=O')
 case $answer in
