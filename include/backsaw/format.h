@@ -37,7 +37,8 @@ bs_status bs_smiles_canonical(bs_ctx *cx, bs_arena *home, const bs_mol *mol, uns
 
 /*
  * The canonical SMILES, and where its atoms are: order[k] is the atom that was written k-th. The
- * bracket or symbol of that atom starts at byte at[k] if `at` is not NULL.
+ * bracket or symbol of that atom starts at byte at[k] if `at` is not NULL. Hydrogens that are atoms
+ * for their labels only are not written without labels; they come last, at their neighbour's place.
  */
 bs_status bs_smiles_canonical_order(bs_ctx *cx, bs_arena *home, const bs_mol *mol, unsigned flags,
                                     char **out, uint32_t **order, uint32_t **at);

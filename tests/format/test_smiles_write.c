@@ -137,6 +137,7 @@ static void canonical__is_equal_for_equals(void **state)
         {"C[C@H]([2H])O", "[2H][C@@H](C)O"},
         {"[H]/N=C/C", "C\\C=N\\[H]"},
         {"[CH3:7][OH:1]", "CO"},
+        {"C[CH2:1][H:2]", "CC"},
         {"[Cl-].[Na+]", "[Na+].[Cl-]"},
         {"C1=CC=CC=C1C", "Cc1ccccc1"},
         {"CC1=C(C)C=CC=C1", "CC1=CC=CC=C1C"},
@@ -235,6 +236,13 @@ static void canonical__order_and_places_lead_to_the_atoms(void **state)
         seen |= 1u << order[k];
     }
     assert_int_equal(seen, (1u << bs_mol_atom_count(mol)) - 1);
+    mol = read_mol(f, "[H:3][NH:1]C");
+    check_ok(f, bs_smiles_canonical_order(&f->cx, &f->home, mol, 0, &out, &order, &at));
+    assert_string_equal(out, "CN");
+    assert_int_equal(order[0], 2);
+    assert_int_equal(order[1], 1);
+    assert_int_equal(order[2], 0);
+    assert_int_equal(at[2], at[1]);
 }
 
 static void written__every_failed_allocation_is_rolled_back(void **state)
