@@ -50,6 +50,15 @@ function check.fail(...)
     core.fail("bad value", format(...))
 end
 
+-- A file name; `what` begins the message.
+function check.path(what, value)
+    if type(value) ~= "string" then
+        check.fail("%s: a file name is expected, not a %s", what, type(value))
+    end
+    if string.find(value, "\0", 1, true) then check.fail("%s: a NUL byte in the file name", what) end
+    return value
+end
+
 local function sorted_keys(t)
     local keys = {}
     for key in next, t do keys[#keys + 1] = key end

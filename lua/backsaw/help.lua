@@ -9,7 +9,11 @@ m:formula() m:mass() m:exact_mass()  Hill formula, g/mol, u
 m:charge() m:inchi() m:inchikey() m:smiles()
 m:has(p) m:count(p) m:find(p)        p is a pattern or SMARTS; find gives lists of atom numbers
 m:atoms() m:bonds() m:rings() m:fragments()
-a == b                               the same compound, however it was written]],
+a == b                               the same compound, however it was written
+mol.read "list.sdf"                  the molecules of a file as a list: .smi .mol .sdf, also .gz
+for m in mol.each "list.sdf" do      one after the other, for files of any length
+m.name  m.fields["CAS"]              what the file says of it
+m:molfile()  m:molfile "V3000"       a molfile with a flat drawing]],
 patterns = [[
 p = pattern "[NX3;H2]"               a pattern from SMARTS; print(p) gives the SMARTS
 p:count(m) p:find(m) p:has(m)        matches are unique by their set of atoms

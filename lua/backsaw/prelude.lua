@@ -9,8 +9,8 @@ if core.packed then return end
 local planning = core.module "plan"
 local catalogues = core.module "catalogue"
 
--- mol "SMILES" and mol.read(path)
-mol = setmetatable({}, {
+-- mol "SMILES", mol.read(path) and mol.each(path)
+mol = setmetatable(core.module "file", {
     __call = function(_, value)
         local m = core.mol(value) -- no tail call, so that messages name it
         return m

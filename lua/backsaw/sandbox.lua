@@ -85,6 +85,22 @@ end
 -- What the methods of strings are in the pack state; no pack holds this table.
 sandbox.strings = string_copy()
 
+-- mol "SMILES"; what reads files says that there are none, whatever the name.
+local function molecule_word()
+    local word = {}
+    for _, name in ipairs { "read", "each" } do
+        word[name] = function()
+            core.fail("bad value", format("mol.%s: a pack reads no files", name))
+        end
+    end
+    return setmetatable(word, {
+        __call = function(_, value)
+            local m = core.mol(value) -- no tail call, so that messages name it
+            return m
+        end,
+        __metatable = false,
+    })
+end
 
 function sandbox.environment()
     local env = {
@@ -94,7 +110,7 @@ function sandbox.environment()
         table = pick(table, { "concat", "insert", "pack", "remove", "sort", "unpack" }),
         math = pick(math, { "abs", "ceil", "exp", "floor", "fmod", "huge", "log", "max",
             "maxinteger", "min", "mininteger", "modf", "pi", "sqrt", "tointeger", "type", "ult" }),
-        mol = core.mol, pattern = core.pattern, rewrite = core.rewrite, use = core.use,
+        mol = molecule_word(), pattern = core.pattern, rewrite = core.rewrite, use = core.use,
     }
     for name, word in next, words do env[name] = word end
     env._G = env

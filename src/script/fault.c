@@ -41,8 +41,7 @@ void bsl_printable(const char *text, size_t length, char *out, size_t size)
     out[used] = '\0';
 }
 
-/* Pushes an error object. */
-static void push_fault(lua_State *L, const bsl_fault *fault)
+void bsl_push_fault(lua_State *L, const bsl_fault *fault)
 {
     lua_createtable(L, 0, 6);
     lua_pushstring(L, bs_status_text(fault->code));
@@ -70,7 +69,7 @@ static void push_fault(lua_State *L, const bsl_fault *fault)
 
 int bsl_raise_fault(lua_State *L, const bsl_fault *fault)
 {
-    push_fault(L, fault);
+    bsl_push_fault(L, fault);
     lua_error(L);
     __builtin_unreachable();
 }

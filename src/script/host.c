@@ -127,6 +127,7 @@ static int open_state(lua_State *L)
     bsl_open_transform(L);
     bsl_open_pack(L);
     if (host->kind == BSL_MAIN) {
+        bsl_open_file(L);
         bsl_open_catalogue(L);
         bsl_open_route(L);
         bsl_open_plan(L);

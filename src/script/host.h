@@ -132,6 +132,9 @@ BSL_NORETURN int bsl_raise_from(lua_State *L, bs_mark mark, const char *input, s
 BSL_NORETURN int bsl_error(lua_State *L, bs_status code, const char *format, ...)
     __attribute__((format(printf, 3, 4)));
 
+/* Pushes what a fault holds as an error object. */
+void bsl_push_fault(lua_State *L, const bsl_fault *fault);
+
 /* Raises what a fault holds. */
 BSL_NORETURN int bsl_raise_fault(lua_State *L, const bsl_fault *fault);
 
@@ -162,10 +165,15 @@ void bsl_open_catalogue(lua_State *L);
 void bsl_open_plan(lua_State *L);
 void bsl_open_route(lua_State *L);
 void bsl_open_pack(lua_State *L);
+void bsl_open_file(lua_State *L); /* after that of molecules, to which it adds methods */
 
 /* Makes the locked metatable of a type ("backsaw." and a word) from methods and metamethods, and
    registers it. */
 void bsl_new_type(lua_State *L, const char *type, const luaL_Reg *methods, const luaL_Reg *meta);
+
+/* Number of a molecule's uservalue with what its file says beside the structure: a table with name
+   and fields, or nil. */
+#define BSL_MOL_RECORD 2
 
 /* A copy of the molecule becomes a Lua value; `smiles` is its canonical SMILES or NULL. */
 void bsl_pushmol(lua_State *L, const bs_mol *mol, const char *smiles);

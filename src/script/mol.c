@@ -1,6 +1,7 @@
 /*
  * Molecules in Lua. A molecule is copied into its userdata block, so it needs no finaliser; its
- * canonical SMILES is kept as the first uservalue once it was asked for.
+ * canonical SMILES is kept as the first uservalue once it was asked for, what its file says of it
+ * as the second.
  */
 #include "script/host.h"
 
@@ -388,6 +389,22 @@ static int mol_fragments(lua_State *L)
     return 1;
 }
 
+/* m.formula, m.name, ...: methods, and what the file of the molecule says of it */
+static int mol_index(lua_State *L)
+{
+    lua_settop(L, 2);
+    lua_pushvalue(L, 2);
+    if (lua_rawget(L, lua_upvalueindex(1)) != LUA_TNIL)
+        return 1;
+    if (!bsl_testmol(L, 1) || lua_getiuservalue(L, 1, BSL_MOL_RECORD) != LUA_TTABLE) {
+        lua_pushnil(L);
+        return 1;
+    }
+    lua_pushvalue(L, 2);
+    lua_rawget(L, -2);
+    return 1;
+}
+
 void bsl_open_mol(lua_State *L)
 {
     static const luaL_Reg methods[] = {
@@ -413,7 +430,16 @@ void bsl_open_mol(lua_State *L)
         { NULL, NULL },
     };
 
-    bsl_new_type(L, MOL_TYPE, methods, meta);
+    bsl_new_type(L, MOL_TYPE, NULL, meta);
+    lua_newtable(L);
+    luaL_setfuncs(L, methods, 0);
+    lua_pushvalue(L, -1);
+    lua_setfield(L, -3, "molecule_methods");
+    luaL_getmetatable(L, MOL_TYPE);
+    lua_insert(L, -2);
+    lua_pushcclosure(L, mol_index, 1);
+    lua_setfield(L, -2, "__index");
+    lua_pop(L, 1);
     lua_pushcfunction(L, core_mol);
     lua_setfield(L, -2, "mol");
 }

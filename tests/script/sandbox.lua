@@ -33,7 +33,10 @@ print(try "string.upper = 1 table.sort = nil math = nil x = 5") --> fine
 print(try "assert(x == nil and ('a'):upper() == 'A' and table.sort and math.floor(1.5) == 1)") --> fine
 print(try "use './quay.lua'") --> PACK:1: './quay.lua' is no name of a pack; letters, digits, '-', '_' and '.' are expected
 print(try "pack { name = 'x', needs = { '../../etc/passwd' } }") --> PACK:1: '../../etc/passwd' is no name of a pack; letters, digits, '-', '_' and '.' are expected
-print(try "mol.read 'x'") --> PACK:1: attempt to index a function value (global 'mol')
+print(try "mol.read '/etc/passwd'") --> PACK:1: mol.read: a pack reads no files
+print(try "mol.read '/no/such/file'") --> PACK:1: mol.read: a pack reads no files
+print(try "mol.each 'x.sdf'") --> PACK:1: mol.each: a pack reads no files
+print(try "assert(mol('OCC') == mol 'CCO' and mol('C').molfile == nil)") --> fine
 print(try "('x'):rep(1e9)") --> PACK:1: string.rep: more than a million bytes
 print(try "assert(tostring({}) == 'table' and ('%s'):format(print) == 'function')") --> fine
 print(try "local s = '' for k in pairs { b = 1, a = 2, 30, 20 } do s = s .. tostring(k) end assert(s == '12ab')") --> fine
