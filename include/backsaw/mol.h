@@ -109,6 +109,17 @@ bs_status bs_mol_mass(bs_ctx *cx, const bs_mol *mol, double *mass_g_per_mol);
 bs_status bs_mol_exact_mass(bs_ctx *cx, const bs_mol *mol, double *mass_u);
 
 /*
+ * Bertz's index of molecular complexity (1981), on the graph of heavy atoms with aromatic bonds of
+ * order 1.5; a dative bond counts as single. Atoms are alike if they have the same distances to
+ * their hundred nearest atoms, a bond being 1/order long; elements make no difference there, only in
+ * the second part of the index. 0 for a single atom.
+ *
+ *   errors  BS_ENOMEM, BS_ESTOPPED
+ *   cost    O(atoms), at most a hundred atoms looked at for each
+ */
+bs_status bs_mol_complexity(bs_ctx *cx, const bs_mol *mol, double *index);
+
+/*
  * The connected pieces, each with its atoms in the order of the whole, the pieces in the order of
  * their first atoms.
  */

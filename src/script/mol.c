@@ -211,6 +211,18 @@ static int mol_exact_mass(lua_State *L)
     return 1;
 }
 
+/* index = m:complexity() */
+static int mol_complexity(lua_State *L)
+{
+    const bs_mol *mol = bsl_checkmol(L, 1);
+    double index;
+
+    if (bs_mol_complexity(bsl_host_of(L)->cx, mol, &index) != BS_OK)
+        return bsl_raise(L, NULL, 0);
+    lua_pushnumber(L, index);
+    return 1;
+}
+
 /* n = m:charge() */
 static int mol_charge(lua_State *L)
 {
@@ -413,6 +425,7 @@ void bsl_open_mol(lua_State *L)
         { "mass", mol_mass },
         { "exact_mass", mol_exact_mass },
         { "charge", mol_charge },
+        { "complexity", mol_complexity },
         { "inchi", mol_inchi },
         { "inchikey", mol_inchikey },
         { "has", mol_has },
