@@ -53,6 +53,7 @@ typedef struct bs_draft_stereo {
     uint32_t centre;
     uint32_t second;
     uint32_t around[6];
+    bool written; /* someone put it there on purpose: if it means nothing, a doubt remains */
 } bs_draft_stereo;
 
 typedef struct bs_draft {

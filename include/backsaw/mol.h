@@ -120,6 +120,13 @@ bs_status bs_mol_exact_mass(bs_ctx *cx, const bs_mol *mol, double *mass_u);
 bs_status bs_mol_complexity(bs_ctx *cx, const bs_mol *mol, double *index);
 
 /*
+ * What is strange, in lines of text that name atoms by their 1-based numbers: unknown elements,
+ * unusual valences, and stereo marks of the input that mean nothing where they stand and were left
+ * out. None for most molecules.
+ */
+bs_status bs_mol_doubts(bs_ctx *cx, bs_arena *home, const bs_mol *mol, char ***texts, int *count);
+
+/*
  * The connected pieces, each with its atoms in the order of the whole, the pieces in the order of
  * their first atoms.
  */

@@ -7,6 +7,7 @@ molecules = [[
 m = mol "CCOC(=O)c1ccc(N)cc1"        a molecule from SMILES; print(m) gives its canonical SMILES
 m:formula() m:mass() m:exact_mass()  Hill formula, g/mol, u
 m:charge() m:inchi() m:inchikey() m:smiles()
+m:doubts()                           a list of what is strange: valences, stereo marks, ...
 m:complexity()                       Bertz's index: the larger, the more involved
 m:has(p) m:count(p) m:find(p)        p is a pattern or SMARTS; find gives lists of atom numbers
 m:atoms() m:bonds() m:rings() m:fragments()

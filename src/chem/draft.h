@@ -27,6 +27,13 @@ bs_status bs_stereo__place(bs_ctx *cx, const bs_draft *draft, const uint32_t *or
                            const struct bs_rings *rings, bs_mol *mol);
 
 /*
+ * Remembers on atoms and bonds the elements of a draft that were written on purpose and did not
+ * stay. Elements of double bonds count only where the marks can belong to no other double bond, and
+ * not in rings, where many programs write them.
+ */
+void bs_stereo__note_unmarked(const bs_draft *draft, const uint32_t *order, bs_mol *mol);
+
+/*
  * Gives the bonds of order BS_DRAFT_ORDER_AROMATIC orders 1 and 2. `stated` has the hydrogens of
  * each atom or BS_DRAFT_IMPLIED, `wish` whether it was written as aromatic. On BS_EVALUE
  * error.offset is the atom.

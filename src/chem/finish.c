@@ -374,7 +374,10 @@ static bs_status perceive(finish *f)
         return st;
     if ((st = bs_stereo__place(f->cx, f->draft, f->order, &f->rings, f->mol)) != BS_OK)
         return st;
-    return bs_mol__strip_meaningless_stereo(f->cx, f->mol);
+    if ((st = bs_mol__strip_meaningless_stereo(f->cx, f->mol)) != BS_OK)
+        return st;
+    bs_stereo__note_unmarked(f->draft, f->order, f->mol);
+    return BS_OK;
 }
 
 bs_status bs_draft_finish(bs_draft *draft, bs_arena *home, uint32_t **order, bs_mol **out)

@@ -14,7 +14,8 @@ enum {
     BS_ATOM_AROMATIC = 1,
     BS_ATOM_RING = 2,
     BS_ATOM_BRACKET = 4, /* hydrogens are not those that the valence would imply */
-    BS_ATOM_ODD = 8      /* valence outside the usual ones; see doubts */
+    BS_ATOM_ODD = 8,     /* valence outside the usual ones; see doubts */
+    BS_ATOM_UNMARKED = 16 /* was marked as a stereo centre, which means nothing here */
 };
 
 /* Kinds of stereo on an atom. `perm` counts from 1 as in @TH1, @AL2, @SP3, @TB20, @OH30. */
@@ -43,7 +44,13 @@ typedef struct bs_atom {
     uint8_t perm;      /* 1-based, neighbours in adjacency order, implied hydrogen first */
 } bs_atom;
 
-enum { BS_BOND_AROMATIC = 1, BS_BOND_RING = 2, BS_BOND_CIS = 4, BS_BOND_TRANS = 8 };
+enum {
+    BS_BOND_AROMATIC = 1,
+    BS_BOND_RING = 2,
+    BS_BOND_CIS = 4,
+    BS_BOND_TRANS = 8,
+    BS_BOND_UNMARKED = 16 /* was marked as cis or trans, which means nothing here */
+};
 
 typedef struct bs_bond {
     unsigned a : 24;

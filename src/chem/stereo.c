@@ -346,6 +346,51 @@ bs_status bs_stereo__place(bs_ctx *cx, const bs_draft *draft, const uint32_t *or
     return st;
 }
 
+/* Whether an atom has a double bond beside the one to `other`, or a neighbour has one. */
+static bool is_conjugated(const bs_mol *mol, uint32_t atom, uint32_t other)
+{
+    const bs_bond *bonds = bs_mol__bonds(mol);
+    const bs_link *links = bs_mol__links(mol, atom);
+
+    for (int k = 0; k < mol->atoms[atom].degree; k++) {
+        uint32_t near = links[k].atom;
+        const bs_link *next = bs_mol__links(mol, near);
+
+        if (near == other)
+            continue;
+        for (int i = 0; i < mol->atoms[near].degree; i++) {
+            if (bonds[next[i].bond].order == 2 && !(bonds[next[i].bond].flags & BS_BOND_AROMATIC))
+                return true;
+        }
+    }
+    return false;
+}
+
+static void note_bond(bs_mol *mol, uint32_t a, uint32_t b)
+{
+    enum { NO_DOUBT = BS_BOND_CIS | BS_BOND_TRANS | BS_BOND_RING };
+    int bond = bs_mol_bond_between(mol, (int)a, (int)b);
+
+    if (bond >= 0 && !(bs_mol__bonds(mol)[bond].flags & NO_DOUBT) && !is_conjugated(mol, a, b) &&
+        !is_conjugated(mol, b, a))
+        bs_mol__bonds_mutable(mol)[bond].flags |= BS_BOND_UNMARKED;
+}
+
+void bs_stereo__note_unmarked(const bs_draft *draft, const uint32_t *order, bs_mol *mol)
+{
+    for (uint32_t i = 0; i < draft->stereo_count; i++) {
+        const bs_draft_stereo *element = &draft->stereo[i];
+        uint32_t atom = order[element->centre];
+
+        if (!element->written || atom == UINT32_MAX)
+            continue;
+        if (element->kind != BS_DRAFT_DOUBLE && mol->atoms[atom].stereo == BS_STEREO_NONE)
+            mol->atoms[atom].flags |= BS_ATOM_UNMARKED;
+        else if (element->kind == BS_DRAFT_DOUBLE && order[element->second] != UINT32_MAX)
+            note_bond(mol, atom, order[element->second]);
+    }
+}
+
 /* ---- Reading back ---------------------------------------------------------------------------- */
 
 bool bs_stereo__of_atom(const bs_mol *mol, uint32_t atom, bs_draft_stereo *out)

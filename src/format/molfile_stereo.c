@@ -207,6 +207,7 @@ static bs_status add_centre(stereo *s, uint32_t atom)
             element.around[n++] = other_end(bond_at(s, atom, k), atom);
     }
     element.perm = (uint8_t)perm;
+    element.written = s->dimension == FLAT;
     return perm ? bs_draft_add_stereo(s->draft, element) : BS_OK;
 }
 

@@ -158,7 +158,7 @@ static bool fill_allene(const around *a, uint32_t atom, uint32_t *out)
 static bs_status add_centre(around *a, uint32_t atom)
 {
     static const uint8_t sizes[] = {0, 4, 4, 4, 5, 6};
-    bs_draft_stereo element = {.centre = atom};
+    bs_draft_stereo element = {.centre = atom, .written = true};
     int kind = a->r->atoms[atom].kind;
     bool fits;
 
@@ -176,7 +176,9 @@ static bs_status add_centre(around *a, uint32_t atom)
         fits = degree(a, atom) == 2 && fill_allene(a, atom, element.around);
     else
         fits = in_text_order(a, atom, UINT32_MAX, sizes[kind], element.around) > 0;
-    return fits ? bs_draft_add_stereo(&a->r->draft, element) : BS_OK;
+    if (!fits)
+        element.perm = 0;
+    return bs_draft_add_stereo(&a->r->draft, element);
 }
 
 /* ---- Double bonds ---------------------------------------------------------------------------- */
@@ -242,7 +244,8 @@ static bs_status add_geometry(around *a, uint32_t end, uint32_t next)
                                                  .perm = near.below == distant.below ? 1 : 2,
                                                  .centre = end,
                                                  .second = far,
-                                                 .around = {near.named, distant.named}});
+                                                 .around = {near.named, distant.named},
+                                                 .written = true});
 }
 
 bs_status smiles_read_stereo(smiles_reader *r)

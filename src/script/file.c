@@ -97,14 +97,42 @@ static void push_fields(lua_State *L, const bs_record *record)
     }
 }
 
+/* Pushes a list of what the stereo groups say that the molecule does not: mixtures and the like. */
+static void push_doubts(lua_State *L, const bs_record *record)
+{
+    int count = 0;
+
+    lua_newtable(L);
+    for (int i = 0; i < record->group_count; i++) {
+        const bs_stereo_group *group = &record->groups[i];
+        luaL_Buffer text;
+
+        if (group->kind == BS_STEREO_GROUP_ABSOLUTE || group->atom_count == 0)
+            continue;
+        luaL_buffinit(L, &text);
+        luaL_addstring(&text, group->atom_count == 1 ? "atom" : "atoms");
+        for (int k = 0; k < group->atom_count; k++) {
+            lua_pushfstring(L, "%s %d", k > 0 ? "," : "", group->atoms[k] + 1);
+            luaL_addvalue(&text);
+        }
+        luaL_addstring(&text, group->kind == BS_STEREO_GROUP_RACEMIC
+                                  ? ": a mixture of both configurations in the file, as drawn here"
+                                  : ": only relative configuration in the file, as drawn here");
+        luaL_pushresult(&text);
+        lua_rawseti(L, -2, ++count);
+    }
+}
+
 static void push_record(lua_State *L, const bs_record *record)
 {
     bsl_pushmol(L, record->mol, NULL);
-    lua_createtable(L, 0, 2);
+    lua_createtable(L, 0, 3);
     lua_pushlstring(L, record->name, record->name_length);
     lua_setfield(L, -2, "name");
     push_fields(L, record);
     lua_setfield(L, -2, "fields");
+    push_doubts(L, record);
+    lua_setfield(L, -2, "doubts");
     lua_setiuservalue(L, -2, BSL_MOL_RECORD);
 }
 

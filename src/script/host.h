@@ -171,8 +171,8 @@ void bsl_open_file(lua_State *L); /* after that of molecules, to which it adds m
    registers it. */
 void bsl_new_type(lua_State *L, const char *type, const luaL_Reg *methods, const luaL_Reg *meta);
 
-/* Number of a molecule's uservalue with what its file says beside the structure: a table with name
-   and fields, or nil. */
+/* Number of a molecule's uservalue with what its file says beside the structure: a table with name,
+   fields and doubts, or nil. */
 #define BSL_MOL_RECORD 2
 
 /* A copy of the molecule becomes a Lua value; `smiles` is its canonical SMILES or NULL. */

@@ -230,6 +230,31 @@ static int mol_charge(lua_State *L)
     return 1;
 }
 
+/* list = m:doubts(): what is strange about it, and what its file says that was left out */
+static int mol_doubts(lua_State *L)
+{
+    bsl_host *host = bsl_host_of(L);
+    const bs_mol *mol = bsl_checkmol(L, 1);
+    bs_mark mark = bs_arena_mark(&host->results);
+    char **texts;
+    int count, more = 0;
+
+    if (bs_mol_doubts(host->cx, &host->results, mol, &texts, &count) != BS_OK)
+        return bsl_raise_from(L, mark, NULL, 0);
+    bsl_push_words(L, (const char *const *)texts, count);
+    bs_arena_rewind(&host->results, mark);
+    if (lua_getiuservalue(L, 1, BSL_MOL_RECORD) != LUA_TTABLE)
+        lua_pop(L, 1);
+    else if (lua_getfield(L, -1, "doubts") == LUA_TTABLE) {
+        while (lua_rawgeti(L, -1, ++more) != LUA_TNIL)
+            lua_rawseti(L, -4, count + more);
+        lua_pop(L, 3);
+    } else {
+        lua_pop(L, 2);
+    }
+    return 1;
+}
+
 static int push_inchi(lua_State *L, bool key)
 {
     bsl_host *host = bsl_host_of(L);
@@ -426,6 +451,7 @@ void bsl_open_mol(lua_State *L)
         { "exact_mass", mol_exact_mass },
         { "charge", mol_charge },
         { "complexity", mol_complexity },
+        { "doubts", mol_doubts },
         { "inchi", mol_inchi },
         { "inchikey", mol_inchikey },
         { "has", mol_has },

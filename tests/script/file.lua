@@ -25,6 +25,16 @@ local methanol = "\n\n\n  0  0  0     0  0            999 V3000\nM  V30 BEGIN CT
     .. "M  V30 COUNTS 2 1 0 0 0\nM  V30 BEGIN ATOM\nM  V30 1 C 0 0 0 0\nM  V30 2 O 1.5 0 0 0\n"
     .. "M  V30 END ATOM\nM  V30 BEGIN BOND\nM  V30 1 1 1 2\nM  V30 END BOND\nM  V30 END CTAB\nM  END\n"
 
+-- a racemic centre, after the collections of the CTfile formats
+local racemic = "\n\n\n  0  0  0     0  0            999 V3000\nM  V30 BEGIN CTAB\n"
+    .. "M  V30 COUNTS 4 3 0 0 0\nM  V30 BEGIN ATOM\nM  V30 1 C 0 0 0 0\nM  V30 2 F 0 1.5 0 0\n"
+    .. "M  V30 3 Cl 1.3 -0.75 0 0\nM  V30 4 Br -1.3 -0.75 0 0\nM  V30 END ATOM\nM  V30 BEGIN BOND\n"
+    .. "M  V30 1 1 1 2 CFG=1\nM  V30 2 1 1 3\nM  V30 3 1 1 4\nM  V30 END BOND\n"
+    .. "M  V30 BEGIN COLLECTION\nM  V30 MDLV30/STERAC1 ATOMS=(1 1)\nM  V30 END COLLECTION\n"
+    .. "M  V30 END CTAB\nM  END\n"
+local halon = mol.read(write(".racemic.mol", racemic))[1]
+print(halon:formula(), #halon:doubts(), halon:doubts()[1]) --> CHBrClF	1	atom 1: a mixture of both configurations in the file, as drawn here
+
 -- lists of SMILES
 local smi = write(".smi", "# invented\nOCC ethanol\n\nCC(=O)O acetic acid\nC\n")
 local list = mol.read(smi)

@@ -39,6 +39,9 @@ print(#pieces, pieces[1] == mol "[Na+]", pieces[2] == mol "N#[C-]", pieces[3] ==
 print(benzocaine:has "[NX3;H2]", benzocaine:has(pattern "S"), benzocaine:count "[CX3](=O)[OX2]") --> true	false	1
 print(table.concat(mol("OCCO"):find("CO")[2], " "), #mol("CC"):find "N") --> 3 4	0
 
+-- doubts
+print(#mol("CCO"):doubts(), mol("C[C@H](C)O"):doubts()[1]) --> 0	atom 2 (C): it was marked as a stereo centre, but is none
+
 -- complexity: values of tests/data/checks/complexity.json
 print(string.format("%.5f %.5f %.1f", mol("CC(=O)Oc1ccccc1C(=O)O"):complexity(), mol("CCO"):complexity(), mol("C"):complexity())) --> 343.22287 2.75489 0.0
 
