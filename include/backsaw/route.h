@@ -138,7 +138,8 @@ bool bs_route_same(const bs_route *a, const bs_route *b);
 
 /*
  * Adds the route as an indented tree, plain ASCII, target first, each line ending in a newline.
- * A compound that is used again is not unfolded twice.
+ * A compound that is used again is not unfolded twice. Behind it stand the hazardous reagents of
+ * the steps and the sentence that the supplier's safety data sheet prevails.
  */
 bs_status bs_route_text(const bs_route *route, bs_text *text);
 

@@ -250,7 +250,8 @@ typedef struct bs_product_sets {
 
 /*
  * What a transform (or with -1 each one) makes of these reactants, in any order; reactants that
- * the transform does not need may not be given. Expected sets first, by score, then rivals.
+ * the transform does not need may not be given. Asked of each one, a transform whose
+ * product sets are rivals only is left out. Expected sets first, by score, then rivals.
  */
 bs_status bs_rules_forth(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int transform,
                          const bs_mol *const *reactants, int count, const bs_rule_hooks *hooks,

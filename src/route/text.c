@@ -121,6 +121,46 @@ static bs_status unfold(bs_text *text, const bs_route *route, pending *stack, in
     return st;
 }
 
+/* Whether a caution stands in an earlier step, or earlier in the same one. */
+static bool is_repeated(const bs_route *route, int step, int word)
+{
+    const char *caution = route->steps[step].ways[0].cautions.items[word];
+
+    for (int i = 0; i <= step; i++) {
+        const bs_words *words = &route->steps[i].ways[0].cautions;
+
+        for (int k = 0; k < (i < step ? words->count : word); k++)
+            if (strcmp(words->items[k], caution) == 0)
+                return true;
+    }
+    return false;
+}
+
+/* Each hazardous reagent once, and whose word prevails. */
+static bs_status add_cautions(bs_text *text, const bs_route *route)
+{
+    bs_status st = BS_OK;
+    bool any = false;
+
+    for (int i = 0; i < route->step_count; i++) {
+        const bs_words *words = &route->steps[i].ways[0].cautions;
+
+        for (int k = 0; st == BS_OK && k < words->count; k++) {
+            if (is_repeated(route, i, k))
+                continue;
+            if ((st = bs_text_puts(text, any ? ", " : "hazardous: ")) == BS_OK)
+                st = add_clean(text, words->items[k]);
+            any = true;
+        }
+    }
+    if (st == BS_OK && any)
+        st = bs_text_putc(text, '\n');
+    if (st == BS_OK && route->step_count > 0)
+        st = bs_text_puts(text, "The supplier's current safety data sheet, local rules and a risk "
+                                "assessment by a competent person prevail.\n");
+    return st;
+}
+
 bs_status bs_route_text(const bs_route *route, bs_text *text)
 {
     bs_ctx *cx = text->cx;
@@ -139,6 +179,8 @@ bs_status bs_route_text(const bs_route *route, bs_text *text)
     stack[height++] = (pending){0, 0, 0};
     while (st == BS_OK && height > 0)
         st = unfold(text, route, stack, &height, written);
+    if (st == BS_OK)
+        st = add_cautions(text, route);
 done:
     if (st != BS_OK && text->data) {
         text->length = start;

@@ -257,6 +257,14 @@ static void order_sets(bs_product_set *sets, int count)
     }
 }
 
+static bool any_expected(const forth *f, int first)
+{
+    for (int i = first; i < f->count; i++)
+        if (f->sets[i].expected)
+            return true;
+    return false;
+}
+
 bs_status bs_rules_forth(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int transform,
                          const bs_mol *const *reactants, int count, const bs_rule_hooks *hooks,
                          bs_product_sets *out)
@@ -273,8 +281,14 @@ bs_status bs_rules_forth(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int 
     if (count < 1)
         return bs_fail(cx, BS_EVALUE, "a reaction needs at least one reactant");
     st = take_apart(cx, &f);
-    for (int i = transform < 0 ? 0 : transform; i < last && st == BS_OK; i++)
+    for (int i = transform < 0 ? 0 : transform; i < last && st == BS_OK; i++) {
+        int before = f.count;
+
         st = run_transform(cx, &f, rules, i);
+        /* Asked of all: a transform that cannot give what it is for has nothing to say. */
+        if (transform < 0 && st == BS_OK && !any_expected(&f, before))
+            f.count = before;
+    }
     bs_arena_rewind(&cx->scratch, temp);
     if (st != BS_OK) {
         bs_arena_rewind(home, kept);
