@@ -25,7 +25,7 @@ static bs_status keep(doubts *d)
 static bs_status name_atom(doubts *d, const bs_mol *mol, uint32_t atom)
 {
     const char *symbol = bs_element_symbol(mol->atoms[atom].element);
-    int charge = mol->atoms[atom].charge;
+    int charge = bs_mol_atom_charge(mol, (int)atom);
 
     bs_text_clear(&d->line);
     if (charge == 0)
