@@ -158,4 +158,14 @@ bs_status bs_mol_canonical_order(bs_ctx *cx, bs_arena *home, const bs_mol *mol, 
  */
 bs_status bs_mol_symmetry(bs_ctx *cx, bs_arena *home, const bs_mol *mol, int **classes);
 
+/*
+ * CIP labels by the sequence rules 1a to 5 of the IUPAC recommendations of 2013 (P-92): for each
+ * atom 'R', 'S', 'r', 's' or 0, for each bond 'E', 'Z' or 0. Centres that are not tetrahedral and
+ * allenes get none.
+ *
+ *   errors  BS_ELIMIT  too many rings or atoms for the bound on the search; no label is given
+ */
+bs_status bs_mol_cip(bs_ctx *cx, bs_arena *home, const bs_mol *mol, char **atom_labels,
+                     char **bond_labels);
+
 #endif

@@ -343,6 +343,25 @@ void bsl_push_atom(lua_State *L, const bs_mol *mol, const int *classes, int atom
     lua_setfield(L, -2, "symmetry");
 }
 
+/* The CIP labels of a molecule; NULL where it is too large for them. */
+static void find_cip(lua_State *L, const bs_mol *mol, bs_mark mark, char **atoms, char **bonds)
+{
+    bsl_host *host = bsl_host_of(L);
+    bs_status st = bs_mol_cip(host->cx, &host->results, mol, atoms, bonds);
+
+    if (st != BS_OK && st != BS_ELIMIT)
+        bsl_raise_from(L, mark, NULL, 0);
+}
+
+/* Sets the field `cip` of the table on top if there is a label. */
+static void set_cip(lua_State *L, const char *labels, int i)
+{
+    if (!labels || !labels[i])
+        return;
+    lua_pushlstring(L, labels + i, 1);
+    lua_setfield(L, -2, "cip");
+}
+
 /* list = m:atoms() */
 static int mol_atoms(lua_State *L)
 {
@@ -351,27 +370,34 @@ static int mol_atoms(lua_State *L)
     bs_mark mark = bs_arena_mark(&host->results);
     const int *classes = bsl_symmetry(L, mol, mark);
     int count = bs_mol_atom_count(mol);
+    char *labels, *bond_labels;
 
+    find_cip(L, mol, mark, &labels, &bond_labels);
     lua_createtable(L, count, 0);
     for (int i = 0; i < count; i++) {
         bsl_push_atom(L, mol, classes, i);
+        set_cip(L, labels, i);
         lua_rawseti(L, -2, i + 1);
     }
     bs_arena_rewind(&host->results, mark);
     return 1;
 }
 
-/* list = m:bonds(): each with its two atoms as [1] and [2], order, aromatic, ring, geometry */
+/* list = m:bonds(): each with its two atoms as [1] and [2], order, aromatic, ring, geometry, cip */
 static int mol_bonds(lua_State *L)
 {
     static const char *const geometry[] = { NULL, "cis", "trans" };
     const bs_mol *mol = bsl_checkmol(L, 1);
+    bsl_host *host = bsl_host_of(L);
+    bs_mark mark = bs_arena_mark(&host->results);
     int count = bs_mol_bond_count(mol), a, b;
+    char *labels, *atom_labels;
 
+    find_cip(L, mol, mark, &atom_labels, &labels);
     lua_createtable(L, count, 0);
     for (int i = 0; i < count; i++) {
         bs_mol_bond_ends(mol, i, &a, &b);
-        lua_createtable(L, 2, 4);
+        lua_createtable(L, 2, 5);
         lua_pushinteger(L, a + 1);
         lua_rawseti(L, -2, 1);
         lua_pushinteger(L, b + 1);
@@ -384,8 +410,10 @@ static int mol_bonds(lua_State *L)
         lua_setfield(L, -2, "ring");
         lua_pushstring(L, geometry[bs_mol_bond_geometry(mol, i)]);
         lua_setfield(L, -2, "geometry");
+        set_cip(L, labels, i);
         lua_rawseti(L, -2, i + 1);
     }
+    bs_arena_rewind(&host->results, mark);
     return 1;
 }
 

@@ -31,6 +31,11 @@ print(#bonds, bonds[1][1], bonds[1][2], bonds[1].order, bonds[2].order, bonds[3]
 print(mol("F/C=C/F"):bonds()[2].geometry, mol("FC=CF"):bonds()[2].geometry) --> trans	nil
 print(#mol("c1ccc2ccccc2c1"):rings(), #mol("c1ccc2ccccc2c1"):rings()[1], #mol("CC"):rings()) --> 2	6	0
 
+-- CIP labels: L-alanine is S, L-cysteine R; fumaric acid is E; one centre of the meso pentaric acid is r or s
+print(mol("N[C@@H](C)C(=O)O"):atoms()[2].cip, mol("N[C@@H](CS)C(=O)O"):atoms()[2].cip, mol("CCO"):atoms()[1].cip) --> S	R	nil
+print(mol("OC(=O)/C=C/C(=O)O"):bonds()[4].cip, mol("OC(=O)/C=C\\C(=O)O"):bonds()[4].cip, mol("CC=CC"):bonds()[2].cip) --> E	Z	nil
+print(mol("C[C@H](O)[C@H](Cl)[C@@H](C)O"):atoms()[4].cip, mol("C[C@H](O)[C@@H](Cl)[C@@H](C)O"):atoms()[4].cip) --> s	r
+
 -- fragments
 local pieces = mol("[Na+].[C-]#N.O"):fragments()
 print(#pieces, pieces[1] == mol "[Na+]", pieces[2] == mol "N#[C-]", pieces[3] == mol "O") --> 3	true	true	true
