@@ -18,6 +18,9 @@ function(backsaw_flags target)
     target_compile_definitions(${target} PRIVATE _POSIX_C_SOURCE=200809L _DEFAULT_SOURCE)
     target_include_directories(${target} PRIVATE ${PROJECT_SOURCE_DIR}/src
         ${PROJECT_SOURCE_DIR}/include)
+    if(BACKSAW_FUZZ)
+        target_compile_options(${target} PRIVATE -fsanitize=fuzzer-no-link)
+    endif()
     if(BACKSAW_SANITIZE)
         # The debug arenas pass every request to malloc, so that overruns are seen.
         target_compile_definitions(${target} PRIVATE BS_ARENA_DEBUG=1)

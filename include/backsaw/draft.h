@@ -43,7 +43,8 @@ typedef struct bs_draft_bond {
  * the cumulene whose middle is `centre`. Square, bipyramid, octahedron: 4, 5, 6 in `around`,
  * `perm` as in OpenSMILES. Double bond (kind BS_DRAFT_DOUBLE): atoms centre = first end and
  * second = other end, around[0] beside the first, around[1] beside the second; perm 1 is cis,
- * 2 trans.
+ * 2 trans. In `around`, BS_DRAFT_HYDROGEN names the implied hydrogen of that end. The ends may be
+ * those of an odd chain of double bonds.
  */
 enum { BS_DRAFT_DOUBLE = 6 };
 

@@ -6,7 +6,9 @@
  * input. A hydrogen is folded into its neighbour's count unless it has an isotope, a charge, a
  * label or no single neighbour; then it is an atom like others.
  *
- * Bonds keep a Kekulé order (1 to 4); aromatic ones carry a mark beside it.
+ * Bonds keep a Kekulé order (1 to 4); aromatic ones carry a mark beside it. Nitrogen that was
+ * written with five bonds (nitro, azide, N-oxide) has the usual form with charges, so that both
+ * spellings are one molecule.
  *
  * Stereo. A tetrahedral centre says how its neighbours stand, in the order: implied hydrogen or
  * lone pair first if there is one, then the neighbours in the order of bs_mol_neighbour(). Seen

@@ -142,7 +142,7 @@ static gift gift_of(const bs_mol *mol, uint32_t atom)
     int spare;
 
     if (a->element == 0)
-        return u.in ? GIFT_ONE : GIFT_ANY;
+        return GIFT_ANY;
     if (outer == 0 || outer == 7 || u.in + u.out > 1 || a->valence > *normal)
         return GIFT_NO_PART;
     if (radicals(a, outer) > 0 && (a->element != 6 || a->charge != 0))

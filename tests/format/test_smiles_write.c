@@ -152,6 +152,28 @@ static void canonical__is_equal_for_equals(void **state)
     assert_string_not_equal(canonical(f, "[H]/N=C/C"), canonical(f, "N=CC"));
 }
 
+/* Strings that were none once; damaged ones, found by chance. */
+static void canonical__is_a_fixed_point(void **state)
+{
+    static const char *const texts[] = {
+        "[H]**C1=*=***=CC2=C1C2=C/C=C*",
+        "N(Br)=[C@]=C(O)C",
+        "Br\\C\\C(\\I)=C(\\I)=C(\\Cl)/F",
+        "C1=CC=C2N=C3C1=CC1=C=CC1=C1CCC=C3CC2=C1",
+        "N1=SCN1=CSC2=C1C3=C(N1=CS3)N=N2",
+        "C*1(=O)2=C(C3=C(C=N2)C=CC=C3)CCCN1C",
+        "[H]:C",
+    };
+    fixture *f = *state;
+
+    for (size_t i = 0; i < sizeof texts / sizeof texts[0]; i++) {
+        char *text = canonical(f, texts[i]);
+
+        assert_string_equal(canonical(f, text), text);
+        assert_string_equal(canonical(f, plain(f, texts[i])), text);
+    }
+}
+
 /*
  * The middle double bond has no geometry, and none may be lent to it by the slants of the outer
  * ones.
@@ -280,6 +302,7 @@ int main(void)
         check_case(canonical__does_not_depend_on_the_spelling),
         check_case(canonical__tells_stereoisomers_apart),
         check_case(canonical__is_equal_for_equals),
+        check_case(canonical__is_a_fixed_point),
         check_case(written__leaves_unmarked_double_bonds_alone),
         check_case(written__puts_brackets_only_where_needed),
         check_case(written__labels_and_stereo_are_a_choice),
