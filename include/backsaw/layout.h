@@ -44,8 +44,9 @@ typedef struct bs_layout {
  *
  *   home    arena of the result
  *   errors  BS_ENOMEM, BS_ESTOPPED
- *   cost    some milliseconds for 30 atoms, a second for 200; pieces of more than 250 atoms get a
- *           plain drawing in which parts may overlap, in linear time
+ *   cost    some milliseconds for 30 atoms, seconds for 200 or for several large rings; pieces of
+ *           more than 200 atoms or with too many large rings get a plain drawing in which parts may
+ *           overlap, in linear time
  */
 bs_status bs_layout_make(bs_ctx *cx, bs_arena *home, const bs_mol *mol, bs_layout **out);
 

@@ -17,10 +17,36 @@ namespace
 
 using atom_list = std::vector<sketcherMinimizerAtom *>;
 
+/*
+ * How many pairs of bonds are looked at for crossings, summed over all tries to avoid them. A drug
+ * molecule takes thousands to millions; a crowded one of 200 atoms would take minutes.
+ */
+constexpr long MOST_LOOKS = 40000000;
+
+/*
+ * A bond that counts how often coordgen looks at it, which it does by asking whether this is a
+ * bond between residues of proteins, since those may be crossed. When the looks are used up, the
+ * answer is yes: crossings are no longer avoided, and the search comes to its end soon. Counting
+ * looks instead of time keeps the result the same on every machine.
+ */
+class counting_bond : public sketcherMinimizerBond
+{
+  public:
+    long *left = nullptr;
+
+    bool isResidueInteraction() override
+    {
+        if (*left <= 0)
+            return true;
+        --*left;
+        return false;
+    }
+};
+
 /* The parts of a molecule until the minimizer takes them. */
 struct parts {
     std::vector<std::unique_ptr<sketcherMinimizerAtom>> atoms;
-    std::vector<std::unique_ptr<sketcherMinimizerBond>> bonds;
+    std::vector<std::unique_ptr<counting_bond>> bonds;
     std::unique_ptr<sketcherMinimizerMolecule> molecule;
 };
 
@@ -53,13 +79,13 @@ void set_geometry(sketcherMinimizerBond &bond, const bs_coordgen_bond &from, con
 
 /* Builds the molecule and gives its parts over to the minimizer. */
 atom_list load(sketcherMinimizer &minimizer, std::uint32_t atom_count, const std::uint8_t *elements,
-               std::uint32_t bond_count, const bs_coordgen_bond *bonds)
+               std::uint32_t bond_count, const bs_coordgen_bond *bonds, long *looks)
 {
     parts p;
     atom_list atoms;
 
     p.atoms = make_sorted<sketcherMinimizerAtom>(atom_count);
-    p.bonds = make_sorted<sketcherMinimizerBond>(bond_count);
+    p.bonds = make_sorted<counting_bond>(bond_count);
     p.molecule = std::make_unique<sketcherMinimizerMolecule>();
     atoms.reserve(atom_count);
     p.molecule->_atoms.reserve(atom_count);
@@ -70,6 +96,7 @@ atom_list load(sketcherMinimizer &minimizer, std::uint32_t atom_count, const std
         atoms.push_back(p.atoms[i].get());
     }
     for (std::uint32_t i = 0; i < bond_count; i++) {
+        p.bonds[i]->left = looks;
         p.bonds[i]->startAtom = atoms[bonds[i].a];
         p.bonds[i]->endAtom = atoms[bonds[i].b];
         p.bonds[i]->setBondOrder(bonds[i].order);
@@ -106,9 +133,11 @@ bs_coordgen_result bs_coordgen__place(uint32_t atom_count, const uint8_t *elemen
                                       uint32_t bond_count, const bs_coordgen_bond *bonds, bool open,
                                       double *places)
 {
+    long looks = MOST_LOOKS;
+
     try {
         sketcherMinimizer minimizer;
-        atom_list atoms = load(minimizer, atom_count, elements, bond_count, bonds);
+        atom_list atoms = load(minimizer, atom_count, elements, bond_count, bonds, &looks);
 
         if (open)
             minimizer.setForceOpenMacrocycles(true);

@@ -11,8 +11,9 @@
 #include <string.h>
 
 enum {
-    LARGEST_PIECE = 250, /* coordgen's time grows with the square of the size and worse */
-    LARGEST_RING = 30    /* larger ones keep it busy for minutes */
+    LARGEST_PIECE = 200, /* coordgen's time grows with the square of the size and worse */
+    LARGE_RING = 9,      /* from here on it searches for a form */
+    RINGS_MAX = 5
 };
 
 #define GAP 1.0 /* between pieces, in lengths of a bond */
@@ -80,11 +81,11 @@ typedef struct piece {
 
 typedef struct pieces {
     bs_drawing *d;
-    uint32_t *local;  /* by point: its number in its piece */
-    bool *seen;       /* by atom */
-    bool *placed;     /* by point */
-    uint32_t *points; /* piece after piece */
-    double right;     /* where the drawing ends so far */
+    uint32_t *local;    /* by point: its number in its piece */
+    uint32_t *piece_of; /* by atom: the first atom of its piece, UINT32_MAX before it is known */
+    bool *placed;       /* by point */
+    uint32_t *points;   /* piece after piece */
+    double right;       /* where the drawing ends so far */
     bool any;
 } pieces;
 
@@ -94,14 +95,14 @@ static void gather(pieces *p, uint32_t start, piece *out)
     const bs_mol *mol = p->d->mol;
     uint32_t count = 0;
 
-    p->seen[start] = true;
+    p->piece_of[start] = start;
     out->points[count++] = start;
     for (uint32_t head = 0; head < count; head++) {
         const bs_link *links = bs_mol__links(mol, out->points[head]);
 
         for (int k = 0; k < mol->atoms[out->points[head]].degree; k++) {
-            if (!p->seen[links[k].atom]) {
-                p->seen[links[k].atom] = true;
+            if (p->piece_of[links[k].atom] == UINT32_MAX) {
+                p->piece_of[links[k].atom] = start;
                 out->points[count++] = links[k].atom;
             }
         }
@@ -116,14 +117,42 @@ static void gather(pieces *p, uint32_t start, piece *out)
         p->local[out->points[i]] = i;
 }
 
-/* Whether coordgen draws large rings of the piece like chains. */
-static bool has_large_ring(const bs_mol *mol, const piece *pc)
+typedef enum way { WAY_PLAIN, WAY_SHAPED, WAY_OPEN } way;
+
+/*
+ * How a piece is drawn, by its large rings. Finding forms for them takes coordgen a time that
+ * grows exponentially with their number and size; drawing them open, like chains whose ends meet,
+ * is quicker for big ones. The bounds were measured: what they let through takes a few seconds.
+ */
+static way way_of(const pieces *p, const piece *pc)
 {
-    for (uint32_t i = 0; i < pc->atom_count; i++) {
-        if (mol->atoms[pc->points[i]].min_ring > LARGEST_RING)
-            return true;
+    /* By number of large rings: largest ring and sum of sizes that are shaped, sum that is open. */
+    static const struct {
+        int largest, shaped, open;
+    } bounds[RINGS_MAX] = {{0, 0, 0}, {30, 30, 1000}, {24, 48, 1000}, {16, 48, 80}, {16, 48, 0}};
+    int count = 0;
+    int largest = 0;
+    int sum = 0;
+
+    if (pc->atom_count > LARGEST_PIECE)
+        return WAY_PLAIN;
+    for (uint32_t r = 0; r < p->d->mol->ring_count && count < RINGS_MAX; r++) {
+        const uint32_t *atoms;
+        int size = bs_mol_ring(p->d->mol, (int)r, &atoms);
+
+        if (size < LARGE_RING || p->piece_of[atoms[0]] != pc->points[0])
+            continue;
+        count++;
+        sum += size;
+        largest = size > largest ? size : largest;
     }
-    return false;
+    if (count == 0)
+        return WAY_SHAPED;
+    if (count == RINGS_MAX)
+        return WAY_PLAIN;
+    if (largest <= bounds[count].largest && sum <= bounds[count].shaped)
+        return WAY_SHAPED;
+    return sum <= bounds[count].open ? WAY_OPEN : WAY_PLAIN;
 }
 
 static void copy_bond(const pieces *p, uint32_t bond, bs_coordgen_bond *out)
@@ -170,7 +199,7 @@ static uint32_t copy_bonds(const pieces *p, const piece *pc, bs_coordgen_bond *o
 }
 
 /* Places a piece through coordgen; *done is false if it needs the plain drawing. */
-static bs_status place_well(pieces *p, const piece *pc, bool *done)
+static bs_status place_well(pieces *p, const piece *pc, bool open, bool *done)
 {
     bs_ctx *cx = p->d->cx;
     bs_mark temp = bs_arena_mark(&cx->scratch);
@@ -190,7 +219,7 @@ static bs_status place_well(pieces *p, const piece *pc, bool *done)
     for (uint32_t i = 0; i < pc->point_count; i++)
         elements[i] = i < pc->atom_count ? p->d->mol->atoms[pc->points[i]].element : 1;
     result = bs_coordgen__place(pc->point_count, elements, copy_bonds(p, pc, bonds), bonds,
-                                has_large_ring(p->d->mol, pc), places);
+                                open, places);
     if (result == BS_COORDGEN_NO_MEMORY)
         st = bs_fail_memory(cx);
     *done = result == BS_COORDGEN_DONE;
@@ -236,20 +265,23 @@ static bs_status place_pieces(bs_drawing *d, int *wrong)
     bs_status st;
 
     if ((st = bs_new(d->cx, scratch, d->point_count, &p.local)) != BS_OK ||
-        (st = bs_new(d->cx, scratch, d->atom_count, &p.seen)) != BS_OK ||
+        (st = bs_new(d->cx, scratch, d->atom_count, &p.piece_of)) != BS_OK ||
         (st = bs_new(d->cx, scratch, d->point_count, &p.placed)) != BS_OK ||
         (st = bs_new(d->cx, scratch, d->point_count, &p.points)) != BS_OK)
         goto done;
+    memset(p.piece_of, 0xff, d->atom_count * sizeof *p.piece_of);
     for (uint32_t i = 0; i < d->atom_count && st == BS_OK; i++) {
         piece pc = {.points = p.points + used};
         bool done = false;
+        way chosen;
 
-        if (p.seen[i])
+        if (p.piece_of[i] != UINT32_MAX)
             continue;
         gather(&p, i, &pc);
         used += pc.point_count;
-        if ((st = bs_poll(d->cx)) == BS_OK && pc.atom_count <= LARGEST_PIECE)
-            st = place_well(&p, &pc, &done);
+        chosen = way_of(&p, &pc);
+        if ((st = bs_poll(d->cx)) == BS_OK && chosen != WAY_PLAIN)
+            st = place_well(&p, &pc, chosen == WAY_OPEN, &done);
         if (st == BS_OK && !done)
             st = bs_draw__plain(d, i, p.placed);
     }
