@@ -140,10 +140,11 @@ bs_status bs_molfile_write(bs_text *out, const bs_mol *mol, const char *name,
                            bs_molfile_version version, int *lost);
 
 /*
- * Writes a record of an SD file: molfile, data fields, `$$$$`. Of `record` only the molecule, the
- * name and the fields count. Blank lines in values, which would end them, get a blank; `<` and `>`
+ * Writes a record of an SD file: molfile, data fields, `$$$$`. Of `record` the molecule, the name,
+ * the fields and the stereo groups count; relative and racemic groups need V3000. Blank lines in values, which would end them, get a blank; `<` and `>`
  * in field names become brackets.
  */
-bs_status bs_sdf_write(bs_text *out, const bs_record *record, bs_molfile_version version, int *lost);
+bs_status bs_sdf_write(bs_text *out, const bs_record *record, bs_molfile_version version,
+                       int *lost);
 
 #endif

@@ -113,8 +113,10 @@ static bs_status check_expansion(bs_lines *lines)
     if (lines->total < EXPANSION_COUNTS_FROM || packed <= 0 ||
         lines->total / MOST_EXPANSION < (uint64_t)packed)
         return BS_OK;
-    return bs_fail(lines->cx, BS_ELIMIT, "'%.200s' expands to more than %d times its size; it was "
-                   "not read on", lines->path, MOST_EXPANSION);
+    return bs_fail(lines->cx, BS_ELIMIT,
+                   "'%.200s' expands to more than %d times its size; it was "
+                   "not read on",
+                   lines->path, MOST_EXPANSION);
 }
 
 /* Fills the empty block. */
@@ -162,8 +164,8 @@ static bool take(bs_lines *lines, const char **text, size_t *length)
 
 static bs_status too_long(bs_lines *lines, bool whole)
 {
-    bs_status st = bs_fail(lines->cx, BS_ELIMIT, "line %ld is longer than %zu bytes",
-                           lines->number, lines->longest);
+    bs_status st = bs_fail(lines->cx, BS_ELIMIT, "line %ld is longer than %zu bytes", lines->number,
+                           lines->longest);
 
     lines->cx->error.line = lines->number;
     lines->skipping = !whole;

@@ -52,9 +52,9 @@ static bs_file_kind kind_of_name(const char *path)
         const char *ending;
         bs_file_kind kind;
     } endings[] = {
-        {".sdf", BS_FILE_SDF},       {".sd", BS_FILE_SDF},     {".mol", BS_FILE_SDF},
-        {".mdl", BS_FILE_SDF},       {".smi", BS_FILE_SMILES}, {".smiles", BS_FILE_SMILES},
-        {".ism", BS_FILE_SMILES},    {".txt", BS_FILE_SMILES},
+        {".sdf", BS_FILE_SDF},    {".sd", BS_FILE_SDF},     {".mol", BS_FILE_SDF},
+        {".mdl", BS_FILE_SDF},    {".smi", BS_FILE_SMILES}, {".smiles", BS_FILE_SMILES},
+        {".ism", BS_FILE_SMILES}, {".txt", BS_FILE_SMILES},
     };
     size_t cut = has_ending(path, 0, ".gz") ? 3 : 0;
 
@@ -75,8 +75,10 @@ bs_status bs_file_open(bs_ctx *cx, const char *path, const bs_file_options *opti
 
     *out = NULL;
     if (kind == BS_FILE_BY_NAME)
-        return bs_fail(cx, BS_EVALUE, "the name '%.200s' does not tell what is in the file; .sdf, "
-                       ".mol or .smi was expected, or one of them with .gz", path);
+        return bs_fail(cx, BS_EVALUE,
+                       "the name '%.200s' does not tell what is in the file; .sdf, "
+                       ".mol or .smi was expected, or one of them with .gz",
+                       path);
     file = bs_gate_alloc(cx->gate, sizeof *file);
     if (!file)
         return bs_fail_memory(cx);

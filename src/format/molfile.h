@@ -66,7 +66,8 @@ typedef struct bs_molfile {
 
 /* ---- Lines ----------------------------------------------------------------------------- */
 
-/* A text that is read line by line. `line` is the number of the line in `at`, 0 before the first. */
+/* A text that is read line by line. `line` is the number of the line in `at`, 0 before the first.
+ */
 typedef struct bs_scan {
     bs_ctx *cx;
     const char *text;

@@ -81,8 +81,8 @@ static bs_status add_bonds(const bs_molfile *file, bs_draft *draft)
     for (uint32_t i = 0; i < file->bond_count && st == BS_OK; i++) {
         const bs_molfile_bond *b = &file->bonds[i];
         int order = b->type == BS_MOLFILE_BOND_AROMATIC ? BS_DRAFT_ORDER_AROMATIC
-                    : b->type <= 3                        ? b->type
-                                                          : 0;
+                    : b->type <= 3                      ? b->type
+                                                        : 0;
 
         if (b->type != BS_MOLFILE_BOND_HYDROGEN)
             st = bs_draft_add_bond(draft, b->a, b->b, order, NULL);

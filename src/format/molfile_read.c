@@ -67,10 +67,14 @@ bs_status bs_molfile__check_type(const bs_scan *scan, size_t column, size_t widt
         type == BS_MOLFILE_BOND_HYDROGEN)
         return BS_OK;
     if (type >= 5 && type <= 8)
-        return bs_scan__fail(scan, BS_EVALUE, column, width, "bond type %ld belongs to a query; a "
-                             "molecule has types 1 to 4", type);
-    return bs_scan__fail(scan, BS_EVALUE, column, width, "there is no bond type %ld; 1 to 4 were "
-                         "expected (4 is aromatic)", type);
+        return bs_scan__fail(scan, BS_EVALUE, column, width,
+                             "bond type %ld belongs to a query; a "
+                             "molecule has types 1 to 4",
+                             type);
+    return bs_scan__fail(scan, BS_EVALUE, column, width,
+                         "there is no bond type %ld; 1 to 4 were "
+                         "expected (4 is aromatic)",
+                         type);
 }
 
 bs_status bs_molfile__reserve(bs_molfile *file, uint32_t atoms, uint32_t bonds)
@@ -103,10 +107,12 @@ static bs_status check_first_line(const bs_scan *scan)
     if (bs_scan__starts(scan, "$RXN"))
         return bs_scan__fail(scan, BS_EVALUE, 0, 4, "this is a reaction; a molecule was expected");
     if (bs_scan__starts(scan, "$MDL"))
-        return bs_scan__fail(scan, BS_EVALUE, 0, 4, "this is a query with R groups; a molecule was "
+        return bs_scan__fail(scan, BS_EVALUE, 0, 4,
+                             "this is a query with R groups; a molecule was "
                              "expected");
     if (bs_scan__starts(scan, "$RDFILE"))
-        return bs_scan__fail(scan, BS_EVALUE, 0, 7, "this is an RD file; a molfile or SD file was "
+        return bs_scan__fail(scan, BS_EVALUE, 0, 7,
+                             "this is an RD file; a molfile or SD file was "
                              "expected");
     return BS_OK;
 }
@@ -122,8 +128,10 @@ static bs_status read_version(const bs_scan *scan, int *version)
             continue;
         if (*version == 3 || memcmp(scan->at + i, "V2000", 5) == 0)
             return BS_OK;
-        return bs_scan__fail(scan, BS_ESYNTAX, i, 5, "'%.5s' is no version of the molfile format; "
-                             "V2000 or V3000 was expected", scan->at + i);
+        return bs_scan__fail(scan, BS_ESYNTAX, i, 5,
+                             "'%.5s' is no version of the molfile format; "
+                             "V2000 or V3000 was expected",
+                             scan->at + i);
     }
     return BS_OK;
 }

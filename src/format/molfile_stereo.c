@@ -286,9 +286,9 @@ static bs_status add_double(stereo *s, const bs_molfile_bond *bond)
         open || !end_beside(s, element.centre, before[0], &element.around[0]) ||
         !end_beside(s, element.second, before[1], &element.around[1]))
         return BS_OK;
-    element.perm = (uint8_t)bs_hand__double(place(s, element.centre), place(s, element.second),
-                                            place(s, element.around[0]),
-                                            place(s, element.around[1]));
+    element.perm =
+        (uint8_t)bs_hand__double(place(s, element.centre), place(s, element.second),
+                                 place(s, element.around[0]), place(s, element.around[1]));
     return element.perm ? bs_draft_add_stereo(s->draft, element) : BS_OK;
 }
 
@@ -309,8 +309,8 @@ static bool walk_to_end(const stereo *s, uint32_t middle, uint32_t k, allene_end
     int n = 0;
 
     *out = (allene_end){.beside = {BS_DRAFT_HYDROGEN, BS_DRAFT_HYDROGEN}};
-    out->steps = walk_chain(s, middle, other_end(bond_at(s, middle, k), middle), &before,
-                            &out->atom, &open);
+    out->steps =
+        walk_chain(s, middle, other_end(bond_at(s, middle, k), middle), &before, &out->atom, &open);
     if (open || degree(s, out->atom) < 2 || degree(s, out->atom) > 3 || is_wavy(s, out->atom))
         return false;
     for (uint32_t i = 0; i < degree(s, out->atom); i++) {

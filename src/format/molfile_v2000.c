@@ -8,7 +8,7 @@
 typedef struct v2000 {
     bs_molfile *file;
     bs_scan *scan;
-    bool end_may_lack;  /* files from before there were versions have no M  END */
+    bool end_may_lack;    /* files from before there were versions have no M  END */
     bool cleared_charges; /* M  CHG and M  RAD take the place of the atom block's charges */
     bool cleared_isotopes;
 } v2000;
@@ -28,8 +28,10 @@ static bs_status read_place(const bs_scan *scan, size_t column, double *out)
         width--;
     if (bs_scan__double(scan->at + start, width, out) && fabs(*out) <= BS_MOLFILE_PLACE_MAX)
         return BS_OK;
-    return bs_scan__fail(scan, BS_ESYNTAX, column, 10, "'%.*s' stands where a coordinate such as "
-                         "1.2500 was expected", (int)width, scan->at + start);
+    return bs_scan__fail(scan, BS_ESYNTAX, column, 10,
+                         "'%.*s' stands where a coordinate such as "
+                         "1.2500 was expected",
+                         (int)width, scan->at + start);
 }
 
 static bs_status read_symbol(const bs_scan *scan, bs_molfile_atom *atom)
@@ -97,13 +99,13 @@ static bs_status read_atom(const bs_scan *scan, bs_molfile_atom *atom)
     bs_status st;
 
     if (scan->size < 32)
-        return bs_scan__fail(scan, BS_ESYNTAX, 0, 0, "an atom line was expected: x, y and z in "
+        return bs_scan__fail(scan, BS_ESYNTAX, 0, 0,
+                             "an atom line was expected: x, y and z in "
                              "columns 1 to 30, the symbol in 32 to 34");
     atom->line = scan->line;
     if ((st = read_place(scan, 0, &atom->x)) != BS_OK ||
         (st = read_place(scan, 10, &atom->y)) != BS_OK ||
-        (st = read_place(scan, 20, &atom->z)) != BS_OK ||
-        (st = read_symbol(scan, atom)) != BS_OK)
+        (st = read_place(scan, 20, &atom->z)) != BS_OK || (st = read_symbol(scan, atom)) != BS_OK)
         return st;
     return read_atom_fields(scan, atom);
 }
@@ -119,7 +121,8 @@ static bs_status read_bond(const bs_molfile *file, const bs_scan *scan, bs_molfi
     bs_status st;
 
     if (scan->size < 7)
-        return bs_scan__fail(scan, BS_ESYNTAX, 0, 0, "a bond line was expected: two atom numbers "
+        return bs_scan__fail(scan, BS_ESYNTAX, 0, 0,
+                             "a bond line was expected: two atom numbers "
                              "and the type, three columns each");
     if ((st = bs_scan__column(scan, 0, 3, 1, file->atom_count, "an atom number", &a)) != BS_OK ||
         (st = bs_scan__column(scan, 3, 3, 1, file->atom_count, "an atom number", &b)) != BS_OK ||
@@ -128,8 +131,10 @@ static bs_status read_bond(const bs_molfile *file, const bs_scan *scan, bs_molfi
         (st = bs_scan__column(scan, 9, 3, 0, 6, "a bond stereo code", &mark)) != BS_OK)
         return st;
     if (a < 1 || b < 1)
-        return bs_scan__fail(scan, BS_ESYNTAX, a < 1 ? 0 : 3, 3, "an atom number (1 to %u) was "
-                             "expected", (unsigned)file->atom_count);
+        return bs_scan__fail(scan, BS_ESYNTAX, a < 1 ? 0 : 3, 3,
+                             "an atom number (1 to %u) was "
+                             "expected",
+                             (unsigned)file->atom_count);
     if (a == b)
         return bs_scan__fail(scan, BS_EVALUE, 0, 6, "atom %ld is bonded to itself", a);
     *bond = (bs_molfile_bond){.a = (uint32_t)a - 1, .b = (uint32_t)b - 1, .type = (uint8_t)type};
@@ -166,7 +171,12 @@ static void clear_isotopes(v2000 *v)
     }
 }
 
-typedef enum property { PROPERTY_CHARGE, PROPERTY_ISOTOPE, PROPERTY_RADICAL, PROPERTY_GROUP } property;
+typedef enum property {
+    PROPERTY_CHARGE,
+    PROPERTY_ISOTOPE,
+    PROPERTY_RADICAL,
+    PROPERTY_GROUP
+} property;
 
 static const struct {
     const char *word;
@@ -216,8 +226,10 @@ static bs_status read_pairs(v2000 *v, property kind)
         long value;
 
         if (scan->size <= column + 4)
-            return bs_scan__fail(scan, BS_ESYNTAX, 6, 3, "%ld entries are announced, the line has "
-                                 "%ld", count, i);
+            return bs_scan__fail(scan, BS_ESYNTAX, 6, 3,
+                                 "%ld entries are announced, the line has "
+                                 "%ld",
+                                 count, i);
         if ((st = bs_scan__column(scan, column, 4, 1, v->file->atom_count, "an atom number",
                                   &atom)) != BS_OK ||
             (st = bs_scan__column(scan, column + 4, 4, properties[kind].low, properties[kind].high,
@@ -258,7 +270,8 @@ static bs_status read_property(v2000 *v)
             return read_pairs(v, (property)kind);
     }
     if (bs_scan__starts(v->scan, "M  ALS"))
-        return bs_scan__fail(v->scan, BS_EVALUE, 0, 6, "a list of elements; a molecule has one "
+        return bs_scan__fail(v->scan, BS_EVALUE, 0, 6,
+                             "a list of elements; a molecule has one "
                              "element at each place");
     if (bs_scan__starts(v->scan, "A  ") || bs_scan__starts(v->scan, "G  "))
         return skip_lines(v, 1);
@@ -268,7 +281,8 @@ static bs_status read_property(v2000 *v)
     }
     if (bs_scan__starts(v->scan, "M  ") || bs_scan__starts(v->scan, "V  ") || is_blank(v->scan))
         return BS_OK;
-    return bs_scan__fail(v->scan, BS_ESYNTAX, 0, 0, "a property line or M  END was expected; the "
+    return bs_scan__fail(v->scan, BS_ESYNTAX, 0, 0,
+                         "a property line or M  END was expected; the "
                          "counts of atoms and bonds may be wrong");
 }
 
@@ -318,7 +332,8 @@ bs_status bs_molfile__read_v2000(bs_molfile *file, bs_scan *scan)
     bs_status st;
 
     if (scan->size < 6)
-        return bs_scan__fail(scan, BS_ESYNTAX, 0, 0, "the counts line was expected: the numbers of "
+        return bs_scan__fail(scan, BS_ESYNTAX, 0, 0,
+                             "the counts line was expected: the numbers of "
                              "atoms and bonds, three columns each");
     v.end_may_lack = scan->size < 39;
     if ((st = bs_scan__column(scan, 0, 3, 0, 999, "the number of atoms", &atoms)) != BS_OK ||
@@ -328,7 +343,8 @@ bs_status bs_molfile__read_v2000(bs_molfile *file, bs_scan *scan)
         (st = bs_scan__column(scan, 15, 3, 0, 999, "the number of text entries", &texts)) != BS_OK)
         return st;
     if (lists > 0)
-        return bs_scan__fail(scan, BS_EVALUE, 6, 3, "atom lists belong to a query; a molecule was "
+        return bs_scan__fail(scan, BS_EVALUE, 6, 3,
+                             "atom lists belong to a query; a molecule was "
                              "expected");
     if ((st = bs_molfile__reserve(file, (uint32_t)atoms, (uint32_t)bonds)) != BS_OK)
         return st;

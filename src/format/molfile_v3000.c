@@ -11,8 +11,8 @@
 typedef struct v3000 {
     bs_molfile *file;
     bs_scan *scan;
-    bs_text joined; /* a line that went on */
-    bs_map index;   /* from the numbers that the file gives to atoms to their places */
+    bs_text joined;   /* a line that went on */
+    bs_map index;     /* from the numbers that the file gives to atoms to their places */
     const char *text; /* the line in hand behind "M  V30 " */
     size_t length;
     size_t at;
@@ -48,7 +48,8 @@ static bs_status need_v30(v3000 *v)
 
     if (st != BS_OK || bs_scan__starts(v->scan, "M  V30 "))
         return st;
-    return bs_scan__fail(v->scan, BS_ESYNTAX, 0, 0, "a line that starts with 'M  V30 ' was expected");
+    return bs_scan__fail(v->scan, BS_ESYNTAX, 0, 0,
+                         "a line that starts with 'M  V30 ' was expected");
 }
 
 /* Gathers a line that goes on in the next ones. */
@@ -136,7 +137,7 @@ static bool is_option(word w, const char *name, word *value)
 static bs_status need_long(v3000 *v, word w, long low, long high, const char *expected, long *out)
 {
     return bs_scan__long(w.text, w.length, low, high, out) ? BS_OK
-                                                            : fail_word(v, BS_ESYNTAX, w, expected);
+                                                           : fail_word(v, BS_ESYNTAX, w, expected);
 }
 
 static bs_status need_words(v3000 *v, const char *first, const char *second)
@@ -234,7 +235,8 @@ static bs_status read_symbol(v3000 *v, bs_molfile_atom *atom)
     if (bs_molfile__symbol(w.text, w.length, atom))
         return BS_OK;
     if (w.length > 0 && (w.text[0] == '[' || is_word(w, "NOT")))
-        return bs_scan__fail_line(v->file->cx, v->line, BS_EVALUE, "a list of elements; a molecule "
+        return bs_scan__fail_line(v->file->cx, v->line, BS_EVALUE,
+                                  "a list of elements; a molecule "
                                   "has one element at each place");
     return bs_scan__fail_line(v->file->cx, v->line, BS_EVALUE, "'%.*s' is %s",
                               w.length > 40 ? 40 : (int)w.length, w.text,
@@ -422,8 +424,10 @@ static bs_status read_counts(v3000 *v)
         return st;
     /* A line for each atom has to follow: a count that the text cannot hold takes no memory. */
     if ((size_t)(atoms + bonds) > v->scan->length / 8)
-        return bs_scan__fail_line(v->file->cx, v->line, BS_ESYNTAX, "%ld atoms and %ld bonds are "
-                                  "announced; the record is too short for them", atoms, bonds);
+        return bs_scan__fail_line(v->file->cx, v->line, BS_ESYNTAX,
+                                  "%ld atoms and %ld bonds are "
+                                  "announced; the record is too short for them",
+                                  atoms, bonds);
     v->file->atom_count = (uint32_t)atoms;
     v->file->bond_count = (uint32_t)bonds;
     v->file->chiral = chiral == 1;
@@ -512,7 +516,8 @@ static bs_status read_blocks(v3000 *v)
             return st;
     }
     if (!bonds && v->file->bond_count > 0)
-        return bs_scan__fail_line(v->file->cx, v->line, BS_ESYNTAX, "the table ends without its bonds");
+        return bs_scan__fail_line(v->file->cx, v->line, BS_ESYNTAX,
+                                  "the table ends without its bonds");
     return BS_OK;
 }
 
@@ -527,7 +532,8 @@ static bs_status read_table(v3000 *v)
     if (bs_scan__starts(v->scan, "M  END"))
         return BS_OK;
     if (bs_scan__starts(v->scan, "M  V30 BEGIN RGROUP"))
-        return bs_scan__fail(v->scan, BS_EVALUE, 7, 12, "a definition of R groups belongs to a "
+        return bs_scan__fail(v->scan, BS_EVALUE, 7, 12,
+                             "a definition of R groups belongs to a "
                              "query; a molecule was expected");
     return bs_scan__fail(v->scan, BS_ESYNTAX, 0, 0, "M  END was expected");
 }

@@ -95,8 +95,10 @@ static bs_status check_atoms(bs_ctx *cx, const bs_mol *mol)
         const bs_bond *b = bs_mol__bonds(mol) + i;
 
         if (b->order > 3)
-            return bs_fail(cx, BS_EVALUE, "a molfile has no code for the quadruple bond between "
-                           "atoms %u and %u", (unsigned)b->a + 1, (unsigned)b->b + 1);
+            return bs_fail(cx, BS_EVALUE,
+                           "a molfile has no code for the quadruple bond between "
+                           "atoms %u and %u",
+                           (unsigned)b->a + 1, (unsigned)b->b + 1);
     }
     return BS_OK;
 }
@@ -115,6 +117,10 @@ static const char *v2000_trouble(const bs_molfile_out *o)
     for (uint32_t i = 0; i < o->mol->bond_count; i++) {
         if (bs_mol__bonds(o->mol)[i].order == 0)
             return "coordinate bonds";
+    }
+    for (int i = 0; i < o->group_count; i++) {
+        if (o->groups[i].kind != BS_STEREO_GROUP_ABSOLUTE)
+            return "relative and racemic centres";
     }
     return NULL;
 }
@@ -163,17 +169,17 @@ static bs_status prepare(bs_ctx *cx, bs_molfile_out *o, const bs_mol *mol)
     return BS_OK;
 }
 
-static bs_status write(bs_text *out, const bs_mol *mol, const char *name, size_t name_length,
-                       bs_molfile_version version, int *lost)
+static bs_status write(bs_text *out, const bs_record *record, bs_molfile_version version, int *lost)
 {
     bs_ctx *cx = out->cx;
     bs_mark temp = bs_arena_mark(&cx->scratch);
-    bs_molfile_out o = {.out = out};
+    bs_molfile_out o = {.out = out, .groups = record->groups, .group_count = record->group_count};
     bs_status st;
 
-    if ((st = check_atoms(cx, mol)) != BS_OK || (st = prepare(cx, &o, mol)) != BS_OK ||
+    if ((st = check_atoms(cx, record->mol)) != BS_OK ||
+        (st = prepare(cx, &o, record->mol)) != BS_OK ||
         (st = choose_version(cx, &o, &version)) != BS_OK ||
-        (st = write_name(out, name, name_length)) != BS_OK ||
+        (st = write_name(out, record->name, record->name ? record->name_length : 0)) != BS_OK ||
         (st = bs_text_puts(out, "  backsaw           2D\n\n")) != BS_OK)
         goto done;
     st = version == BS_MOLFILE_V3000 ? bs_molfile__write_v3000(&o) : bs_molfile__write_v2000(&o);
@@ -198,7 +204,8 @@ bs_status bs_molfile_write(bs_text *out, const bs_mol *mol, const char *name,
                            bs_molfile_version version, int *lost)
 {
     size_t length = out->length;
-    bs_status st = write(out, mol, name ? name : "", name ? strlen(name) : 0, version, lost);
+    bs_record record = {.mol = mol, .name = name, .name_length = name ? strlen(name) : 0};
+    bs_status st = write(out, &record, version, lost);
 
     if (st != BS_OK)
         shorten(out, length);
@@ -242,8 +249,7 @@ static bs_status write_field(bs_text *out, const bs_field *field)
 bs_status bs_sdf_write(bs_text *out, const bs_record *record, bs_molfile_version version, int *lost)
 {
     size_t length = out->length;
-    bs_status st = write(out, record->mol, record->name ? record->name : "", record->name_length,
-                         version, lost);
+    bs_status st = write(out, record, version, lost);
 
     for (int i = 0; i < record->field_count && st == BS_OK; i++)
         st = write_field(out, &record->fields[i]);

@@ -16,6 +16,8 @@ typedef struct bs_molfile_out {
     uint8_t *drawn; /* by atom: drawn hydrogens */
     uint32_t atom_count, bond_count;
     bool chiral;
+    const bs_stereo_group *groups;
+    int group_count;
 } bs_molfile_out;
 
 typedef struct bs_molfile_out_bond {

@@ -13,19 +13,19 @@ static bs_status write_atom(const bs_molfile_out *o, uint32_t i)
     bool is_group = a->element == 0 && a->label > 0;
     const char *symbol = is_group ? "R#" : bs_element_symbol(a->element);
 
-    return bs_text_printf(o->out,
-                          "%10.4f%10.4f%10.4f %-3s 0%3d  0  0  0%3d  0  0  0%3d  0  0\n", at.x, at.y,
-                          0.0, symbol, a->charge >= -3 && a->charge <= 3 ? codes[a->charge + 3] : 0,
-                          valence < 0 ? 0 : valence == 0 ? 15 : valence, is_group ? 0 : a->label);
+    return bs_text_printf(o->out, "%10.4f%10.4f%10.4f %-3s 0%3d  0  0  0%3d  0  0  0%3d  0  0\n",
+                          at.x, at.y, 0.0, symbol,
+                          a->charge >= -3 && a->charge <= 3 ? codes[a->charge + 3] : 0,
+                          valence < 0    ? 0
+                          : valence == 0 ? 15
+                                         : valence,
+                          is_group ? 0 : a->label);
 }
 
 static bs_status write_bond(const bs_molfile_out *o, uint32_t i)
 {
     bs_molfile_out_bond b = bs_molfile__out_bond(o, i);
-    int stereo = b.undecided                 ? 3
-                 : b.wedge == BS_WEDGE_UP   ? 1
-                 : b.wedge == BS_WEDGE_DOWN ? 6
-                                             : 0;
+    int stereo = b.undecided ? 3 : b.wedge == BS_WEDGE_UP ? 1 : b.wedge == BS_WEDGE_DOWN ? 6 : 0;
 
     return bs_text_printf(o->out, "%3u%3u%3d%3d\n", (unsigned)b.a + 1, (unsigned)b.b + 1, b.order,
                           stereo);

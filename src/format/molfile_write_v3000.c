@@ -8,21 +8,11 @@
 enum { LINE_MAX_BYTES = 79, PREFIX = 7 };
 
 /* Writes a line behind "M  V30 "; a line that is too long goes on in the next. */
-static bs_status put(bs_text *out, const char *format, ...)
-    __attribute__((format(printf, 2, 3)));
-
-static bs_status put(bs_text *out, const char *format, ...)
+static bs_status put_line(bs_text *out, const char *line, size_t length)
 {
-    char line[256];
-    size_t length;
     size_t at = 0;
-    va_list args;
     bs_status st;
 
-    va_start(args, format);
-    vsnprintf(line, sizeof line, format, args);
-    va_end(args);
-    length = strlen(line);
     for (;;) {
         size_t room = LINE_MAX_BYTES - PREFIX;
         bool whole = length - at <= room;
@@ -34,6 +24,19 @@ static bs_status put(bs_text *out, const char *format, ...)
             return st;
         at += size;
     }
+}
+
+static bs_status put(bs_text *out, const char *format, ...) __attribute__((format(printf, 2, 3)));
+
+static bs_status put(bs_text *out, const char *format, ...)
+{
+    char line[256];
+    va_list args;
+
+    va_start(args, format);
+    vsnprintf(line, sizeof line, format, args);
+    va_end(args);
+    return put_line(out, line, strlen(line));
 }
 
 /* The options behind an atom, each with a blank before. */
@@ -72,16 +75,14 @@ static bs_status write_atom(const bs_molfile_out *o, uint32_t i)
         label = is_group ? 0 : a->label;
         list_options(o, i, options, sizeof options);
     }
-    return put(o->out, "%u %s %.4f %.4f 0 %d%s", (unsigned)i + 1, symbol, at.x, at.y, label, options);
+    return put(o->out, "%u %s %.4f %.4f 0 %d%s", (unsigned)i + 1, symbol, at.x, at.y, label,
+               options);
 }
 
 static bs_status write_bond(const bs_molfile_out *o, uint32_t i)
 {
     bs_molfile_out_bond b = bs_molfile__out_bond(o, i);
-    int stereo = b.undecided                 ? 2
-                 : b.wedge == BS_WEDGE_UP   ? 1
-                 : b.wedge == BS_WEDGE_DOWN ? 3
-                                             : 0;
+    int stereo = b.undecided ? 2 : b.wedge == BS_WEDGE_UP ? 1 : b.wedge == BS_WEDGE_DOWN ? 3 : 0;
     char option[16] = "";
 
     if (stereo != 0)
@@ -97,6 +98,36 @@ static bs_status write_bonds(const bs_molfile_out *o)
     for (uint32_t i = 0; i < o->bond_count && st == BS_OK; i++)
         st = write_bond(o, i);
     return st == BS_OK && o->bond_count > 0 ? put(o->out, "END BOND") : st;
+}
+
+static bs_status write_group(const bs_molfile_out *o, const bs_stereo_group *group)
+{
+    bs_text line;
+    bs_status st;
+
+    bs_text_init(&line, o->out->cx);
+    if (group->kind == BS_STEREO_GROUP_ABSOLUTE)
+        st = bs_text_puts(&line, "MDLV30/STEABS");
+    else
+        st = bs_text_printf(&line, "MDLV30/STE%s%d",
+                            group->kind == BS_STEREO_GROUP_RELATIVE ? "REL" : "RAC", group->number);
+    if (st == BS_OK)
+        st = bs_text_printf(&line, " ATOMS=(%d", group->atom_count);
+    for (int i = 0; i < group->atom_count && st == BS_OK; i++)
+        st = bs_text_printf(&line, " %d", group->atoms[i] + 1);
+    if (st == BS_OK && (st = bs_text_putc(&line, ')')) == BS_OK)
+        st = put_line(o->out, line.data, line.length);
+    bs_text_free(&line);
+    return st;
+}
+
+static bs_status write_groups(const bs_molfile_out *o)
+{
+    bs_status st = o->group_count > 0 ? put(o->out, "BEGIN COLLECTION") : BS_OK;
+
+    for (int i = 0; i < o->group_count && st == BS_OK; i++)
+        st = write_group(o, &o->groups[i]);
+    return st == BS_OK && o->group_count > 0 ? put(o->out, "END COLLECTION") : st;
 }
 
 bs_status bs_molfile__write_v3000(const bs_molfile_out *o)
@@ -116,5 +147,7 @@ bs_status bs_molfile__write_v3000(const bs_molfile_out *o)
         st = put(o->out, "END ATOM");
     if (st == BS_OK)
         st = write_bonds(o);
+    if (st == BS_OK)
+        st = write_groups(o);
     return st == BS_OK ? put(o->out, "END CTAB") : st;
 }

@@ -8,8 +8,7 @@
 
 void bs_scan__begin(bs_scan *scan, bs_ctx *cx, const char *text, size_t length, long first_line)
 {
-    *scan = (bs_scan){
-        .cx = cx, .text = text, .length = length, .line = first_line - 1, .at = text};
+    *scan = (bs_scan){.cx = cx, .text = text, .length = length, .line = first_line - 1, .at = text};
 }
 
 bool bs_scan__line(bs_scan *scan)
@@ -36,8 +35,8 @@ bs_status bs_scan__need_line(bs_scan *scan, const char *what)
 
     if (bs_scan__line(scan))
         return BS_OK;
-    st = bs_fail_at(scan->cx, BS_ESYNTAX, scan->length, "line %ld: the record ends; %s was expected",
-                    scan->line + 1, what);
+    st = bs_fail_at(scan->cx, BS_ESYNTAX, scan->length,
+                    "line %ld: the record ends; %s was expected", scan->line + 1, what);
     scan->cx->error.line = scan->line + 1;
     return st;
 }
@@ -55,7 +54,8 @@ bs_status bs_scan__fail(const bs_scan *scan, bs_status code, size_t column, size
     if (width == 0)
         bs_fail_at(scan->cx, code, offset, "line %ld: %s", scan->line, text);
     else if (width == 1)
-        bs_fail_at(scan->cx, code, offset, "line %ld, column %zu: %s", scan->line, column + 1, text);
+        bs_fail_at(scan->cx, code, offset, "line %ld, column %zu: %s", scan->line, column + 1,
+                   text);
     else
         bs_fail_at(scan->cx, code, offset, "line %ld, columns %zu to %zu: %s", scan->line,
                    column + 1, column + width, text);
@@ -170,6 +170,8 @@ bs_status bs_scan__column(const bs_scan *scan, size_t column, size_t width, long
     cut(scan, &start, &length);
     if (length == 0 || bs_scan__long(scan->at + start, length, low, high, out))
         return BS_OK;
-    return bs_scan__fail(scan, BS_ESYNTAX, column, width, "'%.*s' stands where %s (%ld to %ld) was "
-                         "expected", (int)length, scan->at + start, what, low, high);
+    return bs_scan__fail(scan, BS_ESYNTAX, column, width,
+                         "'%.*s' stands where %s (%ld to %ld) was "
+                         "expected",
+                         (int)length, scan->at + start, what, low, high);
 }

@@ -116,8 +116,8 @@ static bs_status read_field(fields *f, bs_scan *scan, bool *more)
             BS_OK)
         return st;
     field->name = text;
-    st = bs_utf8__copy(f->cx, f->home, scan->text + start, end - start, &text,
-                       &field->value_length);
+    st =
+        bs_utf8__copy(f->cx, f->home, scan->text + start, end - start, &text, &field->value_length);
     if (st != BS_OK)
         return st;
     field->value = text;
@@ -136,7 +136,8 @@ static bs_status read_fields(fields *f, bs_scan *scan)
         else if (scan->at[0] == '>')
             st = read_field(f, scan, &more);
         else
-            return bs_scan__fail(scan, BS_ESYNTAX, 0, 0, "a data field such as > <NAME> or $$$$ was "
+            return bs_scan__fail(scan, BS_ESYNTAX, 0, 0,
+                                 "a data field such as > <NAME> or $$$$ was "
                                  "expected");
     }
     return st;

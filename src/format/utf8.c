@@ -6,11 +6,11 @@
 /* The number of bytes of the character that starts at `at`, 0 if it is none (RFC 3629). */
 static size_t character(const unsigned char *at, size_t left)
 {
-    size_t size = at[0] < 0x80                       ? 1
+    size_t size = at[0] < 0x80                     ? 1
                   : at[0] >= 0xC2 && at[0] <= 0xDF ? 2
                   : at[0] >= 0xE0 && at[0] <= 0xEF ? 3
                   : at[0] >= 0xF0 && at[0] <= 0xF4 ? 4
-                                                     : 0;
+                                                   : 0;
 
     if (size == 0 || size > left)
         return 0;

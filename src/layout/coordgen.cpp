@@ -58,9 +58,10 @@ template <typename T> std::vector<std::unique_ptr<T>> make_sorted(std::uint32_t 
     made.reserve(count);
     for (std::uint32_t i = 0; i < count; i++)
         made.push_back(std::make_unique<T>());
-    std::sort(made.begin(), made.end(), [](const std::unique_ptr<T> &x, const std::unique_ptr<T> &y) {
-        return std::less<const T *>()(x.get(), y.get());
-    });
+    std::sort(made.begin(), made.end(),
+              [](const std::unique_ptr<T> &x, const std::unique_ptr<T> &y) {
+                  return std::less<const T *>()(x.get(), y.get());
+              });
     return made;
 }
 
@@ -73,7 +74,7 @@ void set_geometry(sketcherMinimizerBond &bond, const bs_coordgen_bond &from, con
     info.atom1 = atoms[from.beside_a];
     info.atom2 = atoms[from.beside_b];
     info.stereo = from.geometry == 1 ? sketcherMinimizerBondStereoInfo::cis
-                                                   : sketcherMinimizerBondStereoInfo::trans;
+                                     : sketcherMinimizerBondStereoInfo::trans;
     bond.setStereoChemistry(info);
 }
 

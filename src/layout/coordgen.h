@@ -28,8 +28,8 @@ typedef enum bs_coordgen_result {
 } bs_coordgen_result;
 
 /*
- * Places `atom_count` connected atoms; bonds become about 1 long. `places` gets x and y of each. `open` draws large rings like
- * chains, which takes seconds where their true form would take hours.
+ * Places `atom_count` connected atoms; bonds become about 1 long. `places` gets x and y of each.
+ * `open` draws large rings like chains, which takes seconds where their true form would take hours.
  */
 bs_coordgen_result bs_coordgen__place(uint32_t atom_count, const uint8_t *elements,
                                       uint32_t bond_count, const bs_coordgen_bond *bonds, bool open,

@@ -2,7 +2,7 @@
  * Double bonds whose geometry is open: the molecule does not say it, but it makes a difference.
  */
 #include "chem/stereo.h"
-#include "layout/draw.h"
+#include "layout/drawing.h"
 
 enum { SMALLEST_TRANS_RING = 8 };
 
@@ -70,8 +70,7 @@ static bool in_small_ring(const bs_mol *mol, uint32_t a, uint32_t b)
 
 static bool may_be_open(const bs_mol *mol, const bs_bond *bond)
 {
-    return bond->order == 2 &&
-           !(bond->flags & (BS_BOND_AROMATIC | BS_BOND_CIS | BS_BOND_TRANS)) &&
+    return bond->order == 2 && !(bond->flags & (BS_BOND_AROMATIC | BS_BOND_CIS | BS_BOND_TRANS)) &&
            (!(bond->flags & BS_BOND_RING) || !in_small_ring(mol, bond->a, bond->b));
 }
 
@@ -86,7 +85,7 @@ static bool is_open(const bs_mol *mol, const bs_bond *bond, const int *classes)
            end_tells(mol, end[0], before[0], classes) && end_tells(mol, end[1], before[1], classes);
 }
 
-bs_status bs_draw__mark_undecided(bs_drawing *d, bs_layout *layout)
+bs_status bs_layout__mark_undecided(bs_drawing *d, bs_layout *layout)
 {
     const bs_mol *mol = d->mol;
     const bs_bond *bonds = bs_mol__bonds(mol);

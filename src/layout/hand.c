@@ -184,7 +184,10 @@ int bs_hand__flat_allene(bs_vector a, bs_vector b, bs_vector beside_a, int wedge
     bs_vector axis = unit(minus(b, a));
 
     return perm_of_allene(axis, square_on(axis, minus(beside_a, a)),
-                          (bs_vector){0, 0, wedge > 0 ? 1 : wedge < 0 ? -1 : 0});
+                          (bs_vector){0, 0,
+                                      wedge > 0   ? 1
+                                      : wedge < 0 ? -1
+                                                  : 0});
 }
 
 int bs_hand__solid_allene(bs_vector a, bs_vector b, bs_vector beside_a, bs_vector beside_b)

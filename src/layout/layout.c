@@ -6,7 +6,7 @@
 
 #include "chem/stereo.h"
 #include "layout/coordgen.h"
-#include "layout/draw.h"
+#include "layout/drawing.h"
 
 #include <string.h>
 
@@ -47,7 +47,7 @@ static void mark_hydrogens(bs_drawing *d)
     }
 }
 
-bs_status bs_draw__begin(bs_drawing *d, bs_ctx *cx, const bs_mol *mol)
+bs_status bs_layout__begin(bs_drawing *d, bs_ctx *cx, const bs_mol *mol)
 {
     uint32_t count = 0;
     bs_status st;
@@ -218,8 +218,8 @@ static bs_status place_well(pieces *p, const piece *pc, bool open, bool *done)
         goto done;
     for (uint32_t i = 0; i < pc->point_count; i++)
         elements[i] = i < pc->atom_count ? p->d->mol->atoms[pc->points[i]].element : 1;
-    result = bs_coordgen__place(pc->point_count, elements, copy_bonds(p, pc, bonds), bonds,
-                                open, places);
+    result = bs_coordgen__place(pc->point_count, elements, copy_bonds(p, pc, bonds), bonds, open,
+                                places);
     if (result == BS_COORDGEN_NO_MEMORY)
         st = bs_fail_memory(cx);
     *done = result == BS_COORDGEN_DONE;
@@ -283,10 +283,10 @@ static bs_status place_pieces(bs_drawing *d, int *wrong)
         if ((st = bs_poll(d->cx)) == BS_OK && chosen != WAY_PLAIN)
             st = place_well(&p, &pc, chosen == WAY_OPEN, &done);
         if (st == BS_OK && !done)
-            st = bs_draw__plain(d, i, p.placed);
+            st = bs_layout__plain(d, i, p.placed);
     }
     if (st == BS_OK)
-        st = bs_draw__mend_doubles(d, wrong);
+        st = bs_layout__mend_doubles(d, wrong);
     for (uint32_t at = 0; at < used && st == BS_OK;) {
         piece pc = {.points = p.points + at};
 
@@ -338,10 +338,10 @@ bs_status bs_layout_make(bs_ctx *cx, bs_arena *home, const bs_mol *mol, bs_layou
     bs_status st;
 
     *out = NULL;
-    if ((st = bs_draw__begin(&d, cx, mol)) == BS_OK && (st = place_pieces(&d, &wrong)) == BS_OK &&
+    if ((st = bs_layout__begin(&d, cx, mol)) == BS_OK && (st = place_pieces(&d, &wrong)) == BS_OK &&
         (st = make_result(cx, home, &d, &layout)) == BS_OK &&
-        (st = bs_draw__choose_wedges(&d, layout)) == BS_OK)
-        st = bs_draw__mark_undecided(&d, layout);
+        (st = bs_layout__choose_wedges(&d, layout)) == BS_OK)
+        st = bs_layout__mark_undecided(&d, layout);
     if (home != &cx->scratch)
         bs_arena_rewind(&cx->scratch, temp);
     if (st != BS_OK) {

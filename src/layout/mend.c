@@ -5,7 +5,7 @@
  * other side of the line between its neighbours in the ring, as far out as is needed.
  */
 #include "chem/stereo.h"
-#include "layout/draw.h"
+#include "layout/drawing.h"
 
 #include <string.h>
 
@@ -34,8 +34,9 @@ static int drawn_geometry(const bs_drawing *d, uint32_t bond)
         if (beside[k] == UINT32_MAX)
             return 0;
     }
-    return bs_hand__double(bs_draw__vector(d, element.centre), bs_draw__vector(d, element.second),
-                           bs_draw__vector(d, beside[0]), bs_draw__vector(d, beside[1]));
+    return bs_hand__double(bs_layout__vector(d, element.centre),
+                           bs_layout__vector(d, element.second), bs_layout__vector(d, beside[0]),
+                           bs_layout__vector(d, beside[1]));
 }
 
 static bool is_wrong(const bs_drawing *d, uint32_t bond)
@@ -180,7 +181,7 @@ static void mend_bond(mending *m, const bs_bond *bond)
     }
 }
 
-bs_status bs_draw__mend_doubles(bs_drawing *d, int *wrong)
+bs_status bs_layout__mend_doubles(bs_drawing *d, int *wrong)
 {
     const bs_bond *bonds = bs_mol__bonds(d->mol);
     bs_mark temp = bs_arena_mark(&d->cx->scratch);

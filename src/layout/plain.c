@@ -5,7 +5,7 @@
  * regular polygons, on a bond that is already there if the ring has one, and the other neighbours
  * go into the widest free angle.
  */
-#include "layout/draw.h"
+#include "layout/drawing.h"
 
 #include <math.h>
 
@@ -15,11 +15,11 @@
 typedef struct plain {
     bs_drawing *d;
     bool *placed;
-    bool *drawn;          /* by ring */
-    uint32_t *rings_at;   /* by atom: where its rings stand in `rings` */
+    bool *drawn;        /* by ring */
+    uint32_t *rings_at; /* by atom: where its rings stand in `rings` */
     uint32_t *rings;
     uint32_t *queue;
-    int8_t *turn;         /* by atom: to which side a chain bends next */
+    int8_t *turn; /* by atom: to which side a chain bends next */
     uint32_t head, tail;
 } plain;
 
@@ -128,7 +128,8 @@ static void place_rest(plain *p, uint32_t atom)
         if (next < p->d->atom_count)
             put_at_angle(p, atom, next, angle, (int8_t)-p->turn[atom]);
         else
-            p->d->at[next] = (bs_point){p->d->at[atom].x + cos(angle), p->d->at[atom].y + sin(angle)};
+            p->d->at[next] =
+                (bs_point){p->d->at[atom].x + cos(angle), p->d->at[atom].y + sin(angle)};
     }
 }
 
@@ -228,7 +229,7 @@ static bs_status list_rings(plain *p)
     return BS_OK;
 }
 
-bs_status bs_draw__plain(bs_drawing *d, uint32_t start, bool *placed)
+bs_status bs_layout__plain(bs_drawing *d, uint32_t start, bool *placed)
 {
     bs_mark temp = bs_arena_mark(&d->cx->scratch);
     plain p = {.d = d, .placed = placed};

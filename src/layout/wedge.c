@@ -6,12 +6,12 @@
  * bonds of one are taken, the others move over (augmenting paths, as in bipartite matching).
  */
 #include "chem/stereo.h"
-#include "layout/draw.h"
+#include "layout/drawing.h"
 
 #include <math.h>
 
 enum {
-    COST_LONG = 2,   /* the neighbour goes on */
+    COST_LONG = 2, /* the neighbour goes on */
     COST_CARBON = 1,
     COST_CENTRE = 20,
     COST_RING = 40,
@@ -32,7 +32,7 @@ typedef struct wedges {
 
 #define NOBODY UINT32_MAX
 
-int bs_draw__spokes(const bs_drawing *d, uint32_t centre, bs_spoke spokes[4], uint32_t ends[4])
+int bs_layout__spokes(const bs_drawing *d, uint32_t centre, bs_spoke spokes[4], uint32_t ends[4])
 {
     uint32_t around[6];
     int count = bs_stereo__around(d->mol, centre, BS_STEREO_TETRAHEDRAL, around);
@@ -111,7 +111,7 @@ static int lines_of(const wedges *w, uint32_t centre, uint32_t lines[4], int cos
 {
     bs_spoke spokes[4];
     uint32_t ends[4];
-    int count = bs_draw__spokes(w->d, centre, spokes, ends);
+    int count = bs_layout__spokes(w->d, centre, spokes, ends);
     int found = 0;
 
     for (int k = 0; k < count; k++) {
@@ -210,7 +210,7 @@ static bs_wedge wedge_for(const wedges *w, uint32_t centre, uint32_t line)
 {
     bs_spoke spokes[4];
     uint32_t ends[4];
-    int count = bs_draw__spokes(w->d, centre, spokes, ends);
+    int count = bs_layout__spokes(w->d, centre, spokes, ends);
     int perm;
 
     for (int k = 0; k < count; k++) {
@@ -229,11 +229,12 @@ static bs_wedge wedge_for(const wedges *w, uint32_t centre, uint32_t line)
  * An allene shows its hand by a wedge on a bond of one end. `around` names the atoms of both ends
  * in the order of the perm; the end in the page is the one whose atoms come first.
  */
-static void draw_allene(wedges *w, uint32_t centre, const uint32_t around[4], uint32_t a, uint32_t b)
+static void draw_allene(wedges *w, uint32_t centre, const uint32_t around[4], uint32_t a,
+                        uint32_t b)
 {
     const bs_mol *mol = w->d->mol;
     int in_page = around[0] == BS_DRAFT_HYDROGEN;
-    bs_vector beside = bs_draw__vector(w->d, around[in_page]);
+    bs_vector beside = bs_layout__vector(w->d, around[in_page]);
 
     for (int k = 2; k < 4; k++) {
         uint32_t line;
@@ -244,7 +245,8 @@ static void draw_allene(wedges *w, uint32_t centre, const uint32_t around[4], ui
         line = line_to(w, b, around[k]);
         if (bs_mol__bonds(mol)[line].order != 1 || w->owner[line] != NOBODY)
             continue;
-        perm = bs_hand__flat_allene(bs_draw__vector(w->d, a), bs_draw__vector(w->d, b), beside, 1);
+        perm =
+            bs_hand__flat_allene(bs_layout__vector(w->d, a), bs_layout__vector(w->d, b), beside, 1);
         if (perm == 0)
             break;
         if ((in_page == 1) != (k == 3))
@@ -316,7 +318,7 @@ static bs_status begin(wedges *w)
     return BS_OK;
 }
 
-bs_status bs_draw__choose_wedges(bs_drawing *d, bs_layout *layout)
+bs_status bs_layout__choose_wedges(bs_drawing *d, bs_layout *layout)
 {
     /* Good lines first, then those in rings or between centres, then unclear ones. */
     static const int worst[] = {COST_CENTRE, COST_RING, COST_UNCLEAR};

@@ -58,7 +58,10 @@ static void lines__of_an_empty_file_are_none(void **state)
 static void lines__leave_out_the_byte_order_mark(void **state)
 {
     fixture *f = *state;
-    bs_lines *lines = open_text(f, "\xEF\xBB\xBF" "C\n", 5);
+    bs_lines *lines = open_text(f,
+                                "\xEF\xBB\xBF"
+                                "C\n",
+                                5);
 
     check_line(f, lines, "C");
     check_line(f, lines, NULL);

@@ -44,9 +44,10 @@ static void check_text(const char *text, size_t length, const char *expected)
 static void sdf__names_and_fields(void **state)
 {
     fixture *f = *state;
-    static const char text[] = WATER "> <boiling point> (ID)\n100 \xC2\xB0"
-                                     "C\n\n>  25 <NOTE>\nfirst\r\n\nthird\n\n> DT12\n\n>  <empty>\n\n"
-                                     "$$$$\n" WATER;
+    static const char text[] =
+        WATER "> <boiling point> (ID)\n100 \xC2\xB0"
+              "C\n\n>  25 <NOTE>\nfirst\r\n\nthird\n\n> DT12\n\n>  <empty>\n\n"
+              "$$$$\n" WATER;
     bs_file *file = open_text(f, SDF, text, sizeof text - 1);
     const bs_record *record = next(f, file);
 
@@ -55,7 +56,9 @@ static void sdf__names_and_fields(void **state)
     assert_int_equal(record->number, 1);
     assert_int_equal(record->field_count, 4);
     check_text(record->fields[0].name, record->fields[0].name_length, "boiling point");
-    check_text(record->fields[0].value, record->fields[0].value_length, "100 \xC2\xB0" "C");
+    check_text(record->fields[0].value, record->fields[0].value_length,
+               "100 \xC2\xB0"
+               "C");
     check_text(record->fields[1].name, record->fields[1].name_length, "NOTE");
     check_text(record->fields[1].value, record->fields[1].value_length, "first\n\nthird");
     check_text(record->fields[2].name, record->fields[2].name_length, "DT12");
@@ -95,13 +98,17 @@ static void sdf__text_in_latin_1_becomes_utf_8(void **state)
 {
     fixture *f = *state;
     static const char text[] = "na\xEFve\n\n\n  0  0  0  0  0  0  0  0  0  0999 V2000\nM  END\n"
-                               "> <t>\n100 \xB0" "C\0!\n\n$$$$\n";
+                               "> <t>\n100 \xB0"
+                               "C\0!\n\n$$$$\n";
     bs_file *file = open_text(f, SDF, text, sizeof text - 1);
     const bs_record *record = next(f, file);
 
     check_text(record->name, record->name_length, "na\xC3\xAFve");
     assert_int_equal(record->fields[0].value_length, 9);
-    assert_memory_equal(record->fields[0].value, "100 \xC2\xB0" "C\0!", 10);
+    assert_memory_equal(record->fields[0].value,
+                        "100 \xC2\xB0"
+                        "C\0!",
+                        10);
     bs_file_close(file);
 }
 
@@ -272,6 +279,40 @@ static void sdf__written_records_come_back(void **state)
     bs_file_close(file);
 }
 
+/* A racemic pair of centres and a relative one are kept, which takes V3000. */
+static void sdf__written_stereo_groups_come_back(void **state)
+{
+    fixture *f = *state;
+    int pair[] = {1, 3};
+    int one[] = {5};
+    bs_stereo_group groups[] = {{BS_STEREO_GROUP_RACEMIC, 1, 2, pair},
+                                {BS_STEREO_GROUP_RELATIVE, 3, 1, one}};
+    bs_record record = {.mol = molecule_read(f, "C[C@H](F)[C@H](Cl)C[C@H](Br)C"),
+                        .groups = groups,
+                        .group_count = 2};
+    const bs_record *again;
+    bs_text text;
+    bs_file *file;
+
+    bs_text_init(&text, &f->cx);
+    assert_int_equal(bs_sdf_write(&text, &record, BS_MOLFILE_V2000, NULL), BS_EVALUE);
+    assert_string_equal(f->cx.error.message,
+                        "V2000 cannot hold relative and racemic centres; V3000 can");
+    check_ok(f, bs_sdf_write(&text, &record, BS_MOLFILE_AUTO, NULL));
+    file = open_text(f, SDF, text.data, text.length);
+    bs_text_free(&text);
+    again = next(f, file);
+    assert_int_equal(again->group_count, 2);
+    for (int i = 0; i < 2; i++) {
+        assert_int_equal(again->groups[i].kind, groups[i].kind);
+        assert_int_equal(again->groups[i].number, groups[i].number);
+        assert_int_equal(again->groups[i].atom_count, groups[i].atom_count);
+        assert_memory_equal(again->groups[i].atoms, groups[i].atoms,
+                            (size_t)groups[i].atom_count * sizeof(int));
+    }
+    bs_file_close(file);
+}
+
 /* ---- SMILES -------------------------------------------------------------------------------- */
 
 static void smiles__with_names_comments_and_a_heading(void **state)
@@ -356,6 +397,7 @@ int main(void)
         check_case(sdf__stop_flag_ends_the_reading),
         check_case(sdf__gives_everything_back_when_memory_runs_out),
         check_case(sdf__written_records_come_back),
+        check_case(sdf__written_stereo_groups_come_back),
         check_case(smiles__with_names_comments_and_a_heading),
         check_case(smiles__bad_line_is_reported_and_passed_over),
         check_case(file__kind_follows_the_name),

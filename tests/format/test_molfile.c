@@ -262,14 +262,15 @@ static void v2000__aromatic_bonds_get_their_orders(void **state)
 {
     fixture *f = *state;
 
-    check_reads(f,
-                "\n\n\n  6  6  0  0  0  0  0  0  0  0999 V2000\n"
-                "    0.0000    1.0000    0.0000 N   0  0\n    0.8660    0.5000    0.0000 C   0  0\n"
-                "    0.8660   -0.5000    0.0000 C   0  0\n    0.0000   -1.0000    0.0000 C   0  0\n"
-                "   -0.8660   -0.5000    0.0000 C   0  0\n   -0.8660    0.5000    0.0000 C   0  0\n"
-                "  1  2  4  0\n  2  3  4  0\n  3  4  4  0\n  4  5  4  0\n  5  6  4  0\n  6  1  4  0\n"
-                "M  END\n",
-                "c1ccncc1");
+    check_reads(
+        f,
+        "\n\n\n  6  6  0  0  0  0  0  0  0  0999 V2000\n"
+        "    0.0000    1.0000    0.0000 N   0  0\n    0.8660    0.5000    0.0000 C   0  0\n"
+        "    0.8660   -0.5000    0.0000 C   0  0\n    0.0000   -1.0000    0.0000 C   0  0\n"
+        "   -0.8660   -0.5000    0.0000 C   0  0\n   -0.8660    0.5000    0.0000 C   0  0\n"
+        "  1  2  4  0\n  2  3  4  0\n  3  4  4  0\n  4  5  4  0\n  5  6  4  0\n  6  1  4  0\n"
+        "M  END\n",
+        "c1ccncc1");
     check_reads(f,
                 "\n\n\n  5  5  0  0  0  0  0  0  0  0999 V2000\n"
                 "    0.0000    1.0000    0.0000 N   0  0  0  2\n"
@@ -301,13 +302,14 @@ static void v3000__coordinate_and_hydrogen_bonds(void **state)
 static void v2000__allene_by_a_wedge(void **state)
 {
     fixture *f = *state;
-    static const char format[] = "\n\n\n  5  4  0  0  0  0  0  0  0  0999 V2000\n"
-                                 "   -1.5000    0.8660    0.0000 F   0  0\n"
-                                 "   -1.0000    0.0000    0.0000 C   0  0\n"
-                                 "    0.0000    0.0000    0.0000 C   0  0\n"
-                                 "    1.0000    0.0000    0.0000 C   0  0\n"
-                                 "    1.5000    0.8660    0.0000 Cl  0  0\n"
-                                 "  1  2  1  0\n  2  3  2  0\n  3  4  2  0\n  4  5  1  %c\nM  END\n";
+    static const char format[] =
+        "\n\n\n  5  4  0  0  0  0  0  0  0  0999 V2000\n"
+        "   -1.5000    0.8660    0.0000 F   0  0\n"
+        "   -1.0000    0.0000    0.0000 C   0  0\n"
+        "    0.0000    0.0000    0.0000 C   0  0\n"
+        "    1.0000    0.0000    0.0000 C   0  0\n"
+        "    1.5000    0.8660    0.0000 Cl  0  0\n"
+        "  1  2  1  0\n  2  3  2  0\n  3  4  2  0\n  4  5  1  %c\nM  END\n";
     char up[1000];
     char down[1000];
 
@@ -327,8 +329,7 @@ static void v2000__files_of_other_programs(void **state)
     fixture *f = *state;
 
     /* CRLF, no version and no M  END, as in old files. */
-    check_reads(f,
-                "water\r\n\r\n\r\n  1  0\r\n    0.0000    0.0000    0.0000 O   0  0\r\n", "O");
+    check_reads(f, "water\r\n\r\n\r\n  1  0\r\n    0.0000    0.0000    0.0000 O   0  0\r\n", "O");
     /* Aliases, group abbreviations, S groups, and lines to skip. */
     check_reads(f,
                 "\n\n\n  1  0  0  0  0  0  0  0  0  0999 V2000\n"
@@ -359,7 +360,8 @@ static void molfile__errors_name_line_and_column(void **state)
         {"\n\n\n  1  x  0  0  0  0  0  0  0  0999 V2000\n", BS_ESYNTAX, 4,
          "line 4, columns 4 to 6: 'x' stands where the number of bonds (0 to 999) was expected"},
         {"\n\n\n  1  0  0  0  0  0  0  0  0  0999 V4000\n", BS_ESYNTAX, 4,
-         "line 4, columns 35 to 39: 'V4000' is no version of the molfile format; V2000 or V3000 was "
+         "line 4, columns 35 to 39: 'V4000' is no version of the molfile format; V2000 or V3000 "
+         "was "
          "expected"},
         {ONE_ATOM("  1  0", "Xx ", "M  END\n"), BS_EVALUE, 5,
          "line 5, columns 32 to 34: 'Xx' is no element; a symbol such as C or Cl was expected"},
@@ -369,7 +371,8 @@ static void molfile__errors_name_line_and_column(void **state)
         {ONE_ATOM("  1  0", "Q  ", "M  END\n"), BS_EVALUE, 5,
          "line 5, columns 32 to 34: 'Q' is a query atom; a molecule has one element at each place"},
         {ONE_ATOM("  2  0", "C  ", "M  END\n"), BS_ESYNTAX, 6,
-         "line 6: an atom line was expected: x, y and z in columns 1 to 30, the symbol in 32 to 34"},
+         "line 6: an atom line was expected: x, y and z in columns 1 to 30, the symbol in 32 to "
+         "34"},
         {ONE_ATOM("  1  1", "C  ", "  1  2  1  0\nM  END\n"), BS_ESYNTAX, 6,
          "line 6, columns 4 to 6: '2' stands where an atom number (1 to 1) was expected"},
         {ONE_ATOM("  1  1", "C  ", "  1  1  1  0\nM  END\n"), BS_EVALUE, 6,
@@ -389,7 +392,8 @@ static void molfile__errors_name_line_and_column(void **state)
          "line 7: the record ends; M  END was expected"},
         {"\n\n\n  1  0  0  0  0  0  0  0  0  0999 V2000\n    0.00e0    1e9999    0.0000 C   0  0\n",
          BS_ESYNTAX, 5,
-         "line 5, columns 11 to 20: '1e9999' stands where a coordinate such as 1.2500 was expected"},
+         "line 5, columns 11 to 20: '1e9999' stands where a coordinate such as 1.2500 was "
+         "expected"},
         {"\n\n\n  2  1  0  0  0  0  0  0  0  0999 V2000\n"
          "    0.0000    0.0000    0.0000 C   0  0\n    1.0000    0.0000    0.0000 C   0  0\n"
          "  1  2  8  0\nM  END\n",
@@ -525,8 +529,9 @@ static void write__property_lines_hold_eight_entries(void **state)
     bs_text out;
 
     bs_text_init(&out, &f->cx);
-    check_ok(f, bs_molfile_write(&out, molecule_read(f, "[K+].[K+].[K+].[K+].[K+].[K+].[K+].[K+].[K+]"
-                                                        ".[13CH4].[*:3].[Na].[CH3]"),
+    check_ok(f, bs_molfile_write(&out,
+                                 molecule_read(f, "[K+].[K+].[K+].[K+].[K+].[K+].[K+].[K+].[K+]"
+                                                  ".[13CH4].[*:3].[Na].[CH3]"),
                                  "two\nlines", BS_MOLFILE_V2000, NULL));
     assert_memory_equal(out.data, "two lines\n", 10);
     assert_non_null(strstr(out.data, "\n 13  0  0  0  0  0  0  0  0  0999 V2000\n"));

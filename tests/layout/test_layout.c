@@ -163,10 +163,9 @@ static void double_bonds__are_drawn_cis_and_trans(void **state)
         int from = i < 2 ? 0 : 3;
 
         assert_int_equal(layout->lost, 0);
-        assert_int_equal(side(layout, from + 1, from + 2, from) *
-                                 side(layout, from + 1, from + 2, from + 3) <
-                             0,
-                         cases[i].trans);
+        assert_int_equal(
+            side(layout, from + 1, from + 2, from) * side(layout, from + 1, from + 2, from + 3) < 0,
+            cases[i].trans);
     }
 }
 
@@ -178,7 +177,7 @@ static void double_bonds__are_undecided_only_where_it_matters(void **state)
         const char *smiles;
         bool undecided;
     } cases[] = {
-        {"CC=CC", true},    {"CC(C)=CC", false}, {"C=CC", false},   {"C1CCCCC=C1", false},
+        {"CC=CC", true},       {"CC(C)=CC", false}, {"C=CC", false},    {"C1CCCCC=C1", false},
         {"C1CCCCCC=C1", true}, {"C/C=C/C", false},  {"CC=C=CC", false}, {"CC=NO", true},
         {"CC=C=C=CC", true},   {"CC=N", false},
     };
@@ -302,6 +301,59 @@ static void layout__large_molecules_get_a_plain_drawing(void **state)
     bs_text_free(&text);
 }
 
+/* Adds a ring of carbon atoms, on the bond `edge` of the one before; `edge` becomes a bond of it.
+ */
+static void add_ring(fixture *f, bs_draft *draft, int size, uint32_t edge[2], bool fused)
+{
+    bs_draft_atom carbon = {.element = 6, .hydrogens = BS_DRAFT_IMPLIED};
+    uint32_t first = 0;
+    uint32_t last = 0;
+    uint32_t middle[2] = {0, 0};
+
+    for (int i = 0; i < size; i++) {
+        uint32_t atom = fused && i == 0 ? edge[0] : fused && i == size - 1 ? edge[1] : 0;
+
+        if (!fused || (i > 0 && i < size - 1))
+            check_ok(f, bs_draft_add_atom(draft, carbon, &atom));
+        if (i > 0)
+            check_ok(f, bs_draft_add_bond(draft, last, atom, 1, NULL));
+        if (i == 0)
+            first = atom;
+        if (i == size / 2 || i == size / 2 + 1)
+            middle[i - size / 2] = atom;
+        last = atom;
+    }
+    if (!fused)
+        check_ok(f, bs_draft_add_bond(draft, last, first, 1, NULL));
+    memcpy(edge, middle, sizeof middle);
+}
+
+/* Large rings that share bonds, a huge ring, a crowded tree: each would keep coordgen for minutes.
+ */
+static void layout__of_difficult_molecules_takes_seconds(void **state)
+{
+    fixture *f = *state;
+    static const int rings[][2] = {{1, 48}, {5, 24}, {10, 10}, {1, 150}};
+    bs_mol *mol;
+    bs_layout *layout;
+
+    for (size_t i = 0; i < sizeof rings / sizeof *rings; i++) {
+        bs_draft draft;
+        uint32_t edge[2] = {0, 0};
+
+        bs_draft_init(&draft, &f->cx, &f->home);
+        for (int r = 0; r < rings[i][0]; r++)
+            add_ring(f, &draft, rings[i][1], edge, r > 0);
+        check_ok(f, bs_draft_finish(&draft, &f->home, NULL, &mol));
+        check_ok(f, bs_layout_make(&f->cx, &f->home, mol, &layout));
+    }
+    draw(f,
+         "CC(C)(C)C(C(C)(C)C)(C(C)(C)C)C(C(C(C)(C)C)(C(C)(C)C)C(C)(C)C)(C(C(C)(C)C)(C(C)(C)C)C(C)("
+         "C)C)"
+         "C(C(C)(C)C)(C(C)(C)C)C(C)(C)C",
+         &mol);
+}
+
 static void layout__gives_everything_back_when_memory_runs_out(void **state)
 {
     fixture *f = *state;
@@ -341,6 +393,7 @@ int main(void)
         check_case(layout__of_nothing_is_empty),
         check_case(layout__is_the_same_each_time),
         check_case(layout__large_molecules_get_a_plain_drawing),
+        check_case(layout__of_difficult_molecules_takes_seconds),
         check_case(layout__gives_everything_back_when_memory_runs_out),
     };
 
