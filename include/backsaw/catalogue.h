@@ -38,7 +38,8 @@ typedef struct bs_import_report {
  * that names its columns (smiles; code, name, price_per_gram[_eur], pack_g or container_g,
  * lead_days, all but smiles optional, in any order and case, others ignored), each also with .gz.
  * In a .csv fields may be quoted as in RFC 4180, and semicolons or tabs may stand for the commas;
- * a .tsv knows no quotes. The file is written beside `output` and renamed into place, so a failure
+ * a .tsv knows no quotes. An .sdf has the structure in place of the smiles column and data fields
+ * in place of the others. The file is written beside `output` and renamed into place, so a failure
  * leaves an older one whole; a file that is there and is no catalogue is not overwritten.
  *
  *   A line that is no use is counted in the report and left out: its SMILES cannot be read or

@@ -15,8 +15,9 @@
 #include <sys/stat.h>
 #include <unistd.h>
 
-/* No compound that is sold needs a longer SMILES. */
+/* No compound that is sold is larger. */
 #define SMILES_BYTES ((size_t)16 * 1024)
+#define MOL_ATOMS 10000
 
 /* ---- One row --------------------------------------------------------------------------- */
 
@@ -66,20 +67,18 @@ static bs_status copy_clean(bs_ctx *cx, bs_arena *home, bs_slice slice, const ch
     return BS_OK;
 }
 
-/*
- * Fills an offer from a row, in scratch. A row that is no use gives BS_EVALUE or BS_ESYNTAX; other
- * errors end the import.
- */
-static bs_status read_offer(bs_ctx *cx, const bs_row *row, bs_offer *out)
+/* The molecule of a row, from its SMILES in scratch where the list has none. */
+static bs_status read_mol(bs_ctx *cx, const bs_row *row, const bs_mol **out)
 {
     bs_mol *mol;
-    char *smiles;
-    double mass;
     size_t used;
     bs_status st;
 
     if (row->fault)
         return bs_fail(cx, BS_EVALUE, "%s", row->fault);
+    *out = row->mol;
+    if (row->mol)
+        return BS_OK;
     if (row->smiles.length > SMILES_BYTES)
         return bs_fail(cx, BS_ELIMIT, "a SMILES of %zu bytes; at most %zu are read",
                        row->smiles.length, SMILES_BYTES);
@@ -88,8 +87,28 @@ static bs_status read_offer(bs_ctx *cx, const bs_row *row, bs_offer *out)
         return st;
     if (used < row->smiles.length)
         return bs_fail_at(cx, BS_ESYNTAX, used, "text behind the SMILES");
+    *out = mol;
+    return BS_OK;
+}
+
+/*
+ * Fills an offer from a row, in scratch. A row that is no use gives BS_EVALUE, BS_ESYNTAX or
+ * BS_ELIMIT; other errors end the import.
+ */
+static bs_status read_offer(bs_ctx *cx, const bs_row *row, bs_offer *out)
+{
+    const bs_mol *mol;
+    char *smiles;
+    double mass;
+    bs_status st = read_mol(cx, row, &mol);
+
+    if (st != BS_OK)
+        return st;
     if (bs_mol_atom_count(mol) == 0)
-        return bs_fail(cx, BS_EVALUE, "no SMILES");
+        return bs_fail(cx, BS_EVALUE, "no structure");
+    if (bs_mol_atom_count(mol) > MOL_ATOMS)
+        return bs_fail(cx, BS_ELIMIT, "a structure of %d atoms; at most %d are read",
+                       bs_mol_atom_count(mol), MOL_ATOMS);
     /* What cannot be weighed has no price per mole; this refuses unknown atoms too. */
     if ((st = bs_mol_mass(cx, mol, &mass)) != BS_OK ||
         (st = bs_smiles_canonical(cx, &cx->scratch, mol, 0, &smiles)) != BS_OK)

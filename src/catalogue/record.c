@@ -155,7 +155,7 @@ static bs_status take(bs_records *r, int byte)
 static void end_field(bs_records *r, scan *s)
 {
     if (r->field_count < BS_RECORD_FIELDS)
-        r->fields[r->field_count] = (bs_field){s->start, r->text.length - s->start};
+        r->fields[r->field_count] = (bs_span){s->start, r->text.length - s->start};
     r->field_count++;
     s->start = r->text.length;
     s->where = AT_START;

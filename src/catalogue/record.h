@@ -21,10 +21,10 @@
 
 #define BS_RECORD_BUFFER ((size_t)64 * 1024)
 
-typedef struct bs_field {
+typedef struct bs_span {
     size_t at; /* in text.data */
     size_t length;
-} bs_field;
+} bs_span;
 
 typedef struct bs_records {
     bs_ctx *cx;
@@ -36,7 +36,7 @@ typedef struct bs_records {
     /* The record that was read last. */
     long line; /* where it begins, 1-based */
     bs_text text;
-    bs_field fields[BS_RECORD_FIELDS];
+    bs_span fields[BS_RECORD_FIELDS];
     int field_count;   /* may exceed BS_RECORD_FIELDS; the fields beyond are not kept */
     const char *fault; /* why the record must be refused, or NULL */
 

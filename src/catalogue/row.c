@@ -2,6 +2,7 @@
 #include "catalogue/row.h"
 
 #include <math.h>
+#include <stdio.h>
 #include <string.h>
 #include <strings.h>
 
@@ -10,13 +11,14 @@
 typedef struct format {
     const char *ending;
     int separator;
-    bool quotes, table;
+    bool quotes, table, sd;
 } format;
 
 static const format formats[] = {
-    {".smi", -1, false, false},
-    {".tsv", '\t', false, true},
-    {".csv", ',', true, true},
+    {".smi", -1, false, false, false},
+    {".tsv", '\t', false, true, false},
+    {".csv", ',', true, true, false},
+    {".sdf", -1, false, false, true},
 };
 
 static bool ends_in(const char *path, size_t length, const char *ending)
@@ -55,20 +57,20 @@ static const struct {
     {"lead_days", BS_COLUMN_LEAD},
 };
 
-static bs_slice field(const bs_records *r, int index)
+static bs_slice trim(const char *text, size_t length)
 {
-    const char *text;
-    size_t length;
-
-    if (index < 0 || index >= r->field_count || index >= BS_RECORD_FIELDS)
-        return (bs_slice){"", 0};
-    text = r->text.data + r->fields[index].at;
-    length = r->fields[index].length;
     while (length > 0 && (*text == ' ' || *text == '\t'))
         text++, length--;
     while (length > 0 && (text[length - 1] == ' ' || text[length - 1] == '\t'))
         length--;
     return (bs_slice){length ? text : "", length};
+}
+
+static bs_slice field(const bs_records *r, int index)
+{
+    if (index < 0 || index >= r->field_count || index >= BS_RECORD_FIELDS)
+        return (bs_slice){"", 0};
+    return trim(r->text.data + r->fields[index].at, r->fields[index].length);
 }
 
 /* Compares a heading with a column's name; case, spaces and hyphens make no difference. */
@@ -134,12 +136,17 @@ bs_status bs_rows__open(bs_ctx *cx, const char *path, bs_rows *out)
     const format *f = find_format(path);
     bs_status st;
 
+    out->file = NULL;
+    bs_arena_init(&out->home, cx->gate);
     if (!f)
         return bs_fail(cx, BS_EFILE,
-                       "'%.200s' is no list: its name must end in .smi, .tsv or .csv, or in one of "
-                       "these and .gz",
+                       "'%.200s' is no list: its name must end in .smi, .tsv, .csv or .sdf, or in "
+                       "one of these and .gz",
                        path);
     out->table = f->table;
+    out->records.cx = cx;
+    if (f->sd)
+        return bs_file_open(cx, path, &(bs_file_options){.kind = BS_FILE_SDF}, &out->file);
     if ((st = bs_records__open(cx, path, f->separator, f->quotes, &out->records)) != BS_OK)
         return st;
     if (f->table && (st = read_header(out)) != BS_OK)
@@ -149,7 +156,11 @@ bs_status bs_rows__open(bs_ctx *cx, const char *path, bs_rows *out)
 
 void bs_rows__close(bs_rows *rows)
 {
-    bs_records__close(&rows->records);
+    if (rows->file)
+        bs_file_close(rows->file);
+    else
+        bs_records__close(&rows->records);
+    bs_arena_free(&rows->home);
 }
 
 /* ---- Numbers --------------------------------------------------------------------------- */
@@ -215,14 +226,13 @@ bool bs_row__number(const char *text, size_t length, bool comma, double *out)
 
 /* ---- Rows ------------------------------------------------------------------------------ */
 
-static double number(bs_rows *rows, bs_row *row, bs_column column, const char *fault)
+static double number(bs_slice s, bool comma, bs_row *row, const char *fault)
 {
-    bs_slice s = field(&rows->records, rows->place[column]);
     double value = -1;
 
     if (s.length == 0 || (s.length == 1 && *s.text == '-'))
         return -1;
-    if (!bs_row__number(s.text, s.length, rows->records.separator != ',', &value)) {
+    if (!bs_row__number(s.text, s.length, comma, &value)) {
         if (!row->fault)
             row->fault = fault;
         return -1;
@@ -230,23 +240,75 @@ static double number(bs_rows *rows, bs_row *row, bs_column column, const char *f
     return value;
 }
 
+/* Fills a row from the texts of its columns; `comma` allows decimal commas. */
+static void fill(const bs_slice text[BS_COLUMN_COUNT], bool comma, bs_row *row)
+{
+    row->smiles = text[BS_COLUMN_SMILES];
+    row->code = text[BS_COLUMN_CODE];
+    row->name = text[BS_COLUMN_NAME];
+    row->price_per_gram = number(text[BS_COLUMN_PRICE], comma, row,
+                                 "the price per gram is no number of 0 or more");
+    row->container_g = number(text[BS_COLUMN_CONTAINER], comma, row,
+                              "the pack size in g is no number of 0 or more");
+    row->lead_days = number(text[BS_COLUMN_LEAD], comma, row,
+                            "the lead time in days is no number of 0 or more");
+}
+
 static void fill_from_table(bs_rows *rows, bs_row *row)
 {
     const bs_records *r = &rows->records;
+    bs_slice text[BS_COLUMN_COUNT];
 
     for (int i = rows->width; i < r->field_count && !row->fault; i++) {
         if (i >= BS_RECORD_FIELDS || field(r, i).length > 0)
             row->fault = "more fields than the header line has";
     }
-    row->smiles = field(r, rows->place[BS_COLUMN_SMILES]);
-    row->code = field(r, rows->place[BS_COLUMN_CODE]);
-    row->name = field(r, rows->place[BS_COLUMN_NAME]);
-    row->price_per_gram =
-        number(rows, row, BS_COLUMN_PRICE, "the price per gram is no number of 0 or more");
-    row->container_g =
-        number(rows, row, BS_COLUMN_CONTAINER, "the pack size in g is no number of 0 or more");
-    row->lead_days =
-        number(rows, row, BS_COLUMN_LEAD, "the lead time in days is no number of 0 or more");
+    for (int i = 0; i < BS_COLUMN_COUNT; i++)
+        text[i] = field(r, rows->place[i]);
+    fill(text, r->separator != ',', row);
+}
+
+/* The first data field of each column's name counts; without a name, the record's own does. */
+static void fill_from_record(const bs_record *record, bs_row *row)
+{
+    bs_slice text[BS_COLUMN_COUNT];
+
+    for (int i = 0; i < BS_COLUMN_COUNT; i++)
+        text[i] = (bs_slice){"", 0};
+    for (int i = 0; i < record->field_count; i++) {
+        const bs_field *f = &record->fields[i];
+
+        for (size_t k = 0; k < sizeof columns / sizeof *columns; k++) {
+            bs_slice *place = &text[columns[k].column];
+
+            if (place->length == 0 && is_column(trim(f->name, f->name_length), columns[k].name))
+                *place = trim(f->value, f->value_length);
+        }
+    }
+    if (text[BS_COLUMN_NAME].length == 0)
+        text[BS_COLUMN_NAME] = (bs_slice){record->name, record->name_length};
+    fill(text, true, row);
+    row->mol = record->mol;
+}
+
+/* Reads a record of an SD file; one that cannot be read is a fault if there is a way on. */
+static bs_status next_record(bs_rows *rows, bs_row *row, bool *more)
+{
+    bs_ctx *cx = rows->records.cx;
+    bs_record *record = NULL;
+    bs_status st;
+
+    bs_arena_free(&rows->home);
+    st = bs_file_next(rows->file, &rows->home, &record);
+    *more = st != BS_OK || record;
+    row->line = bs_file_record_line(rows->file);
+    if (st == BS_OK && record)
+        fill_from_record(record, row);
+    if (st == BS_OK || st == BS_ENOMEM || st == BS_ESTOPPED || !bs_file_can_go_on(rows->file))
+        return st;
+    snprintf(rows->fault, sizeof rows->fault, "%s", cx->error.message);
+    row->fault = rows->fault;
+    return BS_OK;
 }
 
 static void fill_from_line(bs_rows *rows, bs_row *row)
@@ -264,7 +326,7 @@ static void fill_from_line(bs_rows *rows, bs_row *row)
 
 bs_status bs_rows__next(bs_rows *rows, bs_row *row, bool *more)
 {
-    bs_status st = bs_records__next(&rows->records, more);
+    bs_status st;
 
     *row = (bs_row){.smiles = {"", 0},
                     .code = {"", 0},
@@ -272,6 +334,9 @@ bs_status bs_rows__next(bs_rows *rows, bs_row *row, bool *more)
                     .price_per_gram = -1,
                     .container_g = -1,
                     .lead_days = -1};
+    if (rows->file)
+        return next_record(rows, row, more);
+    st = bs_records__next(&rows->records, more);
     if (st != BS_OK || !*more)
         return st;
     row->line = rows->records.line;

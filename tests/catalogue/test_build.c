@@ -85,6 +85,42 @@ static void build__every_format(void **state)
     check_format(d, "a.csv.gz", csv, true);
 }
 
+/* Ethanol as a molfile writes it: three atoms, two bonds. */
+#define ETHANOL                                                                                    \
+    "\n\n\n  3  2  0  0  0  0            999 V2000\n"                                               \
+    "    0.0000    0.0000    0.0000 C   0  0\n"                                                    \
+    "    1.2990    0.7500    0.0000 C   0  0\n"                                                    \
+    "    2.5981    0.0000    0.0000 O   0  0\n"                                                    \
+    "  1  2  1  0\n  2  3  1  0\nM  END\n"
+
+static void build__sd_file_with_data_fields(void **state)
+{
+    static const char text[] = "title" ETHANOL
+                               ">  <Code>\nE-1\n\n> <name>\nethanol, absolute\n\n"
+                               ">  <price_per_gram>\n0.02\n\n> <PACK_G>\n1000\n\n"
+                               "> <lead days>\n3\n\n$$$$\n"
+                               "broken\n\n\nnot a count line\nM  END\n$$$$\n"
+                               "from the title" ETHANOL "> <price_per_gram>\n0,5\n\n$$$$\n"
+                               "dear" ETHANOL "> <price_per_gram>\nask\n\n$$$$\n";
+    folder *d = *state;
+    bs_import_report report;
+    bs_catalogue *catalogue = build_and_open(d, "a.sdf.gz", text, &report);
+    bs_offers offers = find(d, catalogue, "OCC");
+
+    assert_int_equal(report.lines, 4);
+    assert_int_equal(report.refused, 2);
+    assert_int_equal(offers.count, 2);
+    assert_string_equal(offers.items[0].code, "E-1");
+    assert_string_equal(offers.items[0].name, "ethanol, absolute");
+    assert_true(offers.items[0].price_per_gram == 0.02);
+    assert_true(offers.items[0].container_g == 1000);
+    assert_true(offers.items[0].lead_days == 3);
+    assert_string_equal(offers.items[1].name, "from the title");
+    assert_true(offers.items[1].price_per_gram == 0.5);
+    assert_non_null(strstr(report.first_refused, "a.sdf.gz', line "));
+    bs_catalogue_close(catalogue);
+}
+
 static void build__several_lists_into_one(void **state)
 {
     folder *d = *state;
@@ -374,6 +410,7 @@ int main(void)
 {
     const struct CMUnitTest tests[] = {
         folder_case(build__every_format),
+        folder_case(build__sd_file_with_data_fields),
         folder_case(build__several_lists_into_one),
         folder_case(build__refused_lines_are_counted),
         folder_case(build__hostile_lines_are_refused),

@@ -143,7 +143,7 @@ static void open__other_names_are_refused(void **state)
     first_row r;
 
     assert_int_equal(read_first(d, "l.xlsx", "C", &r), BS_EFILE);
-    assert_non_null(strstr(d->f->cx.error.message, "must end in .smi, .tsv or .csv"));
+    assert_non_null(strstr(d->f->cx.error.message, "must end in .smi, .tsv, .csv or .sdf"));
     assert_int_equal(read_first(d, "smi", "C", &r), BS_EFILE);
 }
 
