@@ -42,6 +42,16 @@ static inline int fixture_teardown(void **state)
 #define check_case(function)                                                                       \
     cmocka_unit_test_setup_teardown(function, fixture_setup, fixture_teardown)
 
+/*
+ * Asserts that at least `least` requests for memory were failed in turn. Only where the arenas pass
+ * each request on to the gate (the sanitizer builds); elsewhere they take a chunk, or none.
+ */
+#ifdef BS_ARENA_DEBUG
+#define check_requests(count, least) assert_true((count) >= (least))
+#else
+#define check_requests(count, least) ((void)(count))
+#endif
+
 /* Fails with the error message if a call of the library did. */
 #define check_ok(f, call)                                                                          \
     do {                                                                                           \
