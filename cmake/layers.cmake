@@ -21,6 +21,10 @@ function(backsaw_flags target)
     if(BACKSAW_FUZZ)
         target_compile_options(${target} PRIVATE -fsanitize=fuzzer-no-link)
     endif()
+    # The tests and the installed archive link without a linker plugin.
+    if(CMAKE_INTERPROCEDURAL_OPTIMIZATION AND CMAKE_C_COMPILER_ID STREQUAL "GNU")
+        target_compile_options(${target} PRIVATE -ffat-lto-objects)
+    endif()
     if(BACKSAW_SANITIZE)
         # The debug arenas pass every request to malloc, so that overruns are seen.
         target_compile_definitions(${target} PRIVATE BS_ARENA_DEBUG=1)

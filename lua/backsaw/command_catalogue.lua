@@ -4,7 +4,7 @@ local core = ...
 local usage = [[
 usage: backsaw catalogue build IN... -o OUT
 
-Builds a catalogue from lists of compounds: .smi (SMILES, blank, name), .tsv or .csv with a header
+Builds a catalogue from lists of compounds: .smi (SMILES, blank, name), .sdf, .tsv or .csv with a header
 line that names its columns (smiles; optional are code, name, price_per_gram, pack_g, lead_days),
 each also with .gz. A line whose structure cannot be read is counted and left out.
 Exit status: 0 done, 1 failed, 2 wrong usage.]]
