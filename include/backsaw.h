@@ -9,6 +9,7 @@
 #include "backsaw/format.h"
 #include "backsaw/file.h"
 #include "backsaw/match.h"
+#include "backsaw/polarity.h"
 #include "backsaw/rule.h"
 #include "backsaw/catalogue.h"
 #include "backsaw/route.h"

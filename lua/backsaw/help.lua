@@ -12,6 +12,7 @@ m:complexity()                       Bertz's index: the larger, the more involve
 m:has(p) m:count(p) m:find(p)        p is a pattern or SMARTS; find gives lists of atom numbers
 m:atoms() m:bonds() m:rings() m:fragments()
 a == b                               the same compound, however it was written
+m:polarity(a, b)                     a and d labels of a bond, or how two heteroatoms stand
 mol.read "list.sdf"                  the molecules of a file as a list: .smi .mol .sdf, also .gz
 for m in mol.each "list.sdf" do      one after the other, for files of any length
 m.name  m.fields["CAS"]              what the file says of it

@@ -70,12 +70,18 @@ function methods.uses(step, reagent)
     return false
 end
 
--- "A + B -> P  (transform)"
+-- "a1 + d2", and whether one of them is against nature
+local function labels(polarity)
+    local text = "; " .. polarity.labels[1] .. " + " .. polarity.labels[2]
+    return polarity.umpolung[1] and text .. ", umpolung" or text
+end
+
+-- "A + B -> P  (transform; labels of acceptor and donor)"
 function core.step_type.__tostring(step)
     local text = {}
     for i, precursor in ipairs(step.precursors) do text[i] = tostring(precursor) end
-    return string.format("%s -> %s  (%s)", table.concat(text, " + "), tostring(step.product),
-        step.transform or "known")
+    return string.format("%s -> %s  (%s%s)", table.concat(text, " + "), tostring(step.product),
+        step.transform or "known", step.polarity and labels(step.polarity) or "")
 end
 
 return methods

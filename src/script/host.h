@@ -159,6 +159,7 @@ void bsl_printable(const char *text, size_t length, char *out, size_t size);
 void bsl_open_mol(lua_State *L);
 void bsl_open_pattern(lua_State *L);
 void bsl_open_rewrite(lua_State *L);
+void bsl_open_polarity(lua_State *L); /* after bsl_open_mol() */
 void bsl_open_define(lua_State *L);
 void bsl_open_transform(lua_State *L);
 void bsl_open_catalogue(lua_State *L);
@@ -214,6 +215,9 @@ const int *bsl_symmetry(lua_State *L, const bs_mol *mol, bs_mark mark);
  * of bsl_symmetry().
  */
 void bsl_push_atom(lua_State *L, const bs_mol *mol, const int *classes, int atom);
+
+/* Pushes the table of the two ends of a bond: atoms, labels, donor, acceptor, umpolung. */
+void bsl_push_poles(lua_State *L, const bs_pole *ends);
 
 /* Pushes a step's table for a step of the rule book; the product's value is at `product`. */
 void bsl_push_step(lua_State *L, int product, const bs_step *step);

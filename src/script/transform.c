@@ -155,9 +155,38 @@ static void set_definition(lua_State *L, const bs_transform_def *def)
     lua_setfield(L, -2, "reagents");
 }
 
+/* The atom of a site with this map number, or -1. */
+static int mapped_atom(const bs_site *site, int map)
+{
+    for (int i = 0; i < site->count; i++) {
+        if (site->maps[i] == map)
+            return (int)site->atoms[i];
+    }
+    return -1;
+}
+
+/* Sets the field polarity of a disconnection by synthons. */
+static void set_polarity(lua_State *L, const bs_mol *mol, const bs_transform_def *def,
+                         const bs_site *site)
+{
+    bs_ctx *cx = bsl_host_of(L)->cx;
+    int acceptor = mapped_atom(site, def->acceptor_map);
+    int donor = mapped_atom(site, def->donor_map);
+    bs_pole ends[2];
+
+    if (!def->cut[0] || acceptor < 0 || donor < 0)
+        return;
+    if (bs_polarity_of_end(cx, mol, acceptor, donor, true, &ends[0]) != BS_OK ||
+        bs_polarity_of_end(cx, mol, donor, acceptor, false, &ends[1]) != BS_OK)
+        bsl_raise(L, NULL, 0);
+    bsl_push_poles(L, ends);
+    lua_setfield(L, -2, "polarity");
+}
+
 void bsl_push_step(lua_State *L, int product, const bs_step *step)
 {
-    bs_session *session = bsl_host_of(L)->session;
+    const bs_transform_def *def =
+        bs_rules_transform(bsl_host_of(L)->session->rules, step->transform);
 
     luaL_checkstack(L, 8, "step");
     product = lua_absindex(L, product);
@@ -180,7 +209,8 @@ void bsl_push_step(lua_State *L, int product, const bs_step *step)
         lua_rawseti(L, -2, i + 1);
     }
     lua_setfield(L, -2, "rivals");
-    set_definition(L, bs_rules_transform(session->rules, step->transform));
+    set_definition(L, def);
+    set_polarity(L, bsl_checkmol(L, product), def, &step->site);
     luaL_setmetatable(L, STEP_TYPE);
 }
 
@@ -269,23 +299,23 @@ static int core_forth(lua_State *L)
 void bsl_open_transform(lua_State *L)
 {
     static const luaL_Reg methods[] = {
-        { "back", transform_back },
-        { "forth", transform_forth },
-        { NULL, NULL },
+        {"back", transform_back},
+        {"forth", transform_forth},
+        {NULL, NULL},
     };
     static const luaL_Reg meta[] = {
-        { "__tostring", transform_tostring },
-        { "__eq", transform_eq },
-        { NULL, NULL },
+        {"__tostring", transform_tostring},
+        {"__eq", transform_eq},
+        {NULL, NULL},
     };
     static const luaL_Reg functions[] = {
-        { "find_transform", core_find_transform },
-        { "nth_transform", core_nth_transform },
-        { "transform_index", core_transform_index },
-        { "describe", core_describe },
-        { "back", core_back },
-        { "forth", core_forth },
-        { NULL, NULL },
+        {"find_transform", core_find_transform},
+        {"nth_transform", core_nth_transform},
+        {"transform_index", core_transform_index},
+        {"describe", core_describe},
+        {"back", core_back},
+        {"forth", core_forth},
+        {NULL, NULL},
     };
 
     bsl_new_type(L, TRANSFORM_TYPE, methods, meta);
