@@ -262,3 +262,32 @@ disconnection "formamide-formation" {
     example { "O=CNc1cccc(Cl)c1C", from = { "Nc1cccc(Cl)c1C", "OC=O" } },
     refuse { "CN(C)C(C)=O" }, -- an acetamide
 }
+
+disconnection "meldrum-acylation-keto" {
+    about = "Acylation of Meldrum's acid; written as the ketone",
+    target = "[#6:1][CX3:2](=[OX1:3])[CX4;H1:4]1C(=O)OC([CH3])([CH3])OC1=O",
+    from = "[#6:1][C:2](=[O:3])Cl.[C:4]1C(=O)OC(C)(C)OC1=O",
+    conditions = "acylation",
+    also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol" },
+    recipe = "pyridine (2 equiv.), CH2Cl2, 0 °C",
+    yield = { 80, 95 },
+    cautions = { "pyridine" },
+    source = "Oikawa, Sugano, Yonemitsu, J. Org. Chem. 1978, 43, 2087; from memory",
+    example { "CCCC(=O)C1C(=O)OC(C)(C)OC1=O", from = { "CCCC(=O)Cl", "CC1(C)OC(=O)CC(=O)O1" } },
+    example { "O=C(Cc1ccccc1)C1C(=O)OC(C)(C)OC1=O", from = { "O=C(Cl)Cc1ccccc1", "CC1(C)OC(=O)CC(=O)O1" } },
+    refuse { "CC(=O)C1C(=O)CCCC1=O" }, -- a carbocycle
+}
+
+disconnection "meldrum-alcoholysis-keto" {
+    about = "β-Keto ester by alcoholysis of an acyl Meldrum's acid written as the ketone; loses CO2 and acetone",
+    target = "[#6:1][CX3:2](=[OX1:3])[CX4;H2:4][CX3:5](=[OX1:6])[OX2:7][CX4:8]",
+    from = "[#6:1][C:2](=[O:3])[C:4]1[C:5](=[O:6])OC(C)(C)OC1=O.[O:7][C:8]",
+    conditions = "acid-hot-dry",
+    also_attacks = { "primary amine", "secondary amine", "other alcohol" },
+    recipe = "the alcohol as solvent, reflux 2 h; or 1-3 equiv. in toluene, reflux",
+    yield = { 70, 92 },
+    source = "Oikawa, Sugano, Yonemitsu, J. Org. Chem. 1978, 43, 2087; from memory",
+    example { "CCCC(=O)CC(=O)OCC", from = { "CCCC(=O)C1C(=O)OC(C)(C)OC1=O", "CCO" } },
+    example { "COC(=O)CC(=O)Cc1ccccc1", from = { "O=C(Cc1ccccc1)C1C(=O)OC(C)(C)OC1=O", "CO" } },
+    refuse { "COC(=O)C(C)C(C)=O" }, -- substituted between the carbonyl groups
+}

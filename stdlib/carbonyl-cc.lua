@@ -477,3 +477,91 @@ interconversion "decarboxylation-malonic" {
     example { "O=C(O)C1CCC1", from = { "O=C(O)C1(C(=O)O)CCC1" } },
     refuse { "CC(C)(C)C(=O)O" }, -- no H left where the second carboxyl group stood
 }
+
+-- A benzoin splits into two aldehydes; only equal halves come without three others.
+local benzoin_halves = rewrite "[c:1][C:2]([O:3])[C:4](=[O:5])[c:6]>>[c:1][C:2]=[O:3].[C:4](=[O:5])[c:6]"
+
+disconnection "benzoin" {
+    about = "Benzoin condensation; two equal aromatic aldehydes, one of them with its polarity inverted by cyanide",
+    target = "[c:1]-[CX4;H1;!R:2]([OX2H1:3])-!@[CX3;!R:4](=[OX1:5])-[c:6]",
+    from = "[c:1][C:2]=[O:3].[C:4](=[O:5])[c:6]",
+    when = function(m)
+        for _, halves in ipairs(benzoin_halves:apply(m.molecule)) do
+            if halves[1] == halves[2] then return true end
+        end
+        return false
+    end,
+    conditions = "cyanide",
+    also_attacks = { "other aldehyde", "alkyl halide", "acyl halide" },
+    recipe = "NaCN (cat.), aq. EtOH, reflux; also: thiamine or a thiazolium salt, Et3N",
+    yield = { 65, 92 },
+    cautions = { "sodium cyanide" },
+    source = "Adams, Marvel, Org. Synth. Coll. Vol. 1, 94; from memory",
+    example { "O=C(c1ccco1)C(O)c1ccco1", from = { "O=Cc1ccco1", "O=Cc1ccco1" } },
+    example { "O=C(c1ccccc1)C(O)c1ccccc1", from = { "O=Cc1ccccc1", "O=Cc1ccccc1" } },
+    refuse { "O=C(c1ccccc1)C(O)c1ccco1" }, -- unequal halves would give four benzoins
+}
+
+disconnection "knoevenagel-ketone" {
+    about = "Knoevenagel condensation of a ketone with a cyano ester, malononitrile or the like (Cope); mixture of E and Z",
+    target = "[#6;$(c),$([CX4]):1][CX3;H0:2](-[#6;$(c),$([CX4]):6])=!@[CX3:3](-[#6;$([CX3](=O)[OX2][#6]),$([CX3](=O)[NX3]),$([CX2]#N):4])[CX2:5]#[NX1:7]",
+    cut = { 2, 3 },
+    acceptor = { 2, "alkylidene" },
+    donor = { 3, "stabilised-carbanion" },
+    conditions = "acid-hot-dry",
+    also_attacks = { "aldehyde", "other ketone", "acyl halide", "primary amine" },
+    recipe = "NH4OAc, AcOH, toluene, water removed; also: TiCl4, pyridine, 0 °C",
+    yield = { 60, 85 },
+    source = "Cope, Hofmann, Wyckoff, Hardenbergh, J. Am. Chem. Soc. 1941, 63, 3452; from memory",
+    example { "CCOC(=O)C(C#N)=C1CCN(C(=O)OC(C)(C)C)CC1",
+        from = { "O=C1CCN(C(=O)OC(C)(C)C)CC1", "CCOC(=O)CC#N" } },
+    example { "CCOC(=O)C(C#N)=C(C)c1ccccc1", from = { "CC(=O)c1ccccc1", "CCOC(=O)CC#N" } },
+    refuse { "COC(=O)C(C(=O)OC)=C(C)C" }, -- malonates need a stronger Lewis acid
+}
+
+disconnection "arylacrylonitrile-condensation" {
+    about = "Condensation of an aromatic aldehyde with an arylacetonitrile or a 3-alkoxypropionitrile",
+    target = "[c:1][CX3;H1;!R:2]=!@[CX3:3](-[$(c),$([CX4;H2][OX2;H0]):4])[CX2:5]#[NX1:6]",
+    cut = { 2, 3 },
+    acceptor = { 2, "alkylidene" },
+    donor = { 3, "stabilised-carbanion" },
+    conditions = "alkoxide",
+    also_attacks = { "other aldehyde", "enolisable ketone", "alkyl halide", "acyl halide" },
+    recipe = "NaOMe, MeOH, or KOH, EtOH, rt to reflux",
+    yield = { 60, 90 },
+    cautions = { "sodium methoxide" },
+    source = "Stenbuck, Baltzly, Hood, J. Org. Chem. 1963, 28, 1983; from memory",
+    example { "N#CC(=Cc1ccccc1)c1ccccc1", from = { "O=Cc1ccccc1", "N#CCc1ccccc1" } },
+    example { "COCC(C#N)=Cc1cc(OC)c(OC)c(OC)c1", from = { "O=Cc1cc(OC)c(OC)c(OC)c1", "COCCC#N" } },
+    refuse { "N#CC=Cc1ccccc1" }, -- acetonitrile is too weak an acid for these bases
+}
+
+disconnection "conjugate-cyanide-addition" {
+    about = "Conjugate addition of cyanide to an alkylidene malonate, cyanoacetate or to an enone",
+    target = "[CX4;!$(C[OX2H]):1](-!@[CX2:2]#[NX1:3])[CX4;H1,H2;$(C([CX3]=O)[$([CX3]=O),$(C#N)]),$(C[CX3](=O)[#6]):4]",
+    from = "[C:1]=[C:4].[Na+].[C-:2]#[N:3]",
+    conditions = "cyanide",
+    also_attacks = { "aldehyde", "alkyl halide", "acyl halide", "epoxide", "other enone" },
+    recipe = "NaCN or KCN, aq. EtOH, 0 °C to rt; ketones: KCN, NH4Cl, DMF, or Et2AlCN",
+    yield = { 65, 90 },
+    cautions = { "sodium cyanide", "hydrogen cyanide" },
+    source = "Higson, Thorpe, J. Chem. Soc., Trans. 1906, 89, 1455; from memory",
+    example { "CCOC(=O)C(C#N)C(C)(CC)C#N", from = { "CCOC(=O)C(C#N)=C(C)CC", "[Na+].[C-]#N" } },
+    example { "N#CC(CC(=O)c1ccccc1)c1ccccc1", from = { "O=C(C=Cc1ccccc1)c1ccccc1", "[Na+].[C-]#N" } },
+    refuse { "CCOC(=O)CC(C)C#N" }, -- a simple unsaturated ester is too poor an acceptor
+}
+
+interconversion "glycidic-ester-to-aldehyde" {
+    about = "Aldehyde from a glycidic ester by saponification and loss of carbon dioxide (after Darzens)",
+    target = "[#6;!$([#6]=[O,N,S]);!$([#6]#N):1][CX4;H1,H2;!$(C[!#6;!#1]);!$(C([CX3]=O)[CX3]=O):2][CX3;H1:3]=[OX1:4]",
+    from = "[#6:1][C:2]1[O:4][C:3]1C(=O)OCC",
+    conditions = "base-aq-strong",
+    also_attacks = { "other ester", "aldehyde", "acyl halide", "alkyl halide" },
+    recipe = "NaOEt, then water, or NaOH, aq. EtOH; acid, 60-100 °C (CO2 leaves)",
+    yield = { 55, 80 },
+    cautions = { "sodium hydroxide" },
+    source = "Allen, Van Allan, Org. Synth. Coll. Vol. 3, 733 (hydratropaldehyde); from memory",
+    example { "CC(C)Cc1ccc(C(C)C=O)cc1", from = { "CCOC(=O)C1OC1(C)c1ccc(CC(C)C)cc1" } },
+    example { "CC(C=O)c1ccccc1", from = { "CCOC(=O)C1OC1(C)c1ccccc1" } },
+    refuse { "CC(C)(C=O)c1ccccc1" }, -- no hydrogen where the enol has to close
+}

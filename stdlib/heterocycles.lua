@@ -163,3 +163,78 @@ interconversion "fischer-indole-from-hydrazone" {
     example { "COC(=O)Cc1c(C)[nH]c2ccc(OC)cc12", from = { "COC(=O)CCC(C)=NNc1ccc(OC)cc1" } },
     refuse { "c1ccc2[nH]ccc2c1" }, -- the parent indole does not form
 }
+
+disconnection "hantzsch-thiazole-chloride" {
+    about = "Hantzsch thiazole synthesis with an α-chloro ketone or chloroacetaldehyde; S to the carbon that bears Cl",
+    target = "[s;R1:1]1:[c;R1;$(c-[#6,#7]):2]:[nX2:3]:[c;R1:4]:[c;R1:5]:1",
+    from = "[S:1]=[C:2]-[N:3].O=[C:4]-[C:5]Cl",
+    conditions = "amine-heat",
+    also_attacks = { "other alkyl halide", "primary amine", "thiol" },
+    recipe = "water or EtOH, warm, then base; thiourea gives the 2-amine, a thioamide the 2-alkyl compound",
+    yield = { 65, 92 },
+    cautions = { "chloroacetaldehyde" },
+    source = "Joule, Mills, Heterocyclic Chemistry; from memory",
+    example { "Nc1nccs1", from = { "NC(N)=S", "O=CCCl" } },
+    example { "Cc1csc(N)n1", from = { "NC(N)=S", "CC(=O)CCl" } },
+    refuse { "c1ccc2scnc2c1" }, -- a benzothiazole
+}
+
+disconnection "pyrazolone-n-methylation" {
+    about = "Methylation of a pyrazolone at N2; O and C4 compete under basic conditions",
+    target = "[nX3:1]1(-[CX4;H3:2]):[c:3](-[#6:4]):[c:5]:[c:6](=[OX1:7]):[nX3:8]1-[c:9]",
+    from = "[N:1]1=[C:3](-[#6:4])[C:5][C:6](=[O:7])[N:8]1-[c:9].I[C:2]",
+    conditions = "alkylation",
+    also_attacks = { "primary amine", "thiol", "phenol", "free acid" },
+    recipe = "MeI, MeOH, 100 °C (sealed), or Me2SO4, NaOH, 80 °C",
+    yield = { 65, 88 },
+    cautions = { "iodomethane" },
+    source = "Knorr, Ber. Dtsch. Chem. Ges. 1884, 17, 546; from memory",
+    example { "Cc1cc(=O)n(-c2ccccc2)n1C", from = { "CC1=NN(c2ccccc2)C(=O)C1", "CI" } },
+    example { "Cc1c(C(C)C)c(=O)n(-c2ccccc2)n1C", from = { "CC1=NN(c2ccccc2)C(=O)C1C(C)C", "CI" } },
+    refuse { "Cc1cc(=O)[nH]n1C" }, -- no aryl group on N1
+}
+
+disconnection "diaminopyrimidine-from-benzylidene-nitrile" {
+    about = "5-Benzyl-2,4-diaminopyrimidine from guanidine and a 2-alkoxymethyl cinnamonitrile; base moves the double bond first",
+    target = "[n:1]1:[c:2](-[NX3;H2:3]):[n:4]:[cH:5]:[c:6](-[CX4;H2:9]-[c:10]):[c:7]1-[NX3;H2:8]",
+    from = "[NH:1]=[C:2]([N:3])[NH2:4].CO[C:5][C:6](=[C:9]-[c:10])[C:7]#[N:8]",
+    conditions = "alkoxide",
+    also_attacks = { "ester", "alkyl halide", "acyl halide", "aldehyde" },
+    recipe = "guanidine (from its salt and NaOMe), MeOH, reflux",
+    yield = { 60, 85 },
+    cautions = { "sodium methoxide" },
+    source = "Stenbuck, Baltzly, Hood, J. Org. Chem. 1963, 28, 1983; from memory",
+    example { "COc1cc(Cc2cnc(N)nc2N)cc(OC)c1OC", from = { "N=C(N)N", "COCC(C#N)=Cc1cc(OC)c(OC)c(OC)c1" } },
+    example { "Nc1ncc(Cc2ccccc2)c(N)n1", from = { "N=C(N)N", "COCC(C#N)=Cc1ccccc1" } },
+    refuse { "Nc1ncc(-c2ccccc2)c(N)n1" }, -- no CH2 between the rings
+}
+
+disconnection "succinimide-from-diacid" {
+    about = "Five-membered imide from a diacid and ammonia",
+    target = "[NX3;H1;r5:1]1-[CX3:2](=[OX1:3])-[CX4:4]-[CX4:5]-[CX3:6](=[OX1:7])-1",
+    from = "[N:1].O[C:2](=[O:3])[C:4][C:5][C:6](=[O:7])O",
+    conditions = "heat-200",
+    also_attacks = { "ester", "aldehyde", "ketone", "acyl halide" },
+    recipe = "conc. aq. NH3, then 180-200 °C; also: urea melt",
+    yield = { 65, 88 },
+    cautions = { "ammonia" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "CCC1(C)CC(=O)NC1=O", from = { "N", "CCC(C)(CC(=O)O)C(=O)O" } },
+    example { "O=C1CCC(=O)N1", from = { "N", "OC(=O)CCC(=O)O" } },
+    refuse { "O=C1CCCN1" }, -- a lactam: one carbonyl group only
+}
+
+disconnection "inverse-demand-dihydropyran" {
+    about = "2-Alkoxy-3,4-dihydro-2H-pyran from an enal and a vinyl ether (hetero Diels-Alder reaction with inverse demand)",
+    target = "[OX2:1]1[CX4;H1:2]([OX2:8][CX4:9])[CX4;H2:3][CX4:4][CX3:5]=[CX3;H1:6]1",
+    from = "[O:1]=[C:6][C:5]=[C:4].[C:3]=[C:2][O:8][C:9]",
+    conditions = "heat-200",
+    also_attacks = { "other enal", "conjugated diene", "primary amine", "thiol" },
+    recipe = "neat, 160-190 °C under pressure, hydroquinone; also: ZnCl2 or Eu(fod)3, lower temperature",
+    yield = { 70, 90 },
+    cautions = { "acrolein" },
+    source = "Longley, Emerson, J. Am. Chem. Soc. 1950, 72, 3079; from memory",
+    example { "CCOC1CCC=CO1", from = { "C=CC=O", "C=COCC" } },
+    example { "CCOC1CC(C)C=CO1", from = { "CC=CC=O", "C=COCC" } },
+    refuse { "C1CC=COC1" }, -- no alkoxy group from a vinyl ether
+}

@@ -180,3 +180,59 @@ interconversion "nitrobenzoate-removal" {
         from = { "CC(C)[C@@H]1CC[C@@H](C)C[C@@H]1OC(=O)c1ccc([N+](=O)[O-])cc1" } },
     refuse { "CCO" }, -- a primary alcohol needs no such detour
 }
+
+interconversion "succinic-acid-from-cyano-ester" {
+    about = "Succinic acid from a 2,3-dicyano ester: both nitriles and the ester hydrolyse, one carboxyl group leaves",
+    target = "[OX2H][CX3:1](=[OX1])[CX4;H2:2][CX4:3][CX3:4](=[OX1])[OX2H]",
+    from = "CCO[C:1](=O)[C:2](C#N)[C:3][C:4]#N",
+    conditions = "acid-aq-strong",
+    also_attacks = { "acetal", "Boc carbamate", "tert-butyl ester", "silyl ether", "ester", "nitrile", "amide" },
+    recipe = "conc. HCl, reflux; or 70 % H2SO4, 130 °C",
+    yield = { 65, 88 },
+    cautions = { "hydrochloric acid" },
+    source = "Miller, Long, J. Am. Chem. Soc. 1951, 73, 4895; from memory",
+    example { "CCC(C)(CC(=O)O)C(=O)O", from = { "CCOC(=O)C(C#N)C(C)(CC)C#N" } },
+    example { "OC(=O)CC(C(=O)O)c1ccccc1", from = { "CCOC(=O)C(C#N)C(C#N)c1ccccc1" } },
+    refuse { "OC(=O)CCCC(=O)O" }, -- a glutaric acid
+}
+
+interconversion "acetonedicarboxylic-acid" {
+    about = "β-Keto acid by loss of carbon monoxide from a citric acid (α-hydroxy acid in fuming sulfuric acid)",
+    target = "[OX2H:5][CX3:6](=[O:7])[CX4;H2:1][CX3:2](=[OX1:3])[CX4;H2:4][CX3:8](=[O:9])[OX2H:10]",
+    from = "[O:5][C:6](=[O:7])[C:1][C:2]([O:3])(C(=O)O)[C:4][C:8](=[O:9])[O:10]",
+    conditions = "so3",
+    also_attacks = { "alcohol", "alkene", "arene", "acetal", "primary amine" },
+    recipe = "20 % fuming H2SO4, -5 to 30 °C (carbon monoxide escapes), then ice",
+    yield = { 80, 90 },
+    cautions = { "oleum", "carbon monoxide" },
+    source = "Adams, Chiles, Rassweiler, Org. Synth. Coll. Vol. 1, 10; from memory",
+    example { "OC(=O)CC(=O)CC(=O)O", from = { "OC(=O)CC(O)(CC(=O)O)C(=O)O" } },
+    refuse { "CC(=O)CC(=O)O" }, -- only citric acids, which are stable enough
+}
+
+interconversion "glutaraldehyde-from-alkoxydihydropyran" {
+    about = "1,5-Dialdehyde from a 2-alkoxy-3,4-dihydro-2H-pyran",
+    target = "[OX1:1]=[CX3;H1:2][CX4:3][CX4:4][CX4;H2:5][CX3;H1:6]=[OX1:7]",
+    from = "CC[O:1][C:2]1[C:3][C:4][C:5]=[C:6][O:7]1",
+    conditions = "acid-aq-mild",
+    also_attacks = { "acetal", "silyl ether", "other enol ether" },
+    recipe = "dil. HCl, H2O, rt; used in solution",
+    yield = { 75, 95 },
+    source = "Cope, Dryden, Howell, Org. Synth. Coll. Vol. 4, 816; from memory",
+    example { "O=CCCCC=O", from = { "CCOC1CCC=CO1" } },
+    example { "O=CCC(C)CC=O", from = { "CCOC1CC(C)C=CO1" } },
+    refuse { "O=CCCC=O" }, -- four carbons: from a dimethoxytetrahydrofuran
+}
+
+interconversion "succinaldehyde-from-dimethoxytetrahydrofuran" {
+    about = "1,4-Dialdehyde from a 2,5-dimethoxytetrahydrofuran",
+    target = "[OX1:1]=[CX3;H1:2][CX4:3][CX4:4][CX3;H1:5]=[OX1:6]",
+    from = "C[O:1][C:2]1[C:3][C:4][C:5](OC)[O:6]1",
+    conditions = "acid-aq-mild",
+    also_attacks = { "acetal", "silyl ether", "enol ether" },
+    recipe = "0.1-1 M HCl, rt to 60 °C; used in solution",
+    yield = { 75, 95 },
+    source = "Fakstorp, Raleigh, Schniepp, J. Am. Chem. Soc. 1950, 72, 869; from memory",
+    example { "O=CCCC=O", from = { "COC1CCC(OC)O1" } },
+    refuse { "O=CCCCC=O" }, -- five carbons
+}
