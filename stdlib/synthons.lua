@@ -45,6 +45,20 @@ synthon "acyl ethyl ester" { kind = "acceptor", equivalents = { { attach = "OCC"
 -- Acetyl (a1) as acetic anhydride.
 synthon "acetyl" { kind = "acceptor", equivalents = { { attach = "OC(C)=O", name = "acetic anhydride" } } }
 
+synthon "trifluoroacetyl" {
+    kind = "acceptor",
+    equivalents = { { attach = "OC(=O)C(F)(F)F", name = "trifluoroacetic anhydride" } },
+}
+
+-- a1 as the phenyl ester, or of a carbamate as the phenyl carbamate.
+synthon "acyl phenyl ester" { kind = "acceptor", equivalents = { { attach = "Oc1ccccc1" } } }
+
+-- tert-Butoxycarbonyl as the dicarbonate.
+synthon "tert-butoxycarbonyl" {
+    kind = "acceptor",
+    equivalents = { { attach = "OC(=O)OC(C)(C)C", name = "di-tert-butyl dicarbonate" } },
+}
+
 -- Formyl (a1) as N,N-dimethylformamide.
 synthon "formyl" { kind = "acceptor", equivalents = { { attach = "N(C)C", name = "N,N-dimethylformamide" } } }
 
@@ -119,6 +133,8 @@ synthon "alkene" { kind = "donor", equivalents = { { attach = "[H]" } } }
 
 -- Cyanide (d1).
 synthon "cyanide" { kind = "donor", equivalents = { { attach = "[Na]", ionic = true } } }
+
+synthon "copper cyanide" { kind = "donor", equivalents = { { attach = "[Cu]", name = "copper(I) cyanide" } } }
 
 -- Carbanions (alkyl-d, aryl-d) as metal compounds.
 synthon "organomagnesium" { kind = "donor", equivalents = { { attach = "[Mg]Br", name = "Grignard reagent" } } }
