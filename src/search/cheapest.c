@@ -86,8 +86,7 @@ static bool is_open(const bs_cheapest *work, const bs_graph_way *way)
     return !work->barred[way->step] && (only == BS_GRAPH_NONE || only == way->step);
 }
 
-/* The smallest number above 0 that costs are made of: the measure of what is negligible. */
-static double least_number(const bs_graph *graph)
+double bs_cheapest__unit(const bs_graph *graph)
 {
     double least = INFINITY;
 
@@ -109,7 +108,7 @@ static bs_status start(bs_cheapest *work, const double *leaf)
 
     work->heap.count = 0;
     work->converged = true;
-    work->unit = bs_graph__is_superior(graph, work->mode) ? 0 : least_number(graph);
+    work->unit = bs_graph__is_superior(graph, work->mode) ? 0 : bs_cheapest__unit(graph);
     memset(work->settled, 0, graph->mol_count * sizeof *work->settled);
     if (graph->way_count > 0)
         memcpy(work->missing, work->counts, graph->way_count * sizeof *work->missing);

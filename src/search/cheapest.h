@@ -18,8 +18,8 @@
 typedef struct bs_cheapest {
     const bs_graph *graph;
     bs_cost_mode mode;
-    double *value;    /* by molecule; INFINITY if it cannot be had */
-    uint32_t *choice; /* by molecule: a way, BS_GRAPH_BUY or BS_GRAPH_NONE */
+    double *value;     /* by molecule; INFINITY if it cannot be had */
+    uint32_t *choice;  /* by molecule: a way, BS_GRAPH_BUY or BS_GRAPH_NONE */
     uint32_t *missing; /* by way: precursors that have no value yet */
     uint32_t *counts;  /* by way: its precursors */
     bool *settled;
@@ -27,7 +27,7 @@ typedef struct bs_cheapest {
     bool *barred;   /* by step */
     bool *no_buy;   /* by molecule */
     bs_heap heap;
-    double unit; /* changes of a small part of it do not count */
+    double unit;    /* changes of a small part of it do not count */
     bool converged; /* false if the bound on settling again was hit */
 } bs_cheapest;
 
@@ -44,5 +44,8 @@ void bs_cheapest__free(bs_cheapest *work);
  *   cost    O((ways + uses) log molecules) with a superior cost
  */
 bs_status bs_cheapest__run(bs_cheapest *work, const double *leaf, uint32_t target);
+
+/* The smallest number above 0 that costs are made of, or 1: the measure of what is negligible. */
+double bs_cheapest__unit(const bs_graph *graph);
 
 #endif

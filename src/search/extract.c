@@ -290,7 +290,7 @@ bs_status bs_plan__take_routes(bs_plan_state *plan, bs_arena *home, long tries, 
     plan->kbest_cut = false;
     if (st != BS_OK)
         return st;
-    st = bs_kbest__new(&plan->x.graph, plan->opts->mode, plan->target, 0, &kbest);
+    st = bs_kbest__new(&plan->x.graph, plan->opts->mode, plan->target, NULL, &kbest);
     while (st == BS_OK && *count < plan->pool) {
         bs_kbest_route answer;
         bs_route *route;

@@ -1,15 +1,24 @@
 /* The enumeration of kbest.h: a heap of problems, each solved when it comes to the top. */
 #include "search/kbest.h"
 
-#include "search/cheapest.h"
+#include "search/lazy.h"
+#include "search/part.h"
 
 #include <math.h>
 #include <string.h>
 
-/* By default so many problems are solved that about this many ways and uses are looked at. */
-#define DEFAULT_WORK 1e9
-#define LEAST_SOLVES 1000.0
-#define MOST_SOLVES 1e6
+/* By default the enumeration ends when about so many ways were looked at. */
+#define MOST_WORK 4000000000u
+
+/* Marks the number of a problem in the heap that is not solved. */
+#define UNSOLVED ((uint32_t)1 << 31)
+
+/* Ways of the first ring, and how much larger the next is. */
+#define FIRST_RING 2000
+#define RING_GROWTH 8
+
+/* So many times a problem is put off when another may be cheaper, before it is solved anyway. */
+#define MOST_PUT_OFF 2
 
 /* One decision: how a molecule is had. */
 typedef struct decision {
@@ -29,158 +38,43 @@ typedef struct problem {
     uint32_t first_bar, bar_count;
     uint32_t first_decision, decision_count;
     bool solved;
+    uint8_t put_off;
 } problem;
 
 struct bs_kbest {
     bs_ctx *cx;
-    bs_graph part;     /* what the target can be made from, and nothing else */
-    uint32_t *origin;  /* by way of `part`: the way of the caller's graph */
-    uint32_t target;   /* in `part`; BS_GRAPH_NONE if it cannot be had */
+    bs_part part;
+    bs_ring ring; /* the graph that the problems are about */
+    uint32_t ring_ways;
+    double given; /* routes up to this cost were given from smaller rings */
     bs_cost_mode mode;
-    bs_cheapest work;
+    bs_cheapest work; /* for the ring, as is all that follows */
+    bs_lazy lazy;
+    bool solid; /* the values that the solver starts from are lower bounds */
     problem *problems;
     uint32_t *bars; /* steps or BS_GRAPH_BUY */
     decision *decisions;
-    bs_heap heap; /* of problems */
+    bs_heap heap;   /* of problems */
     uint32_t *seen; /* by molecule: the last walk that met it */
     uint32_t *ways; /* of the route given last */
     uint32_t walk;
     size_t problem_count, bar_count, decision_count;
-    size_t problem_room, bar_room, decision_room, ways_room, origin_room, seen_room;
-    long solves;
+    size_t problem_room, bar_room, decision_room, ways_room, seen_room;
+    long solves;        /* problems that may still be solved; 0 or less: the work counts alone */
+    bool limited;       /* `solves` counts */
+    uint64_t work_left; /* ways */
     bool cut;
 };
-
-/* ---- The part of the graph that matters -------------------------------------------------- */
-
-static bool way_is_possible(const bs_graph *graph, const bs_cheapest *all, const bs_graph_way *way)
-{
-    for (uint32_t use = way->first; use < way->first + way->count; use++) {
-        uint32_t mol = graph->uses[use].mol;
-
-        if (mol == way->product || !isfinite(all->value[mol]))
-            return false;
-    }
-    return true;
-}
-
-/* Numbers the molecules that possible ways reach from the target, breadth first. */
-static bs_status number_part(bs_kbest *k, const bs_graph *graph, const bs_cheapest *all,
-                             uint32_t target, uint32_t *number, uint32_t *order)
-{
-    uint32_t at = 0;
-    bs_status st;
-
-    order[0] = target;
-    if ((st = bs_graph__add_mol(&k->part, graph->mols[target].price, &number[target])) != BS_OK)
-        return st;
-    for (; at < k->part.mol_count; at++) {
-        const bs_graph_mol *mol = &graph->mols[order[at]];
-
-        for (uint32_t w = mol->first_way; w != BS_GRAPH_NONE; w = graph->ways[w].next) {
-            const bs_graph_way *way = &graph->ways[w];
-
-            if (!way_is_possible(graph, all, way))
-                continue;
-            for (uint32_t use = way->first; use < way->first + way->count; use++) {
-                uint32_t need = graph->uses[use].mol;
-
-                if (number[need] != BS_GRAPH_NONE)
-                    continue;
-                order[k->part.mol_count] = need;
-                st = bs_graph__add_mol(&k->part, graph->mols[need].price, &number[need]);
-                if (st != BS_OK)
-                    return st;
-            }
-        }
-    }
-    return BS_OK;
-}
-
-/* Copies one way into the part, under the step number that its step has there. */
-static bs_status copy_way(bs_kbest *k, const bs_graph *graph, uint32_t w, const uint32_t *number,
-                          uint32_t *step_number)
-{
-    const bs_graph_way *way = &graph->ways[w];
-    bs_mark mark = bs_arena_mark(&k->cx->scratch);
-    bs_graph_part *parts;
-    uint32_t made;
-    bs_status st;
-
-    if ((st = bs_new(k->cx, &k->cx->scratch, way->count, &parts)) != BS_OK)
-        return st;
-    for (uint32_t i = 0; i < way->count; i++) {
-        const bs_graph_use *use = &graph->uses[way->first + i];
-
-        parts[i] = (bs_graph_part){number[use->mol], use->equivalents};
-    }
-    st = bs_graph__reserve(k->cx, &k->origin, &k->origin_room, (size_t)k->part.way_count + 1,
-                           sizeof *k->origin);
-    if (st == BS_OK)
-        st = bs_graph__add_way(&k->part, number[way->product], step_number[way->step], parts,
-                               way->count, way->cost, way->yield, 0, &made);
-    if (st == BS_OK) {
-        k->origin[made] = w;
-        step_number[way->step] = k->part.ways[made].step;
-    }
-    bs_arena_rewind(&k->cx->scratch, mark);
-    return st;
-}
-
-static bs_status copy_ways(bs_kbest *k, const bs_graph *graph, const bs_cheapest *all,
-                           const uint32_t *number)
-{
-    bs_mark mark = bs_arena_mark(&k->cx->scratch);
-    uint32_t *step_number;
-    bs_status st = bs_new(k->cx, &k->cx->scratch, (size_t)graph->step_count + 1, &step_number);
-
-    if (st != BS_OK)
-        return st;
-    for (uint32_t i = 0; i < graph->step_count; i++)
-        step_number[i] = BS_GRAPH_NONE;
-    for (uint32_t w = 0; st == BS_OK && w < graph->way_count; w++) {
-        if (number[graph->ways[w].product] != BS_GRAPH_NONE &&
-            way_is_possible(graph, all, &graph->ways[w]))
-            st = copy_way(k, graph, w, number, step_number);
-    }
-    bs_arena_rewind(&k->cx->scratch, mark);
-    return st;
-}
-
-/* Builds `part`: in a large graph few molecules can be had, and only they are solved again. */
-static bs_status take_part(bs_kbest *k, const bs_graph *graph, uint32_t target)
-{
-    bs_mark mark = bs_arena_mark(&k->cx->scratch);
-    bs_cheapest all;
-    uint32_t *number, *order;
-    bs_status st = bs_cheapest__init(&all, graph, k->mode);
-
-    if (st != BS_OK)
-        return st;
-    st = bs_cheapest__run(&all, NULL, BS_GRAPH_NONE);
-    if (st != BS_OK || !isfinite(all.value[target]))
-        goto done;
-    if ((st = bs_new(k->cx, &k->cx->scratch, graph->mol_count, &number)) != BS_OK ||
-        (st = bs_new(k->cx, &k->cx->scratch, graph->mol_count, &order)) != BS_OK)
-        goto done;
-    for (uint32_t i = 0; i < graph->mol_count; i++)
-        number[i] = BS_GRAPH_NONE;
-    if ((st = number_part(k, graph, &all, target, number, order)) == BS_OK)
-        st = copy_ways(k, graph, &all, number);
-    if (st == BS_OK)
-        k->target = number[target];
-done:
-    bs_cheapest__free(&all);
-    bs_arena_rewind(&k->cx->scratch, mark);
-    return st;
-}
 
 /* ---- Problems -------------------------------------------------------------------------------- */
 
 /* Puts a problem into the heap: lower bound first, the older first among equals. */
+/* Among problems of the same bound those that are solved come first. */
 static bs_status push(bs_kbest *k, uint32_t index)
 {
-    return bs_heap__push(&k->heap, k->cx, k->problems[index].bound, index);
+    const problem *p = &k->problems[index];
+
+    return bs_heap__push(&k->heap, k->cx, p->bound, p->solved ? index : index | UNSOLVED);
 }
 
 static bs_status add_problem(bs_kbest *k, problem p)
@@ -198,9 +92,14 @@ static bs_status add_problem(bs_kbest *k, problem p)
 
 /* ---- Solving one problem ------------------------------------------------------------------- */
 
+static void spend(bs_kbest *k, uint64_t work)
+{
+    k->work_left = k->work_left > work ? k->work_left - work : 0;
+}
+
 static uint32_t step_of(const bs_kbest *k, uint32_t way)
 {
-    return way == BS_GRAPH_BUY ? BS_GRAPH_BUY : k->part.ways[way].step;
+    return way == BS_GRAPH_BUY ? BS_GRAPH_BUY : k->ring.graph.ways[way].step;
 }
 
 /* Sets the bars of a problem in the working room, or takes them back. */
@@ -221,7 +120,7 @@ static void set_bars(bs_kbest *k, const problem *p, bool on)
     }
 }
 
-static bs_status add_decision(bs_kbest *k, uint32_t mol)
+static bs_status add_decision(bs_kbest *k, const uint32_t *choice, uint32_t mol)
 {
     bs_status st;
 
@@ -231,7 +130,7 @@ static bs_status add_decision(bs_kbest *k, uint32_t mol)
     st = bs_graph__reserve(k->cx, &k->decisions, &k->decision_room, k->decision_count + 1,
                            sizeof *k->decisions);
     if (st == BS_OK)
-        k->decisions[k->decision_count++] = (decision){mol, k->work.choice[mol]};
+        k->decisions[k->decision_count++] = (decision){mol, choice[mol]};
     return st;
 }
 
@@ -239,48 +138,90 @@ static bs_status add_decision(bs_kbest *k, uint32_t mol)
  * Writes the decisions of the answer, breadth first from the target, so that the molecule of each
  * decision follows from the decisions before it.
  */
-static bs_status write_decisions(bs_kbest *k, problem *p)
+static bs_status write_decisions(bs_kbest *k, problem *p, const uint32_t *choice)
 {
     bs_status st;
 
     k->walk++;
     p->first_decision = (uint32_t)k->decision_count;
-    st = add_decision(k, k->target);
+    st = add_decision(k, choice, k->ring.target);
     for (size_t at = p->first_decision; st == BS_OK && at < k->decision_count; at++) {
         uint32_t way = k->decisions[at].way;
         const bs_graph_way *w;
 
         if (way == BS_GRAPH_BUY)
             continue;
-        w = &k->part.ways[way];
+        w = &k->ring.graph.ways[way];
         for (uint32_t i = 0; st == BS_OK && i < w->count; i++)
-            st = add_decision(k, k->part.uses[w->first + i].mol);
+            st = add_decision(k, choice, k->ring.graph.uses[w->first + i].mol);
     }
     p->decision_count = (uint32_t)(k->decision_count - p->first_decision);
     return st;
 }
 
-/* Solves a problem and puts it back into the heap, unless it has no answer. */
+/* Tries the solver that looks only at what changed. The bars are set. */
+static bs_lazy_end try_lazy(bs_kbest *k, const problem *p)
+{
+    const bs_graph *graph = &k->ring.graph;
+    double give_up = bs_part__slack(&k->part, k->ring.bound);
+    uint64_t before = k->lazy.looked, budget = 1000 + graph->way_count / 2;
+    bs_lazy_end end;
+
+    bs_lazy__reset(&k->lazy);
+    if (p->parent == BS_GRAPH_NONE)
+        return bs_lazy__solve(&k->lazy, k->ring.target, give_up, budget);
+    bs_lazy__revise(&k->lazy, p->bar_mol);
+    for (uint32_t i = p->kept; i-- > 0;)
+        bs_lazy__revise(&k->lazy, k->decisions[k->problems[p->parent].first_decision + i].mol);
+    if (p->put_off < MOST_PUT_OFF && k->heap.count > 0)
+        give_up = fmax(p->bound, k->heap.entries[0].key);
+    end = bs_lazy__solve(&k->lazy, k->ring.target, give_up, budget);
+    spend(k, k->lazy.looked - before);
+    return end;
+}
+
+/* Solves a problem from scratch. The bars are set. */
+static bs_status solve_whole(bs_kbest *k, double *value)
+{
+    bs_status st = bs_cheapest__run(&k->work, NULL, k->ring.target);
+
+    spend(k, (uint64_t)k->ring.graph.way_count + k->ring.graph.use_count);
+    if (!k->work.converged)
+        k->cut = true;
+    *value = k->work.value[k->ring.target];
+    return st;
+}
+
+/* Solves a problem, or puts it off, and puts it back into the heap, unless it has no answer. */
 static bs_status solve(bs_kbest *k, uint32_t index)
 {
     problem *p = &k->problems[index];
-    bs_status st;
+    bs_lazy_end end = BS_LAZY_SPENT;
+    const uint32_t *choice = k->lazy.choice;
+    double value = INFINITY;
+    bs_status st = BS_OK;
 
     k->solves--;
     set_bars(k, p, true);
-    st = bs_cheapest__run(&k->work, NULL, k->target);
+    if (k->solid) {
+        end = try_lazy(k, p);
+        value = k->lazy.value[k->ring.target];
+    }
+    if (end == BS_LAZY_SPENT) {
+        st = solve_whole(k, &value);
+        choice = k->work.choice;
+    }
     set_bars(k, p, false);
-    if (st != BS_OK)
+    if (st != BS_OK || isinf(value))
         return st;
-    if (!k->work.converged)
-        k->cut = true;
-    if (!isfinite(k->work.value[k->target]))
-        return BS_OK;
-    if ((st = write_decisions(k, p)) != BS_OK)
+    p->bound = fmax(p->bound, value);
+    if (end == BS_LAZY_ABOVE) {
+        p->put_off++;
+        return push(k, index);
+    }
+    if ((st = write_decisions(k, p, choice)) != BS_OK)
         return st;
     p->solved = true;
-    if (k->work.value[k->target] > p->bound)
-        p->bound = k->work.value[k->target];
     return push(k, index);
 }
 
@@ -289,13 +230,13 @@ static bs_status solve(bs_kbest *k, uint32_t index)
 /* Whether a molecule has a way besides those barred: worth a problem of its own. */
 static bool has_another(const bs_kbest *k, uint32_t mol, uint32_t chosen)
 {
-    const bs_graph_mol *m = &k->part.mols[mol];
+    const bs_graph_mol *m = &k->ring.graph.mols[mol];
     uint32_t step = step_of(k, chosen);
 
     if (step != BS_GRAPH_BUY && isfinite(m->price))
         return true;
-    for (uint32_t w = m->first_way; w != BS_GRAPH_NONE; w = k->part.ways[w].next) {
-        if (k->part.ways[w].step != step)
+    for (uint32_t w = m->first_way; w != BS_GRAPH_NONE; w = k->ring.graph.ways[w].next) {
+        if (k->ring.graph.ways[w].step != step)
             return true;
     }
     return false;
@@ -367,7 +308,7 @@ static bs_status order_ways(bs_kbest *k, const problem *p, bool *legal, bs_kbest
     for (uint32_t i = 0; i < p->decision_count; i++) {
         bool bought = d[i].way == BS_GRAPH_BUY;
 
-        value[d[i].mol] = bought ? k->part.mols[d[i].mol].price : INFINITY;
+        value[d[i].mol] = bought ? k->ring.graph.mols[d[i].mol].price : INFINITY;
         left += !bought;
     }
     for (bool moved = true; moved && placed < left;) {
@@ -377,17 +318,79 @@ static bs_status order_ways(bs_kbest *k, const problem *p, bool *legal, bs_kbest
 
             if (d[i].way == BS_GRAPH_BUY || isfinite(value[d[i].mol]))
                 continue;
-            cost = bs_graph__way_cost(&k->part, d[i].way, k->mode, value);
+            cost = bs_graph__way_cost(&k->ring.graph, d[i].way, k->mode, value);
             if (!isfinite(cost))
                 continue;
             value[d[i].mol] = cost;
-            k->ways[placed++] = k->origin[d[i].way];
+            k->ways[placed++] = k->ring.origin[d[i].way];
             moved = true;
         }
     }
     *legal = placed == left;
-    *route = (bs_kbest_route){value[k->target], k->ways, placed};
+    *route = (bs_kbest_route){value[k->ring.target], k->ways, placed};
     return BS_OK;
+}
+
+/* ---- Rings ----------------------------------------------------------------------------------- */
+
+static void drop_ring(bs_kbest *k)
+{
+    bs_gate_free(k->cx->gate, k->seen, k->seen_room * sizeof *k->seen);
+    k->seen = NULL;
+    k->seen_room = 0;
+    bs_lazy__free(&k->lazy);
+    bs_cheapest__free(&k->work);
+    bs_ring__free(&k->ring);
+    k->problem_count = k->bar_count = k->decision_count = k->heap.count = 0;
+}
+
+/* Cuts a ring of k->ring_ways ways, and begins anew in it. */
+static bs_status enter_ring(bs_kbest *k)
+{
+    bs_status st;
+
+    drop_ring(k);
+    if ((st = bs_ring__build(&k->ring, &k->part, k->ring_ways)) != BS_OK ||
+        (st = bs_cheapest__init(&k->work, &k->ring.graph, k->mode)) != BS_OK ||
+        (st = bs_cheapest__run(&k->work, NULL, BS_GRAPH_NONE)) != BS_OK ||
+        (st = bs_lazy__init(&k->lazy, &k->work)) != BS_OK ||
+        (st = bs_graph__reserve(k->cx, &k->seen, &k->seen_room, k->ring.graph.mol_count,
+                                sizeof *k->seen)) != BS_OK)
+        return st;
+    memset(k->seen, 0, k->seen_room * sizeof *k->seen);
+    k->walk = 0;
+    k->solid = k->work.converged;
+    return add_problem(k, (problem){.parent = BS_GRAPH_NONE, .bar_mol = BS_GRAPH_NONE});
+}
+
+/* Whether nothing is left in the ring that could be a route up to its bound. */
+static bool ring_is_done(const bs_kbest *k)
+{
+    return k->heap.count == 0 || k->heap.entries[0].key > bs_part__slack(&k->part, k->ring.bound);
+}
+
+/* Goes on in a larger ring; what costs no more than the bound of this one was given. */
+static bs_status grow_ring(bs_kbest *k)
+{
+    k->given = k->ring.bound;
+    k->ring_ways =
+        k->ring_ways > UINT32_MAX / RING_GROWTH ? UINT32_MAX : k->ring_ways * RING_GROWTH;
+    return enter_ring(k);
+}
+
+/* Takes the first problem off: solves it, or makes a route of its answer. */
+static bs_status take_first(bs_kbest *k, bool *found, bs_kbest_route *route)
+{
+    uint32_t item = bs_heap__pop(&k->heap).item;
+    bool legal;
+    bs_status st;
+
+    if (item & UNSOLVED)
+        return solve(k, item & ~UNSOLVED);
+    if ((st = partition(k, item)) == BS_OK)
+        st = order_ways(k, &k->problems[item], &legal, route);
+    *found = st == BS_OK && legal && route->cost > k->given && route->cost <= k->ring.bound;
+    return st;
 }
 
 bs_status bs_kbest__next(bs_kbest *k, bool *found, bs_kbest_route *route)
@@ -395,23 +398,17 @@ bs_status bs_kbest__next(bs_kbest *k, bool *found, bs_kbest_route *route)
     bs_status st = BS_OK;
 
     *found = false;
-    while (st == BS_OK && k->heap.count > 0 && !k->cut) {
-        uint32_t index;
-
-        index = k->heap.entries[0].item;
-        if (atomic_load(k->cx->stop) || (k->solves <= 0 && !k->problems[index].solved)) {
+    while (st == BS_OK && !*found && !k->cut && k->part.reachable) {
+        if (ring_is_done(k)) {
+            if (isinf(k->ring.bound))
+                break;
+            st = grow_ring(k);
+        } else if (atomic_load(k->cx->stop) || k->work_left == 0 ||
+                   (k->limited && k->solves <= 0 && (k->heap.entries[0].item & UNSOLVED))) {
             k->cut = true;
-            break;
+        } else {
+            st = take_first(k, found, route);
         }
-        bs_heap__pop(&k->heap);
-        if (!k->problems[index].solved) {
-            st = solve(k, index);
-            continue;
-        }
-        if ((st = partition(k, index)) == BS_OK)
-            st = order_ways(k, &k->problems[index], found, route);
-        if (*found)
-            break;
     }
     return st;
 }
@@ -421,34 +418,11 @@ bool bs_kbest__cut(const bs_kbest *k)
     return k->cut;
 }
 
-/* ---- Life ------------------------------------------------------------------------------------- */
+/* ---- Life -------------------------------------------------------------------------------------
+ */
 
-static long default_solves(const bs_graph *part)
-{
-    double size = 100.0 + part->mol_count + part->way_count + part->use_count;
-
-    return (long)fmin(MOST_SOLVES, fmax(LEAST_SOLVES, DEFAULT_WORK / size));
-}
-
-static bs_status prepare(bs_kbest *k, const bs_graph *graph, uint32_t target)
-{
-    bs_status st = take_part(k, graph, target);
-
-    if (st != BS_OK || k->target == BS_GRAPH_NONE)
-        return st;
-    if (k->solves <= 0)
-        k->solves = default_solves(&k->part);
-    if ((st = bs_cheapest__init(&k->work, &k->part, k->mode)) != BS_OK)
-        return st;
-    st = bs_graph__reserve(k->cx, &k->seen, &k->seen_room, k->part.mol_count, sizeof *k->seen);
-    if (st != BS_OK)
-        return st;
-    memset(k->seen, 0, k->seen_room * sizeof *k->seen);
-    return add_problem(k, (problem){.parent = BS_GRAPH_NONE, .bar_mol = BS_GRAPH_NONE});
-}
-
-bs_status bs_kbest__new(const bs_graph *graph, bs_cost_mode mode, uint32_t target, long solves,
-                        bs_kbest **out)
+bs_status bs_kbest__new(const bs_graph *graph, bs_cost_mode mode, uint32_t target,
+                        const bs_kbest_limits *limits, bs_kbest **out)
 {
     bs_ctx *cx = graph->cx;
     bs_kbest *k = bs_gate_alloc(cx->gate, sizeof *k);
@@ -459,10 +433,15 @@ bs_status bs_kbest__new(const bs_graph *graph, bs_cost_mode mode, uint32_t targe
         return bs_fail_memory(cx);
     k->cx = cx;
     k->mode = mode;
-    k->target = BS_GRAPH_NONE;
-    k->solves = solves;
-    bs_graph__init(&k->part, cx);
-    if ((st = prepare(k, graph, target)) != BS_OK)
+    k->solves = limits ? limits->solves : 0;
+    k->limited = k->solves > 0;
+    k->ring_ways = limits && limits->first_ring > 0 ? limits->first_ring : FIRST_RING;
+    k->work_left = MOST_WORK;
+    k->given = -INFINITY;
+    st = bs_part__init(&k->part, graph, mode, target);
+    if (st == BS_OK && k->part.reachable)
+        st = enter_ring(k);
+    if (st != BS_OK)
         bs_kbest__free(k);
     else
         *out = k;
@@ -476,14 +455,12 @@ void bs_kbest__free(bs_kbest *k)
     if (!k)
         return;
     gate = k->cx->gate;
-    bs_cheapest__free(&k->work);
-    bs_graph__free(&k->part);
-    bs_gate_free(gate, k->origin, k->origin_room * sizeof *k->origin);
+    drop_ring(k);
+    bs_part__free(&k->part);
     bs_gate_free(gate, k->problems, k->problem_room * sizeof *k->problems);
     bs_gate_free(gate, k->bars, k->bar_room * sizeof *k->bars);
     bs_gate_free(gate, k->decisions, k->decision_room * sizeof *k->decisions);
     bs_heap__free(&k->heap, k->cx);
-    bs_gate_free(gate, k->seen, k->seen_room * sizeof *k->seen);
     bs_gate_free(gate, k->ways, k->ways_room * sizeof *k->ways);
     bs_gate_free(gate, k, sizeof *k);
 }

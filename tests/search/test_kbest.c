@@ -103,7 +103,7 @@ static void check_graph(fixture *f, json_t *entry, bs_cost_mode mode, const char
     bs_graph__init(&graph, &f->cx);
     load(f, entry, &graph, &target);
     assert_int_equal(graph.superior, json_is_true(json_object_get(expect, "superior")));
-    check_ok(f, bs_kbest__new(&graph, mode, target, 0, &kbest));
+    check_ok(f, bs_kbest__new(&graph, mode, target, NULL, &kbest));
     for (bool more = true; more;) {
         bs_kbest_route route;
 
@@ -287,6 +287,7 @@ static void check_against_brute_force(fixture *f, const bs_graph *graph, bs_cost
                                       int trial, double *costs)
 {
     brute b = {.graph = graph, .mode = mode, .costs = costs};
+    bs_kbest_limits narrow = {.first_ring = 1 + (uint32_t)trial % 5};
     bs_kbest *kbest;
     size_t found = 0;
 
@@ -294,7 +295,7 @@ static void check_against_brute_force(fixture *f, const bs_graph *graph, bs_cost
         b.choice[m] = BS_GRAPH_NONE;
     enumerate(&b);
     qsort(costs, b.count, sizeof *costs, by_cost);
-    check_ok(f, bs_kbest__new(graph, mode, 0, 0, &kbest));
+    check_ok(f, bs_kbest__new(graph, mode, 0, trial % 3 ? &narrow : NULL, &kbest));
     for (bool more = true; more; found += more) {
         bs_kbest_route route;
 
@@ -333,6 +334,78 @@ static void kbest__random_graphs_against_brute_force(void **state)
     free(costs);
 }
 
+/* ---- Rings -------------------------------------------------------------------------------- */
+
+#define RING_MOLS 40
+#define RING_ROUTES 60
+
+/* A graph too large for brute force: several ways to each molecule, circles, many sold. */
+static void draw_wide_graph(fixture *f, bs_graph *graph, uint64_t *seed, bool split)
+{
+    uint32_t made;
+
+    for (uint32_t m = 0; m < RING_MOLS; m++) {
+        bool sold = m > 0 && draw(seed, 3) == 0;
+
+        check_ok(f, bs_graph__add_mol(graph, sold ? draw(seed, 1000) : INFINITY, &made));
+    }
+    for (uint32_t s = 0; s < 4 * RING_MOLS; s++) {
+        uint32_t product = draw(seed, RING_MOLS), a = draw(seed, RING_MOLS);
+        uint32_t b = (a + 1 + draw(seed, RING_MOLS - 1)) % RING_MOLS;
+        bs_graph_part parts[] = {{a, split && draw(seed, 10) == 0 ? 0.4 : 1}, {b, 1.2}};
+
+        check_ok(f, bs_graph__add_way(graph, product, BS_GRAPH_NONE, parts, 1 + draw(seed, 2),
+                                      draw(seed, 100), 0.6 + 0.1 * draw(seed, 5), s, &made));
+    }
+}
+
+static int take_costs(fixture *f, const bs_graph *graph, uint32_t first_ring, double *costs)
+{
+    bs_kbest_limits limits = {.first_ring = first_ring};
+    bs_kbest *kbest;
+    int count = 0;
+
+    check_ok(f, bs_kbest__new(graph, BS_COST_PER_MOLE, 0, &limits, &kbest));
+    while (count < RING_ROUTES) {
+        bs_kbest_route route;
+        bool more;
+
+        check_ok(f, bs_kbest__next(kbest, &more, &route));
+        if (!more)
+            break;
+        costs[count++] = route.cost;
+    }
+    assert_false(bs_kbest__cut(kbest));
+    bs_kbest__free(kbest);
+    return count;
+}
+
+/* The size of the first ring must not show; 1000 ways hold the whole graph. */
+static void kbest__rings_do_not_show(void **state)
+{
+    fixture *f = *state;
+    uint64_t seed = 7;
+    int full = 0;
+
+    for (int trial = 0; trial < 200; trial++) {
+        double small[RING_ROUTES], large[RING_ROUTES];
+        bs_graph graph;
+        int count;
+
+        bs_graph__init(&graph, &f->cx);
+        draw_wide_graph(f, &graph, &seed, trial % 2);
+        count = take_costs(f, &graph, 1000, large);
+        assert_int_equal(take_costs(f, &graph, 1 + (uint32_t)trial % 9, small), count);
+        for (int i = 0; i < count; i++) {
+            if (!near(small[i], large[i]))
+                fail_msg("trial %d: route %d costs %.12g and %.12g", trial, i, small[i], large[i]);
+        }
+        full += count == RING_ROUTES;
+        bs_graph__free(&graph);
+    }
+    assert_true(full > 100);
+}
+
 /* ---- The rest ------------------------------------------------------------------------------ */
 
 /* A graph in which t is made from a by two ways of one step, and a is sold. */
@@ -349,10 +422,11 @@ static void two_ways(fixture *f, bs_graph *graph, bool one_step)
 
 static int count_routes(fixture *f, const bs_graph *graph, long solves, double *first, bool *cut)
 {
+    bs_kbest_limits limits = {.solves = solves};
     bs_kbest *kbest;
     int count = 0;
 
-    check_ok(f, bs_kbest__new(graph, BS_COST_PER_MOLE, 0, solves, &kbest));
+    check_ok(f, bs_kbest__new(graph, BS_COST_PER_MOLE, 0, &limits, &kbest));
     for (;;) {
         bs_kbest_route route;
         bool more;
@@ -417,7 +491,7 @@ static void kbest__every_failed_allocation_leaks_nothing(void **state)
         bool more = true;
 
         atomic_store(&f->cx.own_gate.fail_after, allowed);
-        st = bs_kbest__new(&graph, BS_COST_PER_MOLE, 0, 0, &kbest);
+        st = bs_kbest__new(&graph, BS_COST_PER_MOLE, 0, NULL, &kbest);
         while (st == BS_OK && more)
             st = bs_kbest__next(kbest, &more, &route);
         bs_kbest__free(kbest);
@@ -436,6 +510,7 @@ int main(void)
     const struct CMUnitTest tests[] = {
         check_case(kbest__the_check_graphs),
         check_case(kbest__random_graphs_against_brute_force),
+        check_case(kbest__rings_do_not_show),
         check_case(kbest__ways_of_one_step_are_one_route),
         check_case(kbest__a_spent_budget_and_a_stop_are_told),
         check_case(kbest__every_failed_allocation_leaks_nothing),
