@@ -14,5 +14,6 @@
 #include "backsaw/catalogue.h"
 #include "backsaw/route.h"
 #include "backsaw/search.h"
+#include "backsaw/report.h"
 
 #endif

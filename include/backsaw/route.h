@@ -134,6 +134,13 @@ bs_status bs_route_verify(bs_ctx *cx, const bs_route *route, const bs_rules *rul
  */
 bool bs_route_same(const bs_route *a, const bs_route *b);
 
+/*
+ * Sets `checked` and the rule of every step anew, as the rules at hand have it (NULL: none): for a
+ * route that comes from elsewhere and that nobody else looks at yet.
+ */
+bs_status bs_route_recheck(bs_ctx *cx, bs_route *route, const bs_rules *rules,
+                           const bs_rule_hooks *hooks);
+
 /* ---- Text ------------------------------------------------------------------------------ */
 
 /*
@@ -153,6 +160,12 @@ typedef struct bs_gap {
     int steps;       /* explored steps that use it */
 } bs_gap;
 
+/* A pack that steps of the routes come from. */
+typedef struct bs_pack_name {
+    const char *name;
+    const char *version; /* or NULL */
+} bs_pack_name;
+
 typedef struct bs_routes {
     bs_arena arena; /* all below lies here */
     bs_route **items;
@@ -166,6 +179,8 @@ typedef struct bs_routes {
     long steps;
     bs_gap *gaps; /* those that open most first; for the target alone */
     int gap_count;
+    bs_pack_name *packs; /* see bs_routes_set_packs() */
+    int pack_count;
 } bs_routes;
 
 /* NULL is allowed. The routes of the list die with it. */
@@ -177,6 +192,17 @@ void bs_routes_free(bs_ctx *cx, bs_routes *routes);
  */
 bs_status bs_routes_pick(bs_ctx *cx, const bs_route *const *items, int count,
                          const bs_routes *like, bs_routes **out);
+
+/* Keeps those of the packs that steps of the routes name. */
+bs_status bs_routes_set_packs(bs_ctx *cx, bs_routes *routes, const bs_pack_name *packs, int count);
+
+/*
+ * A new list with the routes of both, each once, the cheapest first; among equals those of `a`
+ * come first. It is complete if both are, and counts what both explored.
+ *
+ *   errors  BS_EVALUE  different targets, or costs that mean different things
+ */
+bs_status bs_routes_merge(bs_ctx *cx, const bs_routes *a, const bs_routes *b, bs_routes **out);
 
 /* Adds a table with one line a route, aligned columns, plain ASCII. */
 bs_status bs_routes_table(const bs_routes *routes, bs_text *text);

@@ -4,7 +4,7 @@ local planning = core.module "plan"
 
 local usage = [[
 usage: backsaw plan SMILES [-c CATALOGUE]... [-n BEST] [--depth N] [--steps N] [--molecules N]
-                    [--seconds S] [--step-cost EUR] [--at-hand SMILES]... [--quiet]
+                    [--seconds S] [--step-cost EUR] [--at-hand SMILES]... [-o FILE.json] [--quiet]
 
 Plans routes to a molecule and prints a table of them, then the best one as a tree.
 
@@ -16,6 +16,7 @@ Plans routes to a molecule and prints a table of them, then the best one as a tr
   --seconds S       time to explore
   --step-cost EUR   cost of a step in € a mole, 50 without it
   --at-hand SMILES  a compound that is free
+  -o FILE.json      write the routes into a file as well
   --quiet           no line of progress
 
 Exit status: 0 routes found, 1 none found or failed, 2 wrong usage.]]
@@ -38,12 +39,14 @@ local function read_arguments(arguments)
         if argument == "--help" then return { help = true } end
         if argument == "--quiet" then
             given.quiet = true
-        elseif number or argument == "-c" or argument == "--at-hand" then
+        elseif number or argument == "-c" or argument == "-o" or argument == "--at-hand" then
             i = i + 1
             local value = arguments[i]
             if not value then return wrong("%s: a value is expected", argument) end
             if argument == "-c" then
                 table.insert(given.catalogues, value)
+            elseif argument == "-o" then
+                given.output = value
             elseif argument == "--at-hand" then
                 table.insert(given.at_hand, value)
             else
@@ -91,6 +94,7 @@ local function main(...)
             routes.reason and "; " .. routes.reason or ""))
         return 1
     end
+    if given.output then routes:save(given.output) end
     print(routes)
     print()
     print(routes[1])

@@ -58,7 +58,11 @@ transforms  names of those to use; {} switches them off     at_hand, quiet]],
 routes = [[
 print(routes)                        a table, one line a route
 #routes  routes[1]  routes:where(f)  routes:sort(f)  routes:gaps()  routes.complete  routes.reason
+routes:merge(others)                 both lists in one, each route once
+routes:save "r.json"                 and routes.load "r.json"
 print(routes[1])                     the route as an indented tree
+routes[1]:compare(routes[2])         what is shared, what differs
+routes[1]:json()  routes[1]:verify()
 r.cost  r:steps()  r:leaves()  r:measure()      steps longest leaves cost yield_low yield yield_high]],
 }
 

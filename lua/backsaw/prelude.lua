@@ -23,6 +23,7 @@ pack, synthon, disconnection, interconversion = words.pack, words.synthon, words
     words.interconversion
 example, refuse = words.example, words.refuse
 catalogue, plan, cost = catalogues, planning.plan, planning.cost
+routes = core.module "routes"
 help = core.module "help"
 
 function use(name)

@@ -21,6 +21,11 @@ static bool has_precursors(const bs_route *route, const bs_route_step *step, con
     return true;
 }
 
+static int rule_of(const bs_route_way *way, const bs_rules *rules)
+{
+    return rules && way->transform ? bs_rules_find(rules, way->transform) : -1;
+}
+
 static bs_status verify_step(bs_ctx *cx, const bs_route *route, const bs_route_step *step,
                              const bs_rules *rules, const bs_rule_hooks *hooks, bool *good)
 {
@@ -28,7 +33,7 @@ static bs_status verify_step(bs_ctx *cx, const bs_route *route, const bs_route_s
     bs_arena home; /* not the scratch arena, which the callee rewinds */
     bs_steps found = {NULL, 0};
     bs_mol *product;
-    int rule = step->ways[0].transform ? bs_rules_find(rules, step->ways[0].transform) : -1;
+    int rule = rule_of(&step->ways[0], rules);
     bs_status st;
 
     *good = false;
@@ -62,4 +67,24 @@ bs_status bs_route_verify(bs_ctx *cx, const bs_route *route, const bs_rules *rul
         }
     }
     return BS_OK;
+}
+
+bs_status bs_route_recheck(bs_ctx *cx, bs_route *route, const bs_rules *rules,
+                           const bs_rule_hooks *hooks)
+{
+    bs_status st = BS_OK;
+
+    for (int i = 0; st == BS_OK && i < route->step_count; i++) {
+        bs_route_step *step = &route->steps[i];
+
+        step->checked = false;
+        if (step->known)
+            continue;
+        for (int k = 0; k < step->way_count; k++)
+            step->ways[k].rule = rule_of(&step->ways[k], rules);
+        st = verify_step(cx, route, step, rules, hooks, &step->checked);
+        if (st == BS_ELIMIT)
+            st = BS_OK;
+    }
+    return st;
 }

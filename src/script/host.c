@@ -131,6 +131,7 @@ static int open_state(lua_State *L)
         bsl_open_file(L);
         bsl_open_catalogue(L);
         bsl_open_route(L);
+        bsl_open_report(L);
         bsl_open_plan(L);
     }
     host->calls = lua_newthread(L);

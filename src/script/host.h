@@ -165,6 +165,7 @@ void bsl_open_transform(lua_State *L);
 void bsl_open_catalogue(lua_State *L);
 void bsl_open_plan(lua_State *L);
 void bsl_open_route(lua_State *L);
+void bsl_open_report(lua_State *L); /* after that of routes, to which it adds methods */
 void bsl_open_pack(lua_State *L);
 void bsl_open_file(lua_State *L); /* after that of molecules, to which it adds methods */
 
@@ -236,6 +237,13 @@ void bsl_push_routes(lua_State *L, bs_routes *routes);
 
 /* Pushes a copy of a route. */
 void bsl_push_route(lua_State *L, const bs_route *route);
+
+/* The list of routes, or the route, at index `i`, or an argument error. */
+bs_routes *bsl_checkroutes(lua_State *L, int i);
+bs_route *bsl_checkroute(lua_State *L, int i);
+
+/* Tells a list of routes from which of the packs in use its steps come. */
+bs_status bsl_name_packs(lua_State *L, bs_routes *routes);
 
 /* The catalogue at index `i`, or NULL if it is none; raises if it is closed. */
 bs_catalogue *bsl_testcatalogue(lua_State *L, int i);

@@ -390,8 +390,9 @@ static int core_plan(lua_State *L)
     }
     if (st != BS_OK)
         return plan.failed ? bsl_raise_fault(L, &plan.fault) : bsl_raise(L, NULL, 0);
+    st = bsl_name_packs(L, routes);
     bsl_push_routes(L, routes);
-    return 1;
+    return st == BS_OK ? 1 : bsl_raise(L, NULL, 0);
 }
 
 void bsl_open_plan(lua_State *L)

@@ -19,7 +19,7 @@ typedef struct route_box {
     bs_route *route; /* NULL once freed */
 } route_box;
 
-static bs_routes *check_routes(lua_State *L, int i)
+bs_routes *bsl_checkroutes(lua_State *L, int i)
 {
     routes_box *box = luaL_testudata(L, i, ROUTES_TYPE);
 
@@ -30,7 +30,7 @@ static bs_routes *check_routes(lua_State *L, int i)
     return box->routes;
 }
 
-static bs_route *check_route(lua_State *L, int i)
+bs_route *bsl_checkroute(lua_State *L, int i)
 {
     route_box *box = luaL_testudata(L, i, ROUTE_TYPE);
 
@@ -192,7 +192,7 @@ void bsl_push_route_step(lua_State *L, const bs_route *route, int index)
 /* list = r:steps(), in the order of the bench */
 static int route_steps(lua_State *L)
 {
-    const bs_route *route = check_route(L, 1);
+    const bs_route *route = bsl_checkroute(L, 1);
 
     lua_createtable(L, route->step_count, 0);
     for (int i = 0; i < route->step_count; i++) {
@@ -205,7 +205,7 @@ static int route_steps(lua_State *L)
 /* list = r:leaves(): what is bought; each has molecule, price (a mole), moles, offer */
 static int route_leaves(lua_State *L)
 {
-    const bs_route *route = check_route(L, 1);
+    const bs_route *route = bsl_checkroute(L, 1);
     int n = 0;
 
     lua_newtable(L);
@@ -238,7 +238,7 @@ static int route_measure(lua_State *L)
 {
     bs_route_measures m;
 
-    bs_route_measure(check_route(L, 1), &m);
+    bs_route_measure(bsl_checkroute(L, 1), &m);
     lua_createtable(L, 0, 9);
     lua_pushinteger(L, m.steps);
     lua_setfield(L, -2, "steps");
@@ -260,7 +260,7 @@ static int route_measure(lua_State *L)
 /* text = tostring(r): the indented tree */
 static int route_tostring(lua_State *L)
 {
-    const bs_route *route = check_route(L, 1);
+    const bs_route *route = bsl_checkroute(L, 1);
     bs_text text;
 
     bs_text_init(&text, bsl_host_of(L)->cx);
@@ -284,7 +284,7 @@ static int route_eq(lua_State *L)
 /* r.cost, r.rank, r.target; else a method */
 static int route_index(lua_State *L)
 {
-    const bs_route *route = check_route(L, 1);
+    const bs_route *route = bsl_checkroute(L, 1);
     const char *key = lua_type(L, 2) == LUA_TSTRING ? lua_tostring(L, 2) : "";
 
     if (strcmp(key, "cost") == 0) {
@@ -306,7 +306,7 @@ static int route_index(lua_State *L)
 /* n = #rs */
 static int routes_len(lua_State *L)
 {
-    lua_pushinteger(L, check_routes(L, 1)->count);
+    lua_pushinteger(L, bsl_checkroutes(L, 1)->count);
     return 1;
 }
 
@@ -326,7 +326,7 @@ static void push_nth(lua_State *L, const bs_routes *routes, int i)
 /* rs[i], rs.complete, rs.reason, rs.target, rs.explored; else a method */
 static int routes_index(lua_State *L)
 {
-    const bs_routes *routes = check_routes(L, 1);
+    const bs_routes *routes = bsl_checkroutes(L, 1);
     const char *key = lua_type(L, 2) == LUA_TSTRING ? lua_tostring(L, 2) : "";
     lua_Integer i;
 
@@ -359,7 +359,7 @@ static int routes_index(lua_State *L)
 /* text = tostring(rs): a table, one line a route */
 static int routes_tostring(lua_State *L)
 {
-    const bs_routes *routes = check_routes(L, 1);
+    const bs_routes *routes = bsl_checkroutes(L, 1);
     bs_text text;
 
     bs_text_init(&text, bsl_host_of(L)->cx);
@@ -375,7 +375,7 @@ static int routes_tostring(lua_State *L)
 /* list = rs:gaps(): each with molecule, opens, opens_target, steps */
 static int routes_gaps(lua_State *L)
 {
-    const bs_routes *routes = check_routes(L, 1);
+    const bs_routes *routes = bsl_checkroutes(L, 1);
 
     lua_createtable(L, routes->gap_count, 0);
     for (int i = 0; i < routes->gap_count; i++) {
@@ -400,7 +400,7 @@ static int routes_gaps(lua_State *L)
 static int core_pick_routes(lua_State *L)
 {
     bsl_host *host = bsl_host_of(L);
-    const bs_routes *like = check_routes(L, 2);
+    const bs_routes *like = bsl_checkroutes(L, 2);
     bs_mark mark = bs_arena_mark(&host->results);
     const bs_route **items;
     bs_routes *picked;
@@ -413,7 +413,7 @@ static int core_pick_routes(lua_State *L)
         return bsl_raise_from(L, mark, NULL, 0);
     for (int i = 0; i < count; i++) {
         lua_rawgeti(L, 1, i + 1);
-        items[i] = check_route(L, -1);
+        items[i] = bsl_checkroute(L, -1);
         lua_pop(L, 1);
     }
     st = bs_routes_pick(host->cx, items, count, like, &picked);
@@ -421,6 +421,12 @@ static int core_pick_routes(lua_State *L)
     if (st != BS_OK)
         return bsl_raise(L, NULL, 0);
     bsl_push_routes(L, picked);
+    return 1;
+}
+
+static int core_is_route(lua_State *L)
+{
+    lua_pushboolean(L, luaL_testudata(L, 1, ROUTE_TYPE) != NULL);
     return 1;
 }
 
@@ -466,4 +472,6 @@ void bsl_open_route(lua_State *L)
     indexed_type(L, ROUTES_TYPE, "routes_methods", routes_index, list_methods, list_meta);
     lua_pushcfunction(L, core_pick_routes);
     lua_setfield(L, -2, "pick_routes");
+    lua_pushcfunction(L, core_is_route);
+    lua_setfield(L, -2, "is_route");
 }
