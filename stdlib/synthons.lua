@@ -110,6 +110,10 @@ synthon "aryl halide" {
 -- Aryl activated for nucleophilic substitution.
 synthon "activated aryl" { kind = "acceptor", equivalents = { { attach = "F" }, { attach = "Cl" } } }
 
+-- The same with one leaving group: fluorine where the nucleophile is weak, chlorine on azines.
+synthon "fluoroarene" { kind = "acceptor", equivalents = { { attach = "F" } } }
+synthon "chloroazine" { kind = "acceptor", equivalents = { { attach = "Cl" } } }
+
 -- ---- Donors -------------------------------------------------------------------------------
 
 -- Nucleophiles that bring the bond and lose a hydrogen.
