@@ -128,6 +128,21 @@ bs_status bs_mol_complexity(bs_ctx *cx, const bs_mol *mol, double *index);
  */
 bs_status bs_mol_doubts(bs_ctx *cx, bs_arena *home, const bs_mol *mol, char ***texts, int *count);
 
+/* Multiple bonds that their ring is too small for. */
+typedef enum bs_strain {
+    BS_STRAIN_NONE,
+    BS_STRAIN_BRIDGEHEAD, /* a double bond at a bridgehead, against Bredt's rule */
+    BS_STRAIN_ALKYNE,     /* a triple bond in a ring of fewer than eight */
+    BS_STRAIN_ALLENE      /* cumulated double bonds in a ring of fewer than nine */
+} bs_strain;
+
+/*
+ * The first bond with number `from` or higher that cannot be where it is: `*bond`, and what is wrong
+ * with it. BS_STRAIN_NONE and -1 if there is none. A bridgehead may have a double bond if the larger
+ * ring through it has eight members (Wiseman 1967, from memory). Aromatic rings are not looked at.
+ */
+bs_status bs_mol_strain(bs_ctx *cx, const bs_mol *mol, int from, bs_strain *kind, int *bond);
+
 /*
  * The connected pieces, each with its atoms in the order of the whole, the pieces in the order of
  * their first atoms.

@@ -228,7 +228,8 @@ enum {
 
 /*
  * The steps that make `product` by one transform (or by all, with -1, in the order of the book).
- * Each step was run forwards and gave the product. Steps with the same precursors by the same
+ * Each step was run forwards and gave the product. Precursors with a bond that their rings cannot
+ * hold (bs_mol_strain()) make no step, unless the product has one. Steps with the same precursors by the same
  * transform are given once.
  */
 bs_status bs_rules_back(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int transform,

@@ -79,6 +79,30 @@ static bs_status look_at_bond(doubts *d, const bs_mol *mol, uint32_t bond)
     return st == BS_OK ? keep(d) : st;
 }
 
+static bs_status look_at_rings(doubts *d, const bs_mol *mol)
+{
+    static const char *const words[] = {
+        [BS_STRAIN_BRIDGEHEAD] = "a double bond at a bridgehead",
+        [BS_STRAIN_ALKYNE] = "a triple bond in a ring of fewer than eight",
+        [BS_STRAIN_ALLENE] = "cumulated double bonds in a ring of fewer than nine",
+    };
+    bs_strain kind;
+    int bond = -1;
+    bs_status st;
+
+    while ((st = bs_mol_strain(d->cx, mol, bond + 1, &kind, &bond)) == BS_OK &&
+           kind != BS_STRAIN_NONE) {
+        const bs_bond *b = bs_mol__bonds(mol) + bond;
+
+        bs_text_clear(&d->line);
+        st = bs_text_printf(&d->line, "atoms %lu and %lu: %s cannot be kept",
+                            (unsigned long)b->a + 1, (unsigned long)b->b + 1, words[kind]);
+        if (st != BS_OK || (st = keep(d)) != BS_OK)
+            break;
+    }
+    return st;
+}
+
 static bs_status look(doubts *d, const bs_mol *mol)
 {
     bs_status st = BS_OK;
@@ -88,7 +112,7 @@ static bs_status look(doubts *d, const bs_mol *mol)
         st = look_at_atom(d, mol, i);
     for (uint32_t i = 0; st == BS_OK && i < mol->bond_count; i++)
         st = look_at_bond(d, mol, i);
-    return st;
+    return st == BS_OK ? look_at_rings(d, mol) : st;
 }
 
 bs_status bs_mol_doubts(bs_ctx *cx, bs_arena *home, const bs_mol *mol, char ***texts, int *count)

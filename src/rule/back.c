@@ -40,7 +40,8 @@ typedef struct back {
     int room;
 } back;
 
-/* ---- Precursors ------------------------------------------------------------------------------- */
+/* ---- Precursors -------------------------------------------------------------------------------
+ */
 
 /* A salt of two molecules. */
 static bs_status join_ions(bs_ctx *cx, bs_arena *home, const bs_mol *a, const bs_mol *b,
@@ -79,12 +80,12 @@ static bs_status join_ions(bs_ctx *cx, bs_arena *home, const bs_mol *a, const bs
     return st;
 }
 
-/* Whether no atom of a part of the precursors comes from the target: a counter-ion, or a reagent. */
+/* Whether no atom of a part of the precursors comes from the target: a counter-ion, or a reagent.
+ */
 static bool is_added(const bs_case *kase, int part)
 {
     for (int i = 0; i < kase->source.atom_count; i++) {
-        if (kase->source.atoms[i].part == part &&
-            kase->back.to_slot[i] < kase->target.atom_count)
+        if (kase->source.atoms[i].part == part && kase->back.to_slot[i] < kase->target.atom_count)
             return false;
     }
     return true;
@@ -173,7 +174,8 @@ static bs_status find_inputs(bs_ctx *cx, back *b, const bs_result *result, char 
     return st;
 }
 
-/* ---- Steps -------------------------------------------------------------------------------------- */
+/* ---- Steps --------------------------------------------------------------------------------------
+ */
 
 static bs_status make_room(bs_ctx *cx, back *b)
 {
@@ -230,7 +232,8 @@ static bs_status add_step(bs_ctx *cx, back *b, const inputs *list, const uint32_
     return BS_OK;
 }
 
-/* ---- One result of a case --------------------------------------------------------------------------- */
+/* ---- One result of a case
+ * --------------------------------------------------------------------------- */
 
 static bs_status is_allowed(bs_ctx *cx, back *b, const uint32_t *where, bool *allowed)
 {
@@ -289,6 +292,23 @@ static bool holds_product(const back *b, const inputs *list)
     return false;
 }
 
+/* Whether a precursor has a bond that its rings cannot hold; what the product has may stay. */
+static bs_status is_strained(bs_ctx *cx, const back *b, const bs_result *result, bool *strained)
+{
+    bs_strain kind = BS_STRAIN_NONE;
+    int bond;
+    bs_status st = BS_OK;
+
+    for (int i = 0; i < result->product_count && st == BS_OK && kind == BS_STRAIN_NONE; i++)
+        st = bs_mol_strain(cx, result->products[i], 0, &kind, &bond);
+    *strained = kind != BS_STRAIN_NONE;
+    if (st == BS_OK && *strained) {
+        st = bs_mol_strain(cx, b->piece->mol, 0, &kind, &bond);
+        *strained = kind == BS_STRAIN_NONE;
+    }
+    return st;
+}
+
 static bs_status take_result(void *payload, bs_ctx *cx, const uint32_t *where,
                              const bs_result *result, bool *keep)
 {
@@ -296,11 +316,12 @@ static bs_status take_result(void *payload, bs_ctx *cx, const uint32_t *where,
     bs_verdict verdict = {.passed = true};
     inputs list;
     char **smiles;
-    bool fresh;
+    bool fresh, strained;
     int index;
     bs_status st;
 
-    if ((st = is_allowed(cx, b, where, &fresh)) != BS_OK || !fresh)
+    if ((st = is_strained(cx, b, result, &strained)) != BS_OK || strained ||
+        (st = is_allowed(cx, b, where, &fresh)) != BS_OK || !fresh)
         return st;
     if ((st = bs_result__smiles(cx, b->home, result, &smiles)) != BS_OK ||
         (st = find_inputs(cx, b, result, smiles, &list)) != BS_OK)
@@ -319,7 +340,9 @@ static bs_status take_result(void *payload, bs_ctx *cx, const uint32_t *where,
     return add_step(cx, b, &list, where, &verdict);
 }
 
-/* ---- All ----------------------------------------------------------------------------------------------- */
+/* ---- All
+ * -----------------------------------------------------------------------------------------------
+ */
 
 static bs_status run_transform(bs_ctx *cx, back *b, int index)
 {
@@ -380,7 +403,11 @@ bs_status bs_rules_back(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int t
 {
     bs_mark kept = bs_arena_mark(home);
     bs_mark temp = bs_arena_mark(&cx->scratch);
-    back b = {.home = home, .rules = rules, .hooks = hooks, .flags = flags, .whole = product,
+    back b = {.home = home,
+              .rules = rules,
+              .hooks = hooks,
+              .flags = flags,
+              .whole = product,
               .steps = out};
     bs_status st;
 

@@ -20,16 +20,20 @@ static book new_book(void **state)
 static void add_synthon(book *b, const char *name, bs_synthon_kind kind,
                         const bs_equivalent_def *equivalents, int count)
 {
-    bs_synthon_def def = {.name = name, .kind = kind, .equivalents = equivalents,
-                          .equivalent_count = count};
+    bs_synthon_def def = {
+        .name = name, .kind = kind, .equivalents = equivalents, .equivalent_count = count};
 
     check_ok(b->f, bs_rules_add_synthon(&b->f->cx, b->rules, &def));
 }
 
 static int add_from(book *b, const char *name, const char *target, const char *from)
 {
-    bs_transform_def def = {.name = name, .kind = BS_INTERCONVERSION, .target = target,
-                            .from = from, .hook_when = -1, .hook_prefer = -1};
+    bs_transform_def def = {.name = name,
+                            .kind = BS_INTERCONVERSION,
+                            .target = target,
+                            .from = from,
+                            .hook_when = -1,
+                            .hook_prefer = -1};
     int index = -1;
 
     check_ok(b->f, bs_rules_add_transform(&b->f->cx, b->rules, &def, &index));
@@ -39,9 +43,14 @@ static int add_from(book *b, const char *name, const char *target, const char *f
 static int add_cut(book *b, const char *name, const char *target, int acceptor_map,
                    const char *acceptor, int donor_map, const char *donor)
 {
-    bs_transform_def def = {.name = name, .target = target, .cut = {acceptor_map, donor_map},
-                            .acceptor_map = acceptor_map, .donor_map = donor_map,
-                            .acceptor = acceptor, .donor = donor, .hook_when = -1,
+    bs_transform_def def = {.name = name,
+                            .target = target,
+                            .cut = {acceptor_map, donor_map},
+                            .acceptor_map = acceptor_map,
+                            .donor_map = donor_map,
+                            .acceptor = acceptor,
+                            .donor = donor,
+                            .hook_when = -1,
                             .hook_prefer = -1};
     int index = -1;
 
@@ -143,8 +152,7 @@ static void ketone_reduction__leaves_the_new_centre_open(void **state)
 static void hydration__lists_the_other_regioisomer_as_rival(void **state)
 {
     book b = new_book(state);
-    int acid = add_from(&b, "acid hydration", "[CX4;H0,H1:1]([OX2H:3])[CX4;H3:2]",
-                        "[C:1]=[C:2]");
+    int acid = add_from(&b, "acid hydration", "[CX4;H0,H1:1]([OX2H:3])[CX4;H3:2]", "[C:1]=[C:2]");
     int boron = add_from(&b, "hydroboration", "[CX4;H2:1]([OX2H:3])[CX4;!H0:2]", "[C:1]=[C:2]");
     bs_steps steps = back(&b, acid, "CCCC(C)O");
     bs_product_sets sets;
@@ -186,8 +194,9 @@ static void lindlar__makes_the_z_alkene_only(void **state)
 static void osmylation__makes_cis_diols_only(void **state)
 {
     book b = new_book(state);
-    int index = add_from(&b, "osmylation", "[#6;R:5][C@;X4;H1;R:1]([OX2H1])[C@;X4;H1;R:3]([OX2H1])[#6;R:6]",
-                         "[#6;R:5][CX3;H1;R:1]=[CX3;H1;R:3][#6;R:6]");
+    int index =
+        add_from(&b, "osmylation", "[#6;R:5][C@;X4;H1;R:1]([OX2H1])[C@;X4;H1;R:3]([OX2H1])[#6;R:6]",
+                 "[#6;R:5][CX3;H1;R:1]=[CX3;H1;R:3][#6;R:6]");
 
     assert_int_equal(back(&b, index, "O[C@@H]1CCCC[C@@H]1O").count, 1);
     assert_int_equal(back(&b, index, "O[C@@H]1CCCC[C@H]1O").count, 0);
@@ -216,7 +225,8 @@ static void mitsunobu__turns_either_hand(void **state)
     bs_rules_free(b.rules);
 }
 
-/* ---- Disconnections ---------------------------------------------------------------------------- */
+/* ---- Disconnections ----------------------------------------------------------------------------
+ */
 
 static const bs_equivalent_def halides[] = {{.attach = "Br"}, {.attach = "Cl"}};
 static const bs_equivalent_def proton[] = {{.attach = "[H]"}};
@@ -256,8 +266,8 @@ static void williamson__gives_ethers_from_both_sides(void **state)
 
     add_synthon(&b, "alkyl", BS_ACCEPTOR, halides, 1);
     add_synthon(&b, "alcohol", BS_DONOR, proton, 1);
-    index = add_cut(&b, "Williamson ether", "[CX4;H2,H3:1]-!@[OX2:2][#6:3]", 1, "alkyl", 2,
-                    "alcohol");
+    index =
+        add_cut(&b, "Williamson ether", "[CX4;H2,H3:1]-!@[OX2:2][#6:3]", 1, "alkyl", 2, "alcohol");
     steps = back(&b, index, "CCOCCC");
     assert_int_equal(steps.count, 2);
     assert_true(has_step(&b, &steps, "CCBr", "CCCO"));
@@ -383,7 +393,8 @@ static void aldol__counts_equal_halves(void **state)
     steps = back(&b, index, "OC(c1ccccc1)CC(C)=O");
     assert_int_equal(steps.count, 1);
     assert_true(has_step(&b, &steps, "O=Cc1ccccc1", "CC(C)=O"));
-    /* Acetone with itself, and benzaldehyde at the other carbon of acetone, are the same or more. */
+    /* Acetone with itself, and benzaldehyde at the other carbon of acetone, are the same or more.
+     */
     assert_true(has_rival(&b, &steps.items[0], "CC(=O)CC(O)c1ccccc1") == false);
     bs_rules_free(b.rules);
 }
@@ -410,14 +421,19 @@ static void intramolecular_cut__leaves_one_molecule(void **state)
     bs_rules_free(b.rules);
 }
 
-/* ---- The book ------------------------------------------------------------------------------------- */
+/* ---- The book
+ * ------------------------------------------------------------------------------------- */
 
 static void names__ignore_case_spaces_and_hyphens(void **state)
 {
     book b = new_book(state);
     static const char *also[] = {"Other Name"};
-    bs_transform_def def = {.name = "ketone-reduction", .also = {also, 1}, .target = "[C:1]O",
-                            .from = "[C:1]=O", .hook_when = -1, .hook_prefer = -1};
+    bs_transform_def def = {.name = "ketone-reduction",
+                            .also = {also, 1},
+                            .target = "[C:1]O",
+                            .from = "[C:1]=O",
+                            .hook_when = -1,
+                            .hook_prefer = -1};
     int index = -1;
 
     check_ok(b.f, bs_rules_add_transform(&b.f->cx, b.rules, &def, &index));
@@ -452,14 +468,29 @@ static void definitions__mistakes_name_the_field(void **state)
     check_refused(&b, (bs_transform_def){.target = "[C:1]", .from = "[C:2]"}, BS_EVALUE,
                   "map number 2");
     check_refused(&b, (bs_transform_def){.target = "[C:1]"}, BS_EVALUE, "from or cut");
-    check_refused(&b, (bs_transform_def){.target = "[C:1][N:2]", .cut = {1, 3}, .acceptor_map = 1,
-                                         .donor_map = 3, .acceptor = "alkyl", .donor = "amine"},
+    check_refused(&b,
+                  (bs_transform_def){.target = "[C:1][N:2]",
+                                     .cut = {1, 3},
+                                     .acceptor_map = 1,
+                                     .donor_map = 3,
+                                     .acceptor = "alkyl",
+                                     .donor = "amine"},
                   BS_EVALUE, "cut:");
-    check_refused(&b, (bs_transform_def){.target = "[C:1][N:2]", .cut = {1, 2}, .acceptor_map = 1,
-                                         .donor_map = 2, .acceptor = "aryl", .donor = "amine"},
+    check_refused(&b,
+                  (bs_transform_def){.target = "[C:1][N:2]",
+                                     .cut = {1, 2},
+                                     .acceptor_map = 1,
+                                     .donor_map = 2,
+                                     .acceptor = "aryl",
+                                     .donor = "amine"},
                   BS_ENOTFOUND, "aryl");
-    check_refused(&b, (bs_transform_def){.target = "[C:1][N:2]", .cut = {1, 2}, .acceptor_map = 1,
-                                         .donor_map = 2, .acceptor = "amine", .donor = "amine"},
+    check_refused(&b,
+                  (bs_transform_def){.target = "[C:1][N:2]",
+                                     .cut = {1, 2},
+                                     .acceptor_map = 1,
+                                     .donor_map = 2,
+                                     .acceptor = "amine",
+                                     .donor = "amine"},
                   BS_EVALUE, "donor");
     bs_rules_free(b.rules);
 }
@@ -481,7 +512,8 @@ static void synthons__mistakes_name_the_field(void **state)
     bs_rules_free(b.rules);
 }
 
-/* ---- Hooks ------------------------------------------------------------------------------------------ */
+/* ---- Hooks
+ * ------------------------------------------------------------------------------------------ */
 
 static bs_status fewer_carbons(void *payload, bs_ctx *cx, int hook, const bs_mol *product,
                                const bs_site *site, bool *allowed)
@@ -507,19 +539,22 @@ static void hooks__decide_and_order(void **state)
 {
     book b = new_book(state);
     bs_rule_hooks hooks = {NULL, fewer_carbons, score_carbons};
-    bs_transform_def def = {.name = "hydroboration", .target = "[CX4:1]([OX2H:3])[CX4;!H0:2]",
-                            .from = "[C:1]=[C:2]", .hook_when = 7, .hook_prefer = 8};
+    bs_transform_def def = {.name = "hydroboration",
+                            .target = "[CX4:1]([OX2H:3])[CX4;!H0:2]",
+                            .from = "[C:1]=[C:2]",
+                            .hook_when = 7,
+                            .hook_prefer = 8};
     const bs_mol *alkene = read_mol(b.f, "CC(C)=CC");
     bs_product_sets sets;
     bs_steps steps;
     int index = -1;
 
     check_ok(b.f, bs_rules_add_transform(&b.f->cx, b.rules, &def, &index));
-    check_ok(b.f, bs_rules_back(&b.f->cx, &b.f->home, b.rules, index,
-                                read_mol(b.f, "CC(O)C(C)C"), &hooks, 0, &steps));
+    check_ok(b.f, bs_rules_back(&b.f->cx, &b.f->home, b.rules, index, read_mol(b.f, "CC(O)C(C)C"),
+                                &hooks, 0, &steps));
     assert_true(has_step(&b, &steps, "CC(C)=CC", NULL));
-    check_ok(b.f, bs_rules_back(&b.f->cx, &b.f->home, b.rules, index,
-                                read_mol(b.f, "CC(C)(O)CC"), &hooks, 0, &steps));
+    check_ok(b.f, bs_rules_back(&b.f->cx, &b.f->home, b.rules, index, read_mol(b.f, "CC(C)(O)CC"),
+                                &hooks, 0, &steps));
     assert_int_equal(steps.count, 0);
     check_ok(b.f, bs_rules_forth(&b.f->cx, &b.f->home, b.rules, index, &alkene, 1, &hooks, &sets));
     assert_int_equal(sets.count, 2);
@@ -532,13 +567,19 @@ static void hooks__decide_and_order(void **state)
 
 static bs_status use_book_once(fixture *f, const bs_mol *product, const bs_mol *const *given)
 {
-    bs_synthon_def acceptor = {.name = "a", .kind = BS_ACCEPTOR, .equivalents = carbonyl,
-                               .equivalent_count = 1};
-    bs_synthon_def donor = {.name = "d", .kind = BS_DONOR, .equivalents = sodium,
-                            .equivalent_count = 1};
-    bs_transform_def def = {.name = "cyanohydrin", .target = "[CX4:1]([OX2H:3])-!@[C:2]#[N:4]",
-                            .cut = {1, 2}, .acceptor_map = 1, .donor_map = 2, .acceptor = "a",
-                            .donor = "d", .hook_when = -1, .hook_prefer = -1};
+    bs_synthon_def acceptor = {
+        .name = "a", .kind = BS_ACCEPTOR, .equivalents = carbonyl, .equivalent_count = 1};
+    bs_synthon_def donor = {
+        .name = "d", .kind = BS_DONOR, .equivalents = sodium, .equivalent_count = 1};
+    bs_transform_def def = {.name = "cyanohydrin",
+                            .target = "[CX4:1]([OX2H:3])-!@[C:2]#[N:4]",
+                            .cut = {1, 2},
+                            .acceptor_map = 1,
+                            .donor_map = 2,
+                            .acceptor = "a",
+                            .donor = "d",
+                            .hook_when = -1,
+                            .hook_prefer = -1};
     bs_rules *rules = NULL;
     bs_steps steps = {0};
     bs_product_sets sets = {0};
@@ -582,6 +623,20 @@ static void book__every_failed_allocation_is_rolled_back(void **state)
     assert_int_equal(st, BS_OK);
 }
 
+/* Dehydration cannot be read backwards or forwards into a bridgehead alkene: Bredt's rule. */
+static void back__makes_no_bridgehead_alkene(void **state)
+{
+    book b = new_book(state);
+    int hydrogenation = add_from(&b, "hydrogenation", "[CX4:1][CX4;!H0:2]", "[C:1]=[C:2]");
+    bs_steps steps = back(&b, hydrogenation, "C1CC2CCC1C2");
+
+    assert_int_equal(steps.count, 1);
+    assert_string_equal(steps.items[0].smiles[0], canonical(b.f, "C1=CC2CCC1C2"));
+    steps = back(&b, hydrogenation, "C1CC2CCCC(C1)CCC2");
+    assert_true(steps.count > 1);
+    bs_rules_free(b.rules);
+}
+
 int main(void)
 {
     const struct CMUnitTest tests[] = {
@@ -604,6 +659,7 @@ int main(void)
         check_case(definitions__mistakes_name_the_field),
         check_case(synthons__mistakes_name_the_field),
         check_case(hooks__decide_and_order),
+        check_case(back__makes_no_bridgehead_alkene),
         check_case(book__every_failed_allocation_is_rolled_back),
     };
 
