@@ -1,7 +1,6 @@
 /* Growing the hypergraph: meeting molecules, merging proposals, and the ends of the search. */
 #include "search/explore.h"
 
-#include "search/frontier.h"
 #include "search/lane.h"
 
 #include <math.h>
@@ -36,6 +35,7 @@ void bs_explore__init(bs_explore *x, bs_ctx *cx, const bs_explore_calls *calls,
     bs_arena_init(&x->arena, cx->gate);
     bs_graph__init(&x->graph, cx);
     bs_map_init(&x->index, cx);
+    bs_frontier__init(&x->front, &x->graph, mode);
 }
 
 void bs_explore__free(bs_explore *x)
@@ -43,6 +43,7 @@ void bs_explore__free(bs_explore *x)
     bs_gate *gate = x->cx->gate;
 
     bs_map_free(&x->index);
+    bs_frontier__free(&x->front);
     bs_graph__free(&x->graph);
     bs_gate_free(gate, x->nodes, x->node_room * sizeof *x->nodes);
     bs_gate_free(gate, x->check, x->check_room * sizeof *x->check);
@@ -199,46 +200,59 @@ static bs_status add_proposal(bs_explore *x, uint32_t product, uint32_t since,
 }
 
 /*
- * Merges what the expansion of a molecule gave. Steps apart come first in it, so that ways added
- * after them never join one: `since` is the first way that may be joined.
+ * Merges what the expansion of a molecule gave, or the rest of it after a limit or a stop cut it
+ * short. Steps apart come first in it, so that ways added after them never join one: x->since
+ * is the first way that may be joined.
  */
 static bs_status merge(bs_explore *x, uint32_t mol, bs_proposals *found)
 {
     bs_status st = BS_OK;
-    uint32_t since = x->graph.way_count;
 
-    for (int i = 0; st == BS_OK && i < found->count; i++) {
-        bs_proposal *p = &found->items[i];
+    if (!x->partial) {
+        x->next_proposal = 0;
+        x->since = x->graph.way_count;
+    }
+    x->partial = true;
+    for (; x->next_proposal < found->count; x->next_proposal++) {
+        bs_proposal *p = &found->items[x->next_proposal];
         bool admitted = true;
 
         if (p->count < 1)
             continue;
+        x->crowded = !has_room(x, p);
+        if (x->crowded)
+            return BS_OK;
         if (x->calls.admit)
             st = x->calls.admit(x->calls.payload, x->cx, x->nodes[mol].smiles, p, &admitted);
-        if (st != BS_OK || !admitted)
-            continue;
-        if (!has_room(x, p)) {
-            x->crowded = true;
-            continue;
-        }
-        st = add_proposal(x, mol, since, p);
+        if (st == BS_OK && admitted)
+            st = add_proposal(x, mol, x->since, p);
+        if (st != BS_OK)
+            return st;
         if (p->apart)
-            since = x->graph.way_count;
+            x->since = x->graph.way_count;
     }
-    return st;
+    x->partial = false;
+    return BS_OK;
 }
 
-/* Merges the answer of a job; one of BS_ELIMIT is counted and passed over. */
+/*
+ * Merges the answer of a job; one of BS_ELIMIT is counted and passed over. A molecule whose answer
+ * was cut short is still to be expanded.
+ */
 static bs_status take_answer(bs_explore *x, uint32_t mol, bs_lane_job *job)
 {
     bs_status st = job->status;
 
-    x->nodes[mol].expanded = true;
-    x->expanded++;
     if (st != BS_OK)
         x->cx->error = job->error;
     else
         st = merge(x, mol, &job->found);
+    if (st == BS_ESTOPPED || x->crowded)
+        return st;
+    x->partial = false;
+    x->nodes[mol].expanded = true;
+    x->expanded++;
+    x->front.picked_at++;
     if (st == BS_ELIMIT) {
         x->failed++;
         st = BS_OK;
@@ -268,29 +282,29 @@ static bool is_over(bs_explore *x)
 }
 
 /* Asks `enough`, now and then: it is dear, since it counts routes. */
-static bs_status ask_enough(bs_explore *x, const bs_frontier *front, bool *done)
+static bs_status ask_enough(bs_explore *x, bool *done)
 {
-    double bound;
+    double cheapest = x->front.had.items[0].value, bound;
     bs_status st;
 
     *done = false;
-    if (!x->calls.enough || isinf(front->cheapest) || x->expanded < x->next_enough)
+    if (!x->calls.enough || isinf(cheapest) || x->expanded < x->next_enough)
         return BS_OK;
-    if ((st = bs_frontier__bound(x, &bound)) != BS_OK || bound < front->cheapest)
-        return st;
     x->next_enough = x->expanded + x->expanded / 4 + 1;
+    if ((st = bs_frontier__bound(x, &bound)) != BS_OK || bound < cheapest)
+        return st;
     return x->calls.enough(x->calls.payload, x->cx, bound, done);
 }
 
-static void report(const bs_explore *x, const bs_frontier *front)
+static void report(const bs_explore *x)
 {
     bs_plan_progress now = {
         .molecules = x->graph.mol_count,
         .expanded = x->expanded,
         .steps = x->graph.step_count,
-        .open = front->open,
+        .open = x->front.open,
         .seconds = bs_explore__clock() - x->started,
-        .solved = isfinite(front->cheapest),
+        .solved = isfinite(x->front.had.items[0].value),
     };
 
     if (x->calls.progress)
@@ -298,35 +312,37 @@ static void report(const bs_explore *x, const bs_frontier *front)
 }
 
 /*
- * Expands a batch. With one thread each molecule is merged before the next is expanded, so that a
- * limit of time is heeded between them; what is merged is the same.
+ * Expands what is left of the batch. With one thread each molecule is merged before the next is
+ * expanded, so that a limit of time is heeded between them; what is merged is the same.
  */
-static bs_status expand_batch(bs_explore *x, bs_arena *home, const bs_frontier *front, bool *over)
+static bs_status expand_batch(bs_explore *x, bs_arena *home, bool *over)
 {
+    uint32_t first = x->front.picked_at, last = x->front.picked_count;
+    int count = (int)(last - first);
     bs_lane_job *jobs;
-    bs_status st = bs_new(x->cx, home, front->picked_count, &jobs);
+    bs_status st = bs_new(x->cx, home, count, &jobs);
 
     if (st != BS_OK)
         return st;
-    for (int i = 0; i < front->picked_count; i++) {
-        const bs_explore_node *node = &x->nodes[front->picked[i]];
+    for (int i = 0; i < count; i++) {
+        const bs_explore_node *node = &x->nodes[x->front.picked[first + (uint32_t)i]];
 
         jobs[i].smiles = node->smiles;
         jobs[i].closed = node->closed;
-        jobs[i].lane = i % x->limits.lanes;
+        jobs[i].lane = (int)(first + (uint32_t)i) % x->limits.lanes;
         bs_arena_init(&jobs[i].home, x->cx->gate);
     }
     if (x->limits.threads > 1)
-        st = bs_lane__run_all(x, jobs, front->picked_count);
-    for (int i = 0; st == BS_OK && !*over && i < front->picked_count; i++) {
+        st = bs_lane__run_all(x, jobs, count);
+    for (int i = 0; st == BS_OK && !*over && i < count; i++) {
         if (!jobs[i].ran && x->limits.threads <= 1)
             bs_lane__run(x, x->cx, &jobs[i]);
         if (jobs[i].ran)
-            st = take_answer(x, front->picked[i], &jobs[i]);
+            st = take_answer(x, x->front.picked[first + (uint32_t)i], &jobs[i]);
         *over = st == BS_OK && is_over(x);
         bs_arena_free(&jobs[i].home);
     }
-    for (int i = 0; i < front->picked_count; i++)
+    for (int i = 0; i < count; i++)
         bs_arena_free(&jobs[i].home);
     return st;
 }
@@ -334,27 +350,27 @@ static bs_status expand_batch(bs_explore *x, bs_arena *home, const bs_frontier *
 /* One round: look, perhaps end, expand a batch. */
 static bs_status go_round(bs_explore *x, bs_arena *home, bool *over)
 {
-    bs_frontier front;
     bool done = false;
-    bs_status st = bs_frontier__look(x, home, &front);
+    bs_status st;
 
-    if (st != BS_OK)
-        return st;
-    report(x, &front);
-    x->too_deep = front.too_deep;
-    if (front.picked_count == 0) {
-        x->end = BS_END_EXHAUSTED;
-        *over = true;
-        return BS_OK;
+    if (x->front.picked_at == x->front.picked_count) {
+        if ((st = bs_frontier__look(x)) != BS_OK)
+            return st;
+        report(x);
+        if (x->front.picked_count == 0) {
+            x->end = BS_END_EXHAUSTED;
+            *over = true;
+            return BS_OK;
+        }
+        if ((st = ask_enough(x, &done)) != BS_OK)
+            return st;
     }
-    if ((st = ask_enough(x, &front, &done)) != BS_OK)
-        return st;
     if (done) {
         x->end = BS_END_ENOUGH;
         *over = true;
         return BS_OK;
     }
-    return expand_batch(x, home, &front, over);
+    return expand_batch(x, home, over);
 }
 
 bs_status bs_explore__run(bs_explore *x, const bs_mol *target, const char *smiles)
@@ -365,8 +381,9 @@ bs_status bs_explore__run(bs_explore *x, const bs_mol *target, const char *smile
 
     if (x->limits.batch < 1 || x->limits.lanes < 1 || x->limits.threads < 1)
         return bs_fail(x->cx, BS_EBUG, "batch, lanes and threads must be 1 or more");
+    x->started = bs_explore__clock();
     st = meet(x, target, smiles, &mol);
-    if (st == BS_OK)
+    if (st == BS_OK && !x->nodes[mol].expanded)
         x->nodes[mol].closed = false; /* the target is always worth it */
     while (st == BS_OK && !over) {
         bs_arena round;

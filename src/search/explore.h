@@ -11,7 +11,7 @@
 
 #include "backsaw/search.h"
 #include "core/map.h"
-#include "search/graph.h"
+#include "search/frontier.h"
 
 /* A way to make the molecule that is being expanded. */
 typedef struct bs_proposal {
@@ -77,6 +77,7 @@ typedef struct bs_explore_node {
     double guess;
     uint32_t depth; /* steps from the target at least; as of the last look at the frontier */
     bool expanded, urgent, closed;
+    bool open; /* it could be expanded, as of that look */
 } bs_explore_node;
 
 typedef enum bs_explore_end {
@@ -88,7 +89,7 @@ typedef enum bs_explore_end {
     BS_END_STOPPED
 } bs_explore_end;
 
-typedef struct bs_explore {
+struct bs_explore {
     bs_ctx *cx;
     bs_explore_calls calls;
     bs_explore_limits limits;
@@ -103,17 +104,24 @@ typedef struct bs_explore {
     double started;
     uint32_t expanded;
     uint32_t failed;   /* molecules that `expand` had no answer for */
-    uint32_t too_deep; /* molecules left alone for their depth, at the end */
-    bool crowded;      /* a proposal was left out for the limit of molecules */
+    bs_frontier front;
+    bool crowded; /* a proposal was put off for the limit of molecules */
+    bool partial; /* the molecule at hand was cut short: its next proposal is ... */
+    int next_proposal;
+    uint32_t since; /* ... and it may join ways from this on */
     uint32_t next_enough; /* ask `enough` when so many are expanded */
     bs_explore_end end;
-} bs_explore;
+};
 
 void bs_explore__init(bs_explore *x, bs_ctx *cx, const bs_explore_calls *calls,
                       const bs_explore_limits *limits, bs_cost_mode mode);
 void bs_explore__free(bs_explore *x);
 
-/* Explores from a target until an end is reached, which is in x->end. */
+/*
+ * Explores from a target until an end is reached, which is in x->end. Called again, perhaps after
+ * x->limits were changed, it goes on from there. A search that was cut short by a limit of
+ * molecules and goes on grows the graph that it would have grown in one go.
+ */
 bs_status bs_explore__run(bs_explore *x, const bs_mol *target, const char *smiles);
 
 /* The molecule with this SMILES, or BS_GRAPH_NONE. */

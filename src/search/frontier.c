@@ -2,20 +2,36 @@
 #include "search/frontier.h"
 
 #include "search/cheapest.h"
+#include "search/explore.h"
 
 #include <math.h>
-#include <stdlib.h>
+#include <string.h>
 
-/* The top-down half: the cheapest route through each molecule. */
-typedef struct look {
-    bs_explore *x;
-    bs_cheapest work;
-    double *leaf;    /* price, or guess of what is open */
-    double *through; /* cost of the cheapest route through the molecule */
-    double *moles;   /* of it that this route needs for a mole of target */
-    bool *done;
-    bs_heap heap;
-} look;
+void bs_frontier__init(bs_frontier *front, const bs_graph *graph, bs_cost_mode mode)
+{
+    *front = (bs_frontier){.depth = 0};
+    bs_values__init(&front->had, graph, mode, false);
+    bs_values__init(&front->hoped, graph, mode, false);
+}
+
+void bs_frontier__free(bs_frontier *front)
+{
+    bs_ctx *cx;
+
+    if (!front->had.graph)
+        return;
+    cx = front->had.graph->cx;
+    bs_gate_free(cx->gate, front->reach, front->reach_room * sizeof *front->reach);
+    bs_gate_free(cx->gate, front->picked, front->picked_room * sizeof *front->picked);
+    bs_heap__free(&front->urgent, cx);
+    bs_heap__free(&front->heap, cx);
+    bs_heap__free(&front->ready, cx);
+    bs_values__free(&front->had);
+    bs_values__free(&front->hoped);
+    *front = (bs_frontier){.depth = 0};
+}
+
+/* ---- Taking in what is new ------------------------------------------------------------------- */
 
 static bool is_open(const bs_explore *x, uint32_t mol)
 {
@@ -24,195 +40,225 @@ static bool is_open(const bs_explore *x, uint32_t mol)
     return !node->expanded && (!node->closed || node->urgent) && node->depth < x->limits.depth;
 }
 
-/* ---- Depth --------------------------------------------------------------------------------- */
-
-/* Breadth first from the target, over all ways. */
-static bs_status find_depths(bs_explore *x)
+/* Sees whether a molecule is open, and puts its guess in or out. */
+static bs_status refresh(bs_explore *x, uint32_t mol)
 {
-    bs_arena *scratch = &x->cx->scratch;
-    bs_mark temp = bs_arena_mark(scratch);
-    uint32_t head = 0, tail = 0, *queue;
-    bs_status st = bs_new(x->cx, scratch, x->graph.mol_count, &queue);
+    bs_frontier *front = &x->front;
+    bs_explore_node *node = &x->nodes[mol];
+    double price = x->graph.mols[mol].price;
+    bool open = is_open(x, mol);
+    bs_status st;
 
-    if (st != BS_OK)
-        return st;
-    for (uint32_t m = 1; m < x->graph.mol_count; m++)
-        x->nodes[m].depth = UINT32_MAX;
-    x->nodes[0].depth = 0;
-    queue[tail++] = 0;
-    while (head < tail) {
-        uint32_t mol = queue[head++];
+    if (open == node->open)
+        return BS_OK;
+    node->open = open;
+    front->open += open ? 1 : -1u;
+    st = bs_values__set_leaf(&front->hoped, mol, open && isinf(price) ? node->guess : price);
+    if (st == BS_OK && open && node->urgent)
+        st = bs_heap__push(&front->urgent, x->cx, 0, mol);
+    return st;
+}
 
-        for (uint32_t w = x->graph.mols[mol].first_way; w != BS_GRAPH_NONE;
-             w = x->graph.ways[w].next) {
-            const bs_graph_way *way = &x->graph.ways[w];
+static bs_status offer_depth(bs_explore *x, uint32_t mol, uint32_t depth)
+{
+    if (depth >= x->nodes[mol].depth)
+        return BS_OK;
+    x->nodes[mol].depth = depth;
+    return bs_heap__push(&x->front.heap, x->cx, depth, mol);
+}
 
-            for (uint32_t use = way->first; use < way->first + way->count; use++) {
-                bs_explore_node *need = &x->nodes[x->graph.uses[use].mol];
+static bs_status pass_depth(bs_explore *x, uint32_t way)
+{
+    const bs_graph_way *w = &x->graph.ways[way];
+    uint32_t depth = x->nodes[w->product].depth;
+    bs_status st = BS_OK;
 
-                if (need->depth != UINT32_MAX)
-                    continue;
-                need->depth = x->nodes[mol].depth + 1;
-                queue[tail++] = x->graph.uses[use].mol;
-            }
-        }
+    for (uint32_t use = w->first; st == BS_OK && use < w->first + w->count; use++)
+        st = offer_depth(x, x->graph.uses[use].mol, depth + 1);
+    return st;
+}
+
+/* New ways make molecules less deep, and those below them; what was too deep may become open. */
+static bs_status spread_depths(bs_explore *x)
+{
+    bs_frontier *front = &x->front;
+    bs_status st = front->mols == 0 ? offer_depth(x, 0, 0) : BS_OK;
+
+    for (; st == BS_OK && front->ways < x->graph.way_count; front->ways++) {
+        if (x->nodes[x->graph.ways[front->ways].product].depth != UINT32_MAX)
+            st = pass_depth(x, front->ways);
     }
-    bs_arena_rewind(scratch, temp);
-    return BS_OK;
+    while (st == BS_OK && front->heap.count > 0) {
+        bs_heap_entry top = bs_heap__pop(&front->heap);
+
+        if (top.key > x->nodes[top.item].depth)
+            continue;
+        st = refresh(x, top.item);
+        for (uint32_t w = x->graph.mols[top.item].first_way; st == BS_OK && w != BS_GRAPH_NONE;
+             w = x->graph.ways[w].next)
+            st = pass_depth(x, w);
+    }
+    return st;
+}
+
+/* Brings everything up to date after an expansion, or with another limit of depth. */
+static bs_status take_in(bs_explore *x)
+{
+    bs_frontier *front = &x->front;
+    bs_status st;
+
+    front->heap.count = 0;
+    if ((st = bs_graph__reserve(x->cx, &front->reach, &front->reach_room, x->graph.mol_count,
+                                sizeof *front->reach)) != BS_OK ||
+        (st = bs_values__grow(&front->had)) != BS_OK ||
+        (st = bs_values__grow(&front->hoped)) != BS_OK)
+        return st;
+    for (uint32_t m = front->mols; m < x->graph.mol_count; m++)
+        front->reach[m] = (bs_reach){.look = 0};
+    for (uint32_t i = 0; st == BS_OK && i < front->picked_count; i++)
+        st = refresh(x, front->picked[i]);
+    if (st == BS_OK)
+        st = spread_depths(x);
+    front->mols = x->graph.mol_count;
+    for (uint32_t m = 0; st == BS_OK && front->depth != x->limits.depth && m < front->mols; m++)
+        st = refresh(x, m);
+    front->depth = x->limits.depth;
+    if (st == BS_OK)
+        st = bs_values__settle(&front->had);
+    return st == BS_OK ? bs_values__settle(&front->hoped) : st;
 }
 
 /* ---- Through ------------------------------------------------------------------------------- */
 
-static bs_status push(look *l, double key, uint32_t mol)
+static bs_status reach(bs_explore *x, uint32_t mol, double through, double moles)
 {
-    return bs_heap__push(&l->heap, l->x->cx, key, mol);
+    bs_frontier *front = &x->front;
+    bs_reach *r = &front->reach[mol];
+
+    if (r->look == front->look && (r->done || !(through < r->through)))
+        return BS_OK;
+    *r = (bs_reach){.through = through, .moles = moles, .look = front->look};
+    return bs_heap__push(&front->heap, x->cx, through, mol);
 }
 
 /* Passes the best way down to `mol` on to what its ways need. */
-static bs_status pass_down(look *l, uint32_t mol)
+static bs_status pass_down(bs_explore *x, uint32_t mol)
 {
-    const bs_graph *graph = &l->x->graph;
+    const bs_graph *graph = &x->graph;
+    const bs_values *hoped = &x->front.hoped;
+    const bs_reach *r = &x->front.reach[mol];
     bs_status st = BS_OK;
 
     for (uint32_t w = graph->mols[mol].first_way; st == BS_OK && w != BS_GRAPH_NONE;
          w = graph->ways[w].next) {
         const bs_graph_way *way = &graph->ways[w];
-        double cost = bs_graph__way_cost(graph, w, l->x->mode, l->work.value);
-        double key = l->through[mol] + l->moles[mol] * fmax(0, cost - l->work.value[mol]);
+        double cost = bs_values__cost(hoped, w);
+        double key = r->through + r->moles * fmax(0, cost - hoped->items[mol].value);
 
-        for (uint32_t use = way->first;
-             st == BS_OK && isfinite(cost) && use < way->first + way->count; use++) {
-            uint32_t need = graph->uses[use].mol;
-
-            if (!(key < l->through[need]) || l->done[need])
-                continue;
-            l->through[need] = key;
-            l->moles[need] = l->moles[mol];
-            if (l->x->mode == BS_COST_PER_MOLE)
-                l->moles[need] *= graph->uses[use].equivalents / way->yield;
-            st = push(l, key, need);
-        }
-    }
-    return st;
-}
-
-static bs_status find_through(look *l)
-{
-    bs_status st;
-
-    if (!isfinite(l->work.value[0]))
-        return BS_OK;
-    l->through[0] = l->work.value[0];
-    l->moles[0] = 1;
-    st = push(l, l->through[0], 0);
-    while (st == BS_OK && l->heap.count > 0) {
-        bs_heap_entry top = bs_heap__pop(&l->heap);
-
-        if (l->done[top.item])
+        if (isinf(cost))
             continue;
-        l->done[top.item] = true;
-        st = pass_down(l, top.item);
+        for (uint32_t use = way->first; st == BS_OK && use < way->first + way->count; use++) {
+            double factor =
+                x->mode == BS_COST_PER_MOLE ? graph->uses[use].equivalents / way->yield : 1;
+
+            st = reach(x, graph->uses[use].mol, key, r->moles * factor);
+        }
     }
     return st;
 }
 
 /* ---- Picking ------------------------------------------------------------------------------- */
 
-static int by_key(const void *a, const void *b)
+static bool is_full(const bs_explore *x)
 {
-    const bs_heap_entry *x = a, *y = b;
+    return x->front.picked_count >= (uint32_t)x->limits.batch;
+}
 
-    if (x->key != y->key)
-        return x->key < y->key ? -1 : 1;
-    return (x->item > y->item) - (x->item < y->item);
+static void pick(bs_explore *x, uint32_t mol)
+{
+    x->front.picked[x->front.picked_count++] = mol;
 }
 
 /*
- * Sorts the open molecules. One that is sold is worth expanding only if made it could compete, so
- * it waits for the difference between its guess and its price.
+ * Settles the molecule at the top. If it is open, it waits for its turn; one that is sold is worth
+ * expanding only if made it could compete, so it waits for the difference between its guess and
+ * its price, too.
  */
-static bs_status pick(look *l, bs_arena *home, bs_frontier *out)
+static bs_status settle_top(bs_explore *x)
 {
-    bs_explore *x = l->x;
-    bs_arena *scratch = &x->cx->scratch;
-    bs_heap_entry *open;
-    bs_status st = bs_new(x->cx, scratch, x->graph.mol_count, &open);
+    bs_frontier *front = &x->front;
+    bs_heap_entry top = bs_heap__pop(&front->heap);
+    bs_reach *r = &front->reach[top.item];
+    const bs_explore_node *node = &x->nodes[top.item];
+    double price = x->graph.mols[top.item].price, wait = 0;
+    bs_status st = BS_OK;
 
-    if (st != BS_OK)
-        return st;
-    for (uint32_t m = 0; m < x->graph.mol_count; m++) {
-        const bs_explore_node *node = &x->nodes[m];
-        double key = l->through[m];
-
-        if (!isfinite(key) || node->expanded || (node->closed && !node->urgent))
-            continue;
-        if (!is_open(x, m)) {
-            out->too_deep++;
-            continue;
-        }
-        if (isfinite(x->graph.mols[m].price))
-            key += l->moles[m] * fmax(0, node->guess - x->graph.mols[m].price);
-        open[out->open++] = (bs_heap_entry){node->urgent ? -1 : key, m};
+    if (r->done)
+        return BS_OK;
+    r->done = true;
+    front->walked++;
+    if (node->open && !node->urgent) {
+        if (isfinite(price))
+            wait = r->moles * fmax(0, node->guess - price);
+        st = bs_heap__push(&front->ready, x->cx, r->through + wait, top.item);
     }
-    qsort(open, out->open, sizeof *open, by_key);
-    out->picked_count = x->limits.batch;
-    if ((uint32_t)out->picked_count > out->open)
-        out->picked_count = (int)out->open;
-    if ((st = bs_new(x->cx, home, out->picked_count, &out->picked)) != BS_OK)
-        return st;
-    for (int i = 0; i < out->picked_count; i++)
-        out->picked[i] = open[i].item;
-    return BS_OK;
+    return st == BS_OK ? pass_down(x, top.item) : st;
 }
 
-static bs_status take_room(look *l)
+/* Goes down from the target, cheapest first, until the batch is full. */
+static bs_status pick_cheapest(bs_explore *x)
 {
-    bs_arena *scratch = &l->x->cx->scratch;
-    size_t n = l->x->graph.mol_count;
-    bs_status st;
+    bs_frontier *front = &x->front;
+    bs_status st = BS_OK;
 
-    if ((st = bs_new(l->x->cx, scratch, n, &l->leaf)) != BS_OK ||
-        (st = bs_new(l->x->cx, scratch, n, &l->through)) != BS_OK ||
-        (st = bs_new(l->x->cx, scratch, n, &l->moles)) != BS_OK ||
-        (st = bs_new(l->x->cx, scratch, n, &l->done)) != BS_OK)
-        return st;
-    for (size_t i = 0; i < n; i++)
-        l->through[i] = INFINITY;
-    return bs_cheapest__init(&l->work, &l->x->graph, l->x->mode);
-}
-
-static void drop_room(look *l)
-{
-    bs_cheapest__free(&l->work);
-    bs_heap__free(&l->heap, l->x->cx);
-}
-
-bs_status bs_frontier__look(bs_explore *x, bs_arena *home, bs_frontier *out)
-{
-    bs_mark temp = bs_arena_mark(&x->cx->scratch);
-    look l = {.x = x};
-    bs_status st;
-
-    *out = (bs_frontier){.cheapest = INFINITY};
-    if ((st = find_depths(x)) != BS_OK || (st = take_room(&l)) != BS_OK ||
-        (st = bs_cheapest__run(&l.work, NULL, BS_GRAPH_NONE)) != BS_OK)
-        goto done;
-    out->cheapest = l.work.value[0];
-    for (uint32_t m = 0; m < x->graph.mol_count; m++) {
-        double price = x->graph.mols[m].price;
-
-        l.leaf[m] = isinf(price) && is_open(x, m) ? x->nodes[m].guess : price;
+    front->look++;
+    front->heap.count = front->ready.count = 0;
+    if (isfinite(front->hoped.items[0].value))
+        st = reach(x, 0, front->hoped.items[0].value, 1);
+    while (st == BS_OK && !is_full(x) && (front->heap.count > 0 || front->ready.count > 0)) {
+        if (front->ready.count > 0 &&
+            (front->heap.count == 0 || front->ready.entries[0].key < front->heap.entries[0].key))
+            pick(x, bs_heap__pop(&front->ready).item);
+        else
+            st = settle_top(x);
     }
-    if ((st = bs_cheapest__run(&l.work, l.leaf, BS_GRAPH_NONE)) == BS_OK &&
-        (st = find_through(&l)) == BS_OK)
-        st = pick(&l, home, out);
-done:
-    drop_room(&l);
-    bs_arena_rewind(&x->cx->scratch, temp);
     return st;
 }
 
+bs_status bs_frontier__look(bs_explore *x)
+{
+    bs_frontier *front = &x->front;
+    bs_status st;
+
+    if ((st = take_in(x)) != BS_OK ||
+        (st = bs_graph__reserve(x->cx, &front->picked, &front->picked_room, (size_t)x->limits.batch,
+                                sizeof *front->picked)) != BS_OK)
+        return st;
+    front->picked_count = front->picked_at = 0;
+    while (front->urgent.count > 0 && !is_full(x)) {
+        uint32_t mol = bs_heap__pop(&front->urgent).item;
+
+        if (x->nodes[mol].open)
+            pick(x, mol);
+    }
+    return is_full(x) ? BS_OK : pick_cheapest(x);
+}
+
 /* ---- Bound --------------------------------------------------------------------------------- */
+
+typedef struct look {
+    bs_explore *x;
+    bs_cheapest work;
+    double *leaf;    /* price, or the least that what is open can cost */
+    double *through; /* cost of having the molecule by way of something open */
+    bool *done;
+    bs_heap heap;
+} look;
+
+static bs_status push(look *l, double key, uint32_t mol)
+{
+    return bs_heap__push(&l->heap, l->x->cx, key, mol);
+}
 
 /*
  * With through[] as the cost of having a molecule by way of something open: a way that needs one
@@ -239,6 +285,27 @@ static bs_status pass_up(look *l, uint32_t mol)
         st = push(l, cost + more, product);
     }
     return st;
+}
+
+static bs_status take_room(look *l)
+{
+    bs_arena *scratch = &l->x->cx->scratch;
+    size_t n = l->x->graph.mol_count;
+    bs_status st;
+
+    if ((st = bs_new(l->x->cx, scratch, n, &l->leaf)) != BS_OK ||
+        (st = bs_new(l->x->cx, scratch, n, &l->through)) != BS_OK ||
+        (st = bs_new(l->x->cx, scratch, n, &l->done)) != BS_OK)
+        return st;
+    for (size_t i = 0; i < n; i++)
+        l->through[i] = INFINITY;
+    return bs_cheapest__init(&l->work, &l->x->graph, l->x->mode);
+}
+
+static void drop_room(look *l)
+{
+    bs_cheapest__free(&l->work);
+    bs_heap__free(&l->heap, l->x->cx);
 }
 
 bs_status bs_frontier__bound(bs_explore *x, double *bound)

@@ -261,6 +261,20 @@ static void explore__ends_when_nothing_open_can_be_cheaper(void **state)
     }
 }
 
+static void assert_same_graph(const bs_explore *a, const bs_explore *b)
+{
+    assert_int_equal(a->expanded, b->expanded);
+    assert_int_equal(a->graph.mol_count, b->graph.mol_count);
+    assert_int_equal(a->graph.way_count, b->graph.way_count);
+    for (uint32_t i = 0; i < a->graph.mol_count; i++)
+        assert_string_equal(a->nodes[i].smiles, b->nodes[i].smiles);
+    for (uint32_t i = 0; i < a->graph.way_count; i++) {
+        assert_int_equal(a->graph.ways[i].product, b->graph.ways[i].product);
+        assert_int_equal(a->graph.uses[a->graph.ways[i].first].mol,
+                         b->graph.uses[b->graph.ways[i].first].mol);
+    }
+}
+
 /* The graph is the same, molecule for molecule and way for way, whatever the number of threads. */
 static void explore__threads_change_nothing(void **state)
 {
@@ -278,15 +292,62 @@ static void explore__threads_change_nothing(void **state)
         limits.threads = threads;
         explore(f, &x, &m, &limits, "40");
         assert_int_equal(x.end, one.end);
-        assert_int_equal(x.graph.mol_count, one.graph.mol_count);
-        assert_int_equal(x.graph.way_count, one.graph.way_count);
-        for (uint32_t i = 0; i < one.graph.mol_count; i++)
-            assert_string_equal(x.nodes[i].smiles, one.nodes[i].smiles);
-        for (uint32_t i = 0; i < one.graph.way_count; i++) {
-            assert_int_equal(x.graph.ways[i].product, one.graph.ways[i].product);
-            assert_int_equal(x.graph.uses[x.graph.ways[i].first].mol,
-                             one.graph.uses[one.graph.ways[i].first].mol);
+        assert_same_graph(&x, &one);
+        bs_explore__free(&x);
+    }
+    bs_explore__free(&one);
+}
+
+/* However often a limit of molecules cuts in, the graph grows as without. */
+static void explore__goes_on_as_in_one_go(void **state)
+{
+    fixture *f = *state;
+    bs_explore_limits limits = wide;
+    numbers n = {.guess_factor = 0.5};
+    bs_explore one;
+
+    limits.molecules = 38;
+    explore(f, &one, &n, &limits, "40");
+    for (uint32_t part = 1; part < 38; part++) {
+        numbers m = {.guess_factor = 0.5, .threaded = part % 2};
+        bs_explore x;
+
+        limits.threads = part % 2 ? 3 : 1;
+        limits.molecules = part;
+        explore(f, &x, &m, &limits, "40");
+        assert_int_equal(x.end, BS_END_MOLECULES);
+        assert_true(x.graph.mol_count <= part);
+        while (x.limits.molecules < 38) {
+            x.limits.molecules += part < 38 - x.limits.molecules ? part : 38 - x.limits.molecules;
+            check_ok(f, bs_explore__run(&x, NULL, "40"));
         }
+        assert_int_equal(x.end, one.end);
+        assert_same_graph(&x, &one);
+        bs_explore__free(&x);
+    }
+    bs_explore__free(&one);
+}
+
+/* The same when the stop flag cuts in after each number of expansions, and the search goes on. */
+static void explore__goes_on_after_a_stop(void **state)
+{
+    fixture *f = *state;
+    numbers n = {.guess_factor = 0.5};
+    bs_explore one;
+
+    explore(f, &one, &n, &wide, "40");
+    for (int stop = 1; stop < 39; stop++) {
+        numbers m = {.guess_factor = 0.5, .stop_after = stop};
+        bs_explore x;
+
+        explore(f, &x, &m, &wide, "40");
+        assert_int_equal(x.end, BS_END_STOPPED);
+        assert_int_equal(m.expanded, stop);
+        m.stop_after = 0;
+        atomic_store(f->cx.stop, false);
+        check_ok(f, bs_explore__run(&x, NULL, "40"));
+        assert_int_equal(x.end, BS_END_EXHAUSTED);
+        assert_same_graph(&x, &one);
         bs_explore__free(&x);
     }
     bs_explore__free(&one);
@@ -325,6 +386,8 @@ int main(void)
         check_case(explore__an_error_of_the_owner_is_passed_on),
         check_case(explore__ends_when_nothing_open_can_be_cheaper),
         check_case(explore__threads_change_nothing),
+        check_case(explore__goes_on_as_in_one_go),
+        check_case(explore__goes_on_after_a_stop),
         check_case(explore__every_failed_allocation_leaks_nothing),
     };
 
