@@ -11,6 +11,7 @@
 #include "backsaw/match.h"
 #include "backsaw/polarity.h"
 #include "backsaw/rule.h"
+#include "backsaw/group.h"
 #include "backsaw/catalogue.h"
 #include "backsaw/route.h"
 #include "backsaw/search.h"

@@ -165,6 +165,7 @@ const bs_transform_def *bs_rules_transform(const bs_rules *rules, int index);
  */
 typedef struct bs_rules_mark {
     int synthons, transforms;
+    int shelves[4], rulings; /* what group.h adds */
 } bs_rules_mark;
 
 bs_rules_mark bs_rules_grown(const bs_rules *rules);
@@ -211,6 +212,7 @@ typedef struct bs_step {
     bs_mol **precursors;
     char **smiles;
     double *equivalents;
+    bool **reacting; /* for each precursor and each of its atoms: whether it takes part */
     int precursor_count;
     bs_site site;
     bs_outcomes rivals;

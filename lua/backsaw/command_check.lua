@@ -1,14 +1,16 @@
 -- backsaw check PACK...: reads packs and runs the self-tests of their transforms.
 local core = ...
 local transforms = core.module "transform"
+local groups = core.module "group"
 
 local usage = [[
 usage: backsaw check PACK...
 
 Reads each pack (a file, or a name on the path) and runs the self-tests of its transforms: the
 precursors of every example must be among the steps that the transform gives for its product, and
-the transform must give no step for a molecule that it refuses. Prints a line for each failure and
-a summary. Exit status: 0 all passed, 1 something failed, 2 wrong usage.]]
+the transform must give no step for a molecule that it refuses; the groups and the conditions that
+it names must be there. Then those of its groups: each example has as many hits as it says, and
+non-examples none. Prints a line for each failure and a summary. Exit status: 0 all passed, 1 something failed, 2 wrong usage.]]
 
 local function pack_of_number(number)
     for _, pack in ipairs(core.packs()) do
@@ -22,20 +24,30 @@ end
 
 -- Runs the tests of one pack; returns how many failed.
 local function check_pack(pack)
-    local rules, tests, failed = 0, 0, 0
+    local rules, kinds, tests, failed = 0, 0, 0, 0
+    local function take(failures, count)
+        for _, line in ipairs(failures) do print(line) end
+        tests, failed = tests + count, failed + #failures
+    end
     for _, t in ipairs(transforms.all()) do
         if t.pack == pack.name then
             local failures, count = transforms.test(t)
-            rules, tests = rules + 1, tests + count
-            for _, line in ipairs(failures) do print(line) end
-            failed = failed + #failures
+            rules = rules + 1
+            take(failures, count)
+            take(groups.check_words(t), 0)
             if count == 0 then
                 io.stderr:write(string.format("backsaw: %s: %s: no example\n", t.origin, t.name))
             end
         end
     end
-    print(string.format("%s: %s, %s, %d failed", pack.name, counted(rules, "transform"),
-        counted(tests, "self-test"), failed))
+    for _, one in ipairs(groups.all()) do
+        if one.pack == pack.name then
+            kinds = kinds + 1
+            take(groups.test(one))
+        end
+    end
+    print(string.format("%s: %s, %s%s, %d failed", pack.name, counted(rules, "transform"),
+        kinds > 0 and counted(kinds, "group") .. ", " or "", counted(tests, "self-test"), failed))
     return failed
 end
 

@@ -40,6 +40,16 @@ interconversion "name" { target =, from = }
 example { "product", from = { ... } }   refuse { "product" }     inside the tables
 Further fields: conditions recipe yield reagents cautions spares also_attacks source rxno also
 when prefer step_cost about]],
+groups = [[
+m:groups()                           functional groups, each with group and atoms
+m:clashes("lialh4", { reacting = { 2, 3 } })
+                                     what the conditions attack elsewhere: group atoms verdict why;
+                                     a second list has the cautions (slow)
+verdict { group = "ester", conditions = "nabh4", "slow", why = "..." }    corrects a verdict
+group "id" { smarts =, parents =, also =, examples =, non_examples = }
+conditions "id" { attacks = { "group", { "group", why = } }, slow =, survives =, reagents = }
+protecting "id" { guards =, installed_by =, removed_by =, group =, example = }
+incompatible "id" { { "groups" }, { "groups" }, conditions =, why = }]],
 catalogues = [[
 catalogue.build { from = "list.tsv", into = "list.catalogue" }
 c = catalogue.open "list.catalogue"
@@ -66,7 +76,7 @@ routes[1]:json()  routes[1]:verify()
 r.cost  r:steps()  r:leaves()  r:measure()      steps longest leaves cost yield_low yield yield_high]],
 }
 
-local order = { "molecules", "patterns", "transforms", "packs", "catalogues", "plan", "routes" }
+local order = { "molecules", "patterns", "transforms", "packs", "groups", "catalogues", "plan", "routes" }
 
 -- help() lists the topics; help "plan" explains one.
 return function(topic)

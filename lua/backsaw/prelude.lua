@@ -4,6 +4,7 @@ local core = ...
 core.module "step"
 local transforms = core.module "transform"
 local words = core.module "pack"
+local group_words = core.module("group").words
 if core.packed then return end
 
 local planning = core.module "plan"
@@ -22,6 +23,8 @@ transform, back, forth = transforms.fetch, core.back, core.forth
 pack, synthon, disconnection, interconversion = words.pack, words.synthon, words.disconnection,
     words.interconversion
 example, refuse = words.example, words.refuse
+group, conditions, verdict = group_words.group, group_words.conditions, group_words.verdict
+protecting, incompatible = group_words.protecting, group_words.incompatible
 catalogue, plan, cost = catalogues, planning.plan, planning.cost
 routes = core.module "routes"
 help = core.module "help"

@@ -3,6 +3,7 @@
 -- catch the end of the budget; no clock, no chance, no files.
 local core = ...
 local words = core.module "pack"
+local group_words = core.module("group").words
 
 local sandbox = {}
 local rep, format, find, type, tostring = string.rep, string.format, string.find, type, tostring
@@ -113,6 +114,7 @@ function sandbox.environment()
         mol = molecule_word(), pattern = core.pattern, rewrite = core.rewrite, use = core.use,
     }
     for name, word in next, words do env[name] = word end
+    for name, word in next, group_words do env[name] = word end
     env._G = env
     return env
 end

@@ -29,6 +29,7 @@ bs_status bs_rules_new(bs_ctx *cx, bs_rules **out)
         return bs_fail_memory(cx);
     rules->gate = cx->gate;
     bs_arena_init(&rules->arena, cx->gate);
+    bs_shelves__init(&rules->shelves, cx->gate);
     return BS_OK;
 }
 
@@ -36,6 +37,7 @@ void bs_rules_free(bs_rules *rules)
 {
     if (!rules)
         return;
+    bs_shelves__free(&rules->shelves);
     bs_arena_free(&rules->arena);
     bs_gate_free(rules->gate, rules, sizeof *rules);
 }
@@ -126,7 +128,10 @@ const bs_transform_def *bs_rules_transform(const bs_rules *rules, int index)
 
 bs_rules_mark bs_rules_grown(const bs_rules *rules)
 {
-    return (bs_rules_mark){rules->synthon_count, rules->transform_count};
+    bs_rules_mark mark = {.synthons = rules->synthon_count, .transforms = rules->transform_count};
+
+    bs_shelves__mark(&rules->shelves, &mark);
+    return mark;
 }
 
 void bs_rules_rewind(bs_rules *rules, bs_rules_mark mark)
@@ -135,6 +140,7 @@ void bs_rules_rewind(bs_rules *rules, bs_rules_mark mark)
         rules->synthon_count = mark.synthons;
     if (mark.transforms < rules->transform_count)
         rules->transform_count = mark.transforms;
+    bs_shelves__rewind(&rules->shelves, mark);
 }
 
 void bs_rules_retire_transform(bs_rules *rules, int index, bool retired)
@@ -165,7 +171,7 @@ void bs_rules_retire_synthon(bs_rules *rules, const char *name, bool retired)
 
 /* ---- Copies of definitions ----------------------------------------------------------------------- */
 
-static bs_status copy_string(bs_ctx *cx, bs_arena *home, const char **string)
+bs_status bs_rules__copy_string(bs_ctx *cx, bs_arena *home, const char **string)
 {
     char *copy;
     bs_status st;
@@ -177,7 +183,7 @@ static bs_status copy_string(bs_ctx *cx, bs_arena *home, const char **string)
     return st;
 }
 
-static bs_status copy_words(bs_ctx *cx, bs_arena *home, bs_words *words)
+bs_status bs_rules__copy_words(bs_ctx *cx, bs_arena *home, bs_words *words)
 {
     const char **items;
     bs_status st;
@@ -190,7 +196,7 @@ static bs_status copy_words(bs_ctx *cx, bs_arena *home, bs_words *words)
         return st;
     for (int i = 0; i < words->count && st == BS_OK; i++) {
         items[i] = words->items[i];
-        st = copy_string(cx, home, &items[i]);
+        st = bs_rules__copy_string(cx, home, &items[i]);
     }
     words->items = items;
     return st;
@@ -206,9 +212,9 @@ static bs_status copy_transform(bs_ctx *cx, bs_arena *home, bs_transform_def *de
     bs_status st = BS_OK;
 
     for (size_t i = 0; i < sizeof strings / sizeof *strings && st == BS_OK; i++)
-        st = copy_string(cx, home, strings[i]);
+        st = bs_rules__copy_string(cx, home, strings[i]);
     for (size_t i = 0; i < sizeof lists / sizeof *lists && st == BS_OK; i++)
-        st = copy_words(cx, home, lists[i]);
+        st = bs_rules__copy_words(cx, home, lists[i]);
     return st;
 }
 
@@ -224,9 +230,9 @@ static bs_status copy_equivalents(bs_ctx *cx, bs_arena *home, bs_synthon_def *de
         if ((items[i].attach != NULL) == (items[i].rewrite != NULL))
             return bs_fail(cx, BS_EVALUE,
                            "equivalents: number %d needs either attach or rewrite", i + 1);
-        if ((st = copy_string(cx, home, &items[i].attach)) == BS_OK &&
-            (st = copy_string(cx, home, &items[i].rewrite)) == BS_OK)
-            st = copy_string(cx, home, &items[i].name);
+        if ((st = bs_rules__copy_string(cx, home, &items[i].attach)) == BS_OK &&
+            (st = bs_rules__copy_string(cx, home, &items[i].rewrite)) == BS_OK)
+            st = bs_rules__copy_string(cx, home, &items[i].name);
     }
     def->equivalents = items;
     return st;
@@ -267,8 +273,8 @@ static bs_status make_synthon(bs_ctx *cx, bs_rules *rules, const bs_synthon_def 
         return st;
     if (find_synthon(rules, synthon->key))
         return bs_fail(cx, BS_EVALUE, "the synthon \"%s\" is there already", def->name);
-    if ((st = copy_string(cx, &rules->arena, &synthon->def.name)) != BS_OK ||
-        (st = copy_string(cx, &rules->arena, &synthon->def.origin)) != BS_OK ||
+    if ((st = bs_rules__copy_string(cx, &rules->arena, &synthon->def.name)) != BS_OK ||
+        (st = bs_rules__copy_string(cx, &rules->arena, &synthon->def.origin)) != BS_OK ||
         (st = copy_equivalents(cx, &rules->arena, &synthon->def)) != BS_OK)
         return st;
     trial = bs_arena_mark(&rules->arena);

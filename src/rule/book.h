@@ -9,6 +9,7 @@
 #define RULE_BOOK_H
 
 #include "rule/run.h"
+#include "rule/shelves.h"
 
 typedef struct bs_case {
     bs_side target; /* one part */
@@ -44,6 +45,7 @@ struct bs_rules {
     bs_transform **transforms;
     int synthon_count, synthon_room;
     int transform_count, transform_room;
+    bs_shelves shelves;
 };
 
 /* Map numbers from here on are the compiler's; the author's are smaller. */

@@ -19,8 +19,7 @@ const char *bsl_keep(lua_State *L, const char *text, size_t length)
     return copy;
 }
 
-/* The string field of the table at `i`, or NULL; the table keeps it alive. */
-static const char *text_field(lua_State *L, int i, const char *field)
+const char *bsl_text_field(lua_State *L, int i, const char *field)
 {
     const char *text = NULL;
 
@@ -41,8 +40,7 @@ static double number_field(lua_State *L, int i, const char *field)
     return value;
 }
 
-/* The list of strings in a field of the table at `i`. */
-static bs_words words_field(lua_State *L, int i, const char *field)
+bs_words bsl_words_field(lua_State *L, int i, const char *field)
 {
     bsl_host *host = bsl_host_of(L);
     bs_words words = { NULL, 0 };
@@ -123,8 +121,7 @@ static int hook_field(lua_State *L, int i, const char *field)
     return number;
 }
 
-/* The name of the pack that is being read, for the definition; NULL in the user's own code. */
-static const char *pack_name(const bsl_host *host)
+const char *bsl_pack_name(const bsl_host *host)
 {
     return host->pack > 0 ? host->session->pack_list[host->pack].name : NULL;
 }
@@ -149,9 +146,9 @@ static void read_equivalents(lua_State *L, int i, bs_equivalent_def *items, int 
 {
     for (int k = 0; k < count; k++) {
         lua_rawgeti(L, i, k + 1);
-        items[k].attach = text_field(L, -1, "attach");
-        items[k].rewrite = text_field(L, -1, "rewrite");
-        items[k].name = text_field(L, -1, "name");
+        items[k].attach = bsl_text_field(L, -1, "attach");
+        items[k].rewrite = bsl_text_field(L, -1, "rewrite");
+        items[k].name = bsl_text_field(L, -1, "name");
         items[k].equivalents = number_field(L, -1, "equivalents");
         lua_getfield(L, -1, "ionic");
         items[k].ionic = lua_toboolean(L, -1);
@@ -217,9 +214,9 @@ static int core_synthon(lua_State *L)
     luaL_checktype(L, 1, LUA_TTABLE);
     if (host->kind == BSL_LANE)
         return 0;
-    def.name = text_field(L, 1, "name");
-    def.origin = text_field(L, 1, "origin");
-    kind = text_field(L, 1, "kind");
+    def.name = bsl_text_field(L, 1, "name");
+    def.origin = bsl_text_field(L, 1, "origin");
+    kind = bsl_text_field(L, 1, "kind");
     def.kind = kind && strcmp(kind, "donor") == 0 ? BS_DONOR : BS_ACCEPTOR;
     lua_getfield(L, 1, "equivalents");
     luaL_checktype(L, -1, LUA_TTABLE);
@@ -249,12 +246,12 @@ static void keep_examples(lua_State *L, int index, const char *origin)
             bsl_raise(L, NULL, 0);
         example->transform = index;
         example->origin = origin;
-        example->product = text_field(L, -1, "product");
+        example->product = bsl_text_field(L, -1, "product");
         example->product = bsl_keep(L, example->product, strlen(example->product));
         lua_getfield(L, -1, "refuse");
         example->refuse = lua_toboolean(L, -1);
         lua_pop(L, 1);
-        from = words_field(L, -1, "from");
+        from = bsl_words_field(L, -1, "from");
         if (bs_new(&session->cx, &session->home, from.count + 1, &example->from) != BS_OK)
             bsl_raise(L, NULL, 0);
         for (int n = 0; n < from.count; n++)
@@ -268,33 +265,33 @@ static void keep_examples(lua_State *L, int index, const char *origin)
 
 static void read_transform(lua_State *L, bs_transform_def *def)
 {
-    const char *kind = text_field(L, 1, "kind");
+    const char *kind = bsl_text_field(L, 1, "kind");
     double pair[2];
 
     def->kind = kind && strcmp(kind, "interconversion") == 0 ? BS_INTERCONVERSION
                                                              : BS_DISCONNECTION;
-    def->name = text_field(L, 1, "name");
-    def->also = words_field(L, 1, "also");
-    def->target = text_field(L, 1, "target");
-    def->from = text_field(L, 1, "from");
+    def->name = bsl_text_field(L, 1, "name");
+    def->also = bsl_words_field(L, 1, "also");
+    def->target = bsl_text_field(L, 1, "target");
+    def->from = bsl_text_field(L, 1, "from");
     pair_field(L, 1, "cut", pair);
     def->cut[0] = (int)pair[0];
     def->cut[1] = (int)pair[1];
     end_field(L, 1, "acceptor", &def->acceptor_map, &def->acceptor);
     end_field(L, 1, "donor", &def->donor_map, &def->donor);
-    def->conditions = text_field(L, 1, "conditions");
-    def->recipe = text_field(L, 1, "recipe");
+    def->conditions = bsl_text_field(L, 1, "conditions");
+    def->recipe = bsl_text_field(L, 1, "recipe");
     pair_field(L, 1, "yield", pair);
     def->yield_low = pair[0];
     def->yield_high = pair[1];
     def->step_cost = number_field(L, 1, "step_cost");
-    def->spares = words_field(L, 1, "spares");
-    def->also_attacks = words_field(L, 1, "also_attacks");
-    def->cautions = words_field(L, 1, "cautions");
-    def->reagents = words_field(L, 1, "reagents");
-    def->source = text_field(L, 1, "source");
-    def->rxno = text_field(L, 1, "rxno");
-    def->origin = text_field(L, 1, "origin");
+    def->spares = bsl_words_field(L, 1, "spares");
+    def->also_attacks = bsl_words_field(L, 1, "also_attacks");
+    def->cautions = bsl_words_field(L, 1, "cautions");
+    def->reagents = bsl_words_field(L, 1, "reagents");
+    def->source = bsl_text_field(L, 1, "source");
+    def->rxno = bsl_text_field(L, 1, "rxno");
+    def->origin = bsl_text_field(L, 1, "origin");
 }
 
 /* index = core.transform{...}: the fields of a transform; 0-based, nil in a lane */
@@ -311,7 +308,7 @@ static int core_transform(lua_State *L)
     if (host->kind == BSL_LANE)
         return 0;
     read_transform(L, &def);
-    def.pack = pack_name(host);
+    def.pack = bsl_pack_name(host);
     if (add_transform(host, &def, &index) != BS_OK) {
         bs_arena_rewind(&host->results, mark);
         return raise_definition(L, def.name, def.target, def.from);

@@ -125,6 +125,8 @@ static int open_state(lua_State *L)
     bsl_open_polarity(L);
     open_kinds(L);
     bsl_open_define(L);
+    bsl_open_group(L);
+    bsl_open_clash(L);
     bsl_open_transform(L);
     bsl_open_pack(L);
     if (host->kind == BSL_MAIN) {

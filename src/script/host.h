@@ -161,6 +161,8 @@ void bsl_open_pattern(lua_State *L);
 void bsl_open_rewrite(lua_State *L);
 void bsl_open_polarity(lua_State *L); /* after bsl_open_mol() */
 void bsl_open_define(lua_State *L);
+void bsl_open_group(lua_State *L); /* after that of molecules, to which it adds methods */
+void bsl_open_clash(lua_State *L);
 void bsl_open_transform(lua_State *L);
 void bsl_open_catalogue(lua_State *L);
 void bsl_open_plan(lua_State *L);
@@ -222,6 +224,12 @@ void bsl_push_poles(lua_State *L, const bs_pole *ends);
 
 /* Pushes a step's table for a step of the rule book; the product's value is at `product`. */
 void bsl_push_step(lua_State *L, int product, const bs_step *step);
+
+/* Pushes the clashes of a fate as a list; with `precursors` each tells which one it is in. */
+void bsl_push_clashes(lua_State *L, const bs_clashes *clashes, bs_fate fate, bool precursors);
+
+/* Sets the fields clashes, worries and reacting of the step's table at the top of the stack. */
+void bsl_set_clashes(lua_State *L, const bs_step *step);
 
 /* Pushes a step's table for a step of a route; its molecules are read when they are asked for. */
 void bsl_push_route_step(lua_State *L, const bs_route *route, int index);
@@ -293,6 +301,15 @@ bs_status bsl_use_library(bs_session *session, bsl_fault *fault);
 
 /* Reads a pack again in a lane, for its functions. */
 bs_status bsl_replay(bsl_host *lane, bs_ctx *cx, int pack, bsl_fault *fault);
+
+/* The string field of the table at `i`, or NULL; the table keeps it alive. */
+const char *bsl_text_field(lua_State *L, int i, const char *field);
+
+/* The list of strings in a field of the table at `i`, in the results arena. */
+bs_words bsl_words_field(lua_State *L, int i, const char *field);
+
+/* The name of the pack that is being read, for definitions; NULL in the user's own code. */
+const char *bsl_pack_name(const bsl_host *host);
 
 /* Copies a string into the session's arena; raises when memory runs out. */
 const char *bsl_keep(lua_State *L, const char *text, size_t length);

@@ -120,6 +120,10 @@ static int core_describe(lua_State *L)
     lua_setfield(L, -2, "cautions");
     bsl_push_words(L, def->reagents.items, def->reagents.count);
     lua_setfield(L, -2, "reagents");
+    bsl_push_words(L, def->spares.items, def->spares.count);
+    lua_setfield(L, -2, "spares");
+    bsl_push_words(L, def->also_attacks.items, def->also_attacks.count);
+    lua_setfield(L, -2, "also_attacks");
     return 1;
 }
 

@@ -16,6 +16,7 @@ BEGIN {
     module["mol"] = "chem"
     module["draft"] = "chem"
     module["polarity"] = "rule"
+    module["group"] = "rule"
     module["file"] = "format"
 }
 
