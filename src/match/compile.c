@@ -190,6 +190,18 @@ static bs_status add_entry(compiling *c, const bs_query_expr *expr, const int *p
     return st == BS_OK ? bs_nodes__add(&c->nodes, &relaxed, parts, entry) : st;
 }
 
+static void set_opening(const compiling *c, int32_t entry, bs_opening *opening)
+{
+    const bs_node *node = entry >= 0 ? &c->nodes.items[entry] : NULL;
+
+    *opening = (bs_opening){.rest = entry};
+    if (!node || node->kind != BS_NODE_FIELDS || node->no != BS_NODE_NO)
+        return;
+    memcpy(opening->mask, node->mask, sizeof opening->mask);
+    memcpy(opening->value, node->value, sizeof opening->value);
+    opening->rest = node->yes;
+}
+
 static bs_status fill_part(compiling *c, bs_part *part, const int *parts, bool recursive)
 {
     const bs_query *q = part->query;
@@ -198,11 +210,14 @@ static bs_status fill_part(compiling *c, bs_part *part, const int *parts, bool r
     if (q->atom_count == 0)
         return bs_fail(c->cx, BS_EVALUE, "a pattern without atoms");
     if ((st = bs_new(c->cx, c->home, q->atom_count, &part->entries)) != BS_OK ||
+        (st = bs_new(c->cx, c->home, q->atom_count, &part->openings)) != BS_OK ||
         (st = bs_new(c->cx, c->home, q->atom_count, &part->rarity)) != BS_OK ||
         (st = bs_new(c->cx, c->home, q->bond_count, &part->sorts)) != BS_OK)
         return st;
     for (int i = 0; i < q->atom_count && st == BS_OK; i++) {
         st = add_entry(c, &q->atoms[i].expr, parts, &part->entries[i]);
+        if (st == BS_OK)
+            set_opening(c, part->entries[i], &part->openings[i]);
         part->grouped |= q->atoms[i].component != 0;
     }
     for (int i = 0; i < q->bond_count && st == BS_OK; i++)
@@ -210,7 +225,9 @@ static bs_status fill_part(compiling *c, bs_part *part, const int *parts, bool r
     if (st == BS_OK)
         st = add_checks(c, part, parts);
     if (st == BS_OK)
-        st = bs_screen__rarity(c->cx, q, part->rarity);
+        st = bs_shape__find(c->cx, c->home, q, &part->shape);
+    if (st == BS_OK)
+        st = bs_screen__rarity(c->cx, q, &part->shape, part->rarity);
     if (st == BS_OK)
         st = bs_order__find(c->cx, c->home, part, recursive ? 0 : -1, &part->order);
     part->slot = c->pattern->slot_count;

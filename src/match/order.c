@@ -53,6 +53,12 @@ static int choose(const ordering *o)
     return best;
 }
 
+/* The sorts of a bond that fit its expression and its place in the graph. */
+static uint32_t sorts_of(const ordering *o, int bond)
+{
+    return o->part->sorts[bond] & (o->part->shape.cyclic[bond] ? BS_SORTS_IN_RINGS : UINT32_MAX);
+}
+
 /* The move goes over the bond to the atom placed last; the other bonds are closures. */
 static void place(ordering *o, int atom)
 {
@@ -63,8 +69,10 @@ static void place(ordering *o, int atom)
 
     *move = (bs_move){.atom = atom,
                       .from = -1,
-                      .entry = o->part->entries[atom],
+                      .opening = o->part->openings[atom],
                       .group = q->atoms[atom].component,
+                      .min_degree = o->part->shape.degree[atom],
+                      .min_ring_bonds = o->part->shape.ring_bonds[atom],
                       .closure_first = o->closure_count};
     for (int k = o->first[atom]; k < o->first[atom + 1]; k++) {
         const bs_query_bond *bond = &q->bonds[o->links[k]];
@@ -82,9 +90,9 @@ static void place(ordering *o, int atom)
 
         if (places[other] >= 0 && o->links[k] != via)
             o->out->closures[o->closure_count++] =
-                (bs_closure){places[other], o->part->sorts[o->links[k]]};
+                (bs_closure){places[other], sorts_of(o, o->links[k])};
     }
-    move->sorts = via >= 0 ? o->part->sorts[via] : 0;
+    move->sorts = via >= 0 ? sorts_of(o, via) : 0;
     move->closure_count = o->closure_count - move->closure_first;
     places[atom] = o->out->count++;
 }

@@ -39,13 +39,23 @@ typedef struct bs_closure {
     uint32_t sorts;
 } bs_closure;
 
+/*
+ * The beginning of an atom's tests: a comparison of fields by which most atoms are refused (one
+ * that is always met where the expression begins with something else), and the node that follows.
+ */
+typedef struct bs_opening {
+    uint64_t mask[2], value[2];
+    int32_t rest;
+} bs_opening;
+
 typedef struct bs_move {
+    bs_opening opening;
     int32_t atom;   /* of the query */
     int32_t from;   /* move that placed the atom before, -1 for the first of a component */
     uint32_t sorts; /* of bond, see bs_query_bond_mask() */
-    int32_t entry;  /* first node, or an end */
     int32_t closure_first, closure_count;
     int32_t group; /* component-level group, 0 for none */
+    uint8_t min_degree, min_ring_bonds;
 } bs_move;
 
 /* An order of the atoms of a part. */
@@ -77,12 +87,21 @@ typedef struct bs_turn {
     bool or_unspecified;
 } bs_turn;
 
+/* What the graph of a query demands, by itself. */
+typedef struct bs_shape {
+    uint8_t *degree;     /* of each atom: it has so many neighbours at least */
+    uint8_t *ring_bonds; /* of each atom: it has so many bonds in rings at least */
+    bool *cyclic;        /* of each bond: it lies in a ring */
+} bs_shape;
+
 typedef struct bs_part {
     const bs_query *query;
+    bs_shape shape;
     bs_order order;
     int32_t *entries; /* of each atom, chirality left out */
-    int32_t *rarity;  /* of each atom: how many a usual molecule has, scaled */
-    uint32_t *sorts;  /* of each bond */
+    bs_opening *openings;
+    int32_t *rarity; /* of each atom: how many a usual molecule has, scaled */
+    uint32_t *sorts; /* of each bond */
     bs_centre *centres;
     bs_turn *turns;
     int centre_count, turn_count;
@@ -102,9 +121,16 @@ struct bs_pattern {
     bs_features needs;
 };
 
+/* Finds the demands of a query's graph; the arrays lie in `home`. O(atoms + bonds). */
+bs_status bs_shape__find(bs_ctx *cx, bs_arena *home, const bs_query *query, bs_shape *out);
+
 /* What a pattern demands of a molecule, and how rare each atom of a query is. */
 bs_status bs_screen__needs(bs_ctx *cx, const bs_query *query, bs_features *needs);
-bs_status bs_screen__rarity(bs_ctx *cx, const bs_query *query, int32_t *rarity);
+bs_status bs_screen__rarity(bs_ctx *cx, const bs_query *query, const bs_shape *shape,
+                            int32_t *rarity);
+
+/* The sorts of bond (see bs_query_bond_mask()) that lie in a ring. */
+#define BS_SORTS_IN_RINGS 0xFFFF0000u
 
 /* The nodes of a pattern while they are made, in scratch. */
 typedef struct bs_nodes {

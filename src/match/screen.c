@@ -166,7 +166,19 @@ static void use_connections(const bs_query_expr *expr, box *states)
         states->degrees &= (uint8_t) ~(1 << HIGH);
 }
 
-static bs_status find_box(bs_ctx *cx, const bs_query_expr *expr, box *out)
+/* Leaves out what the place in the graph rules out. */
+static void use_shape(const bs_shape *shape, int atom, box *states)
+{
+    int degree = shape->degree[atom], ring_bonds = shape->ring_bonds[atom];
+
+    states->degrees &= (uint8_t)(ALL_COUNTS << (degree < HIGH ? degree : HIGH));
+    states->ring_bonds &= (uint8_t)(ALL_COUNTS << (ring_bonds < HIGH ? ring_bonds : HIGH));
+    if (ring_bonds > 0)
+        states->rings &= ALL_RINGS & ~1;
+}
+
+static bs_status find_box(bs_ctx *cx, const bs_query_expr *expr, const bs_shape *shape, int atom,
+                          box *out)
 {
     bs_mark temp = bs_arena_mark(&cx->scratch);
     sides *pile;
@@ -193,6 +205,7 @@ static bs_status find_box(bs_ctx *cx, const bs_query_expr *expr, box *out)
     }
     *out = pile[0].yes;
     use_connections(expr, out);
+    use_shape(shape, atom, out);
     bs_arena_rewind(&cx->scratch, temp);
     return BS_OK;
 }
@@ -292,15 +305,19 @@ static bs_features count_needs(const box *boxes, int count)
 static bs_status add_needs(bs_ctx *cx, const bs_query *query, int depth, bs_features *needs)
 {
     bs_mark temp = bs_arena_mark(&cx->scratch);
+    bs_shape shape;
     box *boxes;
     uint32_t sorts;
     bs_status st = bs_new(cx, &cx->scratch, query->atom_count, &boxes);
+
+    if (st == BS_OK)
+        st = bs_shape__find(cx, &cx->scratch, query, &shape);
 
     for (int i = 0; i < query->atom_count && st == BS_OK; i++) {
         const bs_query_expr *expr = &query->atoms[i].expr;
         int sub;
 
-        st = find_box(cx, expr, &boxes[i]);
+        st = find_box(cx, expr, &shape, i, &boxes[i]);
         if (st == BS_OK)
             also(needs, atom_needs(&boxes[i]));
         if (st == BS_OK && depth > 0 && bs_query_demands(expr, BS_TEST_RECURSE, &sub))
@@ -311,7 +328,8 @@ static bs_status add_needs(bs_ctx *cx, const bs_query *query, int depth, bs_feat
 
         st = bs_query_bond_mask(cx, &bond->expr, &sorts);
         if (st == BS_OK)
-            also(needs, bond_needs(sorts, boxes[bond->a].kinds, boxes[bond->b].kinds));
+            also(needs, bond_needs(shape.cyclic[i] ? sorts & BS_SORTS_IN_RINGS : sorts,
+                                   boxes[bond->a].kinds, boxes[bond->b].kinds));
     }
     if (st == BS_OK)
         also(needs, count_needs(boxes, query->atom_count));
@@ -357,7 +375,8 @@ static int32_t box_rarity(const box *b)
     return (int32_t)(rarity * 1000.0);
 }
 
-bs_status bs_screen__rarity(bs_ctx *cx, const bs_query *query, int32_t *rarity)
+bs_status bs_screen__rarity(bs_ctx *cx, const bs_query *query, const bs_shape *shape,
+                            int32_t *rarity)
 {
     box states;
     bs_status st = BS_OK;
@@ -365,7 +384,7 @@ bs_status bs_screen__rarity(bs_ctx *cx, const bs_query *query, int32_t *rarity)
     for (int i = 0; i < query->atom_count && st == BS_OK; i++) {
         const bs_query_expr *expr = &query->atoms[i].expr;
 
-        st = find_box(cx, expr, &states);
+        st = find_box(cx, expr, shape, i, &states);
         if (st != BS_OK)
             break;
         rarity[i] = box_rarity(&states);

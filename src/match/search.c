@@ -145,25 +145,33 @@ static bool passes_special(bs_search *s, const bs_node *node, uint32_t atom,
     }
 }
 
-bool bs_search__passes(bs_search *s, int32_t entry, uint32_t atom, const bs_centre *centre,
-                       const bs_frame *f)
+static inline bool fields_fit(const uint64_t *mask, const uint64_t *value, const bs_atom *atom)
 {
-    const bs_node *nodes = s->pattern->nodes;
     uint64_t word[2];
 
-    memcpy(word, &s->atoms[atom], sizeof word);
-    while (entry >= 0) {
-        const bs_node *node = &nodes[entry];
-        bool yes;
+    memcpy(word, atom, sizeof word);
+    return (((word[0] & mask[0]) ^ value[0]) | ((word[1] & mask[1]) ^ value[1])) == 0;
+}
 
-        if (node->kind == BS_NODE_FIELDS)
-            yes = (((word[0] & node->mask[0]) ^ node->value[0]) |
-                   ((word[1] & node->mask[1]) ^ node->value[1])) == 0;
-        else
-            yes = passes_special(s, node, atom, centre, f);
+/* The tests from `entry` on; most expressions are one comparison of fields. */
+static inline bool passes(bs_search *s, int32_t entry, uint32_t atom, const bs_centre *centre,
+                          const bs_frame *f)
+{
+    while (entry >= 0) {
+        const bs_node *node = &s->pattern->nodes[entry];
+        bool yes = node->kind == BS_NODE_FIELDS
+                       ? fields_fit(node->mask, node->value, &s->atoms[atom])
+                       : passes_special(s, node, atom, centre, f);
+
         entry = yes ? node->yes : node->no;
     }
     return entry == BS_NODE_YES;
+}
+
+bool bs_search__passes(bs_search *s, int32_t entry, uint32_t atom, const bs_centre *centre,
+                       const bs_frame *f)
+{
+    return passes(s, entry, atom, centre, f);
 }
 
 /* ---- Moves ----------------------------------------------------------------------------- */
@@ -207,11 +215,30 @@ static bool group_fits(const bs_search *s, const bs_frame *f, int depth, uint32_
     return true;
 }
 
+/* Whether an atom passes what is asked first of it: most do not. */
+static inline bool opens(const bs_move *move, const bs_atom *atom)
+{
+    const bs_opening *first = &move->opening;
+
+    return fields_fit(first->mask, first->value, atom) && atom->degree >= move->min_degree &&
+           atom->ring_bonds >= move->min_ring_bonds;
+}
+
+/* The next atom at or behind `atom` for a move that starts anywhere, or BS_FREE. */
+static inline uint32_t next_start(const bs_search *s, const bs_move *move, uint32_t atom)
+{
+    uint32_t count = s->mol->atom_count;
+
+    while (atom < count && !opens(move, &s->atoms[atom]))
+        atom++;
+    return atom < count ? atom : BS_FREE;
+}
+
 /* The next atom that a move could go to, or BS_FREE; moves the iterator on. */
 static inline uint32_t candidate(const bs_search *s, const bs_frame *f, int depth)
 {
     const bs_move *move = &f->order->moves[depth];
-    uint32_t *iter = &f->iter[depth];
+    uint32_t *iter = &f->iter[depth], next;
 
     if (move->from >= 0) {
         uint32_t from = f->placed[move->from];
@@ -221,21 +248,24 @@ static inline uint32_t candidate(const bs_search *s, const bs_frame *f, int dept
         while (*iter < degree) {
             const bs_link *link = &links[(*iter)++];
 
-            if (move->sorts & sort_bit(&s->bonds[link->bond]))
+            if ((move->sorts & sort_bit(&s->bonds[link->bond])) &&
+                opens(move, &s->atoms[link->atom]))
                 return link->atom;
         }
         return BS_FREE;
     }
     if (depth == 0 && f->anchor != BS_FREE)
-        return (*iter)++ == 0 ? f->anchor : BS_FREE;
-    return *iter < s->mol->atom_count ? (*iter)++ : BS_FREE;
+        return (*iter)++ == 0 && opens(move, &s->atoms[f->anchor]) ? f->anchor : BS_FREE;
+    next = next_start(s, move, *iter);
+    *iter = next + (next != BS_FREE);
+    return next;
 }
 
 static bool may_place(bs_search *s, const bs_frame *f, int depth, uint32_t atom)
 {
     const bs_move *move = &f->order->moves[depth];
 
-    return !is_taken(f->placed, depth, atom) && bs_search__passes(s, move->entry, atom, NULL, f) &&
+    return !is_taken(f->placed, depth, atom) && passes(s, move->opening.rest, atom, NULL, f) &&
            (move->closure_count == 0 || closes(s, f, move, atom)) &&
            (!f->part->grouped || group_fits(s, f, depth, atom));
 }

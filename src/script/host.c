@@ -263,6 +263,18 @@ void bsl_new_type(lua_State *L, const char *type, const luaL_Reg *methods, const
     lua_pop(L, 1);
 }
 
+void *bsl_test_type(lua_State *L, int i, const void *type)
+{
+    void *block = lua_touserdata(L, i);
+    bool same;
+
+    if (!block || !lua_getmetatable(L, i))
+        return NULL;
+    same = lua_topointer(L, -1) == type;
+    lua_pop(L, 1);
+    return same ? block : NULL;
+}
+
 static int push_text(lua_State *L)
 {
     const bs_text *text = lua_touserdata(L, 1);

@@ -48,6 +48,8 @@ typedef struct bsl_host {
     size_t said;      /* bytes that packs have printed */
     lua_State *calls; /* the thread on which functions of rules run */
     int depth;        /* of such calls in one another */
+    /* The metatables of the types that are asked for most; they stay in the registry. */
+    const void *mol_type, *pattern_type;
 } bsl_host;
 
 /* A self-test of a transform: the product, and what it is made from, or that it is refused. */
@@ -174,6 +176,12 @@ void bsl_open_file(lua_State *L); /* after that of molecules, to which it adds m
 /* Makes the locked metatable of a type ("backsaw." and a word) from methods and metamethods, and
    registers it. */
 void bsl_new_type(lua_State *L, const char *type, const luaL_Reg *methods, const luaL_Reg *meta);
+
+/*
+ * The block of a userdata whose metatable is `type` (as lua_topointer() shows it), or NULL: like
+ * luaL_testudata(), but without a look into the registry.
+ */
+void *bsl_test_type(lua_State *L, int i, const void *type);
 
 /* Number of a molecule's uservalue with what its file says beside the structure: a table with name,
    fields and doubts, or nil. */

@@ -24,7 +24,7 @@ void bsl_pushmol(lua_State *L, const bs_mol *mol, const char *smiles)
 
 const bs_mol *bsl_checkmol(lua_State *L, int i)
 {
-    const bs_mol *mol = luaL_testudata(L, i, MOL_TYPE);
+    const bs_mol *mol = bsl_testmol(L, i);
 
     if (!mol)
         bsl_type_error(L, i, "molecule");
@@ -33,7 +33,7 @@ const bs_mol *bsl_checkmol(lua_State *L, int i)
 
 const bs_mol *bsl_testmol(lua_State *L, int i)
 {
-    return luaL_testudata(L, i, MOL_TYPE);
+    return bsl_test_type(L, i, bsl_host_of(L)->mol_type);
 }
 
 /* Skips blanks; returns the place of the first other byte at or behind `at`. */
@@ -503,6 +503,7 @@ void bsl_open_mol(lua_State *L)
     lua_pushvalue(L, -1);
     lua_setfield(L, -3, "molecule_methods");
     luaL_getmetatable(L, MOL_TYPE);
+    bsl_host_of(L)->mol_type = lua_topointer(L, -1);
     lua_insert(L, -2);
     lua_pushcclosure(L, mol_index, 1);
     lua_setfield(L, -2, "__index");

@@ -12,15 +12,23 @@ typedef struct pattern_box {
     bs_pattern *pattern; /* NULL once closed */
 } pattern_box;
 
+/* The pattern at index `i`, or NULL. */
+static const bs_pattern *test_pattern(lua_State *L, int i)
+{
+    pattern_box *box = bsl_test_type(L, i, bsl_host_of(L)->pattern_type);
+
+    if (box && !box->pattern)
+        bsl_error(L, BS_EVALUE, "the pattern is closed");
+    return box ? box->pattern : NULL;
+}
+
 static const bs_pattern *check_pattern(lua_State *L, int i)
 {
-    pattern_box *box = luaL_testudata(L, i, PATTERN_TYPE);
+    const bs_pattern *pattern = test_pattern(L, i);
 
-    if (!box)
+    if (!pattern)
         bsl_type_error(L, i, "pattern");
-    if (!box->pattern)
-        bsl_error(L, BS_EVALUE, "the pattern is closed");
-    return box->pattern;
+    return pattern;
 }
 
 /* Compiles SMARTS and pushes the pattern. */
@@ -40,11 +48,12 @@ static void read_pattern(lua_State *L, const char *text, size_t length)
 
 const bs_pattern *bsl_topattern(lua_State *L, int i)
 {
+    const bs_pattern *pattern = test_pattern(L, i);
     size_t length;
     const char *text;
 
-    if (luaL_testudata(L, i, PATTERN_TYPE))
-        return check_pattern(L, i);
+    if (pattern)
+        return pattern;
     if (lua_type(L, i) != LUA_TSTRING)
         bsl_type_error(L, i, "pattern or SMARTS");
     i = lua_absindex(L, i);
@@ -104,7 +113,7 @@ static int core_pattern(lua_State *L)
     size_t length;
 
     lua_settop(L, 1);
-    if (luaL_testudata(L, 1, PATTERN_TYPE))
+    if (test_pattern(L, 1))
         return 1;
     if (lua_type(L, 1) != LUA_TSTRING)
         bsl_type_error(L, 1, "SMARTS");
@@ -173,6 +182,9 @@ void bsl_open_pattern(lua_State *L)
     };
 
     bsl_new_type(L, PATTERN_TYPE, methods, meta);
+    luaL_getmetatable(L, PATTERN_TYPE);
+    bsl_host_of(L)->pattern_type = lua_topointer(L, -1);
+    lua_pop(L, 1);
     lua_newtable(L);
     lua_createtable(L, 0, 1);
     lua_pushliteral(L, "v");
