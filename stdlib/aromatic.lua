@@ -1386,6 +1386,7 @@ disconnection "fc-acylation-biphenyl" {
 -- What the lost amino group put in place: an ortho halogen or nitro group beside a para alkyl group.
 interconversion "deamination-para-methyl" {
     about = "Reductive deamination of an aniline that had put a halogen ortho to itself, para to an alkyl group",
+    also = { "deamination-para-alkyl" },
     target = "[cH;$(c1:c(-[Cl,Br,I,$([N+](=O)[O-])]):c:c(-[CX4]):c:c:1),$(c1:c(-[Cl,Br,I,$([N+](=O)[O-])]):c:c:c(-[CX4]):c:1);" ..
         "$(c1:c:c:c(-[CX4]):c:c:1):1]",
     from = "[c:1]N",

@@ -189,6 +189,7 @@ disconnection "sulfonamide" {
 disconnection "phenol-methylation" {
     about = "Methylation of a phenol with iodomethane (Williamson ether synthesis); phenol before alcohol; chelated ortho OH reacts last",
     rxno = "RXNO:0000090",
+    also = { "phenol-methylation-dimethyl-sulfate" },
     target = "[c:1][O;X2:2]-!@[C;X4;H3:3]",
     cut = { 3, 2 },
     acceptor = { 3, "methyl" },
@@ -259,4 +260,232 @@ disconnection "benzhydryl-ether" {
     source = "Rieveschl, US 2421714; from memory",
     example { "CN(C)CCOC(c1ccccc1)c1ccccc1", from = { "BrC(c1ccccc1)c1ccccc1", "CN(C)CCO" } },
     refuse { "CCOC(C)(C)c1ccccc1" }, -- a tertiary benzylic halide eliminates
+}
+
+disconnection "epoxide-opening-by-azide" {
+    about = "Epoxide opening by azide; opens at the less substituted carbon with inversion there; configuration of C-O kept",
+    target = "[C;X4;H1:1]([#6:5])([O;X2;H1:2])[C;X4;H2:3][N;X2;+0:4]=[N;+:6]=[N;-:7]",
+    from = "[C;X4;H1:1]1([#6:5])[O;X2;H0:2][C;X4;H2:3]1.[N;-:4]=[N;+:6]=[N;-:7].[Na+]",
+    conditions = "alkylation",
+    also_attacks = { "alkyl halide", "epoxide" },
+    recipe = "NaN3, NH4Cl, MeOH-H2O, 60 °C",
+    yield = { 75, 95 },
+    cautions = { "sodium azide" },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "OC(CN=[N+]=[N-])COc1ccccc1", from = { "C1OC1COc1ccccc1", "[Na+].[N-]=[N+]=[N-]" } },
+    example { "OC(CN=[N+]=[N-])c1ccccc1", from = { "C1OC1c1ccccc1", "[Na+].[N-]=[N+]=[N-]" } },
+    refuse { "OCC(N=[N+]=[N-])COc1ccccc1" }, -- azide goes to the terminal carbon, so the primary alcohol is a minor isomer
+}
+
+disconnection "epoxide-opening-acid-alcohol" {
+    about = "Acid-catalysed epoxide opening by an alcohol; attack at the more substituted carbon with inversion",
+    target = "[C;X4;H0:1]([C;X4:5])([C;X4:6])([O;X2:4][C;X4;H3,H2:7])[C;X4;H2:3][O;X2;H1:2]",
+    from = "[C;X4;H0:1]1([C;X4:5])([C;X4:6])[O;X2;H0:2][C;X4;H2:3]1.[O;X2;H1:4][C;X4:7]",
+    conditions = "acid-dry-strong",
+    also_attacks = { "silyl ether", "alkene" },
+    recipe = "H2SO4 or camphorsulfonic acid (cat), MeOH, 0 °C to rt; also: BF3·OEt2",
+    yield = { 65, 85 },
+    cautions = { "sulfuric acid" },
+    source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
+    example { "COC1(CO)CCCCC1", from = { "C1CCC2(CC1)CO2", "CO" } },
+    example { "COC(C)(C)CO", from = { "CC1(C)CO1", "CO" } },
+    refuse { "COCC(O)(C)C" }, -- in acid the alcohol attacks the tertiary carbon, not CH2
+}
+
+disconnection "epoxide-opening-by-thiolate" {
+    about = "Epoxide opening by a thiol; opens at the less substituted carbon with inversion there; configuration of C-O kept",
+    target = "[C;X4;H1:1]([#6:5])([O;X2;H1:2])[C;X4;H2:3]-!@[S;X2:4][#6;!$(C=[O,S,N]):6]",
+    cut = { 3, 4 },
+    acceptor = { 3, "oxirane" },
+    donor = { 4, "thiol" },
+    conditions = "base-aq-mild",
+    also_attacks = { "alkyl halide", "enone", "primary amine" },
+    recipe = "Et3N or K2CO3, MeOH or MeCN, rt",
+    yield = { 75, 95 },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "CCCCC(O)CSc1ccc(Cl)cc1", from = { "CCCCC1CO1", "Sc1ccc(Cl)cc1" } },
+    example { "OC(CSc1ccccc1)c1ccccc1", from = { "C1OC1c1ccccc1", "Sc1ccccc1" } },
+    refuse { "CCCCC(CO)Sc1ccccc1" }, -- thiolate goes to the terminal carbon
+}
+
+disconnection "heteroaryl-benzyl-thioether" {
+    about = "S-Alkylation of a heteroarenethiol with a benzylic chloride; S before N",
+    target = "[c;$(c~n):3]-!@[S;X2:2]-!@[C;X4;H2:1][c:4]",
+    cut = { 1, 2 },
+    acceptor = { 1, "alkyl" },
+    donor = { 2, "thiol" },
+    conditions = "alkylation",
+    also_attacks = { "alkyl halide", "epoxide" },
+    recipe = "NaOH, EtOH-H2O, rt to 50 °C",
+    yield = { 80, 95 },
+    cautions = { "sodium hydroxide" },
+    source = "Warren and Wyatt, Organic Synthesis: The Disconnection Approach; from memory",
+    example { "COc1ccc2[nH]c(nc2c1)SCc1ncc(C)c(OC)c1C", from = { "COc1ccc2[nH]c(S)nc2c1", "ClCc1ncc(C)c(OC)c1C" } },
+    example { "C(Sc1nc2ccccc2[nH]1)c1ccccc1", from = { "ClCc1ccccc1", "Sc1nc2ccccc2[nH]1" } },
+    refuse { "c1ccccc1SCc1ccccc1" }, -- arenethiol, no heteroaromatic thione tautomer (use the general rule)
+}
+
+interconversion "thiol-via-thiourea" {
+    about = "Thiol from an alkyl halide and thiourea; inversion; no dialkyl sulfide (unlike NaSH)",
+    target = "[C;X4;H2:1]([#6;!$([C;X4;H0]):3])[S;X2;H1:2]",
+    from = "[C;X4;H2:1]([#6:3])[Br;X1].[N;H2][C;X3]([N;H2])=[S;X1;H0:2]",
+    conditions = "alkylation",
+    also_attacks = { "alkyl halide", "ester" },
+    recipe = "thiourea, EtOH, reflux, then NaOH, H2O; also: Cl, I, OTs",
+    yield = { 70, 90 },
+    cautions = { "sodium hydroxide" },
+    source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
+    example { "SCc1ccc(Br)cc1", from = { "BrCc1ccc(Br)cc1", "NC(N)=S" } },
+    example { "CCCCCCCCCCCCS", from = { "CCCCCCCCCCCCBr", "NC(N)=S" } },
+    refuse { "Sc1ccc(Br)cc1" }, -- aryl halide does not undergo this SN2
+}
+
+disconnection "thioacetate-displacement" {
+    about = "Thioacetate displacement with inversion; inversion",
+    target = "[C@;X4;H1:1]([C;X4:4])([C;X4:5])-!@[S;X2:2][C;X3:3](=[O;X1:6])[C;H3:7]",
+    from = "[C@@;X4;H1:1]([C;X4:4])([C;X4:5])[O;X2][S;X4](=O)(=O)[C;H3].[S;X2;H1:2][C;X3:3](=[O;X1:6])[C;H3:7]",
+    conditions = "alkylation",
+    also_attacks = { "alkyl halide", "epoxide", "enone" },
+    recipe = "KSAc or AcSH, Cs2CO3, DMF, 50-70 °C; also: OTs, Br",
+    yield = { 65, 90 },
+    cautions = { "N,N-dimethylformamide" },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "CC(=O)S[C@@H]1CN(C(=O)OC(C)(C)C)[C@H](C(=O)OC)C1",
+        from = { "CS(=O)(=O)O[C@H]1CN(C(=O)OC(C)(C)C)[C@H](C(=O)OC)C1", "CC(=O)S" } },
+    example { "CC(=O)SC1CCCCC1", from = { "CS(=O)(=O)OC1CCCCC1", "CC(=O)S" } },
+    refuse { "CC(=O)SC(C)(C)C" }, -- tertiary centre does not take part in SN2
+}
+
+disconnection "disulfide-from-thiol" {
+    about = "Oxidative coupling of a thiol to a symmetrical disulfide; symmetrical disulfides only",
+    target = "[#6:1][S;X2:2]-!@[S;X2:3][#6:4]",
+    from = "[#6:1][S;X2;H1:2].[S;X2;H1:3][#6:4]",
+    when = function(m) return m.atom[2].symmetry == m.atom[3].symmetry end,
+    conditions = "br2",
+    also_attacks = { "phosphine" },
+    recipe = "I2, Et3N, MeOH, rt; also: air, DMSO, H2O2",
+    yield = { 85, 98 },
+    cautions = { "iodine" },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "Clc1ccc(cc1)SSc1ccc(Cl)cc1", from = { "Sc1ccc(Cl)cc1", "Sc1ccc(Cl)cc1" } },
+    example { "C(SSCc1ccccc1)c1ccccc1", from = { "SCc1ccccc1", "SCc1ccccc1" } },
+    refuse { "CSSc1ccccc1" }, -- unsymmetrical disulfide would come with both symmetrical ones; the two halves must be equal
+}
+
+interconversion "sulfonyl-chloride-from-thiol" {
+    about = "Sulfonyl chloride by oxidative chlorination of a thiol; also from disulfides and benzyl thioethers",
+    target = "[#6:1][S;X4:2](=[O;X1])(=[O;X1])[Cl;X1]",
+    from = "[#6:1][S;X2;H1:2]",
+    conditions = "br2",
+    also_attacks = { "aldehyde" },
+    recipe = "NCS, 2 M HCl, MeCN, 0-10 °C; also: Cl2, AcOH-H2O; from the benzyl thioether",
+    yield = { 60, 90 },
+    cautions = { "N-chlorosuccinimide", "chlorine", "hydrochloric acid" },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "N#Cc1ccc(cc1)S(=O)(=O)Cl", from = { "N#Cc1ccc(S)cc1" } },
+    example { "O=S(=O)(Cl)Cc1ccccc1", from = { "SCc1ccccc1" } },
+    refuse { "OS(=O)(=O)c1ccccc1" }, -- sulfonic acid, no S-Cl bond
+}
+
+disconnection "triethylsilyl-ether" {
+    about = "Silylation of an alcohol (triethylsilyl); primary before secondary before tertiary",
+    target = "[C;X4:1][O;X2:2][Si;X4:3]([C;H2:4][C;H3:5])([C;H2:6][C;H3:7])[C;H2:8][C;H3:9]",
+    from = "[C;X4:1][O;X2;H1:2].[Cl;X1][Si;X4:3]([C;H2:4][C;H3:5])([C;H2:6][C;H3:7])[C;H2:8][C;H3:9]",
+    conditions = "silylation",
+    also_attacks = { "free acid", "thiol", "primary amine" },
+    recipe = "TESCl, imidazole, DMF or CH2Cl2; also: TESOTf, 2,6-lutidine, -78 °C (tertiary alcohols)",
+    yield = { 85, 98 },
+    cautions = { "N,N-dimethylformamide" },
+    source = "Wuts, Greene's Protective Groups in Organic Synthesis; from memory",
+    example { "CC[Si](CC)(CC)OC(C)(C)C#Cc1ccccc1", from = { "OC(C)(C)C#Cc1ccccc1", "CC[Si](Cl)(CC)CC" } },
+    example { "CC[Si](CC)(CC)OC1CCCCC1", from = { "OC1CCCCC1", "CC[Si](Cl)(CC)CC" } },
+    refuse { "CC[Si](CC)(CC)Cc1ccccc1" }, -- C-Si, not O-Si
+}
+
+interconversion "dimethyl-acetal-formation" {
+    about = "Acetal formation from an aldehyde and methanol; equilibrium: remove water",
+    target = "[C;X4;H1:1]([#6:5])([O;X2:2][C;H3:6])[O;X2:3][C;H3:7]",
+    from = "[C;X3;H1:1]([#6:5])=[O;X1].[O;X2;H1:2][C;H3:6].[O;X2;H1:3][C;H3:7]",
+    conditions = "acid-hot-dry",
+    recipe = "TsOH (cat), HC(OMe)3, MeOH, rt to reflux",
+    yield = { 80, 97 },
+    source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
+    example { "COC(OC)c1ccc(Br)cc1", from = { "O=Cc1ccc(Br)cc1", "CO", "CO" } },
+    example { "COC(OC)c1ccccc1", from = { "O=Cc1ccccc1", "CO", "CO" } },
+    refuse { "COC(OC)OC" }, -- orthoester carbon bears three oxygens
+}
+
+disconnection "vinylogous-ester" {
+    about = "3-Alkoxy enone from a 1,3-diketone; two isomers from an unsymmetrical dione",
+    target = "[C;X4:1][O;X2:2][C;X3:3]=[C;X3;H1:4][C;X3:5](=[O:6])[#6:7]",
+    from = "[C:1][O;H1:2].O=[C:3][C;H2:4][C:5](=[O:6])[#6:7]",
+    conditions = "acid-hot-dry",
+    recipe = "TsOH, ROH, benzene or toluene, reflux with water removal; also: TiCl4/ROH, Me2SO4/K2CO3, MeI",
+    yield = { 80, 95 },
+    source = "Carey and Sundberg, Advanced Organic Chemistry, Part B; from memory",
+    example { "CC(C)COC1=CC(=O)CC(c2ccccc2)C1", from = { "CC(C)CO", "O=C1CC(=O)CC(c2ccccc2)C1" } },
+    example { "CCOC1=CC(=O)CCC1", from = { "CCO", "O=C1CCCC(=O)C1" } },
+    refuse { "COC1=CCCCC1" }, -- no ketone: a simple enol ether
+}
+
+disconnection "heteroaryl-s-methylation" {
+    about = "S-Methylation of a cyclic thiourea or thioamide; sulfur before nitrogen; precursor written as the thiol, it exists as the thione",
+    target = "[n;X2:4]:[c;r6:1]-[S;X2:2]-!@[C;X4;H3:3]",
+    cut = { 3, 2 },
+    acceptor = { 3, "methyl" },
+    donor = { 2, "thiol" },
+    conditions = "alkylation",
+    also_attacks = { "tertiary amine" },
+    recipe = "NaOH, MeI, H2O/MeOH, rt; also: K2CO3/DMF, Me2SO4, benzyl chloride",
+    yield = { 80, 95 },
+    cautions = { "iodomethane", "sodium hydroxide" },
+    source = "Joule and Mills, Heterocyclic Chemistry; from memory",
+    example { "CSc1nc(cc(=O)[nH]1)-c1ccccc1", from = { "O=c1cc(-c2ccccc2)nc(S)[nH]1", "CI" } },
+    example { "CSc1ccccn1", from = { "Sc1ccccn1", "CI" } },
+    refuse { "CSc1ccccc1" }, -- no ring nitrogen next to the carbon
+}
+
+disconnection "thioether-from-activated-alcohol" {
+    about = "Thioether from a diarylcarbinol and a thiol; SN1, racemic",
+    target = "[c:1][C;X4;H1:2]([c:3])-!@[S;X2:4][#6:5]",
+    from = "[c:1][C:2]([c:3])O.[S;H1:4][#6:5]",
+    conditions = "acid-dry-strong",
+    also_attacks = { "other thiol", "alkene" },
+    recipe = "CF3CO2H, rt; also: H2SO4/AcOH, BF3·OEt2; trityl alcohol likewise",
+    yield = { 80, 95 },
+    cautions = { "trifluoroacetic acid" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "OC(=O)CSC(c1ccccc1)c1ccc(F)cc1", from = { "OC(c1ccccc1)c1ccc(F)cc1", "OC(=O)CS" } },
+    example { "OC(=O)CSC(c1ccccc1)c1ccccc1", from = { "OC(c1ccccc1)c1ccccc1", "OC(=O)CS" } },
+    refuse { "CCSCc1ccccc1" }, -- only one aryl group: cation too poor
+}
+
+disconnection "sulfone-by-alkylation" {
+    about = "Sulfone by alkylation of a sulfinate; sulfur, not oxygen",
+    target = "[#6:1][S;X4:2](=[O:3])(=[O:4])-!@[C;X4;H2:5][#6:6]",
+    from = "[#6:1][S;X3:2](=[O:3])[O;H1:4].Br[C:5][#6:6]",
+    conditions = "alkylation",
+    also_attacks = { "other alkyl halide", "enone", "epoxide" },
+    recipe = "sodium sulfinate, DMF, 60-80 °C; also: alkyl chloride, iodide, tosylate",
+    yield = { 75, 93 },
+    cautions = { "methyl bromoacetate", "N,N-dimethylformamide" },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "COC(=O)CS(=O)(=O)c1ccc(F)cc1", from = { "O=S(O)c1ccc(F)cc1", "COC(=O)CBr" } },
+    example { "O=S(=O)(Cc1ccccc1)c1ccccc1", from = { "O=S(O)c1ccccc1", "BrCc1ccccc1" } },
+    refuse { "CC(C)(C)S(=O)(=O)c1ccccc1" }, -- tertiary halide eliminates
+}
+
+disconnection "methyl-sulfone-from-sulfinate" {
+    about = "Methyl sulfone from a sulfinate and iodomethane; sulfur, not oxygen",
+    target = "[c:1][S;X4:2](=[O:3])(=[O:4])-!@[C;X4;H3:5]",
+    from = "[c:1][S;X3:2](=[O:3])[O;H1:4].I[C:5]",
+    conditions = "alkylation",
+    also_attacks = { "tertiary amine" },
+    recipe = "sodium sulfinate, MeI, DMF, 40 °C; also: Me2SO4, ClCH2CO2H then decarboxylation",
+    yield = { 75, 92 },
+    cautions = { "iodomethane", "N,N-dimethylformamide" },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "CS(=O)(=O)c1ccc(C(C)=O)c(Br)c1", from = { "CC(=O)c1ccc(cc1Br)S(=O)O", "CI" } },
+    example { "CS(=O)(=O)c1ccccc1", from = { "O=S(O)c1ccccc1", "CI" } },
+    refuse { "CS(=O)c1ccccc1" }, -- a sulfoxide
 }

@@ -215,3 +215,193 @@ interconversion "benzal-chloride" {
     example { "ClC(Cl)c1ccccc1", from = { "Cc1ccccc1" } },
     refuse { "ClCc1ccccc1" }, -- one chlorine: benzylic chlorination
 }
+
+interconversion "appel-bromide" {
+    about = "Appel bromination with tetrabromomethane; inversion",
+    rxno = "RXNO:0000554",
+    target = "[C@;X4;H1:1]([C;X4:3])([C;X4:4])[Br;X1]",
+    from = "[C@@;X4;H1:1]([C;X4:3])([C;X4:4])[O;H1]",
+    conditions = "pbr3",
+    also_attacks = { "azide" },
+    recipe = "CBr4, PPh3, CH2Cl2, 0 °C to rt",
+    yield = { 65, 90 },
+    cautions = { "tetrabromomethane", "triphenylphosphine" },
+    source = "R. Appel, Angew. Chem. Int. Ed. Engl. 1975, 14, 801; from memory",
+    example { "CCOC(=O)C[C@H](C)Br", from = { "CCOC(=O)C[C@@H](C)O" } },
+    example { "BrC1CCCCC1", from = { "OC1CCCCC1" } },
+    refuse { "CCC(C)(C)Br" }, -- tertiary centre does not take part in SN2
+}
+
+interconversion "appel-allylic-chloride" {
+    about = "Appel chlorination of an allylic alcohol; no allylic transposition, geometry kept",
+    rxno = "RXNO:0000408",
+    target = "[C;X4;H2:1]([C;X3:3]=[C;X3:4])[Cl;X1]",
+    from = "[C;X4;H2:1]([C;X3:3]=[C;X3:4])[O;H1]",
+    conditions = "pbr3",
+    also_attacks = { "azide" },
+    recipe = "CCl4, PPh3, reflux or MsCl, LiCl, s-collidine, DMF, 0 °C",
+    yield = { 75, 90 },
+    cautions = { "carbon tetrachloride", "methanesulfonyl chloride", "N,N-dimethylformamide",
+        "triphenylphosphine" },
+    source = "Org. Synth. Coll. Vol. 6 (geranyl chloride); from memory",
+    example { "CC(C)=CCC/C(C)=C/CCl", from = { "CC(C)=CCC/C(C)=C/CO" } },
+    example { "C/C=C/CCl", from = { "C/C=C/CO" } },
+    refuse { "C=CC(C)(Cl)CCC=C(C)C" }, -- tertiary allylic chloride (SN2′ isomer) is not formed
+}
+
+interconversion "iodide-from-alcohol" {
+    about = "Iodide from alcohol with iodine and triphenylphosphine (Garegg-Samuelsson); inversion; neighbouring centres kept",
+    rxno = "RXNO:0000364",
+    target = "[C;X4;H2:1]([C;X4;!H0:3])[I;X1]",
+    from = "[C;X4;H2:1]([C;X4:3])[O;H1]",
+    conditions = "pbr3",
+    also_attacks = { "azide" },
+    recipe = "I2, PPh3, imidazole, CH2Cl2, 0 °C",
+    yield = { 70, 92 },
+    cautions = { "iodine", "triphenylphosphine" },
+    source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
+    example { "COC(=O)[C@H](CI)NC(=O)OC(C)(C)C", from = { "COC(=O)[C@H](CO)NC(=O)OC(C)(C)C" } },
+    example { "CCCCCI", from = { "CCCCCO" } },
+    refuse { "CC(C)(C)CI" }, -- neopentyl carbon
+}
+
+interconversion "bromide-from-sulfonate" {
+    about = "Bromide displacement of a sulfonate; inversion",
+    target = "[C@;X4;H1:1]([C;X4:3])([C;X4:4])[Br;X1]",
+    from = "[C@@;X4;H1:1]([C;X4:3])([C;X4:4])[O;X2][S;X4](=O)(=O)[C;H3]",
+    conditions = "alkylation",
+    also_attacks = { "alkyl halide", "epoxide" },
+    recipe = "LiBr, acetone or DMF, 50-60 °C; also: tosylate",
+    yield = { 70, 90 },
+    cautions = { "N,N-dimethylformamide" },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "CCCC[C@H](C)Br", from = { "CCCC[C@@H](C)OS(C)(=O)=O" } },
+    example { "BrC1CCCC1", from = { "CS(=O)(=O)OC1CCCC1" } },
+    refuse { "CC(C)(C)Br" }, -- tertiary sulfonate cannot be made or displaced
+}
+
+interconversion "wohl-ziegler-allylic" {
+    about = "Wohl-Ziegler bromination (allylic); allylic C-H; transposed isomer in unsymmetrical alkenes",
+    rxno = "RXNO:0000225",
+    target = "[C;X4;H1;R:1]([C;X4;R:5])([C;X3;H1;R:3]=[C;X3;H1;R:4])[Br;X1]",
+    from = "[C;X4;H2;R:1]([C;X4;R:5])[C;X3;H1;R:3]=[C;X3;H1;R:4]",
+    conditions = "nbs-radical",
+    also_attacks = { "alkene" },
+    recipe = "NBS, dibenzoyl peroxide, CCl4, reflux",
+    yield = { 50, 80 },
+    cautions = { "N-bromosuccinimide", "carbon tetrachloride", "dibenzoyl peroxide" },
+    source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
+    example { "BrC1CCCCC=C1", from = { "C1CCCC=CC1" } },
+    example { "BrC1CCCC=C1", from = { "C1CCC=CC1" } },
+    refuse { "BrC1CCCCC1" }, -- no C=C beside the C-Br carbon
+}
+
+interconversion "hell-volhard-zelinsky" {
+    about = "Hell-Volhard-Zelinsky reaction; alpha to the acid, racemic",
+    rxno = "RXNO:0000621",
+    target = "[O;X2;H1:5][C;X3:1](=[O;X1:2])[C;X4;H1:3]([#6;!$(C=O):6])[Br;X1]",
+    from = "[O;X2;H1:5][C;X3:1](=[O;X1:2])[C;X4;H2:3][#6:6]",
+    conditions = "br2",
+    also_attacks = { "ketone", "aldehyde", "free alcohol" },
+    recipe = "Br2, PBr3 (cat) or red P, 80-100 °C, then H2O",
+    yield = { 65, 90 },
+    cautions = { "bromine", "phosphorus tribromide" },
+    source = "March's Advanced Organic Chemistry; from memory",
+    example { "OC(=O)C(Br)CCc1ccccc1", from = { "OC(=O)CCCc1ccccc1" } },
+    example { "CCCC(Br)C(=O)O", from = { "CCCCC(=O)O" } },
+    refuse { "OC(=O)CC(Br)C" }, -- bromine is beta, not alpha, to the acid
+}
+
+interconversion "haloform-reaction" {
+    about = "Haloform reaction; methyl ketone loses its methyl group",
+    rxno = "RXNO:0000689",
+    target = "[#6;$(c),$([C;X4;H0]([#6])([#6])[#6]),$([C;X3]=C):3][C;X3:1](=[O;X1:2])[O;X2;H1]",
+    from = "[#6:3][C;X3:1](=[O;X1:2])[C;X4;H3]",
+    conditions = "br2",
+    also_attacks = { "free alcohol", "aldehyde" },
+    recipe = "NaOCl or NaOBr, H2O-dioxane, 55 °C",
+    yield = { 75, 95 },
+    cautions = { "sodium hypochlorite" },
+    source = "Org. Synth. Coll. Vol. 2, 428 (2-naphthoic acid); from memory",
+    example { "OC(=O)c1ccc2ccccc2c1", from = { "CC(=O)c1ccc2ccccc2c1" } },
+    example { "OC(=O)C(C)(C)C", from = { "CC(=O)C(C)(C)C" } },
+    refuse { "OC(=O)CCC" }, -- enolisable on the other side of the carbonyl as well
+}
+
+interconversion "deoxyfluorination-alcohol" {
+    about = "Deoxyfluorination of an alcohol; inversion; elimination is the rival",
+    target = "[C@;X4;H1:1]([C;X4:3])([C;X4:4])[F;X1]",
+    from = "[C@@;X4;H1:1]([C;X4:3])([C;X4:4])[O;H1]",
+    conditions = "pbr3",
+    also_attacks = { "aldehyde", "ketone" },
+    recipe = "DAST, CH2Cl2, -78 °C to rt; also: Deoxo-Fluor",
+    yield = { 50, 80 },
+    cautions = { "diethylaminosulfur trifluoride" },
+    source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
+    example { "COC(=O)[C@@H]1C[C@H](F)CN1C(=O)OC(C)(C)C", from = { "COC(=O)[C@@H]1C[C@@H](O)CN1C(=O)OC(C)(C)C" } },
+    example { "FC1CCN(CC1)C(=O)OC(C)(C)C", from = { "OC1CCN(CC1)C(=O)OC(C)(C)C" } },
+    refuse { "Fc1ccccc1" }, -- fluorine on an arene carbon
+}
+
+interconversion "difluoride-from-ketone" {
+    about = "gem-Difluoride from a ketone; vinyl fluoride is the rival",
+    target = "[C;X4;H0:1]([C;X4:3])([C;X4:4])([F;X1])[F;X1]",
+    from = "[C;X3;H0:1]([C;X4:3])([C;X4:4])=[O;X1]",
+    conditions = "pbr3",
+    also_attacks = { "aldehyde", "ketone" },
+    recipe = "DAST, CH2Cl2, rt; also: Deoxo-Fluor",
+    yield = { 50, 80 },
+    cautions = { "diethylaminosulfur trifluoride" },
+    source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
+    example { "FC1(F)CCN(CC1)C(=O)OC(C)(C)C", from = { "O=C1CCN(CC1)C(=O)OC(C)(C)C" } },
+    example { "FC1(F)CCCCC1", from = { "O=C1CCCCC1" } },
+    refuse { "FC(F)(F)CC" }, -- trifluoromethyl group is not made from a ketone
+}
+
+interconversion "bromodecarboxylation" {
+    about = "Hunsdiecker reaction; radical: configuration lost",
+    rxno = "RXNO:0000106",
+    target = "[C;X4;H2,H1;!$(C[#7,#8,#16]):1]([C;X4:3])[Br;X1]",
+    from = "[C;X4:1]([C;X4:3])[C;X3](=O)[O;H1]",
+    conditions = "br2",
+    also_attacks = { "aldehyde", "free alcohol" },
+    recipe = "Ag2O then Br2, CCl4, reflux; also: HgO, Br2 (Cristol-Firth)",
+    yield = { 50, 70 },
+    cautions = { "bromine", "carbon tetrachloride" },
+    source = "Org. Synth. Coll. Vol. 3 (methyl 5-bromovalerate); from memory",
+    example { "COC(=O)CCCCBr", from = { "COC(=O)CCCCC(=O)O" } },
+    example { "BrC1CC1", from = { "OC(=O)C1CC1" } },
+    refuse { "Brc1ccccc1" }, -- arene carbon: decarboxylation of the aroyloxy radical is slow
+}
+
+interconversion "allylic-bromide-transposed" {
+    about = "Primary allylic bromide from a tertiary allylic alcohol; transposition to the primary halide, E:Z about 2:1 to 4:1",
+    rxno = "RXNO:0000364",
+    target = "[#6:4][C;X3;H0:1]([#6:5])=[C;X3;H1:2][C;X4;H2:3][Br]",
+    from = "[#6:4][C:1](O)([#6:5])[C;H1:2]=[C;H2:3]",
+    conditions = "pbr3",
+    also_attacks = { "tertiary alcohol", "silyl ether" },
+    recipe = "PBr3, Et2O, 0 °C; also: 48% HBr, HCl for the chloride",
+    yield = { 70, 90 },
+    cautions = { "phosphorus tribromide" },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "CC(=O)OC(C)CCC(C)=CCBr", from = { "CC(=O)OC(C)CCC(C)(O)C=C" } },
+    example { "CC(C)=CCBr", from = { "CC(C)(O)C=C" } },
+    refuse { "C=CCBr" }, -- no alkyl group on the far carbon
+}
+
+interconversion "allylic-chloride-transposed" {
+    about = "Primary allylic chloride from a tertiary allylic alcohol; transposition to the primary halide, E preferred",
+    rxno = "RXNO:0000364",
+    target = "[#6:4][C;X3;H0:1]([#6:5])=[C;X3;H1:2][C;X4;H2:3]Cl",
+    from = "[#6:4][C:1](O)([#6:5])[C;H1:2]=[C;H2:3]",
+    conditions = "acid-aq-strong",
+    also_attacks = { "other alcohol" },
+    recipe = "conc. HCl, 0-20 °C; also: SOCl2/pyridine, PCl3",
+    yield = { 65, 88 },
+    cautions = { "hydrochloric acid" },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "CC(C)=CCCC(C)=CCCl", from = { "CC(C)=CCCC(C)(O)C=C" } },
+    example { "CC(C)=CCCl", from = { "CC(C)(O)C=C" } },
+    refuse { "C=CCCl" }, -- no alkyl group on the far carbon
+}

@@ -403,3 +403,392 @@ disconnection "aryl-acetate-from-anhydride" {
     refuse { "CC(=O)Oc1ccccc1N" }, -- the free amine would be acylated first
     when = function(m) return not m.molecule:has "[NX3;H1,H2;+0;!$(N[C,S]=[O,S,N])]" end,
 }
+
+interconversion "lindgren-oxidation" {
+    about = "Lindgren oxidation; alkene, alcohol and silyl ether survive; scavenger takes up HOCl",
+    rxno = "RXNO:0000287",
+    target = "[#6:1][C;X3;H0:2](=[O;X1:3])[O;X2;H1]",
+    from = "[#6:1][C;X3;H1:2]=[O;X1:3]",
+    conditions = "tempo",
+    also_attacks = { "aldehyde", "thioether", "aniline" },
+    recipe = "NaClO2, NaH2PO4, 2-methylbut-2-ene, tBuOH-H2O, rt",
+    yield = { 85, 98 },
+    cautions = { "sodium chlorite" },
+    source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
+    example { "OC(=O)/C=C/c1ccc(O[Si](C)(C)C(C)(C)C)cc1", from = { "O=C/C=C/c1ccc(O[Si](C)(C)C(C)(C)C)cc1" } },
+    example { "OC(=O)/C=C/c1ccccc1", from = { "O=C/C=C/c1ccccc1" } },
+    refuse { "CNC(=O)O" }, -- carbamic acid, no carbon on the carboxyl group
+}
+
+disconnection "methyl-ester-diazomethane" {
+    about = "Methyl ester with diazomethane; acid before alcohol; neutral, no epimerisation",
+    target = "[#6:1][C;X3:2](=[O;X1:3])-!@[O;X2:4][C;X4;H3:5]",
+    from = "[#6:1][C;X3:2](=[O;X1:3])[O;X2;H1:4].[C;H2:5]=[N+]=[N-]",
+    conditions = "acid-aq-mild",
+    also_attacks = { "phenol", "free acid", "enone", "thiol" },
+    recipe = "CH2N2, Et2O, 0 °C; also: TMSCHN2, toluene-MeOH",
+    yield = { 90, 99 },
+    cautions = { "diazomethane" },
+    source = "March's Advanced Organic Chemistry; from memory",
+    example { "COC(=O)C1(O)CC(O)C(O)C(O)C1", from = { "OC(=O)C1(O)CC(O)C(O)C(O)C1", "C=[N+]=[N-]" } },
+    example { "COC(=O)C1CCCCC1", from = { "OC(=O)C1CCCCC1", "C=[N+]=[N-]" } },
+    refuse { "CCOC(=O)C" }, -- ethyl ester: diazomethane gives methyl esters
+}
+
+disconnection "transesterification" {
+    about = "Transesterification of a methyl ester; equilibrium: distil methanol off or use excess alcohol",
+    target = "[#6:1][C;X3:2](=[O;X1:3])-!@[O;X2:4]-!@[C;X4;H2;$(C-[#6]):5]",
+    cut = { 2, 4 },
+    acceptor = { 2, "acyl-methyl-ester" },
+    donor = { 4, "alcohol" },
+    conditions = "alkoxide",
+    recipe = "NaOMe or Ti(OiPr)4 (cat), alcohol, reflux; also: K2CO3; ethyl ester",
+    yield = { 75, 95 },
+    cautions = { "sodium methoxide" },
+    source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
+    example { "CCCCOC(=O)c1cccnc1", from = { "COC(=O)c1cccnc1", "CCCCO" } },
+    example { "CCCCOC(=O)C=C", from = { "COC(=O)C=C", "CCCCO" } },
+    refuse { "CC(=O)OC(C)(C)C" }, -- tertiary alkoxide does not exchange in good yield
+}
+
+disconnection "mixed-anhydride" {
+    about = "Anhydride from an acid and an acid chloride; mixed anhydrides disproportionate on heating: use at once",
+    target = "[#6:1][C;X3:2](=[O;X1:3])-!@[O;X2:4]-!@[C;X3:5](=[O;X1:6])[#6:7]",
+    cut = { 5, 4 },
+    acceptor = { 5, "acyl" },
+    donor = { 4, "carboxylate" },
+    conditions = "acylation",
+    recipe = "Et3N or pyridine, Et2O or THF, 0 °C",
+    yield = { 80, 95 },
+    cautions = { "pyridine" },
+    source = "March's Advanced Organic Chemistry; from memory",
+    example { "CC(C)(C)C(=O)OC(=O)c1ccccc1Cl", from = { "OC(=O)c1ccccc1Cl", "CC(C)(C)C(=O)Cl" } },
+    example { "CCCC(=O)OC(=O)C(C)(C)C", from = { "CCCC(=O)O", "CC(C)(C)C(=O)Cl" } },
+    refuse { "O=C1CCC(=O)O1" }, -- cyclic anhydride comes from the diacid
+}
+
+interconversion "cyclic-anhydride" {
+    about = "Cyclic anhydride from a 1,4-diacid; five-membered ring; cis relation in rings",
+    target = "[C;X3;r5:1]1(=[O;X1:2])[O;X2;r5:3][C;X3;r5:4](=[O;X1:5])[#6;r5:6]~[#6;r5:7]1",
+    from = "[C;X3:1](=[O;X1:2])([O;X2;H1:3])[#6:7]~[#6:6][C;X3:4](=[O;X1:5])[O;H1]",
+    conditions = "acylation",
+    recipe = "Ac2O, reflux; also: SOCl2; TFAA, rt",
+    yield = { 85, 97 },
+    cautions = { "acetic anhydride" },
+    source = "March's Advanced Organic Chemistry; from memory",
+    example { "O=C1OC(=O)c2cc(F)ccc12", from = { "OC(=O)c1cc(F)ccc1C(=O)O" } },
+    example { "O=C1CCC(=O)O1", from = { "OC(=O)CCC(=O)O" } },
+    refuse { "CC(=O)OC(C)=O" }, -- open-chain anhydride
+}
+
+disconnection "amide-acid-from-cyclic-anhydride" {
+    about = "Ring opening of a cyclic anhydride by an amine; one acyl group; unsymmetrical anhydrides give isomers",
+    target = "[O;X2;H1:1][C;X3:2](=[O;X1:3])[#6:4]~[#6:5][C;X3:6](=[O;X1:7])-!@[N;X3:8]",
+    from = "[O;X2;H0:1]1[C;X3:2](=[O;X1:3])[#6:4]~[#6:5][C;X3:6]1=[O;X1:7].[N;X3:8]",
+    conditions = "amine-rt",
+    also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol" },
+    recipe = "THF or EtOAc, rt; base for alcohols",
+    yield = { 85, 97 },
+    source = "Warren and Wyatt, Organic Synthesis: The Disconnection Approach; from memory",
+    example { "OC(=O)CCC(=O)Nc1ccc(I)cc1", from = { "O=C1CCC(=O)O1", "Nc1ccc(I)cc1" } },
+    example { "OC(=O)CCC(=O)NCc1ccccc1", from = { "O=C1CCC(=O)O1", "NCc1ccccc1" } },
+    refuse { "OC(=O)CC(=O)Nc1ccccc1" }, -- malonic half-amide: the four-membered anhydride is not available
+}
+
+disconnection "hydrazide-from-ester" {
+    about = "Hydrazinolysis of an ester; monoacylation with excess hydrazine",
+    target = "[#6:1][C;X3:2](=[O;X1:3])[N;X3;H1:4][N;X3;H2:5]",
+    cut = { 2, 4 },
+    acceptor = { 2, "acyl-simple-ester" },
+    donor = { 4, "amine" },
+    conditions = "hydrazine",
+    recipe = "N2H4·H2O (excess), EtOH, reflux; also: ethyl ester",
+    yield = { 80, 97 },
+    cautions = { "hydrazine" },
+    source = "March's Advanced Organic Chemistry; from memory",
+    example { "NNC(=O)c1ccncc1", from = { "COC(=O)c1ccncc1", "NN" } },
+    example { "NNC(=O)c1ccccc1", from = { "CCOC(=O)c1ccccc1", "NN" } },
+    refuse { "CN(N)C(=O)c1ccccc1" }, -- N-methyl hydrazide needs methylhydrazine
+}
+
+disconnection "hydroxamic-acid" {
+    about = "Hydroxamic acid from an ester; N-acylation",
+    target = "[#6:1][C;X3:2](=[O;X1:3])[N;X3;H1:4][O;X2;H1:5]",
+    cut = { 2, 4 },
+    acceptor = { 2, "acyl-simple-ester" },
+    donor = { 4, "amine" },
+    conditions = "base-aq-mild",
+    also_attacks = { "ester", "aldehyde", "ketone", "enone" },
+    recipe = "NH2OH·HCl, NaOMe or KOH, MeOH, 0 °C to rt; also: ethyl ester",
+    yield = { 65, 90 },
+    cautions = { "hydroxylamine hydrochloride", "potassium hydroxide", "sodium methoxide" },
+    source = "March's Advanced Organic Chemistry; from memory",
+    example { "O=C(CCCCCCC(=O)NO)Nc1ccccc1", from = { "COC(=O)CCCCCCC(=O)Nc1ccccc1", "NO" } },
+    example { "ONC(=O)c1ccccc1", from = { "CCOC(=O)c1ccccc1", "NO" } },
+    refuse { "CONC(=O)c1ccccc1" }, -- O-alkyl hydroxamate needs an alkoxyamine
+}
+
+disconnection "isocyanate-from-amine" {
+    about = "Isocyanate from an amine and phosgene equivalent; low concentration of amine avoids the urea",
+    target = "[#6:1][N;X2:2]=[C;X2:3]=[O;X1:4]",
+    from = "[#6:1][N;X3;H2:2].[Cl;X1][C;X3:3](=[O;X1:4])[Cl;X1]",
+    conditions = "acylation",
+    recipe = "triphosgene (0.35 equiv), Et3N or sat. NaHCO3, CH2Cl2, 0 °C",
+    yield = { 75, 95 },
+    cautions = { "phosgene", "triphosgene" },
+    source = "March's Advanced Organic Chemistry; from memory",
+    example { "O=C=Nc1ccc(Cl)c(C(F)(F)F)c1", from = { "Nc1ccc(Cl)c(C(F)(F)F)c1", "ClC(Cl)=O" } },
+    example { "O=C=Nc1ccccc1", from = { "Nc1ccccc1", "ClC(Cl)=O" } },
+    refuse { "CN=C=S" }, -- isothiocyanate needs thiophosgene or CS2
+}
+
+interconversion "curtius-isocyanate" {
+    about = "Curtius rearrangement to an isocyanate; migrating group keeps its configuration",
+    rxno = "RXNO:0000054",
+    target = "[#6:1][N;X2:2]=[C;X2:3]=[O;X1:4]",
+    from = "[#6:1][C;X3:3](=[O;X1:4])[N;X2:2]=[N+]=[N-]",
+    conditions = "heat-200",
+    also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol", "free acid" },
+    recipe = "toluene, 80-110 °C, behind a shield",
+    yield = { 75, 95 },
+    cautions = { "acyl azides" },
+    source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
+    example { "COC(=O)[C@@H]1CC[C@H](CC1)N=C=O", from = { "COC(=O)[C@@H]1CC[C@H](CC1)C(=O)N=[N+]=[N-]" } },
+    example { "O=C=Nc1ccccc1", from = { "[N-]=[N+]=NC(=O)c1ccccc1" } },
+    refuse { "CN=C=S" }, -- isothiocyanate is not formed
+}
+
+disconnection "curtius-boc-amine" {
+    about = "Curtius rearrangement in tert-butanol (one pot); migrating group keeps its configuration",
+    rxno = "RXNO:0000054",
+    target = "[#6;$(c),$([C;X4]);!$(C-[CX3]=O):1][N;X3;H1:2]-!@[C;X3:3](=[O;X1:4])[O;X2:5][C;X4;H0:6]([C;H3:7])([C;H3:8])[C;H3:9]",
+    from = "[#6:1][C;X3:3](=[O;X1:4])[O;H1].[O;X2;H1:5][C;X4:6]([C;H3:7])([C;H3:8])[C;H3:9].O=P(Oc1ccccc1)(Oc1ccccc1)[N;X2:2]=[N+]=[N-]",
+    conditions = "heat-200",
+    also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol" },
+    recipe = "DPPA, Et3N, tBuOH-toluene, 80-100 °C",
+    yield = { 60, 85 },
+    cautions = { "diphenylphosphoryl azide" },
+    source = "T. Shioiri, K. Ninomiya and S. Yamada, J. Am. Chem. Soc. 1972, 94, 6203; from memory",
+    example { "CC(C)(C)OC(=O)Nc1cc(Cl)ncc1",
+        from = { "OC(=O)c1cc(Cl)ncc1", "CC(C)(C)O", "O=P(Oc1ccccc1)(Oc1ccccc1)N=[N+]=[N-]" } },
+    example { "CC(C)(C)OC(=O)NC1CCCCC1",
+        from = { "OC(=O)C1CCCCC1", "CC(C)(C)O", "O=P(Oc1ccccc1)(Oc1ccccc1)N=[N+]=[N-]" } },
+    refuse { "CC(C)(C)OC(=O)N1CCCC1" }, -- secondary amine: the isocyanate gives N-H carbamates only
+}
+
+interconversion "schmidt-acid" {
+    about = "Schmidt rearrangement of a carboxylic acid; migrating group keeps its configuration",
+    rxno = "RXNO:0000170",
+    target = "[#6;$(c),$([C;X4;H1,H0]);!$(C-[CX3]=O):1][N;X3;H2:2]",
+    from = "[#6:1][C;X3](=[O;X1])[O;H1].[N;X2;H1:2]=[N+]=[N-]",
+    conditions = "acid-aq-strong",
+    also_attacks = { "ketone", "aldehyde", "alkene", "free alcohol" },
+    recipe = "NaN3, H2SO4, CHCl3, 40-50 °C (hydrazoic acid made in situ)",
+    yield = { 60, 85 },
+    cautions = { "hydrazoic acid", "sodium azide", "sulfuric acid" },
+    source = "March's Advanced Organic Chemistry; from memory",
+    example { "NC1CCCCC1", from = { "OC(=O)C1CCCCC1", "N=[N+]=[N-]" } },
+    example { "NC1CCCC1", from = { "OC(=O)C1CCCC1", "N=[N+]=[N-]" } },
+    refuse { "CNC1CCCCC1" }, -- secondary amine is not formed
+}
+
+interconversion "lossen-rearrangement" {
+    about = "Lossen rearrangement; migrating group keeps its configuration",
+    rxno = "RXNO:0000156",
+    target = "[c:1][N;X3;H2:2]",
+    from = "[#6:1][C;X3](=[O;X1])[N;X3;H1:2][O;X2;H1]",
+    conditions = "base-aq-strong",
+    also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol" },
+    recipe = "TsCl or CDI, base, MeCN-H2O, heat; also: K2CO3, DMSO, 90-130 °C",
+    yield = { 55, 85 },
+    cautions = { "hydroxamic acids", "4-toluenesulfonyl chloride" },
+    source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
+    example { "Nc1ccc(OC)c(OC)c1", from = { "ONC(=O)c1ccc(OC)c(OC)c1" } },
+    example { "Nc1ccccc1", from = { "ONC(=O)c1ccccc1" } },
+    refuse { "CNc1ccccc1" }, -- secondary amine is not formed
+}
+
+disconnection "arndt-eistert" {
+    about = "Arndt-Eistert reaction; one carbon more; migrating group keeps its configuration",
+    rxno = "RXNO:0000063",
+    target = "[#6:1][C;X4;H2:2][C;X3:3](=[O;X1:4])[O;X2;H1]",
+    from = "[#6:1][C;X3:3](=[O;X1:4])[Cl;X1].[C;H2:2]=[N+]=[N-]",
+    conditions = "photo",
+    also_attacks = { "free acid", "phenol", "aldehyde", "thiol" },
+    recipe = "CH2N2 (2-3 equiv), Et2O, 0 °C, then Ag2O or PhCO2Ag, H2O or light",
+    yield = { 50, 80 },
+    cautions = { "diazomethane" },
+    source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
+    example { "COc1ccc(CC(=O)O)cc1[N+](=O)[O-]", from = { "COc1ccc(C(=O)Cl)cc1[N+](=O)[O-]", "C=[N+]=[N-]" } },
+    example { "OC(=O)Cc1cccc2ccccc12", from = { "O=C(Cl)c1cccc2ccccc12", "C=[N+]=[N-]" } },
+    refuse { "CC(C)(C)C(=O)O" }, -- no CH2 beside the acid to come from diazomethane
+}
+
+interconversion "baeyer-villiger-lactone" {
+    about = "Baeyer-Villiger oxidation (lactone); the more substituted carbon migrates with retention; ring grows by one",
+    rxno = "RXNO:0000031",
+    target = "[C;X4;R;!$(C([#8])[#7,#8,#16]):1]@[O;X2;R]@[C;X3;R:3](=[O;X1:4])@[C;X4;H2;R:5]",
+    from = "[C;X4;R:1][C;X3;R:3](=[O;X1:4])[C;X4;H2;R:5]",
+    conditions = "mcpba",
+    also_attacks = { "ketone" },
+    recipe = "mCPBA, NaHCO3, CH2Cl2, rt; also: H2O2, Lewis acid",
+    yield = { 75, 95 },
+    cautions = { "3-chloroperbenzoic acid" },
+    source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
+    example { "CC1CCCCC(=O)O1", from = { "CC1CCCCC1=O" } },
+    example { "O=C1CCCCCO1", from = { "O=C1CCCCC1" } },
+    refuse { "CC1CCCCOC1=O" }, -- the more substituted carbon migrates, so oxygen is not on CH2 here
+}
+
+disconnection "iodolactonisation" {
+    about = "Iodolactonization; 5-exo, anti addition of I and O",
+    rxno = "RXNO:0000582",
+    target = "[I;X1][C;X4;H2:1][C;X4;r5:2]1[O;X2;r5:3][C;X3;r5:4](=[O;X1:5])[#6;r5:6]~[#6;r5:7]1",
+    from = "[C;X3;H2:1]=[C;X3:2][#6:7]~[#6:6][C;X3:4](=[O;X1:5])[O;X2;H1:3]",
+    conditions = "br2",
+    recipe = "I2, KI, NaHCO3, H2O-CH2Cl2 or MeCN, 0 °C",
+    yield = { 75, 95 },
+    cautions = { "iodine" },
+    source = "M. D. Dowle and D. I. Davies, Chem. Soc. Rev. 1979, 8, 171; from memory",
+    example { "O=C1OC(CI)CC1Cc1ccccc1", from = { "C=CCC(C(=O)O)Cc1ccccc1" } },
+    example { "O=C1CCC(CI)O1", from = { "C=CCCC(=O)O" } },
+    refuse { "O=C1OCC(I)C1" }, -- iodine must sit on the exocyclic carbon (5-exo)
+}
+
+interconversion "omega-bromo-acid-from-lactone" {
+    about = "Opening of a lactone with hydrogen bromide; alkyl-oxygen cleavage at the primary carbon",
+    target = "[Br;X1][C;X4;H2:1][C;X4:2][C;X4:3][C;X3:4](=[O;X1:5])[O;X2;H1:6]",
+    from = "[C;X4;H2:1]1[C;X4:2][C;X4:3][C;X3:4](=[O;X1:5])[O;X2;H0:6]1",
+    conditions = "acid-aq-strong",
+    also_attacks = { "free alcohol", "ether", "alkene" },
+    recipe = "HBr (33 % in AcOH), 50-80 °C; also: SOCl2, MeOH for the chloro ester",
+    yield = { 75, 92 },
+    cautions = { "hydrobromic acid" },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "BrCCC(C)C(=O)O", from = { "CC1CCOC1=O" } },
+    example { "BrCCCC(=O)O", from = { "O=C1CCCO1" } },
+    refuse { "BrCCC(=O)O" }, -- beta-lactone would be needed
+}
+
+interconversion "beckmann-acyclic" {
+    about = "Acyclic Beckmann rearrangement; the group anti to the OH migrates with retention (aryl in aryl methyl oximes)",
+    rxno = "RXNO:0000631",
+    target = "[C;X4:2][C;X3:1](=[O;X1])[N;X3;H1:3]-!@[c:4]",
+    from = "[C;X4:2]/[C;X3:1](=[N;X2;H0:3]\\[O;H1])[c:4]",
+    conditions = "acid-aq-strong",
+    also_attacks = { "free alcohol", "primary amine", "secondary amine" },
+    recipe = "SOCl2 or POCl3, or TsCl, base; also: cyanuric chloride; H2SO4",
+    yield = { 70, 92 },
+    cautions = { "thionyl chloride", "4-toluenesulfonyl chloride", "phosphorus oxychloride" },
+    source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
+    example { "CC(=O)Nc1ccc(O)cc1", from = { "C/C(=N\\O)c1ccc(O)cc1" } },
+    example { "CC(=O)Nc1ccccc1", from = { "C/C(=N\\O)c1ccccc1" } },
+    refuse { "CNC(=O)c1ccccc1" }, -- the group anti to OH migrates; here that would be methyl
+}
+
+disconnection "pinner-imidate" {
+    about = "Pinner reaction; isolated as the hydrochloride; water gives the ester",
+    rxno = "RXNO:0000361",
+    target = "[#6:1][C;X3:2](=[N;X2;H1:3])-!@[O;X2:4][C;X4;H2,H3:5]",
+    from = "[#6:1][C;X2:2]#[N;X1;H0:3].[O;X2;H1:4][C;X4:5]",
+    conditions = "acid-hot-dry",
+    also_attacks = { "alkene" },
+    recipe = "HCl (g), dry EtOH, 0 °C",
+    yield = { 75, 95 },
+    cautions = { "hydrochloric acid" },
+    source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
+    example { "CCOC(=N)c1ccc(Cl)cc1", from = { "N#Cc1ccc(Cl)cc1", "CCO" } },
+    example { "CCOC(=N)c1ccccc1", from = { "N#Cc1ccccc1", "CCO" } },
+    refuse { "CCOC(=NC)c1ccccc1" }, -- N-substituted imidate comes from an amide
+}
+
+disconnection "amidine-from-nitrile" {
+    about = "Amidine from a nitrile; tautomers: drawn with C=NH; isolated as the hydrochloride",
+    target = "[#6:1][C;X3:2](=[N;X2;H1:3])[N;X3;H2:4]",
+    from = "[#6:1][C;X2:2]#[N;X1;H0:3].[N;X3;H3:4]",
+    conditions = "amine-rt",
+    also_attacks = { "ester", "ketone", "alkyl halide", "epoxide" },
+    recipe = "HCl, EtOH, then NH3, EtOH; also: LiN(SiMe3)2, THF, then H3O+",
+    yield = { 65, 90 },
+    cautions = { "hydrochloric acid", "ammonia" },
+    source = "March's Advanced Organic Chemistry; from memory",
+    example { "COc1ccc(cc1)C(N)=N", from = { "COc1ccc(cc1)C#N", "N" } },
+    example { "N=C(N)c1ccccc1", from = { "N#Cc1ccccc1", "N" } },
+    refuse { "CN(C)C(=N)N" }, -- guanidine: the central carbon bears no carbon
+}
+
+disconnection "amidoxime-from-nitrile" {
+    about = "Amidoxime from a nitrile; Z-oxime",
+    target = "[#6:1][C;X3:2](=[N;X2:3][O;H1:4])[N;X3;H2:5]",
+    from = "[#6:1][C:2]#[N;H0:5].[N;H2:3][O:4]",
+    conditions = "base-aq-mild",
+    also_attacks = { "aldehyde", "ketone", "epoxide" },
+    recipe = "NH2OH·HCl, iPr2NEt or Na2CO3, EtOH, 60-80 °C",
+    yield = { 75, 95 },
+    cautions = { "hydroxylamine hydrochloride" },
+    source = "Joule and Mills, Heterocyclic Chemistry; from memory",
+    example { "NC(=NO)c1ccc(cc1)C(=O)OC", from = { "COC(=O)c1ccc(C#N)cc1", "NO" } },
+    example { "NC(=NO)c1ccccc1", from = { "N#Cc1ccccc1", "NO" } },
+    refuse { "CC(=NO)N(C)C" }, -- disubstituted nitrogen
+}
+
+interconversion "thioamide-from-amide" {
+    about = "Thionation of an amide; amide before ester",
+    target = "[#6:1][C;X3:2](=[S;X1])[N;X3:3]",
+    from = "[#6:1][C:2](=O)[N:3]",
+    conditions = "heat-200",
+    also_attacks = { "ketone", "aldehyde", "free alcohol", "free acid", "other amide" },
+    recipe = "Lawesson's reagent, THF or toluene, 60-110 °C; also: P4S10, pyridine",
+    yield = { 70, 92 },
+    cautions = { "phosphorus pentasulfide" },
+    source = "Larock, Comprehensive Organic Transformations; from memory",
+    example { "S=C1CN=C(c2ccccc2)c2cc(Cl)ccc2N1", from = { "O=C1CN=C(c2ccccc2)c2cc(Cl)ccc2N1" } },
+    example { "CN(C)C(=S)c1ccccc1", from = { "CN(C)C(=O)c1ccccc1" } },
+    refuse { "CC(=S)SC" }, -- a dithioester
+}
+
+interconversion "thioamide-from-nitrile" {
+    about = "Primary thioamide from a nitrile",
+    target = "[#6:1][C;X3:2](=[S;X1])[N;X3;H2:3]",
+    from = "[#6:1][C:2]#[N;H0:3]",
+    conditions = "thiolate",
+    also_attacks = { "nitro", "azide", "aldehyde" },
+    recipe = "(NH4)2S or H2S/Et3N, pyridine, 50 °C; also: P4S10/EtOH, thioacetamide/HCl, NaSH/MgCl2 in DMF",
+    yield = { 75, 92 },
+    cautions = { "hydrogen sulfide", "pyridine", "triethylamine" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "NC(=S)c1ccnc(c1)CC", from = { "CCc1nccc(C#N)c1" } },
+    example { "NC(=S)c1ccccc1", from = { "N#Cc1ccccc1" } },
+    refuse { "CNC(C)=S" }, -- substituted nitrogen
+}
+
+disconnection "gramine-cyanide" {
+    about = "Indol-3-ylacetonitrile from a gramine; amine lost by elimination-addition",
+    target = "[c;$(c1c[nX3]c2ccccc12):1][C;X4;H2:2]-[C;X2;+0:3]#[N:4]",
+    from = "[c:1][C:2]N(C)C.[C;-:3]#[N:4].[K+]",
+    conditions = "cyanide",
+    also_attacks = { "alkyl halide", "aldehyde", "acyl halide", "epoxide" },
+    recipe = "KCN, DMF/H2O, reflux; also: gramine methiodide, NaCN",
+    yield = { 60, 88 },
+    cautions = { "potassium cyanide", "N,N-dimethylformamide" },
+    source = "Joule and Mills, Heterocyclic Chemistry; from memory",
+    example { "COc1ccc2[nH]cc(CC#N)c2c1", from = { "COc1ccc2[nH]cc(CN(C)C)c2c1", "[K+].[C-]#N" } },
+    example { "N#CCc1c[nH]c2ccccc12", from = { "CN(C)Cc1c[nH]c2ccccc12", "[K+].[C-]#N" } },
+    refuse { "N#CCc1ccccc1" }, -- benzyl: no elimination to an azafulvene
+}
+
+interconversion "terminal-alkene-to-acid" {
+    about = "Oxidative cleavage of a terminal alkene to an acid (alkene oxidative cleavage); one carbon lost",
+    rxno = "RXNO:0000344",
+    target = "[C;X4;H2:1][C;X3:2](=[O;X1])[O;H1]",
+    from = "[C:1][C;H1:2]=[C;H2]",
+    conditions = "kmno4",
+    also_attacks = { "benzyl ether", "electron-rich arene" },
+    recipe = "RuCl3 (cat.), NaIO4, CCl4/MeCN/H2O; also: KMnO4/NaIO4, O3 then H2O2",
+    yield = { 70, 90 },
+    cautions = { "ruthenium tetroxide", "carbon tetrachloride" },
+    source = "Carey and Sundberg, Advanced Organic Chemistry, Part B; from memory",
+    example { "CC(C)(C)OC(=O)N1CCC(CC1)CC(=O)O", from = { "CC(C)(C)OC(=O)N1CCC(CC1)CC=C" } },
+    example { "CCCCCCCCCC(=O)O", from = { "C=CCCCCCCCCC" } },
+    refuse { "OC(=O)O" }, -- no carbon on the acid
+}

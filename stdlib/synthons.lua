@@ -41,6 +41,7 @@ synthon "acyl acid" { kind = "acceptor", equivalents = { { attach = "O" } } }
 -- a1 as a simple ester.
 synthon "acyl methyl ester" { kind = "acceptor", equivalents = { { attach = "OC" } } }
 synthon "acyl ethyl ester" { kind = "acceptor", equivalents = { { attach = "OCC" } } }
+synthon "acyl simple ester" { kind = "acceptor", equivalents = { { attach = "OC" }, { attach = "OCC" } } }
 
 -- Acetyl (a1) as acetic anhydride.
 synthon "acetyl" { kind = "acceptor", equivalents = { { attach = "OC(C)=O", name = "acetic anhydride" } } }
