@@ -1,32 +1,19 @@
-/*
- * Fuzz entry of the SMILES reader and writer: what is read has to be a fixed point of canonical
- * writing. Start with the strings of tests/data/oracle/smiles-conformance.tsv as corpus.
- */
-#include <stdlib.h>
-#include <string.h>
-
-#include "backsaw/format.h"
-
-int LLVMFuzzerTestOneInput(const uint8_t *data, size_t size);
+/* Fuzz entry of the SMILES reader: what is read is a fixed point of canonical writing. */
+#include "target.h"
 
 int LLVMFuzzerTestOneInput(const uint8_t *data, size_t size)
 {
-    bs_ctx cx;
-    bs_arena home;
+    target t;
     bs_mol *mol;
-    char *first;
-    char *second;
+    const char *name;
 
-    bs_ctx_init(&cx, NULL);
-    bs_arena_init(&home, cx.gate);
-    if (bs_smiles_read(&cx, &home, (const char *)data, size, NULL, &mol) == BS_OK &&
-        bs_smiles_canonical(&cx, &home, mol, 0, &first) == BS_OK) {
-        if (bs_smiles_read(&cx, &home, first, strlen(first), NULL, &mol) != BS_OK ||
-            bs_smiles_canonical(&cx, &home, mol, 0, &second) != BS_OK ||
-            strcmp(first, second) != 0)
-            abort();
+    target_open(&t);
+    if ((mol = target_read(&t, (const char *)data, size)) && (name = target_name(&t, mol))) {
+        mol = target_read(&t, name, strlen(name));
+        if (!mol)
+            target_fail(&t, "written, but not read", name, "nothing");
+        target_expect(&t, "no fixed point", mol, name);
     }
-    bs_arena_free(&home);
-    bs_ctx_free(&cx);
+    target_close(&t);
     return 0;
 }
