@@ -6,9 +6,10 @@
  * input. A hydrogen is folded into its neighbour's count unless it has an isotope, a charge, a
  * label or no single neighbour; then it is an atom like others.
  *
- * Bonds keep a Kekulé order (1 to 4); aromatic ones carry a mark beside it. Nitrogen that was
- * written with five bonds (nitro, azide, N-oxide) has the usual form with charges, so that both
- * spellings are one molecule.
+ * Bonds keep a Kekulé order (1 to 4); aromatic ones carry a mark beside it. Groups that are
+ * spelled with and without charges (nitro, azide, N-oxide; sulfoxide, phosphate, ylide,
+ * perchlorate) have one form, so that both spellings are one molecule: charges on nitrogen, none
+ * on elements that expand their octet.
  *
  * Stereo. A tetrahedral centre says how its neighbours stand, in the order: implied hydrogen or
  * lone pair first if there is one, then the neighbours in the order of bs_mol_neighbour(). Seen

@@ -142,7 +142,7 @@ static gift gift_of(const bs_mol *mol, uint32_t atom)
     int spare;
 
     if (a->element == 0)
-        return GIFT_ANY;
+        return u.in + u.out > 1 ? GIFT_NO_PART : GIFT_ANY;
     if (outer == 0 || outer == 7 || u.in + u.out > 1 || a->valence > *normal)
         return GIFT_NO_PART;
     if (radicals(a, outer) > 0 && (a->element != 6 || a->charge != 0))
@@ -354,9 +354,12 @@ static void mark_rim(aromatic *a, int size)
 
             if (a->bond_count[a->bonds[i]] != 1 || (b->flags & BS_BOND_AROMATIC))
                 continue;
-            b->flags |= BS_BOND_AROMATIC;
             a->mol->atoms[b->a].flags |= BS_ATOM_AROMATIC;
             a->mol->atoms[b->b].flags |= BS_ATOM_AROMATIC;
+            /* A triple bond stays one (arynes): no other Kekulé form has it elsewhere. */
+            if (b->order > 2)
+                continue;
+            b->flags |= BS_BOND_AROMATIC;
             a->open_bonds--;
         }
     }

@@ -2,13 +2,13 @@
  * Finishing a draft: from atoms and bonds as they were written to a perceived molecule.
  *
  * The molecule is put together in the scratch arena, perceived there and copied to its home with
- * its rings. Nitrogen written with five bonds (nitro, azide, N-oxide) becomes the usual form with
- * charges, so that both spellings are one molecule.
+ * its rings.
  */
 #include "chem/canon.h"
 #include "chem/draft.h"
 #include "chem/features.h"
 #include "chem/ring.h"
+#include "chem/spelling.h"
 #include "chem/valence.h"
 
 #include <string.h>
@@ -226,64 +226,12 @@ static bs_status assemble(finish *f)
 
 /* ---- Valence -------------------------------------------------------------------------------- */
 
-static int bond_sum(const bs_mol *mol, uint32_t atom)
-{
-    const bs_bond *bonds = bs_mol__bonds(mol);
-    const bs_link *links = bs_mol__links(mol, atom);
-    int sum = 0;
-
-    for (int k = 0; k < mol->atoms[atom].degree; k++)
-        sum += (int)bonds[links[k].bond].order;
-    return sum;
-}
-
-/* How willingly a terminal atom takes the charge of a nitrogen with five bonds; 0 for not. */
-static int takes_charge(const finish *f, uint32_t atom, unsigned order)
-{
-    const bs_atom *a = &f->mol->atoms[atom];
-
-    if (order < 2 || a->degree != 1 || a->charge != 0 || a->hydrogens != 0 || f->stated[atom] > 0)
-        return 0;
-    if (order == 2)
-        return a->element == 8 ? 4 : a->element == 16 ? 3 : a->element == 34 ? 2 : 0;
-    return order == 3 && a->element == 7 ? 1 : 0;
-}
-
-/* Writes a nitrogen with five bonds with charges. */
-static void separate_charges(finish *f, uint32_t atom)
-{
-    bs_bond *bonds = bs_mol__bonds_mutable(f->mol);
-    const bs_link *links = bs_mol__links(f->mol, atom);
-    bs_atom *a = &f->mol->atoms[atom];
-    int best = 0;
-    int at = 0;
-
-    if (a->element != 7 || a->charge != 0 || bond_sum(f->mol, atom) + a->hydrogens != 5)
-        return;
-    for (int k = 0; k < a->degree; k++) {
-        int taste = takes_charge(f, links[k].atom, bonds[links[k].bond].order);
-
-        if (taste > best) {
-            best = taste;
-            at = k;
-        }
-    }
-    if (best == 0)
-        return;
-    bonds[links[at].bond].order--;
-    a->charge = 1;
-    f->mol->atoms[links[at].atom].charge = -1;
-    f->stated[links[at].atom] = 0;
-    f->stated[atom] = a->hydrogens;
-}
-
 static bs_status fill_valences(finish *f)
 {
-    for (uint32_t i = 0; i < f->mol->atom_count; i++)
-        separate_charges(f, i);
+    bs_spelling__unify(f->mol, f->stated);
     for (uint32_t i = 0; i < f->mol->atom_count; i++) {
         bs_atom *a = &f->mol->atoms[i];
-        int sum = bond_sum(f->mol, i);
+        int sum = bs_spelling__bond_sum(f->mol, i);
         int total;
 
         if (f->stated[i] == BS_DRAFT_IMPLIED)

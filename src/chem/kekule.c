@@ -74,10 +74,10 @@ static need need_of(const kekule *k, uint32_t atom)
 
     if (aromatic == 0)
         return NEED_NONE;
+    if (multiple && (a->element == 6 || a->element == 0))
+        return NEED_NONE;
     if (a->element == 0)
         return NEED_EITHER;
-    if (multiple && a->element == 6)
-        return NEED_NONE;
     sum += a->hydrogens;
     while (*v != 0 && *v < sum)
         v++;
