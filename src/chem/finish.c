@@ -64,7 +64,7 @@ static void find_folded(const bs_draft *draft, uint32_t *host, uint32_t *degree)
             continue;
         degree[b->a]++;
         degree[b->b]++;
-        if (b->order == 1 || b->order == BS_DRAFT_ORDER_AROMATIC) {
+        if (b->order <= 1 || b->order == BS_DRAFT_ORDER_AROMATIC) {
             host[b->a] = b->b;
             host[b->b] = b->a;
         }
@@ -226,6 +226,18 @@ static bs_status assemble(finish *f)
 
 /* ---- Valence -------------------------------------------------------------------------------- */
 
+/* Coordinate bonds of an atom, which SMILES writes as single ones. */
+static int coordinate_bonds(const bs_mol *mol, uint32_t atom)
+{
+    const bs_bond *bonds = bs_mol__bonds(mol);
+    const bs_link *links = bs_mol__links(mol, atom);
+    int count = 0;
+
+    for (int k = 0; k < mol->atoms[atom].degree; k++)
+        count += bonds[links[k].bond].order == 0;
+    return count;
+}
+
 static bs_status fill_valences(finish *f)
 {
     bs_spelling__unify(f->mol, f->stated);
@@ -241,6 +253,7 @@ static bs_status fill_valences(finish *f)
         if (total > UINT8_MAX)
             return bs_fail_at(f->cx, BS_ELIMIT, f->origin[i], "a valence is at most 255");
         a->valence = (uint8_t)total;
+        sum += coordinate_bonds(f->mol, i);
         if (a->hydrogens != bs_valence__implied(a->element, a->charge, sum))
             a->flags |= BS_ATOM_BRACKET;
         if (!bs_valence__is_usual(a->element, a->charge, total))

@@ -43,6 +43,8 @@ static int16_t hydrogens_of(const bs_molfile_atom *atom, bond_sum sum)
 {
     int unpaired = atom->radical == 0 ? 0 : atom->radical == 2 ? 1 : 2;
 
+    if (atom->element == 1)
+        return 0;
     if (atom->hydrogens >= 0)
         return atom->hydrogens;
     if (sum.aromatic > 0)
