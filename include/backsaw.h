@@ -12,6 +12,7 @@
 #include "backsaw/polarity.h"
 #include "backsaw/rule.h"
 #include "backsaw/group.h"
+#include "backsaw/why.h"
 #include "backsaw/catalogue.h"
 #include "backsaw/route.h"
 #include "backsaw/search.h"

@@ -26,6 +26,7 @@ transforms = [[
 t = transform "name"                 by name; case, spaces and hyphens make no difference
 t:back(m)                            the steps that make m by this transform
 t:forth(m, ...)                      what it makes of these: sets with products and expected
+t:why(m)                             why it gives steps to m, or none; m:ideas() asks all
 t:check()                            its self-tests: true, or false and the failures
 back(m)  forth(m, ...)               the same with every transform in use
 A step has product, precursors, equivalents, transform, conditions, recipe, yield, rivals,

@@ -5,6 +5,7 @@ core.module "step"
 local transforms = core.module "transform"
 local words = core.module "pack"
 local group_words = core.module("group").words
+core.module "why"
 if core.packed then return end
 
 local planning = core.module "plan"

@@ -1,9 +1,8 @@
 -- Transforms: fetching by name, their fields, and their self-tests.
 local core = ...
 local check = core.module "check"
-local transforms = {}
-
 local methods = core.transform_type.__index
+local transforms = { methods = methods } -- other modules add to them
 
 function core.transform_type.__index(t, key)
     local method = methods[key]

@@ -26,6 +26,7 @@ typedef struct back {
     const bs_rules *rules;
     const bs_rule_hooks *hooks;
     unsigned flags;
+    const bs_watch *watch; /* is told of refused places; or NULL */
     const bs_piece *piece;
     const bs_mol *whole;
     char *smiles; /* of the piece */
@@ -40,8 +41,7 @@ typedef struct back {
     int room;
 } back;
 
-/* ---- Precursors -------------------------------------------------------------------------------
- */
+/* ---- Precursors ------------------------------------------------------------ */
 
 /* A salt of two molecules. */
 static bs_status join_ions(bs_ctx *cx, bs_arena *home, const bs_mol *a, const bs_mol *b,
@@ -80,8 +80,7 @@ static bs_status join_ions(bs_ctx *cx, bs_arena *home, const bs_mol *a, const bs
     return st;
 }
 
-/* Whether no atom of a part of the precursors comes from the target: a counter-ion, or a reagent.
- */
+/* Whether no atom of a part of the precursors comes from the target: a counter-ion, or a reagent. */
 static bool is_added(const bs_case *kase, int part)
 {
     for (int i = 0; i < kase->source.atom_count; i++) {
@@ -174,8 +173,7 @@ static bs_status find_inputs(bs_ctx *cx, back *b, const bs_result *result, char 
     return st;
 }
 
-/* ---- Steps --------------------------------------------------------------------------------------
- */
+/* ---- Steps ------------------------------------------------------------ */
 
 static bs_status make_room(bs_ctx *cx, back *b)
 {
@@ -232,8 +230,23 @@ static bs_status add_step(bs_ctx *cx, back *b, const inputs *list, const uint32_
     return BS_OK;
 }
 
-/* ---- One result of a case
- * --------------------------------------------------------------------------- */
+/* ---- One result of a case ----------------------------------------------------------------- */
+
+/* Tells who watches why a place gives no step. */
+static bs_status tell(bs_ctx *cx, back *b, bs_refusal reason, const uint32_t *where,
+                      char *const *smiles, int count)
+{
+    bs_mark temp = bs_arena_mark(&cx->scratch);
+    bs_site site;
+    bs_status st;
+
+    if (!b->watch)
+        return BS_OK;
+    if ((st = whole_site(cx, b, &cx->scratch, where, &site)) == BS_OK)
+        st = b->watch->refused(b->watch->payload, cx, reason, &site, smiles, count);
+    bs_arena_rewind(&cx->scratch, temp);
+    return st;
+}
 
 static bs_status is_allowed(bs_ctx *cx, back *b, const uint32_t *where, bool *allowed)
 {
@@ -320,29 +333,34 @@ static bs_status take_result(void *payload, bs_ctx *cx, const uint32_t *where,
     int index;
     bs_status st;
 
-    if ((st = is_strained(cx, b, result, &strained)) != BS_OK || strained ||
-        (st = is_allowed(cx, b, where, &fresh)) != BS_OK || !fresh)
+    if ((st = is_strained(cx, b, result, &strained)) != BS_OK)
         return st;
+    if (strained)
+        return tell(cx, b, BS_REFUSED_STRAINED, where, NULL, 0);
+    if ((st = is_allowed(cx, b, where, &fresh)) != BS_OK)
+        return st;
+    if (!fresh)
+        return tell(cx, b, BS_REFUSED_WHEN, where, NULL, 0);
     if ((st = bs_result__smiles(cx, b->home, result, &smiles)) != BS_OK ||
         (st = find_inputs(cx, b, result, smiles, &list)) != BS_OK)
         return st;
     if (holds_product(b, &list))
-        return BS_OK;
+        return tell(cx, b, BS_REFUSED_SAME, where, NULL, 0);
     if ((st = is_new(cx, b, &list, &index, &fresh)) != BS_OK || !fresh)
         return st;
     if (!(b->flags & BS_BACK_UNCHECKED))
         st = bs_check__step(cx, b->home, b->tr, b->kase, result->products, smiles, b->piece->mol,
                             b->smiles, where, &verdict);
-    if (st != BS_OK || !verdict.passed)
+    if (st != BS_OK)
         return st;
+    if (!verdict.passed)
+        return tell(cx, b, BS_REFUSED_FORWARD, where, smiles, result->product_count);
     b->tried[index] = -1;
     *keep = true;
     return add_step(cx, b, &list, where, &verdict);
 }
 
-/* ---- All
- * -----------------------------------------------------------------------------------------------
- */
+/* ---- All ---------------------------------------------------------------------------------- */
 
 static bs_status run_transform(bs_ctx *cx, back *b, int index)
 {
@@ -397,9 +415,9 @@ static void order_steps(bs_steps *steps)
     }
 }
 
-bs_status bs_rules_back(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int transform,
-                        const bs_mol *product, const bs_rule_hooks *hooks, unsigned flags,
-                        bs_steps *out)
+bs_status bs_back__watched(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int transform,
+                           const bs_mol *product, const bs_rule_hooks *hooks, unsigned flags,
+                           const bs_watch *watch, bs_steps *out)
 {
     bs_mark kept = bs_arena_mark(home);
     bs_mark temp = bs_arena_mark(&cx->scratch);
@@ -407,6 +425,7 @@ bs_status bs_rules_back(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int t
               .rules = rules,
               .hooks = hooks,
               .flags = flags,
+              .watch = watch,
               .whole = product,
               .steps = out};
     bs_status st;
@@ -424,4 +443,11 @@ bs_status bs_rules_back(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int t
     }
     order_steps(out);
     return BS_OK;
+}
+
+bs_status bs_rules_back(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int transform,
+                        const bs_mol *product, const bs_rule_hooks *hooks, unsigned flags,
+                        bs_steps *out)
+{
+    return bs_back__watched(cx, home, rules, transform, product, hooks, flags, NULL, out);
 }

@@ -149,6 +149,26 @@ void bs_forward__free(bs_forward *run);
 bs_status bs_forward__run(bs_ctx *cx, bs_forward *run, const bs_case *kase,
                           const bs_mol *const *mols, const uint32_t *reactant);
 
+/* Why a place where the target fits gives no step. */
+typedef enum bs_refusal {
+    BS_REFUSED_STRAINED, /* a precursor has a bond that its rings cannot hold */
+    BS_REFUSED_WHEN,     /* the rule's own condition */
+    BS_REFUSED_SAME,     /* the product is among the precursors */
+    BS_REFUSED_FORWARD   /* the precursors do not give the product */
+} bs_refusal;
+
+/* Is told of each refused place, with the precursors' SMILES where they are known. */
+typedef struct bs_watch {
+    void *payload;
+    bs_status (*refused)(void *payload, bs_ctx *cx, bs_refusal reason, const bs_site *site,
+                         char *const *smiles, int count);
+} bs_watch;
+
+/* bs_rules_back() with someone who watches, or NULL. */
+bs_status bs_back__watched(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int transform,
+                           const bs_mol *product, const bs_rule_hooks *hooks, unsigned flags,
+                           const bs_watch *watch, bs_steps *out);
+
 /* What a forward check found. */
 typedef struct bs_verdict {
     bool passed;

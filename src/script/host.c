@@ -123,6 +123,7 @@ static int open_state(lua_State *L)
     bsl_open_pattern(L);
     bsl_open_rewrite(L);
     bsl_open_polarity(L);
+    bsl_open_why(L);
     open_kinds(L);
     bsl_open_define(L);
     bsl_open_group(L);
