@@ -489,3 +489,66 @@ disconnection "methyl-sulfone-from-sulfinate" {
     example { "CS(=O)(=O)c1ccccc1", from = { "O=S(O)c1ccccc1", "CI" } },
     refuse { "CS(=O)c1ccccc1" }, -- a sulfoxide
 }
+
+disconnection "aryl-benzyl-ether-secondary" {
+    about = "Aryl ether of a secondary benzylic carbon from the chloride",
+    target = "[c:1][OX2:2]-!@[CX4;H1;$(C(-c)[CX4]):3]",
+    cut = { 3, 2 },
+    acceptor = { 3, "secondary-halide" },
+    donor = { 2, "phenol" },
+    conditions = "alkylation",
+    also_attacks = { "other alkyl halide", "acyl halide", "thiol", "free acid", "primary amine",
+        "secondary amine" },
+    recipe = "K2CO3 or NaOH, DMF or MeCN, KI (cat.), 50-80 °C; elimination competes",
+    yield = { 50, 78 },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "CN(C)CCC(Oc1ccc(cc1)C(F)(F)F)c1ccccc1", from = { "CN(C)CCC(Cl)c1ccccc1", "Oc1ccc(cc1)C(F)(F)F" } },
+    example { "CC(Oc1ccccc1)c1ccccc1", from = { "CC(Br)c1ccccc1", "Oc1ccccc1" } },
+    refuse { "CC(C)Oc1ccccc1" }, -- not benzylic
+}
+
+disconnection "snar-alkoxide-trifluoromethyl" {
+    about = "Aryl ether from an alkoxide and a halobenzotrifluoride",
+    target = "[c;$(c1ccc(C(F)(F)F)cc1),$(c1c(C(F)(F)F)cccc1):1]-!@[OX2:2]-[CX4:3]",
+    cut = { 1, 2 },
+    acceptor = { 1, "activated-aryl" },
+    donor = { 2, "alcohol" },
+    conditions = "base-hindered",
+    also_attacks = { "ester", "ketone", "aldehyde", "free acid", "primary amide", "thiol", "phenol" },
+    recipe = "NaH or KOtBu, DMSO, DMF or NMP, 60-100 °C",
+    yield = { 65, 90 },
+    cautions = { "sodium hydride" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "CNCCC(Oc1ccc(cc1)C(F)(F)F)c1ccccc1", from = { "Clc1ccc(cc1)C(F)(F)F", "CNCCC(O)c1ccccc1" } },
+    example { "CC(C)Oc1ccc(cc1)C(F)(F)F", from = { "Fc1ccc(cc1)C(F)(F)F", "CC(C)O" } },
+    refuse { "COc1cccc(C(F)(F)F)c1" }, -- meta to the trifluoromethyl group
+}
+
+disconnection "hetarylmethyl-thioether" {
+    about = "Thioether from an electron-rich hetarylmethanol and a thiol in acid",
+    target = "[c;$(c1nc[nH]c1),$(c1[nH]cnc1),$(c1ccco1),$(c1ccc(C)o1),$(c1ccc[nH]1):1]-[CX4;H2:2]-!@[SX2:3]-[CX4:4]",
+    from = "[c:1]-[C:2][OH].[S:3]-[C:4]",
+    conditions = "acid-aq-strong",
+    also_attacks = { "other alcohol", "acetal", "Boc carbamate", "tert-butyl ester" },
+    recipe = "conc. HCl or HBr, 0 °C (furans) to reflux (imidazoles)",
+    yield = { 65, 90 },
+    cautions = { "hydrochloric acid" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "NCCSCc1nc[nH]c1C", from = { "OCc1nc[nH]c1C", "NCCS" } },
+    example { "CN(C)Cc1ccc(CSCCN)o1", from = { "CN(C)Cc1ccc(CO)o1", "NCCS" } },
+    refuse { "CSCc1ccccc1" }, -- a plain benzyl group
+}
+
+disconnection "bis-sulfonamide" {
+    about = "Both sulfonyl chlorides of a molecule to primary sulfonamides",
+    target = "([SX4:1](=[OX1:5])(=[OX1:6])(-[c:7])-[NX3;H2:2].[SX4:3](=[OX1:8])(=[OX1:9])(-[c:10])-[NX3;H2:4])",
+    from = "([S:1](=[O:5])(=[O:6])(-[c:7])Cl.[S:3](=[O:8])(=[O:9])(-[c:10])Cl).[N:2].[N:4]",
+    conditions = "amine-rt",
+    also_attacks = { "acyl halide", "alkyl halide", "activated ester" },
+    recipe = "conc. aq. NH3, 0 °C to reflux",
+    yield = { 75, 92 },
+    cautions = { "ammonia" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "Nc1cc(Cl)c(cc1S(N)(=O)=O)S(N)(=O)=O", from = { "Nc1cc(Cl)c(cc1S(=O)(=O)Cl)S(=O)(=O)Cl", "N", "N" } },
+    refuse { "Cc1ccc(cc1)S(N)(=O)=O" }, -- one sulfonyl group only
+}

@@ -405,3 +405,62 @@ interconversion "allylic-chloride-transposed" {
     example { "CC(C)=CCCl", from = { "CC(C)(O)C=C" } },
     refuse { "C=CCCl" }, -- no alkyl group on the far carbon
 }
+
+interconversion "benzylic-chloride-from-secondary-alcohol" {
+    about = "Secondary benzylic chloride from the alcohol",
+    target = "[CX4;H1;$(C(-c)):1](-[#6;c,CX4:2])[ClX1]",
+    from = "[C:1](-[#6:2])[OH]",
+    conditions = "socl2",
+    also_attacks = { "other alcohol", "free acid", "primary amide" },
+    recipe = "SOCl2, CH2Cl2 or toluene, 0 °C to rt; or conc. HCl",
+    yield = { 80, 97 },
+    cautions = { "thionyl chloride" },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "CN(C)CCC(Cl)c1ccccc1", from = { "CN(C)CCC(O)c1ccccc1" } },
+    example { "ClC(c1ccccc1)c1ccccc1", from = { "OC(c1ccccc1)c1ccccc1" } },
+    refuse { "CC(Cl)C" }, -- no aryl group
+}
+
+interconversion "alpha-bromo-ketone-substituted" {
+    about = "α-Bromination of an aryl ketone at a CH2 or CH",
+    target = "[c:5][CX3:1](=[OX1:2])[CX4;H0,H1:3]([CX4:4])[BrX1]",
+    from = "[c:5][C:1](=[O:2])[C:3][C:4]",
+    conditions = "br2",
+    also_attacks = { "alkene", "alkyne", "phenol", "aniline", "other ketone", "aldehyde" },
+    recipe = "Br2, AcOH or CH2Cl2, cat. HBr; also: CuBr2, EtOAc; NBS",
+    yield = { 75, 95 },
+    cautions = { "bromine" },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "CC(Br)C(=O)c1cccc(Cl)c1", from = { "CCC(=O)c1cccc(Cl)c1" } },
+    example { "O=C(c1ccccc1Cl)C1(Br)CCCC1", from = { "O=C(c1ccccc1Cl)C1CCCC1" } },
+    refuse { "CCC(=O)CBr" }, -- not an aryl ketone
+}
+
+interconversion "adamantane-bromination" {
+    about = "Bromination of adamantane at a bridgehead",
+    target = "[BrX1][CX4;H0;$(C12CC3CC(CC(C3)C1)C2),$(C1(Br)CC2CC(C1)CC(C2)):1]",
+    from = "[C:1]",
+    conditions = "br2",
+    also_attacks = { "alkene", "alcohol", "amine", "aldehyde" },
+    recipe = "Br2 (neat), reflux; cat. Fe for more than one",
+    yield = { 80, 95 },
+    cautions = { "bromine" },
+    source = "Stetter, Schwarz, Hirschhorn, Chem. Ber. 1959, 92, 1629; from memory",
+    example { "BrC12CC3CC(CC(C3)C1)C2", from = { "C1C2CC3CC1CC(C3)C2" } },
+    refuse { "CC(C)(C)Br" }, -- not a bridgehead
+}
+
+disconnection "ritter-bromide" {
+    about = "Acetamide from a tertiary bromide and acetonitrile (Ritter reaction)",
+    target = "[CX4;H0:1]-!@[NX3;H1:2]-[CX3:3](=[OX1])-[CH3:5]",
+    from = "[C:1]Br.[N:2]#[C:3][C:5]",
+    conditions = "acid-aq-strong",
+    also_attacks = { "alcohol", "alkene", "acetal", "tert-butyl ester" },
+    recipe = "MeCN, conc. H2SO4, rt to 50 °C",
+    yield = { 70, 92 },
+    cautions = { "sulfuric acid" },
+    source = "Stetter, Mayer, Schwarz, Wulff, Chem. Ber. 1960, 93, 226; from memory",
+    example { "CC(=O)NC12CC3CC(CC(C3)C1)C2", from = { "BrC12CC3CC(CC(C3)C1)C2", "CC#N" } },
+    example { "CC(=O)NC(C)(C)C", from = { "CC(C)(C)Br", "CC#N" } },
+    refuse { "CC(=O)NCC" }, -- a primary carbon
+}

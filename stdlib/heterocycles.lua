@@ -229,7 +229,7 @@ disconnection "inverse-demand-dihydropyran" {
     target = "[OX2:1]1[CX4;H1:2]([OX2:8][CX4:9])[CX4;H2:3][CX4:4][CX3:5]=[CX3;H1:6]1",
     from = "[O:1]=[C:6][C:5]=[C:4].[C:3]=[C:2][O:8][C:9]",
     conditions = "heat-200",
-    also_attacks = { "other enal", "conjugated diene", "primary amine", "thiol" },
+    also_attacks = { "other enone", "conjugated diene", "primary amine", "thiol" },
     recipe = "neat, 160-190 °C under pressure, hydroquinone; also: ZnCl2 or Eu(fod)3, lower temperature",
     yield = { 70, 90 },
     cautions = { "acrolein" },
@@ -488,7 +488,7 @@ disconnection "biginelli" {
 disconnection "debus-radziszewski" {
     about = "Debus-Radziszewski imidazole synthesis; 2,4,5-trisubstituted",
     rxno = "RXNO:0000613",
-    target = "[nX2:1]1:[c;R1;$(c-[#6]):2]:[c;R1;$(c-[#6]):3]:[nX3;H1:4]:[c;$(c-[#6]):5]:1",
+    target = "[nX2:1]1:[c;R1;$(c-[#6]),H1:2]:[c;R1;$(c-[#6]),H1:3]:[nX3;H1:4]:[c;$(c-[#6]):5]:1",
     from = "[N:1].O=[C:2]-[C:3]=O.[N:4].O=[C:5]",
     conditions = "acid-hot-dry",
     recipe = "NH4OAc, AcOH, reflux",
@@ -498,6 +498,7 @@ disconnection "debus-radziszewski" {
         from = { "N", "O=C(c1ccccc1)C(=O)c1ccccc1", "N", "COc1ccc(C=O)cc1" } },
     example { "c1ccc(cc1)-c1nc(c([nH]1)-c1ccccc1)-c1ccccc1",
         from = { "N", "O=C(C(=O)c1ccccc1)c1ccccc1", "N", "O=Cc1ccccc1" } },
+    example { "Cc1ncc[nH]1", from = { "N", "O=CC=O", "N", "CC=O" } },
     refuse { "c1ccc2[nH]cnc2c1" }, -- a benzimidazole
 }
 
@@ -1595,4 +1596,219 @@ disconnection "arylpiperazine-from-mustard" {
     example { "Clc1cccc(N2CCNCC2)c1Cl", from = { "Nc1cccc(Cl)c1Cl", "ClCCNCCCl" } },
     example { "c1ccc(cc1)N1CCNCC1", from = { "Nc1ccccc1", "ClCCNCCCl" } },
     refuse { "C1CN(CCN1)Cc1ccccc1" }, -- an N-benzyl piperazine
+}
+
+disconnection "hydroxycoumarin" {
+    about = "4-Hydroxycoumarin from a 2-hydroxyacetophenone and diethyl carbonate",
+    target = "[OX2H:1]-[c:2]1:[c:3]:[c:4](=[OX1:5]):[o:6]:[c;$(c1ccccc1):7]:[c;$(c1ccccc1):8]:1",
+    from = "[O:1]=[C:2]([C:3])-[c:8]:[c:7]-[O:6].[C:4](=[O:5])(OCC)OCC",
+    conditions = "base-hindered",
+    also_attacks = { "ester", "aldehyde", "free acid", "alkyl halide" },
+    recipe = "NaH or Na, toluene, 100 °C, ethanol distilled off",
+    yield = { 65, 90 },
+    cautions = { "sodium hydride" },
+    source = "Boyd, Robertson, J. Chem. Soc. 1948, 174; from memory",
+    example { "Oc1cc(=O)oc2ccccc12", from = { "CC(=O)c1ccccc1O", "CCOC(=O)OCC" } },
+    example { "COc1ccc2c(O)cc(=O)oc2c1", from = { "COc1ccc(C(C)=O)c(O)c1", "CCOC(=O)OCC" } },
+    refuse { "Cc1cc(=O)oc2ccccc12" }, -- no hydroxyl group at C4
+}
+
+disconnection "benzodiazepinone-glycine-ester" {
+    about = "1,4-Benzodiazepin-2-one from a 2-aminobenzophenone and a glycine ester",
+    target = "[NX3:1]1-[CX3:2](=[OX1:3])-[CX4:4]-[NX2:5]=[CX3:6](-[c:7])-[c:8]:[c:9]-1",
+    from = "[N:1]-[c:9]:[c:8]-[C:6](=O)-[c:7].[N:5][C:4][C:2](=[O:3])OCC",
+    conditions = "amine-heat",
+    also_attacks = { "other primary amine", "aldehyde", "acyl halide" },
+    recipe = "glycine ethyl ester hydrochloride, pyridine, reflux",
+    yield = { 45, 75 },
+    cautions = { "pyridine" },
+    source = "Sternbach, Fryer, Metlesics, Reeder, Sach, Saucy, Stempel, J. Org. Chem. 1962, 27, 3788; from memory",
+    example { "O=C1CN=C(c2ccccc2)c2cc(Cl)ccc2N1", from = { "Nc1ccc(Cl)cc1C(=O)c1ccccc1", "CCOC(=O)CN" } },
+    example { "CN1C(=O)CN=C(c2ccccc2)c2cc(Cl)ccc12", from = { "CNc1ccc(Cl)cc1C(=O)c1ccccc1", "CCOC(=O)CN" } },
+    refuse { "O=C1CNCc2ccccc2N1" }, -- no imine
+}
+
+disconnection "benzodiazepinone-haloacetamide" {
+    about = "1,4-Benzodiazepin-2-one from a 2-(chloroacetamido)benzophenone and ammonia",
+    target = "[NX3:1]1-[CX3:2](=[OX1:3])-[CX4:4]-[NX2:5]=[CX3:6](-[c:7])-[c:8]:[c:9]-1",
+    from = "[N:1](-[C:2](=[O:3])-[C:4]Cl)-[c:9]:[c:8]-[C:6](=O)-[c:7].[N:5]",
+    conditions = "amine-heat",
+    also_attacks = { "other alkyl halide", "acyl halide", "ester" },
+    recipe = "NH3, MeOH or EtOH, rt to reflux; also: hexamethylenetetramine; the bromo or iodo compound",
+    yield = { 60, 85 },
+    source = "Sternbach, Reeder, J. Org. Chem. 1961, 26, 4936; from memory",
+    example { "CN1C(=O)CN=C(c2ccccc2)c2cc(Cl)ccc12", from = { "CN(C(=O)CCl)c1ccc(Cl)cc1C(=O)c1ccccc1", "N" } },
+    example { "O=C1CN=C(c2ccccc2)c2ccccc2N1", from = { "O=C(CCl)Nc1ccccc1C(=O)c1ccccc1", "N" } },
+    refuse { "O=C1CNCc2ccccc2N1" }, -- no imine
+}
+
+disconnection "bredereck-imidazole" {
+    about = "Imidazole from an α-chloro ketone and formamide (Bredereck)",
+    target = "[nH:1]1:[cH:2]:[n:3]:[c;R1:4](-[#6:6]):[c;R1:5]:1",
+    from = "[N:1][C:2]=O.[N:3]C=O.O=[C:4](-[#6:6])[C:5]Cl",
+    conditions = "heat-200",
+    also_attacks = { "other alkyl halide", "acyl halide", "aldehyde" },
+    recipe = "formamide (excess), 150-180 °C",
+    yield = { 45, 70 },
+    source = "Bredereck, Theilig, Chem. Ber. 1953, 86, 88; from memory",
+    example { "c1ccc(cc1)-c1c[nH]cn1", from = { "O=C(CCl)c1ccccc1", "NC=O", "NC=O" } },
+    example { "Cc1c[nH]cn1", from = { "CC(=O)CCl", "NC=O", "NC=O" } },
+    refuse { "Cc1nc(C)c[nH]1" }, -- C2 substituted
+}
+
+disconnection "bredereck-imidazole-tautomer" {
+    about = "Imidazole from an α-chloro ketone and formamide (Bredereck), the other tautomer",
+    target = "[n:1]1:[cH:2]:[nH:3]:[c;R1:4](-[#6:6]):[c;R1:5]:1",
+    from = "[N:1][C:2]=O.[N:3]C=O.O=[C:4](-[#6:6])[C:5]Cl",
+    conditions = "heat-200",
+    also_attacks = { "other alkyl halide", "acyl halide", "aldehyde" },
+    recipe = "formamide (excess), 150-180 °C",
+    yield = { 45, 70 },
+    source = "Bredereck, Theilig, Chem. Ber. 1953, 86, 88; from memory",
+    example { "CCOC(=O)c1nc[nH]c1C", from = { "CC(=O)C(Cl)C(=O)OCC", "NC=O", "NC=O" } },
+    example { "Cc1cnc[nH]1", from = { "CC(=O)CCl", "NC=O", "NC=O" } },
+    refuse { "Cc1nc(C)c[nH]1" }, -- C2 substituted
+}
+
+interconversion "pyrimidinone-from-acylamino-amide" {
+    about = "Fused pyrimidin-4-one by ring closure of an ortho-acylamino carboxamide",
+    target = "[nX3;H1:1]1:[c:2](-[#6:3]):[nX2:4]:[c;R2:5]:[c;R2:6]:[c:7]:1=[OX1:8]",
+    from = "[N:1]-[C:7](=[O:8])-[c:6]:[c:5]-[N:4]-[C:2](=O)[#6:3]",
+    conditions = "alkoxide",
+    also_attacks = { "other ester", "alkyl halide", "acyl halide" },
+    recipe = "KOtBu, tBuOH, or NaOH, H2O2, EtOH, reflux",
+    yield = { 75, 95 },
+    cautions = { "potassium tert-butoxide" },
+    source = "Dale, Dunn, Golightly, Hughes, Levett, Pearce, Searle, Ward, Wood, Org. Process Res. Dev. 2000, 4, 17; from memory",
+    example { "CCCc1nn(C)c2c1nc([nH]c2=O)-c1ccccc1OCC", from = { "CCCc1nn(C)c(C(N)=O)c1NC(=O)c1ccccc1OCC" } },
+    example { "Cc1nc2ccccc2c(=O)[nH]1", from = { "CC(=O)Nc1ccccc1C(N)=O" } },
+    refuse { "Cc1cc(=O)[nH]c(C)n1" }, -- not fused to a second ring
+}
+
+disconnection "pyrimidinone-from-amino-amide" {
+    about = "Fused pyrimidin-4-one from an ortho-amino carboxamide and formamide or an orthoformate",
+    target = "[nX3;H1:1]1:[cH:2]:[nX2:3]:[c;R2:4]:[c;R2:5]:[c:6]:1=[OX1:7]",
+    from = "[N:1]-[C:6](=[O:7])-[c:5]:[c:4]-[N:3].[C:2](=O)N",
+    conditions = "heat-200",
+    also_attacks = { "other ester", "other primary amine" },
+    recipe = "formamide, 160-190 °C; also: triethyl orthoformate, Ac2O; formic acid",
+    yield = { 70, 92 },
+    cautions = { "formamide" },
+    source = "Robins, J. Am. Chem. Soc. 1956, 78, 784; from memory",
+    example { "O=c1[nH]cnc2[nH]ncc12", from = { "NC(=O)c1cn[nH]c1N", "NC=O" } },
+    example { "O=c1[nH]cnc2ccccc12", from = { "NC(=O)c1ccccc1N", "NC=O" } },
+    refuse { "O=c1cc[nH]cn1" }, -- not fused to a second ring
+}
+
+disconnection "imidazoline-from-nitrile" {
+    about = "2-Imidazoline from a nitrile and ethylenediamine",
+    target = "[NX3;H1:1]1-[CX3:2](-[#6:3])=[NX2:4]-[CX4:5]-[CX4:6]-1",
+    from = "[#6:3][C:2]#N.[N:1][C:6][C:5][N:4]",
+    conditions = "heat-200",
+    also_attacks = { "ester", "alkyl halide", "acyl halide", "ketone" },
+    recipe = "ethylenediamine mono-tosylate or S8 (cat.), 120-200 °C; also: through the imidate",
+    yield = { 65, 88 },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "C1CN=C(N1)Cc1ccccc1", from = { "N#CCc1ccccc1", "NCCN" } },
+    example { "C1CN=C(N1)c1ccccc1", from = { "N#Cc1ccccc1", "NCCN" } },
+    refuse { "c1c[nH]cn1" }, -- an imidazole
+}
+
+interconversion "phenothiazine" {
+    about = "Phenothiazine from a diphenylamine and sulfur",
+    target = "[SX2;r6]1-[c:2]:[c:3]-[NX3;H1:4]-[c:5]:[c:6]-1",
+    from = "[cH:2]:[c:3]-[N:4]-[c:5]:[cH:6]",
+    conditions = "heat-200",
+    also_attacks = { "alkene", "aldehyde", "alcohol", "thiol" },
+    recipe = "S8, I2 (cat.), 150-190 °C (hydrogen sulfide escapes)",
+    yield = { 55, 85 },
+    cautions = { "hydrogen sulfide" },
+    source = "Massie, Chem. Rev. 1954, 54, 797; from memory",
+    example { "Clc1ccc2Sc3ccccc3Nc2c1", from = { "Clc1cccc(Nc2ccccc2)c1" } },
+    example { "c1ccc2Sc3ccccc3Nc2c1", from = { "c1ccc(Nc2ccccc2)cc1" } },
+    refuse { "c1ccc2OCCNc2c1" }, -- a benzoxazine
+}
+
+disconnection "benzothiadiazine-dioxide" {
+    about = "3,4-Dihydro-1,2,4-benzothiadiazine dioxide from a 2-aminobenzenesulfonamide and an aldehyde",
+    target = "[NX3;H1:1]1-[c:2]:[c:3]-[SX4:4](=[OX1:5])(=[OX1:6])-[NX3;H1:7]-[CX4;H1,H2:8]-1",
+    from = "[N:1]-[c:2]:[c:3]-[S:4](=[O:5])(=[O:6])-[N:7].[C:8]=O",
+    conditions = "acid-hot-dry",
+    also_attacks = { "other primary amine", "thiol" },
+    recipe = "aldehyde or paraformaldehyde, cat. HCl, EtOH or diglyme, reflux",
+    yield = { 70, 92 },
+    cautions = { "formaldehyde" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "NS(=O)(=O)c1cc2c(cc1Cl)NCNS2(=O)=O", from = { "Nc1cc(Cl)c(cc1S(N)(=O)=O)S(N)(=O)=O", "C=O" } },
+    example { "CC1Nc2ccccc2S(=O)(=O)N1", from = { "Nc1ccccc1S(N)(=O)=O", "CC=O" } },
+    refuse { "CC1CNS(=O)(=O)c2ccccc12" }, -- carbon where the aniline nitrogen has to be
+}
+
+interconversion "saccharin-oxidation" {
+    about = "Saccharin from a 2-methylbenzenesulfonamide by oxidation of the methyl group",
+    target = "[NX3;H1:1]1-[CX3:2](=[OX1])-[c:3]:[c:4]-[SX4:5]1(=[OX1:6])=[OX1:7]",
+    from = "[N:1]-[S:5](=[O:6])(=[O:7])-[c:4]:[c:3]-[CH3:2]",
+    conditions = "kmno4",
+    also_attacks = { "alkene", "alcohol", "aldehyde", "primary amine", "other methylarene" },
+    recipe = "KMnO4, aq. NaOH, 35-60 °C; also: CrO3, H2SO4; H5IO6",
+    yield = { 60, 88 },
+    source = "Fahlberg, Remsen, Ber. Dtsch. Chem. Ges. 1879, 12, 469; from memory",
+    example { "O=C1NS(=O)(=O)c2ccccc12", from = { "Cc1ccccc1S(N)(=O)=O" } },
+    refuse { "O=C1NC(=O)c2ccccc12" }, -- a phthalimide
+}
+
+interconversion "glutarimide-closure" {
+    about = "Glutarimide by ring closure of a glutaramic acid",
+    target = "[NX3;H1:1]1-[CX3:2](=[OX1:3])-[CX4:4]-[CX4:5]-[CX4:6]-[CX3:7]1=[OX1:8]",
+    from = "[N:1][C:2](=[O:3])[C:4][C:5][C:6][C:7](=[O:8])O",
+    conditions = "heat-200",
+    also_attacks = { "primary amine", "alcohol", "other free acid" },
+    recipe = "CDI, DMAP (cat.), MeCN or THF, reflux; also: neat, 180 °C; Ac2O",
+    yield = { 70, 92 },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "O=C1c2ccccc2C(=O)N1C1CCC(=O)NC1=O", from = { "NC(=O)CCC(C(=O)O)N1C(=O)c2ccccc2C1=O" } },
+    example { "O=C1CCCC(=O)N1", from = { "NC(=O)CCCC(=O)O" } },
+    refuse { "O=C1CCC(=O)N1" }, -- a succinimide
+}
+
+disconnection "gould-jacobs-aza" {
+    about = "Gould-Jacobs reaction of an aminopyridine (naphthyridinone)",
+    target = "[nH1:1]1:[c;R2:2]:[c;R2;$(c1cccnc1),$(c1ccncc1),$(c1cnccc1),$(c1cccnc1):3]:[c:4](=[OX1:7]):[c;$(c-C(=O)[OX2]):5]:[cH1:6]:1",
+    from = "[N:1]-[c:2]:[cH:3].CCO[C:6]=[C:5]-[C:4](=[O:7])OCC",
+    conditions = "heat-200",
+    also_attacks = { "other primary amine", "acetal", "tert-butyl ester" },
+    recipe = "neat, 120 °C; then Ph2O, 250 °C",
+    yield = { 60, 85 },
+    source = "Lesher et al., J. Med. Pharm. Chem. 1962, 5, 1063; from memory",
+    example { "CCOC(=O)c1c[nH]c2nc(C)ccc2c1=O", from = { "Cc1cccc(N)n1", "CCOC=C(C(=O)OCC)C(=O)OCC" } },
+    refuse { "O=c1cc[nH]c2ncccc12" }, -- no ester at C3
+}
+
+disconnection "mercaptobenzimidazole-thiol" {
+    about = "2-Mercaptobenzimidazole, written as the thiol, from a 1,2-phenylenediamine and carbon disulfide",
+    target = "[nH:1]1:[c:2](-[SX2;H1:3]):[n:4]:[c;$(c1ccccc1):5]:[c;$(c1ccccc1):6]:1",
+    from = "[N:1]-[c:6]:[c:5]-[N:4].[C:2](=[S:3])=S",
+    conditions = "base-aq-strong",
+    also_attacks = { "other primary amine", "alkyl halide", "acyl halide" },
+    recipe = "CS2, KOH, aq. EtOH, reflux; also: potassium ethyl xanthate",
+    yield = { 75, 92 },
+    cautions = { "carbon disulfide" },
+    source = "VanAllan, Deacon, Org. Synth. Coll. Vol. 4, 569; from memory",
+    example { "COc1ccc2[nH]c(S)nc2c1", from = { "COc1ccc(N)c(N)c1", "S=C=S" } },
+    example { "Sc1nc2ccccc2[nH]1", from = { "Nc1ccccc1N", "S=C=S" } },
+    refuse { "Sc1ncc[nH]1" }, -- no benzo ring
+}
+
+interconversion "quinolone-decarboxylation" {
+    about = "4-Quinolone by decarboxylation of the 3-carboxylic acid",
+    target = "[cH;$(c1c(=O)c2aaaac2[nH]c1):1]",
+    from = "[c:1]C(=O)O",
+    conditions = "heat-200",
+    also_attacks = { "tert-butyl ester", "Boc carbamate" },
+    recipe = "Ph2O or paraffin, 240-260 °C; copper chromite",
+    yield = { 80, 95 },
+    source = "Price, Roberts, Org. Synth. Coll. Vol. 3, 272; from memory",
+    example { "O=c1cc[nH]c2cc(Cl)ccc12", from = { "OC(=O)c1c[nH]c2cc(Cl)ccc2c1=O" } },
+    example { "O=c1cc[nH]c2ccccc12", from = { "OC(=O)c1c[nH]c2ccccc2c1=O" } },
+    refuse { "c1ccc2ncccc2c1" }, -- no oxo group
 }

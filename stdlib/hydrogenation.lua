@@ -480,3 +480,93 @@ interconversion "pyrazoline-oxidation" {
     example { "c1ccc(cc1)-c1cc(-c2ccccc2)[nH]n1", from = { "C1C(NN=C1c1ccccc1)c1ccccc1" } },
     refuse { "c1c[nH]cn1" }, -- an imidazole
 }
+
+interconversion "phenol-hydrogenation" {
+    about = "Cyclohexanol by hydrogenation of a phenol",
+    target = "[OX2H:1]-[CX4;H1;R1:2]1[CX4;H1,H2;R1:3][CX4;H1,H2;R1:4][CX4;H1,H2;R1:5][CX4;H1,H2;R1:6][CX4;H1,H2;R1:7]1",
+    from = "[O:1]-[c:2]1[c:3][c:4][c:5][c:6][c:7]1",
+    conditions = "h2-raney",
+    also_attacks = { "alkene", "alkyne", "nitro", "ketone", "aryl halide", "benzyl ether" },
+    recipe = "H2 (20-100 bar), Raney nickel or Rh/C, 80-180 °C; mixture of stereoisomers",
+    yield = { 75, 95 },
+    cautions = { "hydrogen", "nickel (Raney)" },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "CC1CCC(C(C)C)C(O)C1", from = { "Cc1ccc(C(C)C)c(O)c1" } },
+    example { "OC1CCC(CC1)C(C)(C)C", from = { "Oc1ccc(cc1)C(C)(C)C" } },
+    refuse { "CC1(C)CCCCC1O" }, -- a quaternary ring carbon
+}
+
+interconversion "isopropenyl-to-isopropyl" {
+    about = "Hydrogenation of an isopropenyl group on a ring",
+    target = "[CX4;H3:1][CX4;H1:2]([CH3:4])[CX4;R:3]",
+    from = "[C:1]=[C:2]([C:4])[C:3]",
+    conditions = "h2-pd",
+    also_attacks = { "other alkene", "alkyne", "nitro", "azide" },
+    recipe = "H2 (1-3 bar), PtO2 or Pd/C, EtOH, rt",
+    yield = { 90, 99 },
+    cautions = { "hydrogen" },
+    source = "common practice, no source",
+    example { "CC1CCC(C(C)C)C(O)C1", from = { "CC1CCC(C(C)=C)C(O)C1" } },
+    example { "CC(C)C1CCCCC1", from = { "CC(=C)C1CCCCC1" } },
+    refuse { "CCC(C)(C)C" }, -- no ring
+}
+
+interconversion "phthalide-reduction" {
+    about = "2-(2-Arylethyl)benzoic acid by reduction of a benzylidenephthalide",
+    target = "[OX2H:1][CX3:2](=[OX1:3])-[c:4]:[c:5]-[CX4;H2;!R:6]-[CX4;H2;!R:7]-[c:8]",
+    from = "[O:1]1[C:2](=[O:3])-[c:4]:[c:5]-[C:6]1=[C:7]-[c:8]",
+    conditions = "h2-pd",
+    also_attacks = { "alkene", "nitro", "aryl bromide", "benzyl ether" },
+    recipe = "red P, HI, reflux; also: H2, Pd/C, AcOH; Zn, NH3",
+    yield = { 75, 92 },
+    cautions = { "hydriodic acid" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "OC(=O)c1ccccc1CCc1ccccc1", from = { "O=C1OC(=Cc2ccccc2)c2ccccc12" } },
+    refuse { "OC(=O)c1ccccc1CC" }, -- no aryl group at the end
+}
+
+interconversion "ketone-and-ester-to-diol" {
+    about = "Ketone and benzoic ester of one molecule to the diol in one operation",
+    target = "([CX4;H1:1]([OX2H:2])([CX4:3])[c:4].[c:5][CX4;H2:6][OX2H:7])",
+    from = "([C:1](=[O:2])([C:3])[c:4].[c:5][C:6](=[O:7])OC)",
+    conditions = "lialh4",
+    also_attacks = { "other ester", "nitrile", "amide", "epoxide", "nitro", "aldehyde" },
+    recipe = "LiAlH4, THF, reflux; also: BH3·SMe2; NaBH4 with Lewis acid",
+    yield = { 70, 92 },
+    cautions = { "lithium aluminium hydride" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "CC(C)(C)N(Cc1ccccc1)CC(O)c1ccc(O)c(CO)c1",
+        from = { "COC(=O)c1cc(C(=O)CN(Cc2ccccc2)C(C)(C)C)ccc1O" } },
+    example { "CC(O)c1ccc(CO)cc1", from = { "COC(=O)c1ccc(cc1)C(C)=O" } },
+    refuse { "OCc1ccccc1" }, -- one group only
+}
+
+interconversion "dehydration-diaryl" {
+    about = "1,1-Diarylalkene by dehydration of a tertiary diarylcarbinol",
+    target = "[CX3:1]([c:2])([c:3])=[CX3:4]-[#6:5]",
+    from = "[C:1](O)([c:2])([c:3])[C:4]-[#6:5]",
+    conditions = "acid-aq-strong",
+    also_attacks = { "other tertiary alcohol", "acetal", "Boc carbamate", "tert-butyl ester" },
+    recipe = "HCl, EtOH or AcOH, reflux; also: H2SO4; TsOH, toluene; E and Z",
+    yield = { 75, 96 },
+    cautions = { "hydrochloric acid" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "CN(C)CCC=C1c2ccccc2CCc2ccccc12", from = { "CN(C)CCCC1(O)c2ccccc2CCc2ccccc12" } },
+    example { "CC=C(c1ccccc1)c1ccccc1", from = { "CCC(O)(c1ccccc1)c1ccccc1" } },
+    refuse { "CC=C(C)C" }, -- no aryl groups
+}
+
+interconversion "terminal-alkyne-semihydrogenation" {
+    about = "Terminal alkene by partial hydrogenation of an alkyne beside a carbinol",
+    target = "[CX3;H2:1]=[CX3;H1:2]-[CX4;$(C[OX2H]):3]",
+    from = "[C:1]#[C:2]-[C:3]",
+    conditions = "h2-lindlar",
+    also_attacks = { "other alkyne", "azide", "nitro" },
+    recipe = "H2 (1 bar), Lindlar catalyst, quinoline, hexane, rt",
+    yield = { 85, 98 },
+    cautions = { "hydrogen" },
+    source = "common practice, no source",
+    example { "CC(C)=CCCC(C)(O)C=C", from = { "CC(C)=CCCC(C)(O)C#C" } },
+    example { "CC(C)(O)C=C", from = { "CC(C)(O)C#C" } },
+    refuse { "C=CCCC" }, -- no hydroxyl group beside it
+}

@@ -792,3 +792,65 @@ interconversion "terminal-alkene-to-acid" {
     example { "CCCCCCCCCC(=O)O", from = { "C=CCCCCCCCCC" } },
     refuse { "OC(=O)O" }, -- no carbon on the acid
 }
+
+interconversion "glutaric-anhydride" {
+    about = "Six-membered cyclic anhydride from a glutaric acid",
+    target = "[CX3;r6:1]1(=[OX1:2])[OX2:3][CX3;r6:4](=[OX1:5])[CX4:6][CX4:7][CX4:8]1",
+    from = "[C:1](=[O:2])([O:3])[C:8][C:7][C:6][C:4](=[O:5])O",
+    conditions = "acylation",
+    also_attacks = { "alcohol", "phenol", "primary amine", "secondary amine", "thiol" },
+    recipe = "Ac2O, reflux; also: AcCl; dicyclohexylcarbodiimide",
+    yield = { 85, 97 },
+    cautions = { "acetic anhydride" },
+    source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
+    example { "O=C1CC2(CCCCC2)CC(=O)O1", from = { "OC(=O)CC1(CC(=O)O)CCCCC1" } },
+    example { "O=C1CCCC(=O)O1", from = { "OC(=O)CCCC(=O)O" } },
+    refuse { "O=C1CCC(=O)O1" }, -- a succinic anhydride
+}
+
+interconversion "acyl-lactam-hydrolysis" {
+    about = "4-Amino ketone by hydrolysis and decarboxylation of a 3-acyl-2-pyrrolidinone",
+    target = "[#6;c,CX4:1][CX3:2](=[OX1:3])[CX4;H2:4][CX4;H2:5][CX4;H2:6][NX3;H1,H2:7]",
+    from = "[#6:1][C:2](=[O:3])[C:4]1C(=O)[N:7][C:6][C:5]1",
+    conditions = "acid-aq-strong",
+    also_attacks = { "ester", "nitrile", "acetal", "Boc carbamate", "tert-butyl ester" },
+    recipe = "conc. HCl, reflux (CO2 leaves)",
+    yield = { 70, 90 },
+    cautions = { "hydrochloric acid" },
+    source = "Späth, Bretschneider, Ber. Dtsch. Chem. Ges. 1928, 61, 327; from memory",
+    example { "O=C(CCCNC)c1cccnc1", from = { "CN1CCC(C1=O)C(=O)c1cccnc1" } },
+    example { "O=C(CCCNC)c1ccccc1", from = { "CN1CCC(C1=O)C(=O)c1ccccc1" } },
+    refuse { "CC(=O)CCNC" }, -- one carbon fewer
+}
+
+disconnection "quaternary-nitrile-alcoholysis" {
+    about = "Ester from a nitrile on a fully substituted benzylic carbon and an alcohol",
+    target = "[CX4;H0;$(C-c):1][CX3:2](=[OX1])-!@[OX2:3][CX4;H2,H3:4]",
+    from = "[C:1][C:2]#N.[O:3][C:4]",
+    conditions = "acid-aq-strong",
+    also_attacks = { "acetal", "Boc carbamate", "tert-butyl ester", "silyl ether", "other nitrile" },
+    recipe = "H2SO4 or HCl, the alcohol, 100-130 °C, long",
+    yield = { 60, 82 },
+    cautions = { "sulfuric acid" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "CCOC(=O)C1(CCN(C)CC1)c1ccccc1", from = { "N#CC1(CCN(C)CC1)c1ccccc1", "CCO" } },
+    example { "COC(=O)C1(CCCC1)c1ccccc1", from = { "N#CC1(CCCC1)c1ccccc1", "CO" } },
+    refuse { "CCOC(=O)C(C)(C)C" }, -- no aryl group
+}
+
+disconnection "arylacetonitrile-secondary-alkylation" {
+    about = "Alkylation of an arylacetonitrile with isopropyl bromide",
+    target = "[CX4;H1,H0:1]([c:2])([CX2:3]#[NX1:4])-!@[CX4;H1:5]([CH3:6])[CH3:7]",
+    cut = { 5, 1 },
+    acceptor = { 5, "secondary-halide" },
+    donor = { 1, "stabilised-carbanion" },
+    conditions = "base-hindered",
+    also_attacks = { "free acid", "alcohol", "other alkyl halide", "aldehyde", "ketone", "ester" },
+    recipe = "NaNH2 or NaH, toluene or DMF; also: 50 % NaOH, Bu4NHSO4",
+    yield = { 65, 88 },
+    cautions = { "sodium hydride" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "COc1ccc(cc1OC)C(C#N)C(C)C", from = { "COc1ccc(CC#N)cc1OC", "CC(C)Br" } },
+    example { "CC(C)C(C#N)c1ccccc1", from = { "N#CCc1ccccc1", "CC(C)Br" } },
+    refuse { "CC(C)C(C#N)C" }, -- no aryl group
+}

@@ -504,3 +504,17 @@ disconnection "cross-metathesis" {
     example { "CCCCCC/C=C/C(=O)OC", from = { "C=CCCCCCC", "C=CC(=O)OC" } },
     refuse { "COC(=O)/C=C\\CC" }, -- the Z isomer is not formed
 }
+
+disconnection "corey-chaykovsky-epoxide-sulfoxonium" {
+    about = "Epoxide from a ketone and trimethylsulfoxonium iodide",
+    target = "[CX4;H2;r3:1]1-[OX2;r3:2]-[CX4;H0;r3:3]-1",
+    from = "[C:1][S+](C)(C)=O.[I-].[O:2]=[C:3]",
+    conditions = "ylide",
+    also_attacks = { "alkyl halide", "aldehyde", "free acid", "acyl halide", "enone" },
+    recipe = "Me3SOI, NaOH or KOH, toluene with Bu4NBr or DMSO, rt to 60 °C",
+    yield = { 60, 88 },
+    source = "Corey, Chaykovsky, J. Am. Chem. Soc. 1965, 87, 1353; from memory",
+    example { "Fc1ccc(c(F)c1)C1(Cn2cncn2)CO1", from = { "[I-].C[S+](C)(C)=O", "O=C(Cn1cncn1)c1ccc(F)cc1F" } },
+    example { "CC1(CO1)c1ccccc1", from = { "[I-].C[S+](C)(C)=O", "CC(=O)c1ccccc1" } },
+    refuse { "CC1OC1C" }, -- an internal epoxide
+}

@@ -20,6 +20,9 @@ synthon "alkyl" {
     },
 }
 
+-- A carbon beside an arene or a carbonyl group, which SN2 reaches also where it is secondary.
+synthon "secondary halide" { kind = "acceptor", equivalents = { { attach = "Cl" }, { attach = "Br" } } }
+
 -- Methyl cation.
 synthon "methyl" {
     kind = "acceptor",
