@@ -65,6 +65,8 @@ typedef struct bs_route_step {
     bool checked; /* run forwards, it gave the product */
     char **rivals; /* what else it could give: SMILES, products of one run joined by dots */
     int rival_count;
+    char **clashes; /* groups that the conditions of ways[0] attack in the precursors, by name */
+    int clash_count;
     /*
      * Of the longest linear sequence that ends with this step: its steps, and its overall yields
      * in per cent, at the low end, as used for the cost, and at the high end; where several are

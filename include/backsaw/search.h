@@ -17,6 +17,7 @@
 #ifndef BACKSAW_SEARCH_H
 #define BACKSAW_SEARCH_H
 
+#include "backsaw/group.h"
 #include "backsaw/route.h"
 
 /*
@@ -40,6 +41,16 @@ typedef struct bs_known_step {
 
 /* Step cost by default, € before it is divided by the yield. */
 #define BS_DEFAULT_STEP_COST 50.0
+
+/* What a clash (group.h) costs by default: the steps that put a protecting group on and off again. */
+#define BS_DEFAULT_CLASH_STEPS 2.0
+
+/* What becomes of a rule's step whose conditions attack another group of a precursor. */
+typedef enum bs_clash_policy {
+    BS_CLASH_PENALISE, /* each clash adds clash_cost to its step cost, but not to that of `cost` */
+    BS_CLASH_ALLOW,
+    BS_CLASH_REFUSE
+} bs_clash_policy;
 
 typedef struct bs_plan_limits {
     int depth;      /* steps in line from the target; 0: 16 */
@@ -84,6 +95,9 @@ typedef struct bs_plan_opts {
     bool has_step_cost;
     double step_cost; /* of each step, 0 or more; without has_step_cost BS_DEFAULT_STEP_COST; the
                          step_cost of a transform's definition is added */
+    bs_clash_policy clashes;
+    bool has_clash_cost;
+    double clash_cost; /* 0 or more; without has_clash_cost BS_DEFAULT_CLASH_STEPS times the step cost */
     int best;         /* routes wanted; 0: 10 */
     int batch;        /* molecules expanded at a time; 0: 16 */
     int gaps;         /* gaps listed at most; 0: 10; negative: none */

@@ -29,7 +29,8 @@ t:forth(m, ...)                      what it makes of these: sets with products 
 t:why(m)                             why it gives steps to m, or none; m:ideas() asks all
 t:check()                            its self-tests: true, or false and the failures
 back(m)  forth(m, ...)               the same with every transform in use
-A step has product, precursors, equivalents, transform, conditions, recipe, yield, rivals,
+A step has product, precursors, equivalents, transform, conditions, recipe, yield, rivals, clashes,
+worries,
 and uses(reagent).]],
 packs = [[
 use "./ours.lua"                     a pack by file, or use "ours" by name: beside the script,
@@ -49,6 +50,8 @@ m:clashes("lialh4", { reacting = { 2, 3 } })
 verdict { group = "ester", conditions = "nabh4", "slow", why = "..." }    corrects a verdict
 group "id" { smarts =, parents =, also =, examples =, non_examples = }
 conditions "id" { attacks = { "group", { "group", why = } }, slow =, survives =, reagents = }
+step.clashes  step.worries           what the step attacks, what needs care, in which precursor
+step:protections()                   protecting groups that would help
 protecting "id" { guards =, installed_by =, removed_by =, group =, example = }
 incompatible "id" { { "groups" }, { "groups" }, conditions =, why = }]],
 catalogues = [[
@@ -62,6 +65,7 @@ routes = plan { target = mol "...", catalogue = c, ... }
 catalogue   a catalogue, or a list in order of preference; a plain list of SMILES serves too
 limits      { depth =, steps =, molecules =, seconds =, memory = }
 cost        cost.per_mole { step = 50 }, cost.additive { step = }, or function(step)
+clashes     "penalise" (a clash costs two more steps, or clash_cost), "allow" or "refuse"
 allow       function(step): may the step be used?      keep  function(route): does it count?
 rank        function(route): the lowest first          best  how many routes
 known       { { product =, from = { ... }, yield =, cost =, equiv =, name = }, ... }

@@ -7,7 +7,8 @@ local planning = {}
 
 local fields = { target = "any", catalogue = "any", limits = "any", cost = "any", allow = "code",
     keep = "code", rank = "code", guess = "code", known = "any", transforms = "any",
-    best = "count", at_hand = "any", quiet = "flag", threads = "count" }
+    clashes = "text", clash_cost = "amount", best = "count", at_hand = "any", quiet = "flag",
+    threads = "count" }
 
 local limit_fields = { depth = "count", steps = "count", molecules = "count", seconds = "amount",
     memory = "count" }
@@ -177,6 +178,18 @@ local function set_cost(options, cost)
     end
 end
 
+-- As the library numbers them.
+local clash_policies = { penalise = 0, allow = 1, refuse = 2 }
+
+local function set_clashes(options)
+    local policy = options.clashes or "penalise"
+    options.clashes = nil
+    options.clash_policy = clash_policies[policy]
+    if not options.clash_policy then
+        check.fail("plan: 'clashes' must be \"penalise\", \"allow\" or \"refuse\", not '%s'", policy)
+    end
+end
+
 -- routes = plan { target =, catalogue =, ... }
 function planning.plan(given)
     local options = check.fields("plan", given, fields)
@@ -196,6 +209,7 @@ function planning.plan(given)
     local cost = options.cost
     options.cost = nil
     set_cost(options, cost)
+    set_clashes(options)
     return core.plan(options)
 end
 

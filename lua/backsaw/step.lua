@@ -9,7 +9,40 @@ local function read_all(list)
     return mols
 end
 
+-- The step of the rule book that a step of a route came from, or nil: found by asking its transform
+-- again. Known steps have none.
+local function ask_again(text, transform)
+    local rule = transform and core.find_transform(transform)
+    if not rule then return nil end
+    local wanted = {}
+    for i, m in ipairs(read_all(text.precursors)) do wanted[i] = m:smiles() end
+    table.sort(wanted)
+    for _, step in ipairs(rule:back(core.mol(text.product))) do
+        local found = {}
+        for i, m in ipairs(step.precursors) do found[i] = m:smiles() end
+        table.sort(found)
+        if table.concat(found, " ") == table.concat(wanted, " ") then return step end
+    end
+end
+
+-- The rule's own step, kept with the step of a route. Its precursors may stand in another order.
+local function origin(step)
+    local text = rawget(step, core)
+    if not text then return step end
+    if text.origin == nil then text.origin = ask_again(text, step.transform) or false end
+    return text.origin or nil
+end
+
+local function of_origin(key)
+    return function(_, step)
+        local one = origin(step)
+        return one and one[key] or {}
+    end
+end
+
 local readers = {
+    clashes = of_origin "clashes",
+    worries = of_origin "worries",
     product = function(text) return core.mol(text.product) end,
     precursors = function(text) return read_all(text.precursors) end,
     rivals = function(text)
@@ -24,7 +57,7 @@ local readers = {
 function core.step_type.__index(step, key)
     local text = rawget(step, core)
     if text and readers[key] then
-        local value = readers[key](text)
+        local value = readers[key](text, step)
         rawset(step, key, value)
         return value
     end
@@ -68,6 +101,13 @@ function methods.uses(step, reagent)
             .. type(reagent))
     end
     return false
+end
+
+-- list = step:protections(): protecting groups that would help with its clashes, for each one those
+-- that survive before those that may suffer
+function methods.protections(step)
+    local one = origin(step)
+    return one and core.protections(one) or {}
 end
 
 -- "a1 + d2", and whether one of them is against nature

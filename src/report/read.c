@@ -223,7 +223,7 @@ static bs_status read_precursors(bs_reader *r, const json_t *object, const parts
 
 static bs_status read_step(bs_reader *r, const json_t *object, const parts *p, bs_route_step *step)
 {
-    const char **rivals = NULL;
+    const char **rivals = NULL, **clashes = NULL;
     json_t *product;
     bs_status st;
 
@@ -237,9 +237,11 @@ static bs_status read_step(bs_reader *r, const json_t *object, const parts *p, b
     bs_field__leave(r);
     if (st != BS_OK || (st = read_precursors(r, object, p, step)) != BS_OK ||
         (st = bs_field__flag(r, object, "known", BS_FIELD_OPTIONAL, &step->known)) != BS_OK ||
-        (st = bs_field__words(r, object, "rivals", &rivals, &step->rival_count)) != BS_OK)
+        (st = bs_field__words(r, object, "rivals", &rivals, &step->rival_count)) != BS_OK ||
+        (st = bs_field__words(r, object, "clashes", &clashes, &step->clash_count)) != BS_OK)
         return st;
     step->rivals = (char **)rivals;
+    step->clashes = (char **)clashes;
     return read_ways(r, object, step);
 }
 

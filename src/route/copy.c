@@ -73,7 +73,8 @@ bs_status bs_route__copy_step(bs_ctx *cx, bs_arena *home, const bs_route_step *f
     *to = *from;
     if ((st = bs_new(cx, home, from->precursor_count, &to->precursors)) != BS_OK ||
         (st = bs_new(cx, home, from->way_count, &to->ways)) != BS_OK ||
-        (st = bs_new(cx, home, from->rival_count, &to->rivals)) != BS_OK)
+        (st = bs_new(cx, home, from->rival_count, &to->rivals)) != BS_OK ||
+        (st = bs_new(cx, home, from->clash_count, &to->clashes)) != BS_OK)
         return st;
     for (int i = 0; i < from->precursor_count; i++)
         to->precursors[i] = from->precursors[i];
@@ -83,6 +84,8 @@ bs_status bs_route__copy_step(bs_ctx *cx, bs_arena *home, const bs_route_step *f
     }
     for (int i = 0; st == BS_OK && i < from->rival_count; i++)
         st = bs_copy_text(cx, home, from->rivals[i], strlen(from->rivals[i]), &to->rivals[i]);
+    for (int i = 0; st == BS_OK && i < from->clash_count; i++)
+        st = bs_copy_text(cx, home, from->clashes[i], strlen(from->clashes[i]), &to->clashes[i]);
     return st;
 }
 

@@ -58,6 +58,19 @@ static bs_status add_leaf(bs_text *text, const bs_route_molecule *mol)
     return st;
 }
 
+/* " (clash: ketone, nitrile)" */
+static bs_status add_clashes(bs_text *text, const bs_route_step *step)
+{
+    bs_status st = BS_OK;
+
+    for (int i = 0; i < step->clash_count && st == BS_OK; i++) {
+        st = bs_text_puts(text, i > 0 ? ", " : step->clash_count > 1 ? " (clashes: " : " (clash: ");
+        if (st == BS_OK)
+            st = add_clean(text, step->clashes[i]);
+    }
+    return st == BS_OK && step->clash_count > 0 ? bs_text_putc(text, ')') : st;
+}
+
 /* "by nitro reduction, 80-90 %: Fe, dilute acid" under the molecule that the step makes. */
 static bs_status add_step(bs_text *text, const bs_route_step *step, int depth)
 {
@@ -80,6 +93,8 @@ static bs_status add_step(bs_text *text, const bs_route_step *step, int depth)
     if (st == BS_OK && step->rival_count > 0)
         st = bs_text_printf(text, " (%d rival%s)", step->rival_count,
                             step->rival_count == 1 ? "" : "s");
+    if (st == BS_OK)
+        st = add_clashes(text, step);
     if (st == BS_OK && !step->checked && !step->known)
         st = bs_text_puts(text, " (not checked)");
     return st == BS_OK ? bs_text_putc(text, '\n') : st;

@@ -13,11 +13,21 @@ typedef struct input {
     bs_mol *mol;
     char *smiles;
     double amount;
+    int part; /* of the source */
 } input;
+
+/* Where a part of the source came to lie. */
+typedef struct berth {
+    const bs_mol *mol; /* with its counter-ion */
+    int host;          /* the part that it was joined to, or itself */
+    uint32_t base;     /* what its atom 0 is in the molecule */
+    int item;          /* of the inputs; unset where it was joined */
+} berth;
 
 typedef struct inputs {
     input *items;
     int count;
+    berth *berths; /* one a part */
 } inputs;
 
 /* A transform at work on one piece of the product. */
@@ -120,6 +130,8 @@ static bs_status join_salts(bs_ctx *cx, back *b, inputs *list)
         other = partner_of(list, i);
         if (other < 0)
             continue;
+        list->berths[i].host = other;
+        list->berths[i].base = list->items[other].mol->atom_count;
         st = join_ions(cx, b->home, list->items[other].mol, list->items[i].mol,
                        &list->items[other].mol);
         if (st == BS_OK)
@@ -143,6 +155,7 @@ static void merge_equal(inputs *list)
     int count = 0;
 
     for (int i = 0; i < list->count; i++) {
+        list->berths[i].mol = list->items[i].mol;
         if (list->items[i].mol)
             list->items[count++] = list->items[i];
     }
@@ -151,10 +164,13 @@ static void merge_equal(inputs *list)
     for (int i = 0; i < count; i++) {
         input *last = list->count > 0 ? &list->items[list->count - 1] : NULL;
 
-        if (last && strcmp(last->smiles, list->items[i].smiles) == 0)
+        list->berths[list->items[i].part].item = list->count;
+        if (last && strcmp(last->smiles, list->items[i].smiles) == 0) {
+            list->berths[list->items[i].part].item--;
             last->amount += list->items[i].amount;
-        else
+        } else {
             list->items[list->count++] = list->items[i];
+        }
     }
 }
 
@@ -163,13 +179,85 @@ static bs_status find_inputs(bs_ctx *cx, back *b, const bs_result *result, char 
 {
     bs_status st = bs_new(cx, b->home, result->product_count + 1, &out->items);
 
+    if (st == BS_OK)
+        st = bs_new(cx, b->home, result->product_count + 1, &out->berths);
     if (st != BS_OK)
         return st;
     out->count = result->product_count;
-    for (int i = 0; i < out->count; i++)
-        out->items[i] = (input){result->products[i], smiles[i], b->kase->equivalents[i]};
+    for (int i = 0; i < out->count; i++) {
+        out->items[i] = (input){result->products[i], smiles[i], b->kase->equivalents[i], i};
+        out->berths[i].host = i;
+    }
     if ((st = join_salts(cx, b, out)) == BS_OK)
         merge_equal(out);
+    return st;
+}
+
+/* ---- What reacts ------------------------------------------------------ */
+
+/* Whether an atom of the source takes part. What the rule only looks at counts where it is a
+   heteroatom or unsaturated, so that the group which makes the reaction possible is no bystander. */
+static bool takes_part(const bs_case *kase, int source, const bs_mol *mol, uint32_t atom)
+{
+    int slot = kase->back.to_slot[source];
+
+    if (slot >= kase->target.atom_count || kase->back.active[slot] ||
+        bs_mol_atom_element(mol, (int)atom) != 6)
+        return true;
+    for (int k = 0; k < bs_mol_atom_degree(mol, (int)atom); k++) {
+        int bond;
+
+        bs_mol_neighbour(mol, (int)atom, k, NULL, &bond);
+        if (bs_mol_bond_order(mol, bond) > 1 && !bs_mol_bond_is_aromatic(mol, bond))
+            return true;
+    }
+    return false;
+}
+
+/* The atom of `to` that atom `atom` of `from` is, two drawings of one compound. */
+static bs_status same_atom(bs_ctx *cx, const bs_mol *from, uint32_t atom, const bs_mol *to,
+                           uint32_t *out)
+{
+    int *a, *b;
+    bs_status st;
+
+    *out = atom;
+    if (from == to)
+        return BS_OK;
+    if ((st = bs_mol_canonical_order(cx, &cx->scratch, from, &a)) != BS_OK ||
+        (st = bs_mol_canonical_order(cx, &cx->scratch, to, &b)) != BS_OK)
+        return st == BS_ELIMIT ? BS_OK : st; /* too symmetrical: any atom will do */
+    for (uint32_t i = 0; i < to->atom_count; i++) {
+        if (b[i] == a[atom])
+            *out = i;
+    }
+    return BS_OK;
+}
+
+/* Marks the atoms of the precursors that take part in the reaction. */
+static bs_status mark_reacting(bs_ctx *cx, back *b, const inputs *list, const bs_result *result,
+                               bool **reacting)
+{
+    bs_mark temp = bs_arena_mark(&cx->scratch);
+    bs_status st = BS_OK;
+
+    for (int i = 0; i < list->count && st == BS_OK; i++)
+        st = bs_new(cx, b->home, list->items[i].mol->atom_count + 1, &reacting[i]);
+    for (int k = 0; k < b->kase->source.atom_count && st == BS_OK; k++) {
+        const bs_spot *spot = &result->spots[k];
+        const berth *own, *host;
+        uint32_t atom;
+
+        if (spot->atom == BS_NOWHERE ||
+            !takes_part(b->kase, k, result->products[spot->mol], spot->atom))
+            continue;
+        own = &list->berths[spot->mol];
+        host = &list->berths[own->host];
+        st = same_atom(cx, host->mol, own->base + spot->atom, list->items[host->item].mol, &atom);
+        if (st == BS_OK)
+            reacting[host->item][atom] = true;
+    }
+    bs_arena_rewind(&cx->scratch, temp);
     return st;
 }
 
@@ -206,8 +294,8 @@ static bs_status whole_site(bs_ctx *cx, back *b, bs_arena *home, const uint32_t 
     return bs_site__fill(cx, home, b->tr, atoms, out);
 }
 
-static bs_status add_step(bs_ctx *cx, back *b, const inputs *list, const uint32_t *where,
-                          const bs_verdict *verdict)
+static bs_status add_step(bs_ctx *cx, back *b, const inputs *list, const bs_result *result,
+                          const uint32_t *where, const bs_verdict *verdict)
 {
     bs_step step = {.transform = b->transform,
                     .precursor_count = list->count,
@@ -219,6 +307,8 @@ static bs_status add_step(bs_ctx *cx, back *b, const inputs *list, const uint32_
         (st = bs_new(cx, b->home, list->count + 1, &step.precursors)) != BS_OK ||
         (st = bs_new(cx, b->home, list->count + 1, &step.smiles)) != BS_OK ||
         (st = bs_new(cx, b->home, list->count + 1, &step.equivalents)) != BS_OK ||
+        (st = bs_new(cx, b->home, list->count + 1, &step.reacting)) != BS_OK ||
+        (st = mark_reacting(cx, b, list, result, step.reacting)) != BS_OK ||
         (st = whole_site(cx, b, b->home, where, &step.site)) != BS_OK)
         return st;
     for (int i = 0; i < list->count; i++) {
@@ -357,7 +447,7 @@ static bs_status take_result(void *payload, bs_ctx *cx, const uint32_t *where,
         return tell(cx, b, BS_REFUSED_FORWARD, where, smiles, result->product_count);
     b->tried[index] = -1;
     *keep = true;
-    return add_step(cx, b, &list, where, &verdict);
+    return add_step(cx, b, &list, result, where, &verdict);
 }
 
 /* ---- All ---------------------------------------------------------------------------------- */

@@ -21,8 +21,9 @@ typedef struct judge {
     int remark_count;
     const bs_mol *mol;
     const bool *reacting; /* or NULL */
-    bs_arena own; /* of the hits of one molecule */
+    bs_arena own;         /* of the hits of one molecule */
     const bs_group_hits *hits;
+    bool *involved;  /* for each hit: it belongs to the wanted change */
     bs_clash *items; /* all that do not survive, in scratch */
     int count, room;
 } judge;
@@ -103,17 +104,6 @@ static bs_status judge_hit(judge *j, const bs_group_hit *hit)
     return clash.fate == BS_SURVIVES ? BS_OK : add(j, clash);
 }
 
-/* ---- Pairs of groups ------------------------------------------------------------------------- */
-
-static bool is_one_of(const judge *j, int group, const int *list, int count)
-{
-    for (int i = 0; i < count; i++) {
-        if (bs_group__distance(bs_shelves__group(j->rules, group), group, list[i]) >= 0)
-            return true;
-    }
-    return false;
-}
-
 static bool share_atoms(const bs_group_hit *a, const bs_group_hit *b)
 {
     for (int i = 0; i < a->count; i++) {
@@ -121,6 +111,56 @@ static bool share_atoms(const bs_group_hit *a, const bs_group_hit *b)
             if (a->atoms[i] == b->atoms[k])
                 return true;
         }
+    }
+    return false;
+}
+
+/* Whether two groups are the same, or have a wider group in common. */
+static bool are_related(const judge *j, int a, int b)
+{
+    const bs_group *one = bs_shelves__group(j->rules, a);
+    const bs_group *other = bs_shelves__group(j->rules, b);
+
+    if (bs_group__distance(one, a, b) >= 0 || bs_group__distance(other, b, a) >= 0)
+        return true;
+    for (int i = 0; i < one->wider_count; i++) {
+        if (bs_group__distance(other, b, one->wider[i]) >= 0)
+            return true;
+    }
+    return false;
+}
+
+/*
+ * Finds out which hits belong to the wanted change. In a step so do the parts of a larger group
+ * that reacts: the esters of a malonate, whose CH is alkylated.
+ */
+static bs_status find_involved(judge *j, bool of_step)
+{
+    const bs_group_hits *hits = j->hits;
+    bool *direct;
+    bs_status st;
+
+    if ((st = bs_new(j->cx, &j->own, hits->count + 1, &direct)) != BS_OK ||
+        (st = bs_new(j->cx, &j->own, hits->count + 1, &j->involved)) != BS_OK)
+        return st;
+    for (int i = 0; i < hits->count; i++)
+        j->involved[i] = direct[i] = takes_part(j, &hits->items[i]);
+    for (int i = 0; i < hits->count && of_step; i++) {
+        for (int k = 0; k < hits->count && !j->involved[i]; k++)
+            j->involved[i] = direct[k] &&
+                             are_related(j, hits->items[i].group, hits->items[k].group) &&
+                             share_atoms(&hits->items[i], &hits->items[k]);
+    }
+    return BS_OK;
+}
+
+/* ---- Pairs of groups ------------------------------------------------------------------------- */
+
+static bool is_one_of(const judge *j, int group, const int *list, int count)
+{
+    for (int i = 0; i < count; i++) {
+        if (bs_group__distance(bs_shelves__group(j->rules, group), group, list[i]) >= 0)
+            return true;
     }
     return false;
 }
@@ -168,7 +208,7 @@ static bs_status judge_pair(judge *j, const bs_pair *pair)
             const bs_group_hit *b = &j->hits->items[k];
 
             if (k == i || !is_one_of(j, b->group, pair->other, def->other.count) ||
-                share_atoms(a, b) || (takes_part(j, a) && takes_part(j, b)))
+                share_atoms(a, b) || (j->involved[i] && j->involved[k]))
                 continue;
             st = add_pair(j, pair, a, b);
             break;
@@ -236,7 +276,7 @@ static bs_status keep(const judge *j, bs_fate fate, bs_clashes *out)
 }
 
 /* Finds the groups of the molecule and judges them; the items lie in scratch. */
-static bs_status examine(judge *j, bool with_pairs)
+static bs_status examine(judge *j, bool of_step)
 {
     bs_group_hits *hits;
     bs_status st;
@@ -246,11 +286,12 @@ static bs_status examine(judge *j, bool with_pairs)
         (st = bs_groups_find(j->cx, &j->own, j->rules, j->mol, hits)) != BS_OK)
         return st;
     j->hits = hits;
+    st = find_involved(j, of_step);
     for (int i = 0; i < hits->count && st == BS_OK; i++) {
-        if (!takes_part(j, &hits->items[i]))
+        if (!j->involved[i])
             st = judge_hit(j, &hits->items[i]);
     }
-    for (int i = 0; with_pairs && i < bs_shelves__count(j->rules, BS_PAIRS) && st == BS_OK; i++) {
+    for (int i = 0; of_step && i < bs_shelves__count(j->rules, BS_PAIRS) && st == BS_OK; i++) {
         const bs_pair *pair = bs_shelves__pair(j->rules, i);
 
         if (pair_applies(pair, j->conditions))

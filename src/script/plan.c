@@ -298,6 +298,9 @@ static void read_limits(lua_State *L, int i, bs_plan_opts *opts)
     opts->best = (int)number_option(L, i, "best");
     opts->has_step_cost = has_option(L, i, "step_cost");
     opts->step_cost = number_option(L, i, "step_cost");
+    opts->clashes = (bs_clash_policy)number_option(L, i, "clash_policy");
+    opts->has_clash_cost = has_option(L, i, "clash_cost");
+    opts->clash_cost = number_option(L, i, "clash_cost");
     opts->mode = has_option(L, i, "additive") ? BS_COST_ADDITIVE : BS_COST_PER_MOLE;
 }
 

@@ -213,6 +213,7 @@ void bsl_push_step(lua_State *L, int product, const bs_step *step)
         lua_rawseti(L, -2, i + 1);
     }
     lua_setfield(L, -2, "rivals");
+    bsl_set_clashes(L, step);
     set_definition(L, def);
     set_polarity(L, bsl_checkmol(L, product), def, &step->site);
     luaL_setmetatable(L, STEP_TYPE);

@@ -128,14 +128,19 @@ static bs_status add_steps(const bs_plan_state *plan, list *l, const bs_steps *s
         const bs_step *step = &steps->items[i];
         bs_route_way way;
         bs_proposal p;
+        int clashes;
 
+        if ((st = bs_plan__count_clashes(plan, l->cx, step, &clashes)) != BS_OK)
+            return st;
+        if (clashes > 0 && plan->opts->clashes == BS_CLASH_REFUSE)
+            continue;
         bs_plan__fill_way(plan, (uint32_t)step->transform, &way);
         p = (bs_proposal){
             .mols = (const bs_mol *const *)step->precursors,
             .smiles = (const char *const *)step->smiles,
             .equivalents = step->equivalents,
             .count = step->precursor_count,
-            .cost = way.cost,
+            .cost = way.cost + clashes * plan->clash_cost,
             .yield = way.yield / 100,
             .tag = (uint32_t)step->transform,
             .origin = step,
@@ -226,6 +231,7 @@ static bs_status show(const bs_plan_state *plan, bs_ctx *cx, const char *product
 
         bs_plan__fill_way(plan, p->tag, step->ways);
         step->ways->equivalents = equivalents;
+        step->ways->cost = p->cost;
     }
     step->precursor_count = p->count;
     for (int i = 0; i < p->count; i++) {

@@ -46,6 +46,9 @@ static bs_status run_again(bs_plan_state *plan, uint32_t w, bs_plan_detail *deta
         detail->checked = true;
         st = bs_plan__rivals(cx, &plan->arena, &found.items[i].rivals, &detail->rivals,
                              &detail->rival_count);
+        if (st == BS_OK)
+            st = bs_plan__name_clashes(plan, cx, &plan->arena, &found.items[i], &detail->clashes,
+                                       &detail->clash_count);
     }
     bs_arena_free(&home);
     return st == BS_ELIMIT ? BS_OK : st;
@@ -153,6 +156,8 @@ static bs_status add_step(parts *p, uint32_t w)
         .checked = detail.checked,
         .rivals = detail.rivals,
         .rival_count = detail.rival_count,
+        .clashes = detail.clashes,
+        .clash_count = detail.clash_count,
     };
     if ((st = bs_new(cx, &cx->scratch, way->count, &step->precursors)) != BS_OK)
         return st;

@@ -35,6 +35,8 @@ static bs_status check_options(bs_ctx *cx, const bs_plan_opts *o)
         return bs_fail(cx, BS_EVALUE, "best: must be 1 to %d", MOST_BEST);
     if (o->has_step_cost && !(isfinite(o->step_cost) && o->step_cost >= 0))
         return bs_fail(cx, BS_EVALUE, "cost: the step cost must be a number of 0 or more");
+    if (o->has_clash_cost && !(isfinite(o->clash_cost) && o->clash_cost >= 0))
+        return bs_fail(cx, BS_EVALUE, "clash_cost: must be a number of 0 or more");
     if (o->threads < 0 || o->threads > MOST_THREADS)
         return bs_fail(cx, BS_EVALUE, "threads: must be 1 to %d", MOST_THREADS);
     if (o->batch < 0 || o->transform_count < 0 || (o->lane_hooks && o->lane_count < 1))
@@ -73,6 +75,8 @@ static void read_options(bs_plan_state *plan)
     plan->depth = o->limits.depth > 0 ? o->limits.depth : DEFAULT_DEPTH;
     plan->best = o->best > 0 ? o->best : DEFAULT_BEST;
     plan->step_cost = o->has_step_cost ? o->step_cost : BS_DEFAULT_STEP_COST;
+    plan->clash_cost = o->has_clash_cost ? o->clash_cost
+                                         : BS_DEFAULT_CLASH_STEPS * plan->step_cost;
     plan->pool = plan->best;
     if (o->rank) {
         plan->pool = plan->best * RANK_POOL < RANK_MOST ? plan->best * RANK_POOL : RANK_MOST;

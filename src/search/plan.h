@@ -28,6 +28,8 @@ typedef struct bs_plan_detail {
     bool checked;
     char **rivals;
     int rival_count;
+    char **clashes;
+    int clash_count;
 } bs_plan_detail;
 
 typedef struct bs_plan_state {
@@ -41,7 +43,7 @@ typedef struct bs_plan_state {
     size_t detail_count, detail_room;
     bool rules_on;
     int depth, best, pool;
-    double step_cost;
+    double step_cost, clash_cost;
     double admitted_cost; /* sum over the steps admitted so far, for the unit of guesses */
     double admitted_count;
     bs_guess guess;
@@ -67,6 +69,14 @@ bs_status bs_plan__meet(void *payload, bs_ctx *cx, const bs_mol *mol, const char
 
 /* Writes what the definition behind a tag says; strings are those of the definition. */
 void bs_plan__fill_way(const bs_plan_state *plan, uint32_t tag, bs_route_way *way);
+
+/* How many clashes a step has; 0 without looking where they are allowed. */
+bs_status bs_plan__count_clashes(const bs_plan_state *plan, bs_ctx *cx, const bs_step *step,
+                                 int *count);
+
+/* The names of the groups that a step attacks. */
+bs_status bs_plan__name_clashes(const bs_plan_state *plan, bs_ctx *cx, bs_arena *home,
+                                const bs_step *step, char ***names, int *count);
 
 /* Rivals as text: the products of each outcome joined by dots. */
 bs_status bs_plan__rivals(bs_ctx *cx, bs_arena *home, const bs_outcomes *rivals, char ***out,

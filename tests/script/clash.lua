@@ -108,3 +108,121 @@ print(fails(function() incompatible "x" { "ketone" } end))
 --> incompatible "x": two groups, or two lists of groups, are expected
 print(fails(function() incompatible "x" { "ketone", "keton" } end))
 --> incompatible "x": the second list: there is no group "keton"
+
+-- ---- Steps ------------------------------------------------------------------------------------
+
+-- The step of a transform with this precursor, and what clashes in it.
+local function step_of(name, product, precursor)
+    for _, step in ipairs(transform(name):back(mol(product))) do
+        for i, m in ipairs(step.precursors) do
+            if m == mol(precursor) then return step, i end
+        end
+    end
+end
+
+local function names(list)
+    local texts = {}
+    for i, clash in ipairs(list) do
+        texts[i] = clash.group .. (clash.other and " with " .. clash.other or "")
+    end
+    return #texts > 0 and table.concat(texts, ", ") or "nothing"
+end
+
+interconversion "our ketone reduction" {
+    target = "[CX4;H1:1]([OX2H:2])([#6:3])[#6:4]", from = "[CX3:1](=[O:2])([#6:3])[#6:4]",
+    conditions = "lialh4",
+}
+local step, where = step_of("our ketone reduction", "CC(O)CCC(=O)OC", "CC(=O)CCC(=O)OC")
+print(names(step.clashes), step.clashes[1].precursor == where)  --> methyl-ester	true
+print(#step.clashes[1].atoms, #step.reacting[where])  --> 4	2
+print(names(step_of("our ketone reduction", "CC(O)CCC(C)=O", "CC(=O)CCC(C)=O").clashes))  --> alkyl-ketone
+print(names(step_of("our ketone reduction", "CC(O)CCC(C)C", "CC(=O)CCC(C)C").clashes))    --> nothing
+
+-- A recipe differs from its class in both directions; the nearer word counts.
+interconversion "our mild reduction" {
+    target = "[CX4;H1:1]([OX2H:2])([#6:3])[#6:4]", from = "[CX3:1](=[O:2])([#6:3])[#6:4]",
+    conditions = "lialh4", spares = { "ester" }, also_attacks = { "other nitrile", "acetate ester" },
+}
+print(names(step_of("our mild reduction", "CC(O)CCC(=O)OC", "CC(=O)CCC(=O)OC").clashes))   --> nothing
+print(names(step_of("our mild reduction", "CC(O)CCOC(C)=O", "CC(=O)CCOC(C)=O").clashes))   --> acetate-ester
+print(names(step_of("our mild reduction", "CC(O)CCC#N", "CC(=O)CCC#N").clashes))           --> nitrile
+
+-- `slow` is a worry.
+verdict { group = "methyl-ester", conditions = "lialh4", "slow" }
+step = step_of("our ketone reduction", "CC(O)CCC(=O)OC", "CC(=O)CCC(=O)OC")
+print(names(step.clashes), names(step.worries))       --> nothing	methyl-ester
+verdict { group = "methyl-ester", conditions = "lialh4", "attacked" }
+
+-- Reactions inside one precursor, and a closure that is wanted. Common practice, no source.
+interconversion "our N-debenzylation" {
+    target = "[NX3;H2:1][CX4:2]", from = "[N:1]([C:2])Cc1ccccc1", conditions = "h2-pd",
+}
+local function inside(product, precursor)
+    return names(step_of("our N-debenzylation", product, precursor).clashes)
+end
+print(inside("NCCCBr", "BrCCCNCc1ccccc1"))            --> secondary-amine with primary-alkyl-halide
+print(inside("NCCC=O", "O=CCCNCc1ccccc1"))            --> secondary-amine with aldehyde
+print(inside("NCCC(=O)Cl", "ClC(=O)CCNCc1ccccc1"))    --> acyl-halide, acyl-halide with secondary-amine
+interconversion "our ring closure" {
+    target = "[NX3:1]1[CX4:2][C:3][C:4][C:5]1", from = "[N:1][C:5][C:4][C:3][C:2]Br", conditions = "amine-heat",
+}
+print(names(step_of("our ring closure", "C1CCNC1", "NCCCCBr").clashes))  --> nothing
+interconversion "our Grignard addition" {
+    target = "[CX4:1]([OX2H:2])[CH3:3]", from = "[CX3:1]=[O:2].[CH3:3][Mg]Br", conditions = "grignard",
+}
+print(names(step_of("our Grignard addition", "CC(C)(O)CCCO", "CC(=O)CCCO").clashes))      --> primary-alcohol
+
+-- A dimer whose halves react at different atoms: no half is its own bystander.
+interconversion "our aldol" {
+    target = "[CX4;H1:1]([OX2H:2])[CH2:3][CH1:4]=[O:5]", from = "[C:1]=[O:2].[C:3][C:4]=[O:5]",
+    conditions = "base-aq-mild",
+}
+print(names(step_of("our aldol", "CC(O)CC=O", "CC=O").clashes))  --> nothing
+
+-- ---- Protection -------------------------------------------------------------------------------
+
+local function proposed(step)
+    local found = {}
+    for _, one in ipairs(step:protections()) do found[one.name] = one end
+    return found
+end
+
+-- A hydroxyl beside a Grignard reagent is silylated; an ester of it would not stand the reagent (Greene and Wuts, from
+-- memory).
+local found = proposed(step_of("our Grignard addition", "CC(C)(O)CCCO", "CC(=O)CCCO"))
+print(found.tbs.group, found.tbs.verdict, found.tbs.installed_by, found.tbs.removed_by)
+--> primary-alcohol	survives	silylation	fluoride
+print(found.acetate, found.boc)                       --> nil	nil
+-- A second ketone beside a hydride is kept as the acetal, never as an ester.
+found = proposed(step_of("our ketone reduction", "CC(O)CCC(C)=O", "CC(=O)CCC(C)=O"))
+print(found.methyl_ester, found.tbs)                  --> nil	nil
+-- An ester is no group that protecting groups guard.
+print(#step_of("our ketone reduction", "CC(O)CCC(=O)OC", "CC(=O)CCC(=O)OC"):protections())  --> 0
+
+-- One's own protecting group.
+protecting "our shield" { guards = "primary-alcohol", like = "tips-ether", example = "CO[Si](C)(C)C",
+    installed_by = "silylation", removed_by = { "acid-aq-mild", "fluoride" }, slow = "grignard" }
+found = proposed(step_of("our Grignard addition", "CC(C)(O)CCCO", "CC(=O)CCCO"))
+print(found["our shield"].verdict)                    --> slow
+
+-- ---- Plans ------------------------------------------------------------------------------------
+
+-- A reduction that meets an ester.
+local function cheapest(policy, cost)
+    local routes = plan { target = "CC(O)CCC(=O)OC", catalogue = { "CC(=O)CCC(=O)OC" }, quiet = true,
+        transforms = { "our ketone reduction" }, limits = { depth = 1 }, clashes = policy, clash_cost = cost }
+    return #routes, routes[1] and string.format("%.1f", routes[1].cost)
+end
+print(cheapest())                                     --> 1	177.6
+print(cheapest("penalise", 10))                       --> 1	71.8
+print(cheapest("allow"))                              --> 1	60.0
+print(cheapest("refuse"))                             --> 0	nil
+print(fails(cheapest, "forbid"))
+--> plan: 'clashes' must be "penalise", "allow" or "refuse", not 'forbid'
+print(fails(cheapest, "penalise", -1))                --> plan: 'clash_cost' must be a number of 0 or more, not -1
+local route = plan { target = "CC(O)CCC(=O)OC", catalogue = { "CC(=O)CCC(=O)OC" }, quiet = true,
+    transforms = { "our ketone reduction" } }[1]
+print(tostring(route):find("(clash: methyl-ester)", 1, true) ~= nil)  --> true
+local step_of_route = route:steps()[1]
+print(names(step_of_route.clashes), names(step_of_route.worries), #step_of_route:protections())
+--> methyl-ester	nothing	0
