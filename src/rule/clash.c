@@ -130,6 +130,33 @@ static bool are_related(const judge *j, int a, int b)
     return false;
 }
 
+/* Whether a group is neither narrower nor wider than any other: a feature such as an enolisable
+   ketone, which stands beside the group itself. */
+static bool is_feature(const judge *j, int group)
+{
+    if (bs_shelves__group(j->rules, group)->parent_count > 0)
+        return false;
+    for (int i = group + 1; i < bs_rules_group_count(j->rules); i++) {
+        if (bs_group__distance(bs_shelves__group(j->rules, i), i, group) == 1)
+            return false;
+    }
+    return true;
+}
+
+/* Whether a hit is part of a larger group: of its kind, or a feature of several atoms within. */
+static bool is_part(const judge *j, const bs_group_hit *hit, const bs_group_hit *larger)
+{
+    int shared = 0;
+
+    for (int i = 0; i < hit->count; i++) {
+        for (int k = 0; k < larger->count; k++)
+            shared += hit->atoms[i] == larger->atoms[k];
+    }
+    if (shared > 0 && are_related(j, hit->group, larger->group))
+        return true;
+    return shared > 1 && shared == hit->count && is_feature(j, hit->group);
+}
+
 /*
  * Finds out which hits belong to the wanted change. In a step so do the parts of a larger group
  * that reacts: the esters of a malonate, whose CH is alkylated.
@@ -147,9 +174,7 @@ static bs_status find_involved(judge *j, bool of_step)
         j->involved[i] = direct[i] = takes_part(j, &hits->items[i]);
     for (int i = 0; i < hits->count && of_step; i++) {
         for (int k = 0; k < hits->count && !j->involved[i]; k++)
-            j->involved[i] = direct[k] &&
-                             are_related(j, hits->items[i].group, hits->items[k].group) &&
-                             share_atoms(&hits->items[i], &hits->items[k]);
+            j->involved[i] = direct[k] && is_part(j, &hits->items[i], &hits->items[k]);
     }
     return BS_OK;
 }

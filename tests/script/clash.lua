@@ -226,3 +226,11 @@ print(tostring(route):find("(clash: methyl-ester)", 1, true) ~= nil)  --> true
 local step_of_route = route:steps()[1]
 print(names(step_of_route.clashes), names(step_of_route.worries), #step_of_route:protections())
 --> methyl-ester	nothing	0
+
+-- The esters of a malonate belong to its reacting CH, the ketones of a 1,3-diketone likewise.
+interconversion "our malonate alkylation" {
+    target = "[CH1;$(C(C=O)C=O):1]-[CH2:2][#6:3]", from = "[C:1].[C:2]([#6:3])Br", conditions = "alkoxide",
+}
+print(names(step_of("our malonate alkylation", "COC(=O)C(CC)C(=O)OC", "COC(=O)CC(=O)OC").clashes))  --> nothing
+print(names(step_of("our malonate alkylation", "CC(=O)C(CC)C(C)=O", "CC(=O)CC(C)=O").clashes))      --> nothing
+print(names(step_of("our malonate alkylation", "COC(=O)C(CCOC(C)=O)C(=O)OC", "BrCCOC(C)=O").clashes))  --> acetate-ester
