@@ -116,7 +116,15 @@ synthon "activated aryl" { kind = "acceptor", equivalents = { { attach = "F" }, 
 
 -- The same with one leaving group: fluorine where the nucleophile is weak, chlorine on azines.
 synthon "fluoroarene" { kind = "acceptor", equivalents = { { attach = "F" } } }
+synthon "aryl chloride" { kind = "acceptor", equivalents = { { attach = "Cl" } } }
 synthon "chloroazine" { kind = "acceptor", equivalents = { { attach = "Cl" } } }
+
+-- Aryl for coppers, which leave chlorides alone, and aryl that comes with boron and meets a nucleophile in air.
+synthon "aryl iodide" { kind = "acceptor", equivalents = { { attach = "I" }, { attach = "Br" } } }
+synthon "arylboronic acid" { kind = "acceptor", equivalents = { { attach = "B(O)O", name = "boronic acid" } } }
+
+-- Allyl that palladium(0) ionises.
+synthon "allyl acetate" { kind = "acceptor", equivalents = { { attach = "OC(C)=O" } } }
 
 -- ---- Donors -------------------------------------------------------------------------------
 
@@ -142,11 +150,21 @@ synthon "alkene" { kind = "donor", equivalents = { { attach = "[H]" } } }
 -- Cyanide (d1).
 synthon "cyanide" { kind = "donor", equivalents = { { attach = "[Na]", ionic = true } } }
 
+synthon "zinc cyanide" { kind = "donor", equivalents = { { attach = "[Zn]C#N", name = "zinc cyanide" } } }
 synthon "copper cyanide" { kind = "donor", equivalents = { { attach = "[Cu]", name = "copper(I) cyanide" } } }
 
 -- Carbanions (alkyl-d, aryl-d) as metal compounds.
 synthon "organomagnesium" { kind = "donor", equivalents = { { attach = "[Mg]Br", name = "Grignard reagent" } } }
 synthon "organolithium" { kind = "donor", equivalents = { { attach = "[Li]" } } }
+synthon "organozinc" { kind = "donor", equivalents = { { attach = "[Zn]Br", name = "organozinc bromide" } } }
+synthon "organotin" {
+    kind = "donor",
+    equivalents = { { attach = "[Sn](CCCC)(CCCC)CCCC", name = "tributylstannane" } },
+}
+synthon "alkenylchromium" {
+    kind = "donor",
+    equivalents = { { attach = "I", name = "alkenyl iodide with chromium(II)" } },
+}
 synthon "organoboron" {
     kind = "donor",
     equivalents = {
