@@ -22,6 +22,7 @@ disconnection "amide-from-ethyl-ester" {
     cautions = { "ammonia" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "NC(=O)c1cnc(s1)-c1ccc(F)cc1", from = { "CCOC(=O)c1cnc(s1)-c1ccc(F)cc1", "N" } },
+    example { "NC(=O)c1ccncc1", from = { "CCOC(=O)c1ccncc1", "N" } },
     refuse { "CC(=O)Nc1ccccc1" }, -- anilines are too weak for unactivated esters
 }
 
@@ -39,6 +40,7 @@ disconnection "hydrazide-from-ethyl-ester" {
     cautions = { "hydrazine" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "NNC(=O)Cc1c[nH]c2ccc(F)cc12", from = { "CCOC(=O)Cc1c[nH]c2ccc(F)cc12", "NN" } },
+    example { "NNC(=O)c1ccncc1", from = { "CCOC(=O)c1ccncc1", "NN" } },
     refuse { "CN(N)C(=O)c1ccccc1" }, -- N-methyl hydrazide needs methylhydrazine
 }
 
@@ -56,6 +58,7 @@ disconnection "acetamide-from-anhydride" {
     cautions = { "acetic anhydride", "triethylamine" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "COc1ccc2[nH]cc(CCNC(C)=O)c2c1", from = { "COc1ccc2[nH]cc(CCN)c2c1", "CC(=O)OC(C)=O" } },
+    example { "CC(=O)NCc1ccccc1", from = { "NCc1ccccc1", "CC(=O)OC(C)=O" } },
     refuse { "CC(=O)OCc1ccccc1" }, -- an ester oxygen, not an amide nitrogen
 }
 
@@ -74,6 +77,7 @@ disconnection "oxazolidinone-n-acylation" {
     cautions = { "butyllithium" },
     source = "Carey and Sundberg, Advanced Organic Chemistry, Part B; from memory",
     example { "O=C(CCc1ccc(F)cc1)N1C(=O)OC[C@@H]1Cc1ccccc1", from = { "O=C1N[C@@H](Cc2ccccc2)CO1", "O=C(Cl)CCc1ccc(F)cc1" } },
+    example { "CCC(=O)N1CCOC1=O", from = { "O=C1NCCO1", "CCC(=O)Cl" } },
     refuse { "O=C1OCCN1c1ccccc1" }, -- N-aryl: no acyl group
 }
 
@@ -91,6 +95,7 @@ disconnection "indole-n-acylation" {
     cautions = { "sodium hydride", "N,N-dimethylformamide" },
     source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
     example { "COc1ccc2n(C(=O)c3ccc(Cl)cc3)c(C)c(CC(=O)OC(C)(C)C)c2c1", from = { "COc1ccc2[nH]c(C)c(CC(=O)OC(C)(C)C)c2c1", "O=C(Cl)c1ccc(Cl)cc1" } },
+    example { "CC(=O)n1ccc2ccccc21", from = { "c1ccc2[nH]ccc2c1", "CC(=O)Cl" } },
     refuse { "CC(=O)c1c[nH]c2ccccc12" }, -- a C-acyl indole
 }
 
@@ -108,6 +113,7 @@ disconnection "sulfonylurea-isocyanate" {
     cautions = { "isocyanates" },
     source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
     example { "COc1ccc(Cl)cc1C(=O)NCCc1ccc(cc1)S(=O)(=O)NC(=O)NC1CCCCC1", from = { "COc1ccc(Cl)cc1C(=O)NCCc1ccc(cc1)S(N)(=O)=O", "O=C=NC1CCCCC1" } },
+    example { "CCCCNC(=O)NS(=O)(=O)c1ccc(C)cc1", from = { "Cc1ccc(cc1)S(N)(=O)=O", "CCCCN=C=O" } },
     refuse { "CS(=O)(=O)NC(=O)N(C)C" }, -- second nitrogen carries no H
 }
 
@@ -125,6 +131,7 @@ disconnection "sulfonyl-carbamate" {
     cautions = { "ethyl chloroformate" },
     source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
     example { "CCOC(=O)NS(=O)(=O)c1ccc(C)cc1", from = { "Cc1ccc(cc1)S(N)(=O)=O", "CCOC(=O)Cl" } },
+    example { "CCOC(=O)NS(=O)(=O)c1ccc(Cl)cc1", from = { "NS(=O)(=O)c1ccc(Cl)cc1", "CCOC(=O)Cl" } },
     refuse { "CCOC(=O)NCS(C)(=O)=O" }, -- nitrogen not on the sulfur
 }
 
@@ -141,6 +148,7 @@ disconnection "sulfonylurea-from-carbamate" {
     yield = { 75, 92 },
     source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
     example { "Cc1ccc(cc1)S(=O)(=O)NC(=O)NN1CC2CCCC2C1", from = { "CCOC(=O)NS(=O)(=O)c1ccc(C)cc1", "NN1CC2CCCC2C1" } },
+    example { "CCCNC(=O)NS(=O)(=O)c1ccc(Cl)cc1", from = { "CCOC(=O)NS(=O)(=O)c1ccc(Cl)cc1", "CCCN" } },
     refuse { "CS(=O)(=O)NC(C)=O" }, -- an acyl sulfonamide
 }
 
@@ -158,6 +166,7 @@ disconnection "carbamate-from-isocyanate" {
     cautions = { "isocyanates", "triethylamine" },
     source = "Larock, Comprehensive Organic Transformations; from memory",
     example { "CC(C)OC(=O)Nc1cccc(Cl)c1", from = { "CC(C)O", "O=C=Nc1cccc(Cl)c1" } },
+    example { "CCOC(=O)Nc1ccccc1", from = { "CCO", "O=C=Nc1ccccc1" } },
     refuse { "CCOC(=O)N(C)C" }, -- no N-H
 }
 
@@ -172,6 +181,7 @@ disconnection "thiourea-from-isothiocyanate" {
     cautions = { "isothiocyanates" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "COC(=O)c1ccc(NC(=S)NCC2CCCO2)cc1", from = { "COC(=O)c1ccc(cc1)N=C=S", "NCC1CCCO1" } },
+    example { "S=C(NCc1ccccc1)Nc1ccccc1", from = { "S=C=Nc1ccccc1", "NCc1ccccc1" } },
     refuse { "CN(C)C(=S)N(C)C" }, -- no N-H
 }
 
@@ -185,6 +195,7 @@ disconnection "half-ester-from-cyclic-anhydride" {
     yield = { 75, 95 },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "COC(=O)C1CC=CCC1C(=O)O", from = { "O=C1OC(=O)C2CC=CCC12", "CO" } },
+    example { "COC(=O)c1ccccc1C(=O)O", from = { "O=C1OC(=O)c2ccccc12", "CO" } },
     refuse { "COC(=O)CC(=O)O" }, -- malonic half-ester: the four-membered anhydride is not available
 }
 
@@ -201,6 +212,7 @@ disconnection "malonate-c-acylation" {
     cautions = { "triethylamine" },
     source = "Carey and Sundberg, Advanced Organic Chemistry, Part B; from memory",
     example { "CCOC(=O)C(C(=O)OCC)C(=O)c1cc(F)c(F)cc1Cl", from = { "O=C(Cl)c1cc(F)c(F)cc1Cl", "CCOC(=O)CC(=O)OCC" } },
+    example { "CCOC(=O)C(C(=O)OCC)C(=O)c1ccccc1", from = { "O=C(Cl)c1ccccc1", "CCOC(=O)CC(=O)OCC" } },
     refuse { "CCOC(=O)C(C)(C(C)=O)C(=O)OCC" }, -- no H left on the central carbon
 }
 
@@ -215,6 +227,7 @@ disconnection "meldrum-acylation" {
     cautions = { "pyridine", "4-dimethylaminopyridine" },
     source = "Larock, Comprehensive Organic Transformations; from memory",
     example { "CC1(C)OC(=O)C(=C(O)Cc2cc(F)c(F)cc2F)C(=O)O1", from = { "O=C(Cl)Cc1cc(F)c(F)cc1F", "CC1(C)OC(=O)CC(=O)O1" } },
+    example { "CCC(O)=C1C(=O)OC(C)(C)OC1=O", from = { "CCC(=O)Cl", "CC1(C)OC(=O)CC(=O)O1" } },
     refuse { "CC1(C)OC(=O)C(=Cc2ccccc2)C(=O)O1" }, -- an arylidene: Knoevenagel
 }
 
@@ -228,6 +241,7 @@ disconnection "meldrum-alcoholysis" {
     yield = { 80, 95 },
     source = "Larock, Comprehensive Organic Transformations; from memory",
     example { "COC(=O)CC(=O)Cc1cc(F)c(F)cc1F", from = { "CC1(C)OC(=O)C(=C(O)Cc2cc(F)c(F)cc2F)C(=O)O1", "CO" } },
+    example { "CCOC(=O)CC(=O)CC", from = { "CCC(O)=C1C(=O)OC(C)(C)OC1=O", "CCO" } },
     refuse { "COC(=O)C(C)C(C)=O" }, -- substituted between the carbonyl groups
 }
 
@@ -243,6 +257,7 @@ disconnection "baker-venkataraman" {
     cautions = { "pyridine", "potassium hydroxide" },
     source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
     example { "COc1ccc(cc1)C(=O)CC(=O)c1ccccc1O", from = { "COc1ccc(cc1)C(=O)Oc1ccccc1C(C)=O" } },
+    example { "O=C(CC(=O)c1ccccc1O)c1ccccc1", from = { "CC(=O)c1ccccc1OC(=O)c1ccccc1" } },
     refuse { "O=C(CC(=O)c1ccccc1)c1ccccc1" }, -- no ortho hydroxyl group
 }
 
@@ -260,6 +275,7 @@ disconnection "formamide-formation" {
     cautions = { "formic acid" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "O=CNc1cccc(Cl)c1C", from = { "Nc1cccc(Cl)c1C", "OC=O" } },
+    example { "O=CNc1ccccc1", from = { "Nc1ccccc1", "OC=O" } },
     refuse { "CN(C)C(C)=O" }, -- an acetamide
 }
 

@@ -46,6 +46,7 @@ interconversion "secondary-alcohol-from-ketone" {
     cautions = { "sodium borohydride" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COC(=O)c1ccc(cc1)C(C)O", from = { "COC(=O)c1ccc(cc1)C(C)=O" } },
+    example { "OC1CCCCC1", from = { "O=C1CCCCC1" } },
     refuse { "CCC(C)(C)O" }, -- tertiary alcohol has no H on the carbinol carbon
 }
 
@@ -60,6 +61,7 @@ interconversion "primary-alcohol-from-aldehyde" {
     cautions = { "sodium borohydride" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "OCc1ccc(cc1)[N+](=O)[O-]", from = { "O=Cc1ccc(cc1)[N+](=O)[O-]" } },
+    example { "OCc1ccccc1", from = { "O=Cc1ccccc1" } },
     refuse { "CC(O)c1ccccc1" }, -- secondary alcohol comes from a ketone
 }
 
@@ -75,6 +77,7 @@ interconversion "primary-alcohol-from-acid" {
     cautions = { "borane-tetrahydrofuran complex" },
     source = "Carey and Sundberg, Advanced Organic Chemistry, Part B; from memory",
     example { "OCc1cccc(c1)C(=O)OC", from = { "OC(=O)c1cccc(c1)C(=O)OC" } },
+    example { "OCCc1ccccc1", from = { "OC(=O)Cc1ccccc1" } },
     refuse { "CC(C)O" }, -- secondary alcohol cannot come from an acid without a new C-C bond
 }
 
@@ -90,6 +93,7 @@ interconversion "primary-alcohol-from-ester" {
     cautions = { "lithium aluminium hydride" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "OCc1cc2ccccc2[nH]1", from = { "COC(=O)c1cc2ccccc2[nH]1" } },
+    example { "OCc1ccncc1", from = { "COC(=O)c1ccncc1" } },
     refuse { "OC(C)(C)c1cc2ccccc2[nH]1" }, -- tertiary alcohol from an ester needs a carbon nucleophile
 }
 
@@ -105,6 +109,7 @@ interconversion "luche-reduction" {
     cautions = { "sodium borohydride" },
     source = "J.-L. Luche, J. Am. Chem. Soc. 1978, 100, 2226; from memory",
     example { "CC1=CC[C@@H](CC1O)C(C)=C", from = { "CC1=CC[C@@H](CC1=O)C(C)=C" } },
+    example { "OC1C=CCCC1", from = { "O=C1C=CCCC1" } },
     refuse { "OC1CCCCC1" }, -- no C=C next to the carbinol carbon
 }
 
@@ -121,6 +126,7 @@ interconversion "oxymercuration-demercuration" {
     cautions = { "mercury(II) acetate", "sodium borohydride", "sodium hydroxide" },
     source = "H. C. Brown and P. J. Geoghegan, oxymercuration-demercuration papers; from memory",
     example { "CC(O)C(C)(C)C", from = { "C=CC(C)(C)C" } },
+    example { "CCCCC(C)O", from = { "CCCCC=C" } },
     refuse { "OCCC(C)(C)C" }, -- anti-Markovnikov alcohol: use hydroboration
 }
 
@@ -138,6 +144,7 @@ interconversion "acid-hydration-of-alkene" {
     cautions = { "sulfuric acid" },
     source = "March's Advanced Organic Chemistry; from memory",
     example { "CC1(O)CCN(CC1)C(=O)c1ccccc1", from = { "C=C1CCN(CC1)C(=O)c1ccccc1" } },
+    example { "CC1(O)CCCCC1", from = { "C=C1CCCCC1" } },
     refuse { "CC(O)C(C)(C)C" }, -- secondary cation beside a quaternary carbon rearranges (gives 2,3-dimethylbutan-2-ol)
 }
 
@@ -159,6 +166,7 @@ interconversion "hydroboration-oxidation" {
     cautions = { "borane-tetrahydrofuran complex", "hydrogen peroxide", "sodium hydroxide" },
     source = "H. C. Brown, hydroboration papers; from memory",
     example { "OCCC1CCN(CC1)C(=O)OC(C)(C)C", from = { "C=CC1CCN(CC1)C(=O)OC(C)(C)C" } },
+    example { "C[C@@H]1CCCC[C@H]1O", from = { "CC1=CCCCC1" } },
     refuse { "OCC(C)(C)C" }, -- carbon beside the carbinol carbon carries no H, so no alkene precursor
 }
 
@@ -172,6 +180,7 @@ interconversion "benzylic-halide-hydrolysis" {
     yield = { 70, 95 },
     source = "Larock, Comprehensive Organic Transformations; from memory",
     example { "OCc1ccc(cc1)C#N", from = { "BrCc1ccc(cc1)C#N" } },
+    example { "OCc1ccc([N+](=O)[O-])cc1", from = { "BrCc1ccc([N+](=O)[O-])cc1" } },
     refuse { "OCCc1ccccc1" }, -- not benzylic: hydroxide would eliminate as well
 }
 
@@ -187,6 +196,7 @@ interconversion "syn-dihydroxylation" {
     cautions = { "osmium tetroxide" },
     source = "V. VanRheenen, R. C. Kelly and D. Y. Cha, Tetrahedron Lett. 1976, 1973; from memory",
     example { "O[C@H]1CN(C[C@H]1O)C(=O)OCc1ccccc1", from = { "C1C=CCN1C(=O)OCc1ccccc1" } },
+    example { "O[C@H]1CCCC[C@H]1O", from = { "C1=CCCCC1" } },
     refuse { "O[C@@H]1CCCC[C@H]1O" }, -- trans diol of a ring is not formed by syn addition
 }
 
@@ -201,6 +211,7 @@ interconversion "terminal-dihydroxylation" {
     cautions = { "osmium tetroxide" },
     source = "V. VanRheenen, R. C. Kelly and D. Y. Cha, Tetrahedron Lett. 1976, 1973; from memory",
     example { "OCC(O)CCC(=O)OC(C)(C)C", from = { "C=CCCC(=O)OC(C)(C)C" } },
+    example { "CCCCC(O)CO", from = { "CCCCC=C" } },
     refuse { "OCCCO" }, -- 1,3-diol
 }
 
@@ -217,6 +228,7 @@ interconversion "prilezhaev-epoxidation" {
     cautions = { "3-chloroperbenzoic acid" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "CC(=O)OC/C=C(\\C)CCC1OC1(C)C", from = { "CC(=O)OC/C=C(\\C)CCC=C(C)C" } },
+    example { "C1CCC2OC2C1", from = { "C1=CCCCC1" } },
     refuse { "CC1OC1C(C)=O" }, -- alkene conjugated to C=O is too electron-poor for a peracid (use H2O2, NaOH)
 }
 
@@ -232,6 +244,7 @@ interconversion "chlorohydrin-formation" {
     cautions = { "N-chlorosuccinimide" },
     source = "March's Advanced Organic Chemistry; from memory",
     example { "OC(CCl)c1ccc(Cl)cc1", from = { "C=Cc1ccc(Cl)cc1" } },
+    example { "OC(CCl)c1ccccc1", from = { "C=Cc1ccccc1" } },
     refuse { "OCC(Cl)c1ccccc1" }, -- water attacks the more substituted (benzylic) carbon, halogen ends terminal
 }
 
@@ -247,6 +260,7 @@ interconversion "anti-diol-from-epoxide" {
     cautions = { "sulfuric acid" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "O[C@@H]1CCCC[C@H]1O", from = { "C1CC[C@H]2O[C@H]2C1" } },
+    example { "O[C@@H]1CCC[C@H]1O", from = { "C1C[C@H]2O[C@H]2C1" } },
     refuse { "O[C@@H]1CCCC[C@@H]1O" }, -- cis diol of a ring is not formed by back-side opening
 }
 
@@ -260,6 +274,7 @@ interconversion "alcohol-from-ester-hydrolysis" {
     yield = { 85, 98 },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "OC1CCN(CC1)c1ncccn1", from = { "O=C(OC1CCN(CC1)c1ncccn1)c1ccccc1" } },
+    example { "OC1CCCCC1", from = { "O=C(OC1CCCCC1)c1ccccc1" } },
     refuse { "Oc1ccccc1" }, -- phenol, not an alcohol on sp3 carbon
 }
 
@@ -274,6 +289,7 @@ interconversion "primary-alcohol-from-acid-chloride" {
     cautions = { "lithium aluminium hydride" },
     source = "Nystrom, Brown, J. Am. Chem. Soc. 1947, 69, 1197; from memory",
     example { "CCCCCCCCO", from = { "CCCCCCCC(=O)Cl" } },
+    example { "OCc1ccccc1", from = { "O=C(Cl)c1ccccc1" } },
     refuse { "CC(C)O" }, -- a secondary alcohol
 }
 
@@ -288,6 +304,7 @@ interconversion "primary-alcohol-from-ethyl-ester" {
     cautions = { "lithium aluminium hydride" },
     source = "Nystrom, Brown, J. Am. Chem. Soc. 1947, 69, 1197; from memory",
     example { "OCc1cccnc1", from = { "CCOC(=O)c1cccnc1" } },
+    example { "OCCc1ccccc1", from = { "CCOC(=O)Cc1ccccc1" } },
     refuse { "CC(C)O" }, -- a secondary alcohol
 }
 

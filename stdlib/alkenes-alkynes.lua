@@ -20,6 +20,7 @@ interconversion "lindlar-reduction" {
     cautions = { "hydrogen", "lead salts" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COC(=O)CC/C=C\\CCO", from = { "COC(=O)CCC#CCCO" } },
+    example { "CC/C=C\\CC", from = { "CCC#CCC" } },
     refuse { "CC/C=C/CCO" }, -- E alkene is not formed by syn hydrogenation
 }
 
@@ -35,6 +36,7 @@ interconversion "dissolving-metal-alkyne" {
     cautions = { "sodium", "ammonia" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "CCCC/C=C/CCCO", from = { "CCCCC#CCCCO" } },
+    example { "CC/C=C/CC", from = { "CCC#CCC" } },
     refuse { "CC/C=C\\CCO" }, -- Z alkene comes from Lindlar hydrogenation
 }
 
@@ -51,6 +53,7 @@ interconversion "alkene-hydrogenation" {
     cautions = { "hydrogen" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "CCOC(=O)CCc1ccc(O)c(OC)c1", from = { "CCOC(=O)/C=C/c1ccc(O)c(OC)c1" } },
+    example { "OC(=O)CCc1ccccc1", from = { "OC(=O)/C=C/c1ccccc1" } },
     refuse { "CC(C)(c1ccccc1)C(C)(C)C" }, -- no H on the two carbons
 }
 
@@ -65,6 +68,7 @@ interconversion "dehydration-zaitsev" {
     yield = { 70, 92 },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "Clc1ccc(cc1)C1=CCNCC1", from = { "OC1(CCNCC1)c1ccc(Cl)cc1" } },
+    example { "CC1=CCCCC1", from = { "CC1(O)CCCCC1" } },
     refuse { "C=C1CCCCC1" }, -- the less substituted (exocyclic) alkene is not the Zaitsev product
 }
 
@@ -80,6 +84,7 @@ interconversion "e2-terminal-alkene" {
     cautions = { "potassium tert-butoxide" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "C=CCCCO[Si](C)(C)C(C)(C)C", from = { "BrCCCCCO[Si](C)(C)C(C)(C)C" } },
+    example { "C=CCCCC", from = { "BrCCCCCC" } },
     refuse { "CC=CC" }, -- internal alkene is not formed from a primary halide
 }
 
@@ -94,6 +99,7 @@ interconversion "e2-zaitsev" {
     cautions = { "potassium hydroxide" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "CC1=CCCCC1", from = { "CC1(Br)CCCCC1" } },
+    example { "CC=C(C)C", from = { "CCC(C)(C)Br" } },
     refuse { "CCC(=C)CC" }, -- bulky base would be needed for the less substituted alkene
 }
 
@@ -108,6 +114,7 @@ interconversion "beta-keto-acid-decarboxylation" {
     cautions = { "hydrochloric acid" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "CC(=O)CCc1ccc(Cl)cc1", from = { "CCOC(=O)C(Cc1ccc(Cl)cc1)C(C)=O" } },
+    example { "CC(=O)CCCC", from = { "CCOC(=O)C(CCC)C(C)=O" } },
     refuse { "CC(=O)C(C)(C)C" }, -- alpha carbon carries no H to replace the ester group
 }
 
@@ -122,6 +129,7 @@ interconversion "krapcho-methyl-malonate" {
     yield = { 65, 90 },
     source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
     example { "COC(=O)CCC=C(C)C", from = { "COC(=O)C(CC=C(C)C)C(=O)OC" } },
+    example { "COC(=O)CCc1ccccc1", from = { "COC(=O)C(Cc1ccccc1)C(=O)OC" } },
     refuse { "COC(=O)C(C)(C)C" }, -- alpha carbon carries no H to replace the ester group
 }
 
@@ -137,6 +145,7 @@ interconversion "dehydration-secondary-ring" {
     cautions = { "sulfuric acid" },
     source = "Coleman, Johnstone, Org. Synth. Coll. Vol. 1, 183; from memory",
     example { "C1=CCCCC1", from = { "OC1CCCCC1" } },
+    example { "C1=CCCC1", from = { "OC1CCCC1" } },
     refuse { "CC1=CCCCC1" }, -- gives the trisubstituted alkene from a tertiary alcohol, another rule
 }
 
@@ -150,6 +159,7 @@ interconversion "sulfolene-extrusion" {
     cautions = { "sulfur dioxide", "buta-1,3-diene" },
     source = "Cope, Herrick, Org. Synth. Coll. Vol. 4, 890, discusses the diene; common practice; from memory",
     example { "C=CC=C", from = { "O=S1(=O)CC=CC1" } },
+    example { "CC(=C)C=C", from = { "CC1=CCS(=O)(=O)C1" } },
     refuse { "C1=CC=CCC1" }, -- a cyclic diene would come from a bridged sulfone
 }
 

@@ -23,6 +23,7 @@ disconnection "reductive-amination-primary" {
     cautions = { "sodium cyanoborohydride" },
     source = "Warren and Wyatt, Organic Synthesis: The Disconnection Approach; from memory",
     example { "CC(N)c1ccc(cc1)C(F)(F)F", from = { "CC(=O)c1ccc(cc1)C(F)(F)F", "N" } },
+    example { "CC(N)Cc1ccccc1", from = { "CC(=O)Cc1ccccc1", "N" } },
     refuse { "CC(C)(C)N" }, -- tertiary alkylamine: no H on the amine carbon
 }
 
@@ -465,6 +466,7 @@ disconnection "reductive-amination-secondary" {
     cautions = { "sodium triacetoxyborohydride" },
     source = "A. F. Abdel-Magid et al., J. Org. Chem. 1996, 61, 3849; from memory",
     example { "COC(=O)[C@H](Cc1ccccc1)NCc1ccco1", from = { "O=Cc1ccco1", "COC(=O)[C@@H](N)Cc1ccccc1" } },
+    example { "CC(C)NCc1ccccc1", from = { "O=Cc1ccccc1", "CC(C)N" } },
     refuse { "CC(C)(C)NC(C)(C)C" }, -- no CH2 on nitrogen
 }
 
@@ -482,6 +484,7 @@ disconnection "reductive-amination-ketone" {
     cautions = { "sodium triacetoxyborohydride" },
     source = "A. F. Abdel-Magid et al., J. Org. Chem. 1996, 61, 3849; from memory",
     example { "CC(C)(C)OC(=O)N1CCC(CC1)Nc1ccccc1", from = { "O=C1CCN(CC1)C(=O)OC(C)(C)C", "Nc1ccccc1" } },
+    example { "C1CCC(CC1)N1CCOCC1", from = { "O=C1CCCCC1", "C1COCCN1" } },
     refuse { "CC(C)NC(C)=O" }, -- amide nitrogen
 }
 
@@ -499,6 +502,7 @@ disconnection "reductive-amination-tertiary" {
     cautions = { "sodium triacetoxyborohydride" },
     source = "A. F. Abdel-Magid et al., J. Org. Chem. 1996, 61, 3849; from memory",
     example { "CN1CCN(CC1)Cc1ccc(cc1)C(=O)OC", from = { "COC(=O)c1ccc(C=O)cc1", "CN1CCNCC1" } },
+    example { "C1CCN(C1)Cc1ccccc1", from = { "O=Cc1ccccc1", "C1CCCN1" } },
     refuse { "CC(=O)N(C)Cc1ccccc1" }, -- amide nitrogen
 }
 
@@ -516,6 +520,7 @@ disconnection "eschweiler-clarke" {
     cautions = { "formaldehyde", "formic acid" },
     source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
     example { "CN1CCC(CC1)C(c1ccccc1)c1ccccc1", from = { "C1CNCCC1C(c1ccccc1)c1ccccc1", "C=O" } },
+    example { "CN1CCCCC1", from = { "C1CCNCC1", "C=O" } },
     refuse { "CN(C(C)=O)C" }, -- amide nitrogen
 }
 
@@ -531,6 +536,7 @@ interconversion "imine-reduction" {
     cautions = { "sodium borohydride" },
     source = "Carey and Sundberg, Advanced Organic Chemistry, Part B; from memory",
     example { "COc1cc2CCNC(C)c2cc1OC", from = { "COc1cc2CCN=C(C)c2cc1OC" } },
+    example { "CC(NCc1ccccc1)c1ccccc1", from = { "CC(=NCc1ccccc1)c1ccccc1" } },
     refuse { "CC(C)(C)NC" }, -- carbon on one side carries no H, the other is a methyl group
 }
 
@@ -549,6 +555,7 @@ disconnection "amine-alkylation" {
     cautions = { "N,N-dimethylformamide" },
     source = "Warren and Wyatt, Organic Synthesis: The Disconnection Approach; from memory",
     example { "O=C(CCCN1CCC(O)(CC1)c1ccc(Cl)cc1)c1ccc(F)cc1", from = { "OC1(CCNCC1)c1ccc(Cl)cc1", "BrCCCC(=O)c1ccc(F)cc1" } },
+    example { "C1CCN(CC1)Cc1ccccc1", from = { "C1CCNCC1", "BrCc1ccccc1" } },
     refuse { "CN(C)C(C)(C)C" }, -- tertiary halide eliminates
 }
 
@@ -566,6 +573,7 @@ disconnection "phthalimide-alkylation" {
     cautions = { "N,N-dimethylformamide" },
     source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
     example { "O=C1c2ccccc2C(=O)N1CCCC#N", from = { "O=C1NC(=O)c2ccccc12", "BrCCCC#N" } },
+    example { "O=C1c2ccccc2C(=O)N1Cc1ccccc1", from = { "O=C1NC(=O)c2ccccc12", "BrCc1ccccc1" } },
     refuse { "O=C1c2ccccc2C(=O)N1C(C)(C)C" }, -- tertiary halide eliminates
 }
 
@@ -581,6 +589,7 @@ interconversion "gabriel-amine" {
     cautions = { "hydrazine" },
     source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
     example { "NCCCOc1ccc(Cl)cc1", from = { "O=C1c2ccccc2C(=O)N1CCCOc1ccc(Cl)cc1" } },
+    example { "NCc1ccccc1", from = { "O=C1c2ccccc2C(=O)N1Cc1ccccc1" } },
     refuse { "CNCc1ccccc1" }, -- secondary amine is not formed
 }
 
@@ -595,6 +604,7 @@ interconversion "azide-reduction" {
     cautions = { "organic azides", "triphenylphosphine" },
     source = "March's Advanced Organic Chemistry; from memory",
     example { "COC(=O)[C@@H]1C[C@H](N)CN1C(=O)OC(C)(C)C", from = { "COC(=O)[C@@H]1C[C@H](N=[N+]=[N-])CN1C(=O)OC(C)(C)C" } },
+    example { "NCc1ccccc1", from = { "[N-]=[N+]=NCc1ccccc1" } },
     refuse { "CNC" }, -- secondary amine is not formed
 }
 
@@ -611,6 +621,7 @@ interconversion "nitrile-reduction" {
     cautions = { "lithium aluminium hydride" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "NCCc1c[nH]c2ccc(OC)cc12", from = { "N#CCc1c[nH]c2ccc(OC)cc12" } },
+    example { "NCCc1ccccc1", from = { "N#CCc1ccccc1" } },
     refuse { "CC(N)c1ccccc1" }, -- amine on a CH needs an organometallic as well
 }
 
@@ -626,6 +637,7 @@ interconversion "nitro-reduction" {
     cautions = { "iron powder" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COC(=O)c1ccc(N)c(Cl)c1", from = { "COC(=O)c1ccc([N+](=O)[O-])c(Cl)c1" } },
+    example { "CCOC(=O)c1ccc(N)cc1", from = { "CCOC(=O)c1ccc([N+](=O)[O-])cc1" } },
     refuse { "NCc1ccccc1" }, -- amine not on the arene
 }
 
@@ -642,6 +654,7 @@ interconversion "amide-reduction" {
     cautions = { "lithium aluminium hydride" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "CCN1CCCc2cc(OC)ccc12", from = { "CC(=O)N1CCCc2cc(OC)ccc12" } },
+    example { "CCNc1ccccc1", from = { "CC(=O)Nc1ccccc1" } },
     refuse { "CN(C)C(=O)CC" }, -- still an amide
 }
 
@@ -657,6 +670,7 @@ interconversion "oxime-reduction" {
     cautions = { "lithium aluminium hydride" },
     source = "Larock, Comprehensive Organic Transformations; from memory",
     example { "NC1CCc2cc(OC)ccc12", from = { "ON=C1CCc2cc(OC)ccc12" } },
+    example { "NC1CCCCC1", from = { "ON=C1CCCCC1" } },
     refuse { "CC(C)(C)N" }, -- no H on the amine carbon
 }
 
@@ -674,6 +688,7 @@ disconnection "azole-n-alkylation" {
     cautions = { "sodium hydride", "N,N-dimethylformamide" },
     source = "Larock, Comprehensive Organic Transformations; from memory",
     example { "COC(=O)Cn1cc(C=O)c2ccccc12", from = { "O=Cc1c[nH]c2ccccc12", "COC(=O)CBr" } },
+    example { "c1ccc(Cn2ccnc2)cc1", from = { "c1c[nH]cn1", "BrCc1ccccc1" } },
     refuse { "CC(C)(C)n1ccnc1" }, -- tertiary halide eliminates
 }
 
@@ -690,6 +705,7 @@ disconnection "sulfonamide-n-alkylation" {
     cautions = { "N,N-dimethylformamide" },
     source = "Larock, Comprehensive Organic Transformations; from memory",
     example { "Cc1ccc(cc1)S(=O)(=O)N(CC=C)CC(=O)OC", from = { "Cc1ccc(cc1)S(=O)(=O)NCC(=O)OC", "C=CCBr" } },
+    example { "Cc1ccc(cc1)S(=O)(=O)N(Cc1ccccc1)c1ccccc1", from = { "Cc1ccc(cc1)S(=O)(=O)Nc1ccccc1", "BrCc1ccccc1" } },
     refuse { "CS(=O)(=O)NC(C)(C)C" }, -- N-H left and a tertiary alkyl group
 }
 
@@ -708,6 +724,7 @@ disconnection "amide-n-alkylation" {
     cautions = { "sodium hydride", "N,N-dimethylformamide" },
     source = "Larock, Comprehensive Organic Transformations; from memory",
     example { "O=C1CCCCN1Cc1ccc(Cl)cc1", from = { "O=C1CCCCN1", "BrCc1ccc(Cl)cc1" } },
+    example { "O=C1CCCN1Cc1ccccc1", from = { "O=C1CCCN1", "BrCc1ccccc1" } },
     refuse { "CC(=O)NC(C)(C)C" }, -- N-H left and a tertiary alkyl group
 }
 
@@ -726,6 +743,7 @@ disconnection "aniline-n-alkylation-halide" {
     cautions = { "ethyl bromoacetate" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "CCOC(=O)CNc1ccc(F)cc1", from = { "Nc1ccc(F)cc1", "CCOC(=O)CBr" } },
+    example { "C(Nc1ccccc1)c1ccccc1", from = { "Nc1ccccc1", "BrCc1ccccc1" } },
     refuse { "CCOC(=O)CN(C)c1ccccc1" }, -- a second N-alkyl group: over-alkylation
 }
 
@@ -741,6 +759,7 @@ disconnection "chloroacetamide-amine" {
     yield = { 75, 95 },
     source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
     example { "CCN(CC)CC(=O)Nc1c(C)cccc1C", from = { "CCNCC", "Cc1cccc(C)c1NC(=O)CCl" } },
+    example { "O=C(CN1CCCCC1)Nc1ccccc1", from = { "C1CCNCC1", "O=C(CCl)Nc1ccccc1" } },
     refuse { "CC(=O)N(C)CC(=O)N(C)C" }, -- an amide nitrogen is no nucleophile
 }
 
@@ -755,6 +774,7 @@ disconnection "azide-displacement" {
     cautions = { "sodium azide", "N,N-dimethylformamide" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COC(=O)c1ccc(CN=[N+]=[N-])cc1", from = { "COC(=O)c1ccc(CBr)cc1", "[N-]=[N+]=[N-].[Na+]" } },
+    example { "[N-]=[N+]=NCc1ccccc1", from = { "BrCc1ccccc1", "[N-]=[N+]=[N-].[Na+]" } },
     refuse { "CC(C)(C)N=[N+]=[N-]" }, -- tertiary halide: no SN2
 }
 
@@ -771,6 +791,7 @@ disconnection "hydrazine-alkylation" {
     cautions = { "hydrazine" },
     source = "Larock, Comprehensive Organic Transformations; from memory",
     example { "NNCc1ccc(Cl)cc1", from = { "BrCc1ccc(Cl)cc1", "NN" } },
+    example { "NNCc1ccccc1", from = { "BrCc1ccccc1", "NN" } },
     refuse { "CC(=O)NN" }, -- hydrazide comes from the ester
 }
 
@@ -785,5 +806,6 @@ disconnection "guanidine-from-amine" {
     cautions = { "N,N-dimethylformamide" },
     source = "March's Advanced Organic Chemistry; from memory",
     example { "N=C(N)NCCc1ccc(Cl)cc1", from = { "NCCc1ccc(Cl)cc1", "N=C(N)n1cccn1" } },
+    example { "N=C(N)NCc1ccccc1", from = { "NCc1ccccc1", "N=C(N)n1cccn1" } },
     refuse { "CC(N)=N" }, -- amidine: the carbon bears carbon
 }

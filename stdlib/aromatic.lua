@@ -40,6 +40,7 @@ interconversion "nitration-directed" {
     cautions = { "nitric acid", "sulfuric acid" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "CC(=O)Nc1ccc([N+](=O)[O-])cc1F", from = { "CC(=O)Nc1ccccc1F", "O[N+](=O)[O-]" } },
+    example { "COc1ccc([N+](=O)[O-])cc1", from = { "COc1ccccc1", "O[N+](=O)[O-]" } },
     refuse { "CC(=O)Nc1cccc([N+](=O)[O-])c1" }, -- meta to a donor
 }
 
@@ -333,7 +334,7 @@ disconnection "directed-ortho-formylation" {
     conditions = "organolithium",
     also_attacks = { "free alcohol", "free acid", "primary amine", "secondary amine", "aldehyde", "ketone",
         "ester", "nitrile", "amide", "acyl halide", "epoxide", "nitro", "aryl bromide", "aryl iodide",
-        "terminal alkyne", "other ortho hydrogen next to a directing group" },
+        "terminal alkyne" },
     recipe = "sBuLi, TMEDA, THF, -78 °C, then DMF",
     yield = { 60, 85 },
     cautions = { "sec-butyllithium" },
@@ -864,6 +865,7 @@ interconversion "nitration-meta" {
     cautions = { "nitric acid", "sulfuric acid" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "COC(=O)c1cccc([N+](=O)[O-])c1", from = { "COC(=O)c1ccccc1", "O[N+](=O)[O-]" } },
+    example { "O=[N+]([O-])c1cccc([N+](=O)[O-])c1", from = { "O=[N+]([O-])c1ccccc1", "O[N+](=O)[O-]" } },
     refuse { "COC(=O)c1ccc([N+](=O)[O-])cc1" }, -- para to an acceptor
 }
 
@@ -878,6 +880,7 @@ interconversion "bromination-directed" {
     cautions = { "bromine" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "COc1ccc(Br)cc1C=O", from = { "COc1ccccc1C=O" } },
+    example { "CC(=O)Nc1ccc(Br)cc1", from = { "CC(=O)Nc1ccccc1" } },
     refuse { "COc1cccc(Br)c1" }, -- meta to a donor
 }
 
@@ -893,6 +896,7 @@ interconversion "bromination-meta" {
     cautions = { "bromine" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "O=[N+]([O-])c1cccc(Br)c1", from = { "O=[N+]([O-])c1ccccc1" } },
+    example { "OC(=O)c1cccc(Br)c1", from = { "OC(=O)c1ccccc1" } },
     refuse { "O=[N+]([O-])c1ccc(Br)cc1" }, -- para to an acceptor
 }
 
@@ -907,6 +911,7 @@ interconversion "chlorination-directed" {
     cautions = { "sulfuryl chloride", "chlorine" },
     source = "March's Advanced Organic Chemistry; from memory",
     example { "CCOC(=O)c1ccc(OC)c(Cl)c1", from = { "CCOC(=O)c1ccc(OC)cc1" } },
+    example { "CC(=O)Nc1ccc(Cl)cc1", from = { "CC(=O)Nc1ccccc1" } },
     refuse { "CC(=O)Nc1cccc(Cl)c1" }, -- meta to a donor
 }
 
@@ -921,6 +926,7 @@ interconversion "iodination-directed" {
     cautions = { "iodine monochloride" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "COc1ccc(I)cc1C(=O)OC", from = { "COC(=O)c1ccccc1OC" } },
+    example { "COc1ccc(I)cc1", from = { "COc1ccccc1" } },
     refuse { "COc1cccc(I)c1" }, -- meta to the donor
 }
 
@@ -936,6 +942,7 @@ interconversion "sulfonation" {
     cautions = { "oleum", "sulfuric acid" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "Cc1ccc(S(=O)(=O)O)c(C)c1", from = { "Cc1cccc(C)c1", "O=S(=O)=O" } },
+    example { "Cc1ccc(S(=O)(=O)O)cc1", from = { "Cc1ccccc1", "O=S(=O)=O" } },
     refuse { "COc1cccc(S(=O)(=O)O)c1" }, -- meta to the donor
 }
 
@@ -951,6 +958,7 @@ interconversion "chlorosulfonation" {
     cautions = { "chlorosulfonic acid" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "CC(=O)Nc1ccc(S(=O)(=O)Cl)cc1", from = { "CC(=O)Nc1ccccc1", "O=S(=O)(O)Cl" } },
+    example { "COc1ccc(S(=O)(=O)Cl)cc1", from = { "COc1ccccc1", "O=S(=O)(O)Cl" } },
     refuse { "O=[N+]([O-])c1ccc(S(=O)(=O)Cl)cc1" }, -- ring too electron-poor, wrong position
 }
 
@@ -971,6 +979,7 @@ disconnection "fc-alkylation-tertiary" {
     cautions = { "aluminium chloride" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COc1ccc(C(C)(C)C)cc1", from = { "COc1ccccc1", "CC(C)(C)Cl" } },
+    example { "CC(C)(C)c1ccccc1", from = { "c1ccccc1", "CC(C)(C)Cl" } },
     refuse { "CCCCc1ccccc1" }, -- a primary cation rearranges
 }
 
@@ -990,6 +999,7 @@ disconnection "fc-benzylation" {
     cautions = { "aluminium chloride" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "COc1ccc(Cc2ccc(Cl)cc2)cc1", from = { "COc1ccccc1", "ClCc1ccc(Cl)cc1" } },
+    example { "C(c1ccccc1)c1ccccc1", from = { "c1ccccc1", "ClCc1ccccc1" } },
     refuse { "O=[N+]([O-])c1cccc(Cc2cccc([N+](=O)[O-])c2)c1" }, -- both rings carry a nitro group: neither can be attacked
 }
 
@@ -1010,6 +1020,7 @@ disconnection "fc-acylation" {
     cautions = { "aluminium chloride" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "CC(=O)c1ccc(CC(C)C)cc1", from = { "CC(C)Cc1ccccc1", "CC(=O)Cl" } },
+    example { "O=C(c1ccccc1)c1ccccc1", from = { "c1ccccc1", "O=C(Cl)c1ccccc1" } },
     refuse { "CC(=O)c1cccc([N+](=O)[O-])c1" }, -- nitrobenzene is a solvent for the reaction, not a substrate
 }
 
@@ -1027,6 +1038,7 @@ disconnection "vilsmeier" {
     cautions = { "phosphoryl chloride" },
     source = "Joule, Mills, Heterocyclic Chemistry; from memory",
     example { "COc1ccc2[nH]cc(C=O)c2c1", from = { "COc1ccc2[nH]ccc2c1", "CN(C)C=O" } },
+    example { "CN(C)c1ccc(C=O)cc1", from = { "CN(C)c1ccccc1", "CN(C)C=O" } },
     refuse { "O=Cc1ccccc1" }, -- benzene is not reactive enough
 }
 
@@ -1044,6 +1056,7 @@ disconnection "reimer-tiemann" {
     cautions = { "chloroform", "sodium hydroxide" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "Cc1ccc(O)c(C=O)c1", from = { "Cc1ccc(O)cc1", "ClC(Cl)Cl" } },
+    example { "O=Cc1ccccc1O", from = { "Oc1ccccc1", "ClC(Cl)Cl" } },
     refuse { "O=Cc1ccc(OC)cc1" }, -- no free phenol ortho to the aldehyde
 }
 
@@ -1061,6 +1074,7 @@ disconnection "kolbe-schmitt" {
     cautions = { "carbon dioxide under pressure" },
     source = "March's Advanced Organic Chemistry; from memory",
     example { "Cc1ccc(O)c(C(=O)O)c1", from = { "Cc1ccc(O)cc1", "O=C=O" } },
+    example { "OC(=O)c1ccccc1O", from = { "Oc1ccccc1", "O=C=O" } },
     refuse { "O=C(O)c1cccc(O)c1" }, -- meta to the phenol
 }
 
@@ -1076,6 +1090,7 @@ interconversion "sandmeyer-chloride" {
     cautions = { "diazonium salt", "sodium nitrite" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "Cc1ccc(Cl)c([N+](=O)[O-])c1", from = { "Cc1ccc(N)c([N+](=O)[O-])c1" } },
+    example { "Cc1ccc(Cl)cc1", from = { "Cc1ccc(N)cc1" } },
     refuse { "ClCc1ccccc1" }, -- chlorine not on the ring
 }
 
@@ -1091,6 +1106,7 @@ interconversion "sandmeyer-bromide" {
     cautions = { "diazonium salt", "sodium nitrite" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "COC(=O)c1ccc(Br)c(C)c1", from = { "COC(=O)c1ccc(N)c(C)c1" } },
+    example { "Cc1ccccc1Br", from = { "Cc1ccccc1N" } },
     refuse { "BrCc1ccccc1" }, -- bromine not on the ring
 }
 
@@ -1106,6 +1122,7 @@ disconnection "sandmeyer-cyanide" {
     cautions = { "sodium cyanide", "copper(I) cyanide", "hydrogen cyanide", "diazonium salt" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "Cc1ccc(C#N)cc1", from = { "Cc1ccc(N)cc1", "[Na+].[C-]#N" } },
+    example { "Cc1ccccc1C#N", from = { "Cc1ccccc1N", "[Na+].[C-]#N" } },
     refuse { "N#CCc1ccccc1" }, -- nitrile not on the ring
 }
 
@@ -1121,6 +1138,7 @@ interconversion "balz-schiemann" {
     cautions = { "diazonium tetrafluoroborate (dry: may decompose violently)", "boron trifluoride" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "CCOC(=O)c1ccc(F)cc1", from = { "CCOC(=O)c1ccc(N)cc1" } },
+    example { "Fc1ccccc1", from = { "Nc1ccccc1" } },
     refuse { "FC(F)(F)c1ccccc1" }, -- fluorine not on the ring
 }
 
@@ -1136,6 +1154,7 @@ interconversion "diazonium-iodide" {
     cautions = { "diazonium salt (some with iodide precipitate explosive solids)" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "O=C(O)c1ccccc1I", from = { "Nc1ccccc1C(=O)O" } },
+    example { "Ic1ccccc1", from = { "Nc1ccccc1" } },
     refuse { "ICc1ccccc1" }, -- iodine not on the ring
 }
 
@@ -1150,6 +1169,7 @@ interconversion "diazonium-phenol" {
     cautions = { "diazonium salt", "sulfuric acid" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "Oc1cccc([N+](=O)[O-])c1", from = { "Nc1cccc([N+](=O)[O-])c1" } },
+    example { "Oc1cccc(Br)c1", from = { "Nc1cccc(Br)c1" } },
     refuse { "OCc1ccccc1" }, -- hydroxyl group not on the ring
 }
 
@@ -1164,6 +1184,7 @@ interconversion "deamination" {
     cautions = { "diazonium salt", "hypophosphorous acid" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "Cc1cc(Br)cc([N+](=O)[O-])c1", from = { "Cc1cc(Br)c(N)c([N+](=O)[O-])c1" } },
+    example { "Brc1cc(Br)cc(Br)c1", from = { "Nc1c(Br)cc(Br)cc1Br" } },
     refuse { "Cc1ccc(Br)cc1" }, -- no second group that the lost amine put in place
 }
 
@@ -1181,6 +1202,7 @@ disconnection "snar-amine" {
     cautions = { "dimethyl sulfoxide" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "O=[N+]([O-])c1ccc(N2CCOCC2)c(F)c1", from = { "O=[N+]([O-])c1ccc(F)c(F)c1", "C1COCCN1" } },
+    example { "O=[N+]([O-])c1ccc(cc1)N1CCCCC1", from = { "O=[N+]([O-])c1ccc(F)cc1", "C1CCNCC1" } },
     refuse { "CN(C)c1cccc([N+](=O)[O-])c1" }, -- the nitro group is meta: no stabilisation of the adduct
 }
 
@@ -1196,6 +1218,7 @@ disconnection "snar-azine-amine" {
     yield = { 70, 95 },
     source = "Joule, Mills, Heterocyclic Chemistry; from memory",
     example { "COc1cc2ncnc(Nc3cccc(Cl)c3F)c2cc1OC", from = { "COc1cc2ncnc(Cl)c2cc1OC", "Nc1cccc(Cl)c1F" } },
+    example { "c1ccnc(n1)N1CCNCC1", from = { "Clc1ncccn1", "C1CNCCN1" } },
     refuse { "CNc1cccnc1" }, -- the 3-position of pyridine is not activated
 }
 
@@ -1214,6 +1237,7 @@ disconnection "snar-alkoxide" {
     cautions = { "sodium hydride" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "O=[N+]([O-])c1ccc(OCC2CCCO2)cc1", from = { "O=[N+]([O-])c1ccc(F)cc1", "OCC1CCCO1" } },
+    example { "COc1ccc([N+](=O)[O-])cc1", from = { "Clc1ccc([N+](=O)[O-])cc1", "CO" } },
     refuse { "COc1cccc([N+](=O)[O-])c1" }, -- the nitro group is meta
 }
 
@@ -1231,6 +1255,7 @@ disconnection "snar-thiolate" {
     cautions = { "thiol (stench)" },
     source = "Carey, Sundberg, Advanced Organic Chemistry Part B; from memory",
     example { "CCSc1ccc([N+](=O)[O-])cc1C#N", from = { "N#Cc1cc([N+](=O)[O-])ccc1Cl", "CCS" } },
+    example { "O=[N+]([O-])c1ccc(Sc2ccccc2)cc1", from = { "O=[N+]([O-])c1ccc(Cl)cc1", "Sc1ccccc1" } },
     refuse { "CSc1cccc([N+](=O)[O-])c1" }, -- the nitro group is meta
 }
 
@@ -1247,6 +1272,7 @@ disconnection "snar-phenoxide" {
     yield = { 75, 95 },
     source = "Carey, Sundberg, Advanced Organic Chemistry Part B; from memory",
     example { "N#Cc1ccc(Oc2ccc(Cl)cc2)cc1", from = { "N#Cc1ccc(F)cc1", "Oc1ccc(Cl)cc1" } },
+    example { "O=[N+]([O-])c1ccc(Oc2ccccc2)cc1", from = { "O=[N+]([O-])c1ccc(F)cc1", "Oc1ccccc1" } },
     refuse { "c1ccc(Oc2ccccc2)cc1" }, -- neither ring carries an acceptor: Ullmann or palladium
 }
 
@@ -1262,6 +1288,7 @@ interconversion "benzylic-bromination" {
     cautions = { "N-bromosuccinimide", "dibenzoyl peroxide" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "N#Cc1ccccc1-c1ccc(CBr)cc1", from = { "Cc1ccc(-c2ccccc2C#N)cc1" } },
+    example { "O=[N+]([O-])c1ccc(CBr)cc1", from = { "Cc1ccc([N+](=O)[O-])cc1" } },
     refuse { "BrCCc1ccccc1" }, -- not benzylic
 }
 
@@ -1278,6 +1305,7 @@ interconversion "sidechain-oxidation" {
     cautions = { "potassium permanganate", "chromium trioxide" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "O=C(O)c1ccc([N+](=O)[O-])cc1", from = { "Cc1ccc([N+](=O)[O-])cc1" } },
+    example { "OC(=O)c1ccccc1Cl", from = { "Cc1ccccc1Cl" } },
     refuse { "O=C(O)Cc1ccccc1" }, -- the chain is cut to one carbon, never to two
 }
 
@@ -1297,6 +1325,7 @@ interconversion "clemmensen" {
     cautions = { "zinc amalgam (mercury)", "hydrochloric acid" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "O=C(O)CCCc1ccc(F)cc1", from = { "O=C(O)CCC(=O)c1ccc(F)cc1" } },
+    example { "CCCc1ccccc1", from = { "CCC(=O)c1ccccc1" } },
     refuse { "NCCc1ccccc1" }, -- an α-amino ketone is cleaved at the C-N bond
 }
 
@@ -1314,6 +1343,7 @@ interconversion "wolff-kishner" {
     cautions = { "hydrazine", "potassium hydroxide" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "CN(C)c1ccc(CCC2CCCCC2)cc1", from = { "CN(C)c1ccc(C(=O)CC2CCCCC2)cc1" } },
+    example { "c1ccc2CCCCc2c1", from = { "O=C1CCCc2ccccc12" } },
     refuse { "OCCc1ccccc1" }, -- an α-hydroxy ketone loses its oxygen by elimination (Kishner)
 }
 
@@ -1328,6 +1358,7 @@ interconversion "mandelic-oxidative-decarboxylation" {
     cautions = { "sodium hydroxide" },
     source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
     example { "COc1cc(C=O)ccc1O", from = { "COc1cc(ccc1O)C(O)C(=O)O" } },
+    example { "CCOc1cc(C=O)ccc1O", from = { "CCOc1cc(ccc1O)C(O)C(=O)O" } },
     refuse { "O=CCc1ccccc1" }, -- carbonyl carbon is not on the ring
 }
 
@@ -1344,6 +1375,7 @@ disconnection "gem-diacetate-from-methylarene" {
     cautions = { "sulfuric acid", "acetic anhydride", "chromium trioxide" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "CC(=O)OC(OC(C)=O)c1ccc(cc1Cl)[N+](=O)[O-]", from = { "Cc1ccc(cc1Cl)[N+](=O)[O-]", "CC(=O)OC(C)=O", "CC(=O)OC(C)=O" } },
+    example { "CC(=O)OC(OC(C)=O)c1ccc(cc1)[N+](=O)[O-]", from = { "Cc1ccc(cc1)[N+](=O)[O-]", "CC(=O)OC(C)=O" } },
     refuse { "CC(=O)OCc1ccccc1" }, -- only one acetoxy group
 }
 
@@ -1363,6 +1395,7 @@ disconnection "fc-acetylation-anhydride" {
     cautions = { "aluminium chloride", "acetic anhydride" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "CC(=O)c1ccc(OC)cc1", from = { "COc1ccccc1", "CC(=O)OC(C)=O" } },
+    example { "CC(=O)c1ccccc1", from = { "c1ccccc1", "CC(=O)OC(C)=O" } },
     refuse { "CC(=O)c1cccc([N+](=O)[O-])c1" }, -- nitrobenzene does not react
 }
 
@@ -1380,6 +1413,7 @@ disconnection "fc-acylation-biphenyl" {
     cautions = { "aluminium chloride" },
     source = "common practice, no source",
     example { "CC(=O)c1ccc(-c2ccccc2)cc1", from = { "c1ccc(-c2ccccc2)cc1", "CC(=O)Cl" } },
+    example { "O=C(c1ccccc1)c1ccc(cc1)-c1ccccc1", from = { "c1ccc(cc1)-c1ccccc1", "O=C(Cl)c1ccccc1" } },
     refuse { "CC(=O)c1cccc(-c2ccccc2)c1" }, -- meta to the other ring
 }
 
@@ -1397,5 +1431,6 @@ interconversion "deamination-para-methyl" {
     cautions = { "sodium nitrite" },
     source = "Bigelow, Johnson, Sandborn, Org. Synth. Coll. Vol. 1, 133; from memory",
     example { "Cc1cccc(Br)c1", from = { "Cc1ccc(N)c(Br)c1" } },
+    example { "Cc1cccc([N+](=O)[O-])c1", from = { "Cc1ccc(N)c([N+](=O)[O-])c1" } },
     refuse { "Cc1ccccc1" }, -- no group that the amine would have directed
 }

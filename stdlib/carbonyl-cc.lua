@@ -55,6 +55,7 @@ disconnection "aldol-directed" {
     cautions = { "butyllithium" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "CC(C)C(O)CC(=O)c1ccc(Br)cc1", from = { "CC(C)C=O", "CC(=O)c1ccc(Br)cc1" } },
+    example { "CC(O)CC(=O)c1ccccc1", from = { "CC=O", "CC(=O)c1ccccc1" } },
     refuse { "CC(C)C(O)CC(=O)OC" }, -- an ester: Reformatsky or ester enolate
 }
 
@@ -312,6 +313,7 @@ disconnection "stobbe" {
     cautions = { "potassium tert-butoxide" },
     source = "Johnson, Daub, Org. React. 1951, 6, 1; from memory",
     example { "CCOC(=O)C(CC(=O)O)=C(c1ccccc1)c1ccccc1", from = { "O=C(c1ccccc1)c1ccccc1", "CCOC(=O)CCC(=O)OCC" } },
+    example { "CCOC(=O)C(CC(=O)O)=C1CCCCC1", from = { "O=C1CCCCC1", "CCOC(=O)CCC(=O)OCC" } },
     refuse { "CCOC(=O)C(CC(=O)OCC)=C(C)C" }, -- a diester: the reaction gives the half ester
 }
 
@@ -552,6 +554,7 @@ disconnection "still-gennari" {
     yield = { 70, 90 },
     source = "Still, Gennari, Tetrahedron Lett. 1983, 24, 4405; from memory",
     example { "COC(=O)/C=C\\CCCOCc1ccccc1", from = { "O=CCCCOCc1ccccc1", "COC(=O)CP(=O)(OCC(F)(F)F)OCC(F)(F)F" } },
+    example { "COC(=O)/C=C\\c1ccccc1", from = { "O=Cc1ccccc1", "COC(=O)CP(=O)(OCC(F)(F)F)OCC(F)(F)F" } },
     refuse { "COC(=O)/C=C/CC" }, -- the E ester: Horner-Wadsworth-Emmons
 }
 
@@ -583,6 +586,7 @@ disconnection "julia-kocienski" {
     yield = { 65, 90 },
     source = "Kürti, Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
     example { "CCCC/C=C/CCCOC1CCCCO1", from = { "CCCCC=O", "O=S(=O)(CCCCOC1CCCCO1)c1nnnn1-c1ccccc1" } },
+    example { "CCC/C=C/CCC", from = { "CCCC=O", "CCCCS(=O)(=O)c1nnnn1-c1ccccc1" } },
     refuse { "CCCC/C=C\\CCC" }, -- the Z alkene: Wittig
 }
 
@@ -880,6 +884,7 @@ disconnection "malonate-cyclopropane" {
     cautions = { "1,2-dibromoethane", "N,N-dimethylformamide", "dimethyl sulfoxide" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "CCOC(=O)C1(CC1)C(=O)OCC", from = { "CCOC(=O)CC(=O)OCC", "BrCCBr" } },
+    example { "COC(=O)C1(CC1)C(=O)OC", from = { "COC(=O)CC(=O)OC", "BrCCBr" } },
     refuse { "CCOC(=O)C1CC1" }, -- only one ester group
 }
 
@@ -1059,6 +1064,7 @@ disconnection "wittig-methoxymethylene" {
     cautions = { "butyllithium", "potassium tert-butoxide" },
     source = "Carey and Sundberg, Advanced Organic Chemistry, Part B; from memory",
     example { "COC=C1CCC(CC1)c1ccc(F)cc1", from = { "O=C1CCC(CC1)c1ccc(F)cc1", "[Cl-].COC[P+](c1ccccc1)(c1ccccc1)c1ccccc1" } },
+    example { "COC=C1CCCCC1", from = { "O=C1CCCCC1", "[Cl-].COC[P+](c1ccccc1)(c1ccccc1)c1ccccc1" } },
     refuse { "COC(C)=CC" }, -- methoxy carbon is substituted
 }
 
@@ -1077,6 +1083,7 @@ disconnection "wittig-benzylidene" {
     cautions = { "sodium methoxide", "potassium tert-butoxide" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COc1cc(C=Cc2ccc(F)cc2)cc(OC)c1", from = { "O=Cc1cc(OC)cc(OC)c1", "[Br-].Fc1ccc(C[P+](c2ccccc2)(c2ccccc2)c2ccccc2)cc1" } },
+    example { "C(=Cc1ccccc1)c1ccccc1", from = { "O=Cc1ccccc1", "[Br-].c1ccc(C[P+](c2ccccc2)(c2ccccc2)c2ccccc2)cc1" } },
     refuse { "CC(C)=Cc1ccccc1" }, -- trisubstituted
 }
 
@@ -1145,6 +1152,7 @@ disconnection "fc-tetramethyltetralin" {
     cautions = { "aluminium chloride" },
     source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
     example { "Cc1cc2c(cc1Br)C(C)(C)CCC2(C)C", from = { "Cc1ccccc1Br", "CC(C)(Cl)CCC(C)(C)Cl" } },
+    example { "CC1(C)CCC(C)(C)c2ccccc21", from = { "c1ccccc1", "CC(C)(Cl)CCC(C)(C)Cl" } },
     refuse { "c1ccc2CCCCc2c1" }, -- no gem-dimethyl groups: primary cations rearrange
 }
 
@@ -1159,6 +1167,7 @@ disconnection "hantzsch-two-component" {
     yield = { 55, 80 },
     source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
     example { "CCOC(=O)C1=C(C)NC(C)=C(C(=O)OC)C1c1cccc(Cl)c1Cl", from = { "CCOC(=O)C=C(C)N", "COC(=O)C(=Cc1cccc(Cl)c1Cl)C(C)=O" } },
+    example { "CCOC(=O)C1=C(C)NC(C)=C(C(=O)OC)C1c1cccc([N+](=O)[O-])c1", from = { "CCOC(=O)C=C(C)N", "COC(=O)C(=Cc1cccc([N+](=O)[O-])c1)C(C)=O" } },
     refuse { "CN1C=CC(c2ccccc2)C=C1" }, -- no acceptor groups and N-methyl
 }
 
@@ -1174,6 +1183,7 @@ disconnection "hetero-diels-alder-enone" {
     yield = { 65, 88 },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "CCOC1CC(C)C=CO1", from = { "CC=CC=O", "C=COCC" } },
+    example { "CCOC1CCC=CO1", from = { "C=CC=O", "C=COCC" } },
     refuse { "C1CCOC=C1" }, -- no acetal carbon
 }
 
@@ -1208,6 +1218,7 @@ disconnection "claisen-schmidt" {
     yield = { 70, 95 },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "COc1ccc(/C=C/C(=O)c2ccncc2)cc1", from = { "COc1ccc(C=O)cc1", "CC(=O)c1ccncc1" } },
+    example { "O=C(/C=C/c1ccccc1)c1ccccc1", from = { "O=Cc1ccccc1", "CC(=O)c1ccccc1" } },
     refuse { "O=C(/C=C\\c1ccccc1)c1ccccc1" }, -- the Z enone is not what the reaction gives
 }
 
@@ -1222,6 +1233,7 @@ disconnection "intramolecular-aldol-condensation" {
     yield = { 60, 90 },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "CC/C=C\\CC1=C(C)CCC1=O", from = { "CC/C=C\\CCC(=O)CCC(C)=O" } },
+    example { "CC1=CC(=O)CC1", from = { "CC(=O)CCC(C)=O" } },
     refuse { "CC1=CCCCCCC1=O" }, -- an eight-membered ring: only five- and six-membered ones form well
 }
 
@@ -1238,6 +1250,7 @@ disconnection "knoevenagel" {
     yield = { 70, 95 },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "CCOC(=O)C(C#N)=Cc1ccc(F)cc1", from = { "O=Cc1ccc(F)cc1", "CCOC(=O)CC#N" } },
+    example { "N#CC(C#N)=Cc1ccccc1", from = { "O=Cc1ccccc1", "N#CCC#N" } },
     refuse { "CCOC(=O)C=Cc1ccccc1" }, -- only one electron-withdrawing group: Horner-Wadsworth-Emmons or Doebner
 }
 
@@ -1253,6 +1266,7 @@ disconnection "doebner" {
     cautions = { "pyridine" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "COc1cc(/C=C/C(=O)O)ccc1O", from = { "COc1cc(C=O)ccc1O", "O=C(O)CC(=O)O" } },
+    example { "OC(=O)/C=C/c1ccccc1", from = { "O=Cc1ccccc1", "O=C(O)CC(=O)O" } },
     refuse { "O=C(O)/C=C\\c1ccccc1" }, -- the Z acid is not formed
 }
 
@@ -1270,6 +1284,7 @@ disconnection "henry" {
     cautions = { "nitromethane" },
     source = "Carey, Sundberg, Advanced Organic Chemistry Part B; from memory",
     example { "O=[N+]([O-])CC(O)C1CCN(C(=O)OCc2ccccc2)CC1", from = { "O=CC1CCN(C(=O)OCc2ccccc2)CC1", "C[N+](=O)[O-]" } },
+    example { "O=[N+]([O-])CC(O)c1ccccc1", from = { "O=Cc1ccccc1", "C[N+](=O)[O-]" } },
     refuse { "CC(C)(O)C[N+](=O)[O-]" }, -- ketones give the alcohol poorly: the reaction is reversible
 }
 
@@ -1285,6 +1300,7 @@ disconnection "mannich" {
     cautions = { "formaldehyde" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "CN(C)CCC(=O)c1cccs1", from = { "CNC", "C=O", "CC(=O)c1cccs1" } },
+    example { "CN(C)CCC(=O)c1ccccc1", from = { "CNC", "C=O", "CC(=O)c1ccccc1" } },
     refuse { "CN(C)CCC(=O)OC" }, -- an ester does not enolise: aza-Michael
 }
 
@@ -1301,6 +1317,7 @@ disconnection "michael-malonate" {
     yield = { 70, 95 },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COC(=O)C(C1CCCC(=O)C1)C(=O)OC", from = { "COC(=O)CC(=O)OC", "O=C1C=CCCC1" } },
+    example { "CCOC(=O)C(CCC(C)=O)C(=O)OCC", from = { "CCOC(=O)CC(=O)OCC", "C=CC(C)=O" } },
     refuse { "COC(=O)CCCC(=O)OC" }, -- the donor carbon bears only one activating group
 }
 
@@ -1316,6 +1333,7 @@ disconnection "perkin" {
     cautions = { "acetic anhydride" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "O=C(O)/C=C/c1ccc([N+](=O)[O-])cc1", from = { "O=Cc1ccc([N+](=O)[O-])cc1", "CC(=O)OC(C)=O" } },
+    example { "O=C(O)/C=C/c1ccccc1", from = { "O=Cc1ccccc1", "CC(=O)OC(C)=O" } },
     refuse { "CCC/C=C/C(=O)O" }, -- aliphatic aldehydes condense with themselves
 }
 
@@ -1331,6 +1349,7 @@ disconnection "darzens" {
     cautions = { "ethyl chloroacetate (lachrymator)" },
     source = "Carey, Sundberg, Advanced Organic Chemistry Part B; from memory",
     example { "CCOC(=O)C1OC1(C)c1ccc(CC(C)C)cc1", from = { "CC(=O)c1ccc(CC(C)C)cc1", "CCOC(=O)CCl" } },
+    example { "CCOC(=O)C1OC1c1ccccc1", from = { "O=Cc1ccccc1", "CCOC(=O)CCl" } },
     refuse { "CC1OC1CO" }, -- no ester at the epoxide
 }
 
@@ -1346,6 +1365,7 @@ disconnection "malonic-ester-synthesis" {
     cautions = { "sodium ethoxide" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "O=C(O)CCc1ccc2c(c1)OCO2", from = { "CCOC(=O)CC(=O)OCC", "BrCc1ccc2c(c1)OCO2" } },
+    example { "O=C(O)CCc1ccccc1", from = { "CCOC(=O)CC(=O)OCC", "BrCc1ccccc1" } },
     refuse { "O=C(O)CC(C)(C)C" }, -- a tertiary halide eliminates
 }
 
@@ -1362,6 +1382,7 @@ disconnection "active-methylene-alkylation" {
     cautions = { "sodium hydride" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "CCOC(=O)C(CC=C)(CCC#N)C(=O)OCC", from = { "CCOC(=O)C(CCC#N)C(=O)OCC", "C=CCBr" } },
+    example { "CCOC(=O)C(Cc1ccccc1)C(C)=O", from = { "CCOC(=O)CC(C)=O", "BrCc1ccccc1" } },
     refuse { "COC(=O)C(C(=O)OC)C(C)(C)C" }, -- tertiary halides eliminate
 }
 
@@ -1377,6 +1398,7 @@ disconnection "acetoacetic-ester-synthesis" {
     cautions = { "sodium ethoxide" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COc1ccc2cc(CCC(C)=O)ccc2c1", from = { "CCOC(=O)CC(C)=O", "COc1ccc2cc(CBr)ccc2c1" } },
+    example { "CC(=O)CCc1ccccc1", from = { "CCOC(=O)CC(C)=O", "BrCc1ccccc1" } },
     refuse { "CC(=O)CC(C)(C)C" }, -- a tertiary halide eliminates
 }
 
@@ -1393,6 +1415,7 @@ disconnection "cyanohydrin" {
     cautions = { "sodium cyanide", "hydrogen cyanide" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "N#CC1(O)CCN(Cc2ccccc2)CC1", from = { "O=C1CCN(Cc2ccccc2)CC1", "[Na+].[C-]#N" } },
+    example { "N#CC(O)c1ccccc1", from = { "O=Cc1ccccc1", "[Na+].[C-]#N" } },
     refuse { "N#CCCO" }, -- OH and CN on different carbons
 }
 
@@ -1410,6 +1433,7 @@ disconnection "wittig-z" {
     cautions = { "butyllithium" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "CCCC/C=C\\CCCCO[Si](C)(C)C(C)(C)C", from = { "O=CCCCCO[Si](C)(C)C(C)(C)C", "[Br-].CCCCC[P+](c1ccccc1)(c1ccccc1)c1ccccc1" } },
+    example { "CCC/C=C\\CCC", from = { "CCCC=O", "[Br-].CCCC[P+](c1ccccc1)(c1ccccc1)c1ccccc1" } },
     refuse { "CCCC/C=C/CCCCO" }, -- the E alkene: Julia-Kocienski or Schlosser's variant
 }
 
@@ -1427,6 +1451,7 @@ disconnection "wittig-stabilised" {
     cautions = { "dichloromethane" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COC(=O)/C=C/C1CCN(C(=O)OC(C)(C)C)CC1", from = { "O=CC1CCN(C(=O)OC(C)(C)C)CC1", "COC(=O)C=P(c1ccccc1)(c1ccccc1)c1ccccc1" } },
+    example { "CCOC(=O)/C=C/c1ccccc1", from = { "O=Cc1ccccc1", "CCOC(=O)C=P(c1ccccc1)(c1ccccc1)c1ccccc1" } },
     refuse { "COC(=O)/C=C\\c1ccccc1" }, -- the Z ester: Still-Gennari
 }
 
@@ -1444,6 +1469,7 @@ disconnection "wittig-methylenation" {
     cautions = { "butyllithium" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "C=C1CCC2(CC1)OCCO2", from = { "O=C1CCC2(CC1)OCCO2", "[Br-].C[P+](c1ccccc1)(c1ccccc1)c1ccccc1" } },
+    example { "C=C1CCCCC1", from = { "O=C1CCCCC1", "[Br-].C[P+](c1ccccc1)(c1ccccc1)c1ccccc1" } },
     refuse { "C=C(OC)c1ccccc1" }, -- an enol ether from an ester: Tebbe or Petasis reagent
 }
 
@@ -1461,6 +1487,7 @@ disconnection "hwe-e" {
     cautions = { "sodium hydride" },
     source = "Wadsworth, Emmons, J. Am. Chem. Soc. 1961, 83, 1733; from memory",
     example { "CCOC(=O)/C=C/c1ccc(OC)c(OCc2ccccc2)c1", from = { "COc1ccc(C=O)cc1OCc1ccccc1", "CCOC(=O)CP(=O)(OCC)OCC" } },
+    example { "CCOC(=O)/C=C/c1ccccc1", from = { "O=Cc1ccccc1", "CCOC(=O)CP(=O)(OCC)OCC" } },
     refuse { "CCOC(=O)/C=C\\C" }, -- the Z ester: Still-Gennari
 }
 
@@ -1478,6 +1505,7 @@ disconnection "hwe-benzylic" {
     cautions = { "sodium hydride", "N,N-dimethylformamide", "potassium tert-butoxide" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COc1cc(/C=C/c2ccc(OCc3ccccc3)cc2)cc(OC)c1", from = { "O=Cc1ccc(OCc2ccccc2)cc1", "CCOP(=O)(OCC)Cc1cc(OC)cc(OC)c1" } },
+    example { "c1ccc(cc1)/C=C/c1ccccc1", from = { "O=Cc1ccccc1", "CCOP(=O)(OCC)Cc1ccccc1" } },
     refuse { "c1ccccc1/C=C\\c1ccccc1" }, -- a Z double bond
 }
 
@@ -1495,6 +1523,7 @@ disconnection "conjugate-cyanide" {
     cautions = { "sodium cyanide", "diethylaluminium cyanide" },
     source = "Carey, Sundberg, Advanced Organic Chemistry Part B; from memory",
     example { "N#CC1CCCC(=O)C1", from = { "[C-]#N.[Na+]", "O=C1C=CCCC1" } },
+    example { "N#CC1CCC(=O)C1", from = { "[Na+].[C-]#N", "O=C1C=CCC1" } },
     refuse { "N#CC1(O)CCCCC1" }, -- a cyanohydrin: 1,2-addition
 }
 
@@ -1512,6 +1541,7 @@ disconnection "aza-michael" {
     cautions = { "methyl acrylate" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COC(=O)CCN1CCN(C(=O)OC(C)(C)C)CC1", from = { "C=CC(=O)OC", "CC(C)(C)OC(=O)N1CCNCC1" } },
+    example { "COC(=O)CCN1CCCCC1", from = { "C=CC(=O)OC", "C1CCNCC1" } },
     refuse { "COC(=O)CN1CCCC1" }, -- amino group α to the ester: alkylation by a bromoacetate
 }
 
@@ -1528,6 +1558,7 @@ disconnection "arbuzov" {
     yield = { 80, 97 },
     source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
     example { "CCOP(=O)(Cc1ccc(C#N)cc1)OCC", from = { "N#Cc1ccc(CBr)cc1", "CCOP(OCC)OCC" } },
+    example { "CCOP(=O)(Cc1ccccc1)OCC", from = { "BrCc1ccccc1", "CCOP(OCC)OCC" } },
     refuse { "CCOP(=O)(OCC)OCC" }, -- a phosphate, no C-P bond
 }
 
@@ -1544,6 +1575,7 @@ disconnection "double-claisen-schmidt" {
     cautions = { "sodium hydroxide" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "COc1ccc(C=CC(=O)C=Cc2ccc(OC)cc2)cc1", from = { "COc1ccc(C=O)cc1", "CC(C)=O", "COc1ccc(C=O)cc1" } },
+    example { "O=C(C=Cc1ccccc1)C=Cc1ccccc1", from = { "O=Cc1ccccc1", "CC(C)=O" } },
     refuse { "O=C(C=Cc1ccccc1)C=Cc1ccc(Cl)cc1" }, -- the two aryl groups are the same
 }
 
@@ -1557,6 +1589,7 @@ interconversion "decarboxylation-keto-ester" {
     yield = { 75, 95 },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "O=C1CCN(Cc2ccccc2)CC1", from = { "CCOC(=O)C1CN(Cc2ccccc2)CCC1=O" } },
+    example { "O=C1CCCC1", from = { "CCOC(=O)C1CCCC1=O" } },
     refuse { "CC1(C)CCCC(C)(C)C1=O" }, -- no H on either α carbon
 }
 
@@ -1571,6 +1604,7 @@ disconnection "glyoxylic-acid-hydroxyalkylation" {
     cautions = { "sodium hydroxide" },
     source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
     example { "COc1cc(ccc1O)C(O)C(=O)O", from = { "COc1ccccc1O", "O=CC(=O)O" } },
+    example { "OC(C(=O)O)c1ccc(O)cc1", from = { "Oc1ccccc1", "O=CC(=O)O" } },
     refuse { "OC(C(=O)O)c1ccccc1" }, -- no hydroxyl group on the ring
 }
 
@@ -1585,6 +1619,7 @@ disconnection "bargellini" {
     cautions = { "chloroform", "sodium hydroxide" },
     source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
     example { "CC(C)(Oc1ccc(cc1)C(=O)c1ccc(Cl)cc1)C(=O)O", from = { "Oc1ccc(cc1)C(=O)c1ccc(Cl)cc1", "CC(C)=O", "ClC(Cl)Cl" } },
+    example { "CC(C)(Oc1ccc(Cl)cc1)C(=O)O", from = { "Oc1ccc(Cl)cc1", "CC(C)=O", "ClC(Cl)Cl" } },
     refuse { "CC(Oc1ccccc1)C(=O)O" }, -- only one methyl group: from 2-bromopropionate
 }
 
@@ -1600,6 +1635,7 @@ disconnection "willgerodt-kindler" {
     cautions = { "hydrogen sulfide", "sulfur", "morpholine" },
     source = "Kürti and Czakó, Strategic Applications of Named Reactions in Organic Synthesis; from memory",
     example { "COc1ccc2cc(CC(=S)N3CCOCC3)ccc2c1", from = { "COc1ccc2cc(ccc2c1)C(C)=O", "C1COCCN1" } },
+    example { "S=C(Cc1ccccc1)N1CCOCC1", from = { "CC(=O)c1ccccc1", "C1COCCN1" } },
     refuse { "CC(=S)N1CCOCC1" }, -- no aryl group on the chain
 }
 
@@ -1614,6 +1650,7 @@ disconnection "robinson-granatanone" {
     cautions = { "glutaraldehyde" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "CN1C2CCCC1CC(=O)C2", from = { "CN", "O=CCCCC=O", "OC(=O)CC(=O)CC(=O)O" } },
+    example { "O=C1CC2CCCC(C1)N2Cc1ccccc1", from = { "NCc1ccccc1", "O=CCCCC=O", "OC(=O)CC(=O)CC(=O)O" } },
     refuse { "CN1C2CCC1CC(=O)C2" }, -- tropane: needs succinaldehyde
 }
 
@@ -1629,6 +1666,7 @@ disconnection "coumarin-perkin" {
     cautions = { "acetic anhydride" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "O=c1ccc2cc(Br)ccc2o1", from = { "O=Cc1cc(Br)ccc1O", "CC(=O)OC(C)=O" } },
+    example { "O=c1ccc2ccccc2o1", from = { "O=Cc1ccccc1O", "CC(=O)OC(C)=O" } },
     refuse { "O=c1cccco1" }, -- a pyranone without benzo ring
 }
 
@@ -1643,6 +1681,7 @@ interconversion "decarboxylation-malonic" {
     yield = { 75, 95 },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "O=C(O)C1CCC1", from = { "O=C(O)C1(C(=O)O)CCC1" } },
+    example { "CCCCCC(=O)O", from = { "CCCCC(C(=O)O)C(=O)O" } },
     refuse { "CC(C)(C)C(=O)O" }, -- no H left where the second carboxyl group stood
 }
 

@@ -35,6 +35,7 @@ interconversion "dess-martin-ketone" {
     cautions = { "Dess-Martin periodinane" },
     source = "D. B. Dess and J. C. Martin, J. Org. Chem. 1983, 48, 4155; from memory",
     example { "CC(C)(C)OC(=O)N1CCCC(=O)C1", from = { "CC(C)(C)OC(=O)N1CCCC(O)C1" } },
+    example { "O=C1CCCCC1", from = { "OC1CCCCC1" } },
     refuse { "COC(C)=O" }, -- ester carbonyl does not come from an alcohol
 }
 
@@ -101,6 +102,7 @@ interconversion "ozonolysis-cyclohexene" {
     cautions = { "ozone", "ozonides" },
     source = "Warren and Wyatt, Organic Synthesis: The Disconnection Approach; from memory",
     example { "CC(=O)CCCCC=O", from = { "CC1=CCCCC1" } },
+    example { "O=CCCCCC(=O)c1ccccc1", from = { "C1=C(CCCC1)c1ccccc1" } },
     refuse { "CC(=O)CCCC=O" }, -- 1,5-dicarbonyl: would need a cyclopentene
 }
 
@@ -116,6 +118,7 @@ interconversion "glycol-cleavage" {
     cautions = { "sodium periodate" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "O=CC1COC(C)(C)O1", from = { "OCC(O)C1COC(C)(C)O1" } },
+    example { "O=C[C@H]1COC(C)(C)O1", from = { "OCC(O)[C@H]1COC(C)(C)O1" } },
     refuse { "CC(C)=O" }, -- ketone needs a tertiary carbinol in the diol
     refuse { "CCCCC=O" }, -- kept to α-alkoxy and α-amino aldehydes
 }
@@ -195,6 +198,7 @@ interconversion "aldehyde-from-dimethyl-acetal" {
     cautions = { "hydrochloric acid" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "O=CCNC(=O)c1ccccc1", from = { "COC(OC)CNC(=O)c1ccccc1" } },
+    example { "O=CCN1CCOCC1", from = { "COC(OC)CN1CCOCC1" } },
     refuse { "CC(C)=O" }, -- ketone comes from a ketal (see protection)
     refuse { "O=Cc1ccccc1" }, -- kept to aldehydes that are sold as their acetals
 }
@@ -442,6 +446,7 @@ interconversion "swern-aldehyde" {
     cautions = { "oxalyl chloride", "dimethyl sulfide" },
     source = "A. J. Mancuso and D. Swern, Synthesis 1981, 165; from memory",
     example { "CC(C)(C)OC(=O)NCCCC=O", from = { "CC(C)(C)OC(=O)NCCCCO" } },
+    example { "CCCCCCCC=O", from = { "CCCCCCCCO" } },
     refuse { "CC(C)C(=O)C" }, -- ketone comes from a secondary alcohol
 }
 
@@ -456,6 +461,7 @@ disconnection "oxime-formation" {
     cautions = { "hydroxylamine hydrochloride" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "ON=C1CCN(CC1)C(=O)OC(C)(C)C", from = { "O=C1CCN(CC1)C(=O)OC(C)(C)C", "NO" } },
+    example { "ON=C1CCCCC1", from = { "O=C1CCCCC1", "NO" } },
     refuse { "CO/N=C(/C)C" }, -- O-alkyl oxime needs an alkoxyamine
 }
 
@@ -470,6 +476,7 @@ disconnection "hydrazone-formation" {
     cautions = { "hydrazine", "sulfuric acid" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "C/C(=N\\Nc1ccc(cc1[N+](=O)[O-])[N+](=O)[O-])c1ccccc1", from = { "CC(=O)c1ccccc1", "NNc1ccc(cc1[N+](=O)[O-])[N+](=O)[O-]" } },
+    example { "C1CCC(CC1)=NNc1ccccc1", from = { "O=C1CCCCC1", "NNc1ccccc1" } },
     refuse { "CC(C)=NNC(N)=O" }, -- semicarbazone (own rule)
 }
 
@@ -484,6 +491,7 @@ disconnection "imine-formation" {
     yield = { 80, 97 },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COc1ccc(cc1)/N=C/c1ccccc1Cl", from = { "O=Cc1ccccc1Cl", "COc1ccc(N)cc1" } },
+    example { "C(=Nc1ccccc1)c1ccccc1", from = { "O=Cc1ccccc1", "Nc1ccccc1" } },
     refuse { "CN(C)C=NC" }, -- amidine carbon bears a second nitrogen
 }
 
@@ -498,6 +506,7 @@ interconversion "alkyne-hydration" {
     cautions = { "mercury(II) sulfate", "sulfuric acid" },
     source = "Org. Synth. Coll. Vol. 4 (1-acetylcyclohexanol); from memory",
     example { "CC(=O)C1(O)CCCCC1", from = { "C#CC1(O)CCCCC1" } },
+    example { "CCCCC(C)=O", from = { "CCCCC#C" } },
     refuse { "CC(=O)OC" }, -- ester carbonyl
 }
 
@@ -514,6 +523,7 @@ interconversion "ozonolysis-terminal-alkene" {
     cautions = { "ozone", "ozonides", "triphenylphosphine" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COC(=O)CCCCCCCC=O", from = { "COC(=O)CCCCCCCC=C" } },
+    example { "CCCCCC=O", from = { "CCCCCC=C" } },
     refuse { "COC(=O)CCCC(C)=O" }, -- ketone needs a 1,1-disubstituted alkene
 }
 
@@ -529,6 +539,7 @@ interconversion "aldehyde-from-ester" {
     cautions = { "diisobutylaluminium hydride" },
     source = "P. Garner and J. M. Park, J. Org. Chem. 1987, 52, 2361; from memory",
     example { "CC(C)(C)OC(=O)N1[C@H](C=O)COC1(C)C", from = { "CC(C)(C)OC(=O)N1[C@H](C(=O)OC)COC1(C)C" } },
+    example { "CCCCC=O", from = { "COC(=O)CCCC" } },
     refuse { "CC(C)=O" }, -- ketone carbon bears no H
 }
 
@@ -543,5 +554,6 @@ interconversion "aldehyde-from-nitrile" {
     cautions = { "diisobutylaluminium hydride" },
     source = "Larock, Comprehensive Organic Transformations; from memory",
     example { "O=Cc1ccc(Br)cc1F", from = { "N#Cc1ccc(Br)cc1F" } },
+    example { "O=Cc1ccccc1", from = { "N#Cc1ccccc1" } },
     refuse { "CC(C)=O" }, -- ketone needs an organometallic and the nitrile
 }

@@ -31,6 +31,7 @@ disconnection "suzuki-biaryl" {
     yield = { 70, 95 },
     source = "Miyaura, Suzuki, Chem. Rev. 1995, 95, 2457; from memory",
     example { "O=Cc1ccc(-c2cccnc2)cc1", from = { "Brc1cccnc1", "O=Cc1ccc(B(O)O)cc1" } },
+    example { "Cc1ccc(cc1)-c1ccccc1", from = { "Brc1ccccc1", "Cc1ccc(B(O)O)cc1" } },
     refuse { "c1ccc(-c2ccccn2)nc1" }, -- 2-pyridylboronic acids lose boron: Negishi or Stille
 }
 
@@ -547,6 +548,7 @@ disconnection "sonogashira" {
     yield = { 75, 95 },
     source = "Carey, Sundberg, Advanced Organic Chemistry Part B; from memory",
     example { "CC(C)(O)C#Cc1cccc(N)c1", from = { "Nc1cccc(I)c1", "C#CC(C)(C)O" } },
+    example { "C(#Cc1ccccc1)c1ccccc1", from = { "Ic1ccccc1", "C#Cc1ccccc1" } },
     refuse { "CCCC#CCc1ccccc1" }, -- no bond between arene and alkyne
 }
 
@@ -564,6 +566,7 @@ disconnection "heck-acrylate" {
     yield = { 65, 95 },
     source = "Carey, Sundberg, Advanced Organic Chemistry Part B; from memory",
     example { "CCCCOC(=O)/C=C/c1ccc(C=O)cc1", from = { "O=Cc1ccc(Br)cc1", "C=CC(=O)OCCCC" } },
+    example { "COC(=O)/C=C/c1ccccc1", from = { "Brc1ccccc1", "C=CC(=O)OC" } },
     refuse { "COC(=O)/C=C\\c1ccccc1" }, -- the Z alkene is not formed
 }
 
@@ -582,5 +585,6 @@ disconnection "buchwald-amine" {
     cautions = { "sodium tert-butoxide" },
     source = "Carey, Sundberg, Advanced Organic Chemistry Part B; from memory",
     example { "COc1ccccc1N1CCN(C(=O)OC(C)(C)C)CC1", from = { "COc1ccccc1Br", "CC(C)(C)OC(=O)N1CCNCC1" } },
+    example { "c1ccc(cc1)N1CCOCC1", from = { "Brc1ccccc1", "C1COCCN1" } },
     refuse { "CC(=O)Nc1ccccc1" }, -- an amide nitrogen: Goldberg or amide coupling
 }
