@@ -1,5 +1,5 @@
 /*
- * Reports: routes as JSON, out and in.
+ * Reports: routes as JSON, out and in; the trace of a search.
  *
  * The form of the files is described in docs/routes.md. Compounds stand in them as canonical
  * SMILES. Costs and measures are written for other programs; a reader works them out again.
@@ -7,7 +7,7 @@
 #ifndef BACKSAW_REPORT_H
 #define BACKSAW_REPORT_H
 
-#include "backsaw/route.h"
+#include "backsaw/search.h"
 
 /* The version of the form that is written; readers take it and those below it. */
 #define BS_ROUTES_VERSION 1
@@ -40,5 +40,19 @@ bs_status bs_routes_save(bs_ctx *cx, const bs_routes *routes, const char *path);
  */
 bs_status bs_routes_load(bs_ctx *cx, const char *path, const bs_rules *rules,
                          const bs_rule_hooks *hooks, bs_routes **out);
+
+/* ---- Traces ------------------------------------------------------------------------------------ */
+
+/* A file of JSON lines that grows while a search runs; see docs/routes.md. */
+typedef struct bs_trace bs_trace;
+
+/* Opens a file, or empties it. BS_EFILE with path and reason. The context is used to the end. */
+bs_status bs_trace_open(bs_ctx *cx, const char *path, bs_trace **out);
+
+/* Writes one line; for the trace of bs_plan_opts. */
+bs_status bs_trace_event(bs_ctx *cx, bs_trace *trace, const bs_plan_event *event);
+
+/* Writes what is left and closes, also where that fails; NULL is allowed. */
+bs_status bs_trace_close(bs_ctx *cx, bs_trace *trace);
 
 #endif

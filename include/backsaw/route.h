@@ -162,6 +162,50 @@ typedef struct bs_gap {
     int steps;       /* explored steps that use it */
 } bs_gap;
 
+/* What a search knows of one molecule at its end. Numbers that mean nothing are negative. */
+typedef struct bs_explored_molecule {
+    const char *smiles;
+    double price; /* a mole, where it is sold */
+    double cost;  /* of the cheapest way to have it */
+    int depth;    /* steps from the target, at least */
+    long found, barred, disallowed; /* steps that make it; those of them that constraints refused,
+                                       and those that `allow` did */
+    bool expanded; /* it was asked what makes it */
+    bool closed;   /* it never is, being at hand or without carbon */
+    bool too_deep; /* it was not, for the limit of depth */
+    bool ways;     /* the explored graph has a step that makes it */
+    const char *lacks; /* if it cannot be had: a compound that its nearest step lacks, or NULL */
+} bs_explored_molecule;
+
+/* How a transform fared in a search. */
+typedef struct bs_transform_count {
+    const char *name;
+    long tried;   /* sets of precursors that it gave */
+    long found;   /* of those, steps that gave the product when they were run forwards */
+    long refused; /* of those, steps that constraints or `allow` refused */
+    long used;    /* steps of the routes listed */
+} bs_transform_count;
+
+/* What a search saw. Lists of routes share it; the last one to drop it frees it. */
+typedef struct bs_explored {
+    int holders;
+    bs_arena arena;
+    bs_explored_molecule *molecules; /* in the order in which they were met, the target first */
+    long molecule_count;
+    bs_transform_count *transforms; /* by index in the rule book */
+    int transform_count;
+} bs_explored;
+
+/* Room for so many entries, held once. */
+bs_status bs_explored_new(bs_ctx *cx, long molecules, int transforms, bs_explored **out);
+
+/* Both allow NULL. */
+bs_explored *bs_explored_hold(bs_explored *explored);
+void bs_explored_drop(bs_ctx *cx, bs_explored *explored);
+
+/* The molecule with this canonical SMILES, or NULL; `explored` may be NULL. */
+const bs_explored_molecule *bs_explored_find(const bs_explored *explored, const char *smiles);
+
 /* A pack that steps of the routes come from. */
 typedef struct bs_pack_name {
     const char *name;
@@ -183,6 +227,7 @@ typedef struct bs_routes {
     int gap_count;
     bs_pack_name *packs; /* see bs_routes_set_packs() */
     int pack_count;
+    bs_explored *saw; /* what the search saw, or NULL; held */
 } bs_routes;
 
 /* NULL is allowed. The routes of the list die with it. */

@@ -197,6 +197,8 @@ typedef struct bs_rule_hooks {
     /* Score of a product of the forward reaction; the highest wins. */
     bs_status (*prefer)(void *payload, bs_ctx *cx, int hook, const bs_mol *product,
                         const bs_site *site, double *score);
+    /* If not NULL, sets of precursors that bs_rules_back() tried are counted here, by transform. */
+    long *tried;
 } bs_rule_hooks;
 
 /* ---- Steps ----------------------------------------------------------------------------- */

@@ -23,7 +23,8 @@
 /*
  * A step of the user's own, known to work. `from` and `product` are SMILES. Numbers that are 0 or
  * arrays that are NULL have the default named. A step of its own: two with the same compounds
- * stay two.
+ * stay two. Map numbers in the SMILES tell which atom of the product comes from where; only
+ * constraints on bonds ask for them.
  */
 typedef struct bs_known_step {
     const char *product;
@@ -34,6 +35,8 @@ typedef struct bs_known_step {
     double cost;  /* 0 or more; without has_cost as for a rule's step */
     double yield; /* per cent, above 0 and at most 100; 0: BS_DEFAULT_YIELD */
     const char *name;
+    const char *conditions, *recipe, *source; /* or NULL; they are shown with the step */
+    bs_words reagents, cautions;
 } bs_known_step;
 
 /* Yield of a step that states none, per cent. */
@@ -64,8 +67,72 @@ typedef struct bs_plan_limits {
 typedef struct bs_plan_progress {
     long molecules, expanded, steps, open;
     double seconds;
-    bool solved; /* there is a route */
+    bool solved;     /* there is a route */
+    double cheapest; /* what it costs, or INFINITY */
+    long routes;     /* counted so far, at most as many as are wanted */
+    int depth;       /* of the molecules expanded: steps from the target */
 } bs_plan_progress;
+
+/* What a trace is told, in the order in which it happens, whatever the number of threads. */
+typedef struct bs_plan_event {
+    enum {
+        BS_EVENT_MOLECULE, /* met: smiles, price (INFINITY if it is not sold) */
+        BS_EVENT_STEP,     /* found: `route` of this one step, `verdict`: "taken", or refused by
+                              "constraint" or "allow" */
+        BS_EVENT_LOOK,     /* between batches: now */
+        BS_EVENT_ROUTE,    /* one of the answer: route */
+        BS_EVENT_END       /* routes */
+    } kind;
+    const char *smiles;
+    double price;
+    const bs_route *route;
+    const char *verdict;
+    const bs_plan_progress *now;
+    const bs_routes *routes;
+} bs_plan_event;
+
+/* What a step may be tested for; one of the fields is set. */
+typedef struct bs_step_test {
+    const bs_mol *mol;         /* it is one of the precursors */
+    const bs_pattern *pattern; /* one of the precursors has it */
+    const char *word;          /* a word of its name, conditions, recipe, reagents or cautions
+                                  begins so, whatever the case */
+    const char *transform;     /* it is by this transform */
+    int most;                  /* in at_most: steps of a route that may meet it */
+} bs_step_test;
+
+/* Two bonded atoms of the target, 0-based. */
+typedef struct bs_target_bond {
+    int a, b;
+} bs_target_bond;
+
+/*
+ * What a route must be like. All zero: anything goes. The bonds are those of the target's own
+ * atoms, which are followed from step to step; a known step without map numbers is not used on a
+ * compound that still has such a bond.
+ *
+ * Protecting groups go by the names of transforms: "x protection" puts x on, "x removal" or
+ * "x deprotection" takes it off.
+ */
+typedef struct bs_constraints {
+    const bs_step_test *avoid;   /* no step meets any of these */
+    const bs_step_test *use;     /* each is met by a step */
+    const bs_step_test *at_most;
+    int avoid_count, use_count, at_most_count;
+    const bs_mol *const *start;      /* each is bought; free if nobody sells it */
+    const bs_mol *const *not_bought;
+    int start_count, not_bought_count;
+    const bs_pattern *const *intact; /* no step builds one: it comes whole from what is bought */
+    int intact_count;
+    const bs_target_bond *keep;  /* no step cuts it */
+    const bs_target_bond *cut;   /* some step cuts it */
+    const bs_target_bond *first; /* cut, and before it no step takes the compound apart */
+    int keep_count, cut_count, first_count;
+    bool has_protections;
+    int protections;  /* steps that put a protecting group on, at most */
+    bool unprotect;   /* what is put on comes off before the target */
+    bool convergent;  /* a step is outside of the longest linear sequence */
+} bs_constraints;
 
 /*
  * What to plan and how. All zero but `shelf` is a sound default without rules. Steps are shown to
@@ -90,6 +157,7 @@ typedef struct bs_plan_opts {
     bs_shelf *shelf;       /* or NULL: nothing is sold, only carbon-free compounds are at hand */
     const bs_known_step *known;
     int known_count;
+    const bs_constraints *constraints; /* or NULL */
     bs_plan_limits limits;
     bs_cost_mode mode;
     bool has_step_cost;
@@ -118,6 +186,8 @@ typedef struct bs_plan_opts {
     bs_status (*rank)(void *payload, bs_ctx *cx, const bs_route *route, double *rank);
     /* Called between batches; may be NULL. */
     void (*progress)(void *payload, const bs_plan_progress *now);
+    /* Told of everything; NULL for no trace. */
+    bs_status (*trace)(void *payload, bs_ctx *cx, const bs_plan_event *event);
 } bs_plan_opts;
 
 /*

@@ -68,10 +68,23 @@ clashes     "penalise" (a clash costs two more steps, or clash_cost), "allow" or
 allow       function(step): may the step be used?      keep  function(route): does it count?
 rank        function(route): the lowest first          best  how many routes
 known       { { product =, from = { ... }, yield =, cost =, equiv =, name = }, ... }
-transforms  names of those to use; {} switches them off     at_hand, quiet]],
+transforms  names of those to use; {} switches them off     at_hand, quiet
+constraints { avoid =, use =, ... }: see help "constraints"]],
+constraints = [[
+plan { ..., constraints = { ... } } says what a route must be like:
+avoid, use      lists of words, molecules, patterns, transforms, as for step:uses
+at_most         { 1, "ozone" }: so many steps may use it
+start_from      compounds that a route must buy        not_bought  compounds not to be bought
+intact          patterns that no step may build
+keep            { 1, 2 }: bonds between these map numbers of the target are not cut
+cut, first      { 1, 2 }: this bond is cut; before any other disconnection
+protections     steps that put a protecting group on   unprotect = true: they come off again
+longest         steps in line                          convergent = true: two branches meet]],
 routes = [[
 print(routes)                        a table, one line a route
 #routes  routes[1]  routes:where(f)  routes:sort(f)  routes:gaps()  routes.complete  routes.reason
+routes:why(m)  routes:unsolved()     what became of a molecule; what stayed open
+routes:transforms()                  how the transforms did: tried, found, refused, used
 routes:merge(others)                 both lists in one, each route once
 routes:save "r.json"                 and routes.load "r.json"
 print(routes[1])                     the route as an indented tree

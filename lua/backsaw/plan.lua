@@ -3,18 +3,20 @@
 local core = ...
 local check = core.module "check"
 local transforms = core.module "transform"
+local constraints = core.module "constraint"
 local planning = {}
 
 local fields = { target = "any", catalogue = "any", limits = "any", cost = "any", allow = "code",
     keep = "code", rank = "code", guess = "code", known = "any", transforms = "any",
-    clashes = "text", clash_cost = "amount", best = "count", at_hand = "any", quiet = "flag",
-    threads = "count" }
+    constraints = "any", clashes = "text", clash_cost = "amount", best = "count", at_hand = "any",
+    quiet = "flag", trace = "text", threads = "count" }
 
 local limit_fields = { depth = "count", steps = "count", molecules = "count", seconds = "amount",
     memory = "count" }
 
 local known_fields = { product = "any", from = "any", equiv = "any", cost = "amount",
-    yield = "any", name = "text" }
+    yield = "any", name = "text", conditions = "text", recipe = "text", source = "text",
+    reagents = "texts", cautions = "texts" }
 
 -- A molecule from a molecule or SMILES, with a message that says where it stands.
 local function molecule(what, value)
@@ -82,12 +84,12 @@ local function known_step(what, given)
     local step = check.fields(what, given, known_fields)
     if step.product == nil then check.fail("%s: 'product' is missing", what) end
     if step.from == nil then check.fail("%s: 'from' is missing", what) end
-    step.product = tostring(molecule(what .. ": product", step.product))
+    step.product = molecule(what .. ": product", step.product):smiles "labels"
     local from = step.from
     if type(from) ~= "table" then from = { from } end
     step.from = {}
     for i, entry in ipairs(check.entries(what .. ": from", from)) do
-        step.from[i] = tostring(molecule(string.format("%s: from %d", what, i), entry))
+        step.from[i] = molecule(string.format("%s: from %d", what, i), entry):smiles "labels"
     end
     if step.equiv ~= nil then
         local list = type(step.equiv) == "table" and check.entries(what .. ": equiv", step.equiv)
@@ -205,6 +207,12 @@ function planning.plan(given)
     options.known = known_steps(options.known)
     options.transforms = chosen_transforms(options.transforms)
     options.at_hand = at_hand(options.at_hand)
+    if options.constraints ~= nil then
+        local longest
+        options.constraints, longest = constraints.read(options.constraints, options.target)
+        options.depth = longest and math.min(longest, options.depth or longest) or options.depth
+    end
+    if options.trace then check.path("plan: trace", options.trace) end
     if options.quiet == false then options.quiet = nil end
     local cost = options.cost
     options.cost = nil

@@ -28,6 +28,7 @@ group, conditions, verdict = group_words.group, group_words.conditions, group_wo
 protecting, incompatible = group_words.protecting, group_words.incompatible
 catalogue, plan, cost = catalogues, planning.plan, planning.cost
 routes = core.module "routes"
+core.module "explain"
 help = core.module "help"
 
 function use(name)

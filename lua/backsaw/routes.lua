@@ -21,13 +21,14 @@ core.routes_methods.packs = core.route_packs
 
 -- ---- Comparing ---------------------------------------------------------------------------
 
--- What makes a step the same in two routes: its compounds, and for a known step its name.
+-- What makes a step the same in two routes: its compounds, and for a known step how it is run.
 local function step_key(step)
     local from = {}
     for i, precursor in ipairs(step.precursors) do from[i] = tostring(precursor) end
     table.sort(from)
     return table.concat({ tostring(step.product), table.concat(from, "."),
-        step.known and "known " .. (step.transform or "") or "" }, " ")
+        step.known and table.concat({ "known", step.transform or "", step.conditions or "",
+            step.recipe or "" }, "\n") or "" }, " ")
 end
 
 local function leaf_key(leaf) return tostring(leaf.molecule) end

@@ -10,6 +10,7 @@
 #include <stdio.h>
 #include <stdlib.h>
 #include <string.h>
+#include <sys/ioctl.h>
 #include <unistd.h>
 
 static const char usage_text[] =
@@ -127,16 +128,46 @@ static void on_interrupt(int signal_number)
         bs_session_interrupt(running);
 }
 
+/* The line of progress on the terminal. */
+typedef struct progress_line {
+    bool shown;
+    double when; /* seconds of the search at which the line was written */
+} progress_line;
+
+static void write_progress(const bs_plan_progress *now, char *line, size_t size)
+{
+    int used = snprintf(line, size, "%ld molecules, %ld steps, depth %d, %.0f s", now->molecules,
+                        now->steps, now->depth, now->seconds);
+
+    if (now->solved && used > 0 && (size_t)used < size)
+        used += snprintf(line + used, size - (size_t)used, "; cheapest %.2f", now->cheapest);
+    if (now->routes > 0 && used > 0 && (size_t)used < size)
+        used += snprintf(line + used, size - (size_t)used, ", %ld route%s", now->routes,
+                         now->routes == 1 ? "" : "s");
+    if (used > 0 && (size_t)used < size)
+        snprintf(line + used, size - (size_t)used, " (Ctrl-C ends the search)");
+}
+
 static void show_progress(void *payload, const bs_plan_progress *now)
 {
-    (void)payload;
+    char line[200];
+    progress_line *t = payload;
+    struct winsize size;
+    int width = 79;
+
     if (!now) {
         fputs("\r\033[K", stderr);
+        t->shown = false;
         return;
     }
-    fprintf(stderr, "\r\033[K%ld molecules, %ld steps, %ld open, %.0f s%s (Ctrl-C ends the search)",
-            now->molecules, now->steps, now->open, now->seconds,
-            now->solved ? ", solved" : "");
+    if (t->shown && now->seconds - t->when < 0.1)
+        return;
+    t->shown = true;
+    t->when = now->seconds;
+    write_progress(now, line, sizeof line);
+    if (ioctl(STDERR_FILENO, TIOCGWINSZ, &size) == 0 && size.ws_col > 1)
+        width = size.ws_col - 1;
+    fprintf(stderr, "\r\033[K%.*s", width, line); /* a line that wraps could not be erased */
     fflush(stderr);
 }
 
@@ -226,7 +257,8 @@ int main(int argc, char **argv)
     options o = { 0 };
     char program[PATH_MAX], script[PATH_MAX];
     struct sigaction action = { .sa_handler = on_interrupt, .sa_flags = SA_RESTART };
-    bs_session_opts opts = { 0 };
+    progress_line progress = { 0 };
+    bs_session_opts opts = { .payload = &progress };
     bs_session *session;
     int status = read_options(&o, argc, argv);
 

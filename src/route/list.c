@@ -9,6 +9,7 @@ void bs_routes_free(bs_ctx *cx, bs_routes *routes)
 {
     if (!routes)
         return;
+    bs_explored_drop(cx, routes->saw);
     bs_arena_free(&routes->arena);
     bs_gate_free(cx->gate, routes, sizeof *routes);
 }
@@ -32,6 +33,7 @@ static bs_status copy_statements(bs_ctx *cx, const bs_routes *like, bs_routes *l
     bs_status st;
 
     list->complete = like->complete;
+    list->saw = bs_explored_hold(like->saw);
     list->molecules = like->molecules;
     list->expanded = like->expanded;
     list->steps = like->steps;
@@ -164,6 +166,7 @@ static bs_status join_statements(bs_ctx *cx, const bs_routes *a, const bs_routes
     *both = *a;
     both->target = a->target ? a->target : b->target;
     both->complete = a->complete && b->complete;
+    both->saw = NULL; /* two searches saw different things */
     both->reason = a->reason ? a->reason : b->reason;
     both->molecules += b->molecules;
     both->expanded += b->expanded;

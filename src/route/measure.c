@@ -34,6 +34,18 @@ static bool same_smiles(const bs_route *a, int i, const bs_route *b, int j)
     return strcmp(a->molecules[i].smiles, b->molecules[j].smiles) == 0;
 }
 
+static bool same_text(const char *a, const char *b)
+{
+    return strcmp(a ? a : "", b ? b : "") == 0;
+}
+
+/* Known steps with the same compounds are different steps if they are run differently. */
+static bool same_notes(const bs_route_way *a, const bs_route_way *b)
+{
+    return same_text(a->transform, b->transform) && same_text(a->conditions, b->conditions) &&
+           same_text(a->recipe, b->recipe);
+}
+
 /* Whether step j of b has the product and, in whatever order, the precursors of step i of a. */
 static bool same_step(const bs_route *a, int i, const bs_route *b, int j)
 {
@@ -42,9 +54,7 @@ static bool same_step(const bs_route *a, int i, const bs_route *b, int j)
     if (p->precursor_count != q->precursor_count || p->known != q->known ||
         !same_smiles(a, p->product, b, q->product))
         return false;
-    /* Known steps with the same compounds are different steps if their names differ. */
-    if (p->known && strcmp(p->ways[0].transform ? p->ways[0].transform : "",
-                           q->ways[0].transform ? q->ways[0].transform : "") != 0)
+    if (p->known && !same_notes(&p->ways[0], &q->ways[0]))
         return false;
     for (int k = 0; k < p->precursor_count; k++) {
         int l = 0;

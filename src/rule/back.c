@@ -438,6 +438,8 @@ static bs_status take_result(void *payload, bs_ctx *cx, const uint32_t *where,
         return tell(cx, b, BS_REFUSED_SAME, where, NULL, 0);
     if ((st = is_new(cx, b, &list, &index, &fresh)) != BS_OK || !fresh)
         return st;
+    if (b->hooks && b->hooks->tried)
+        b->hooks->tried[b->transform]++;
     if (!(b->flags & BS_BACK_UNCHECKED))
         st = bs_check__step(cx, b->home, b->tr, b->kase, result->products, smiles, b->piece->mol,
                             b->smiles, where, &verdict);

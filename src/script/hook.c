@@ -120,7 +120,7 @@ static bs_status session_prefer(void *payload, bs_ctx *cx, int hook, const bs_mo
 
 bs_rule_hooks bsl_session_hooks(bs_session *session)
 {
-    return (bs_rule_hooks){ session, session_when, session_prefer };
+    return (bs_rule_hooks){ session, session_when, session_prefer, NULL };
 }
 
 /* ---- Lanes ----------------------------------------------------------------------------- */
@@ -175,7 +175,7 @@ static bs_status lane_prefer(void *payload, bs_ctx *cx, int hook, const bs_mol *
 
 bs_rule_hooks bsl_lane_hooks(bsl_lane *lane)
 {
-    return (bs_rule_hooks){ lane, lane_when, lane_prefer };
+    return (bs_rule_hooks){ lane, lane_when, lane_prefer, NULL };
 }
 
 void bsl_lane_free(bsl_lane *lane)

@@ -135,6 +135,7 @@ static int open_state(lua_State *L)
         bsl_open_catalogue(L);
         bsl_open_route(L);
         bsl_open_report(L);
+        bsl_open_explain(L);
         bsl_open_plan(L);
     }
     host->calls = lua_newthread(L);

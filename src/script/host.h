@@ -170,6 +170,7 @@ void bsl_open_transform(lua_State *L);
 void bsl_open_catalogue(lua_State *L);
 void bsl_open_plan(lua_State *L);
 void bsl_open_route(lua_State *L);
+void bsl_open_explain(lua_State *L);
 void bsl_open_report(lua_State *L); /* after that of routes, to which it adds methods */
 void bsl_open_pack(lua_State *L);
 void bsl_open_file(lua_State *L); /* after that of molecules, to which it adds methods */
@@ -258,6 +259,9 @@ void bsl_push_route(lua_State *L, const bs_route *route);
 /* The list of routes, or the route, at index `i`, or an argument error. */
 bs_routes *bsl_checkroutes(lua_State *L, int i);
 bs_route *bsl_checkroute(lua_State *L, int i);
+
+/* The constraints in the options at `i`, in the results arena; or NULL. */
+const bs_constraints *bsl_read_constraints(lua_State *L, int i);
 
 /* Tells a list of routes from which of the packs in use its steps come. */
 bs_status bsl_name_packs(lua_State *L, bs_routes *routes);

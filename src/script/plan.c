@@ -6,6 +6,7 @@
 #include "script/host.h"
 
 #include <math.h>
+#include <stdio.h>
 #include <string.h>
 #include <unistd.h>
 
@@ -23,6 +24,7 @@ typedef struct planner {
     int options;
     bool failed;
     bsl_fault fault;
+    bs_trace *trace;
 } planner;
 
 typedef struct question {
@@ -134,6 +136,11 @@ static bs_status ask_rank(void *payload, bs_ctx *cx, const bs_route *route, doub
     return st;
 }
 
+static bs_status pass_event(void *payload, bs_ctx *cx, const bs_plan_event *event)
+{
+    return bs_trace_event(cx, ((planner *)payload)->trace, event);
+}
+
 static void show_progress(void *payload, const bs_plan_progress *now)
 {
     const bs_session *session = ((planner *)payload)->host->session;
@@ -215,6 +222,37 @@ static bs_shelf *push_shelf(lua_State *L, int i)
     return box->shelf;
 }
 
+static const char *text_option(lua_State *L, const char *field)
+{
+    const char *text;
+
+    lua_getfield(L, -1, field);
+    text = lua_tostring(L, -1);
+    lua_pop(L, 1);
+    return text;
+}
+
+static bs_words words_option(lua_State *L, const char *field)
+{
+    bsl_host *host = bsl_host_of(L);
+    bs_words words = { NULL, 0 };
+    const char **items;
+
+    if (lua_getfield(L, -1, field) == LUA_TTABLE) {
+        words.count = (int)lua_rawlen(L, -1);
+        if (bs_new(host->cx, &host->results, words.count + 1, &items) != BS_OK)
+            bsl_raise(L, NULL, 0);
+        for (int i = 0; i < words.count; i++) {
+            lua_rawgeti(L, -1, i + 1);
+            items[i] = lua_tostring(L, -1);
+            lua_pop(L, 1);
+        }
+        words.items = items;
+    }
+    lua_pop(L, 1);
+    return words;
+}
+
 /* One known step from the table at the top of the stack, which keeps its strings alive. */
 static void read_known(lua_State *L, bs_known_step *known)
 {
@@ -222,11 +260,13 @@ static void read_known(lua_State *L, bs_known_step *known)
     const char **from;
     double *equivalents;
 
-    lua_getfield(L, -1, "product");
-    known->product = lua_tostring(L, -1);
-    lua_getfield(L, -2, "name");
-    known->name = lua_tostring(L, -1);
-    lua_pop(L, 2);
+    known->product = text_option(L, "product");
+    known->name = text_option(L, "name");
+    known->conditions = text_option(L, "conditions");
+    known->recipe = text_option(L, "recipe");
+    known->source = text_option(L, "source");
+    known->reagents = words_option(L, "reagents");
+    known->cautions = words_option(L, "cautions");
     known->has_cost = has_option(L, -1, "cost");
     known->cost = number_option(L, -1, "cost");
     known->yield = number_option(L, -1, "yield");
@@ -316,6 +356,8 @@ static void read_callbacks(lua_State *L, int i, bs_plan_opts *opts, planner *p)
     opts->rank = has_option(L, i, "rank") ? ask_rank : NULL;
     if (session->opts.progress && !has_option(L, i, "quiet"))
         opts->progress = show_progress;
+    if (p->trace)
+        opts->trace = pass_event;
 }
 
 /* Lends the catalogues of the options to the search (or takes them back), so that a callback
@@ -352,6 +394,25 @@ static void set_lanes(lua_State *L, bs_plan_opts *opts, bsl_lane *lanes, bs_rule
     opts->threads = threads < LANES ? threads : LANES;
 }
 
+static void open_trace(lua_State *L, int i, planner *p)
+{
+    lua_getfield(L, i, "trace");
+    if (lua_isstring(L, -1) && bs_trace_open(p->host->cx, lua_tostring(L, -1), &p->trace) != BS_OK)
+        bsl_raise(L, NULL, 0);
+    lua_pop(L, 1);
+}
+
+/* Says that the search was stopped by Ctrl-C, and what is there. */
+static void say_stopped(const bs_session *session, const bs_routes *routes)
+{
+    char line[120];
+
+    snprintf(line, sizeof line, "the search was stopped; %d route%s found so far", routes->count,
+             routes->count == 1 ? " was" : "s were");
+    if (session->opts.say)
+        session->opts.say(session->opts.payload, line);
+}
+
 /* routes = core.plan(options) */
 static int core_plan(lua_State *L)
 {
@@ -365,7 +426,7 @@ static int core_plan(lua_State *L)
     bsl_lane lanes[LANES];
     bs_routes *routes = NULL;
     const bs_mol *target;
-    bs_status st;
+    bs_status st, closed;
 
     luaL_checktype(L, 1, LUA_TTABLE);
     luaL_checkstack(L, 20, "plan");
@@ -375,7 +436,9 @@ static int core_plan(lua_State *L)
     opts.shelf = push_shelf(L, 1);
     read_known_steps(L, 1, &opts);
     read_transforms(L, 1, &opts);
+    opts.constraints = bsl_read_constraints(L, 1);
     read_limits(L, 1, &opts);
+    open_trace(L, 1, &plan);
     read_callbacks(L, 1, &opts, &plan);
     set_lanes(L, &opts, lanes, lane_hooks);
     lend_catalogues(L, 1, 1);
@@ -383,6 +446,11 @@ static int core_plan(lua_State *L)
     lend_catalogues(L, 1, -1);
     for (int i = 0; i < LANES; i++)
         bsl_lane_free(&lanes[i]);
+    closed = bs_trace_close(host->cx, plan.trace);
+    if (st == BS_OK && closed != BS_OK) {
+        bs_routes_free(host->cx, routes);
+        st = closed;
+    }
     if (opts.progress)
         session->opts.progress(session->opts.payload, NULL);
     bs_arena_rewind(&host->results, mark);
@@ -390,6 +458,8 @@ static int core_plan(lua_State *L)
         /* The first Ctrl-C ends the search, whose routes are kept; the script goes on. */
         atomic_store(host->cx->stop, false);
         bsl_calm(host);
+        if (st == BS_OK)
+            say_stopped(session, routes);
     }
     if (st != BS_OK)
         return plan.failed ? bsl_raise_fault(L, &plan.fault) : bsl_raise(L, NULL, 0);

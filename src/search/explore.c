@@ -211,6 +211,8 @@ static bs_status merge(bs_explore *x, uint32_t mol, bs_proposals *found)
     if (!x->partial) {
         x->next_proposal = 0;
         x->since = x->graph.way_count;
+        if (x->calls.merged)
+            x->calls.merged(x->calls.payload, found);
     }
     x->partial = true;
     for (; x->next_proposal < found->count; x->next_proposal++) {
@@ -305,6 +307,7 @@ static void report(const bs_explore *x)
         .open = x->front.open,
         .seconds = bs_explore__clock() - x->started,
         .solved = isfinite(x->front.had.items[0].value),
+        .cheapest = x->front.had.items[0].value,
     };
 
     if (x->calls.progress)

@@ -29,6 +29,7 @@ typedef struct bs_proposal {
 typedef struct bs_proposals {
     bs_proposal *items;
     int count;
+    const void *extra; /* the owner's, for `merged` */
 } bs_proposals;
 
 /* What the owner knows of a molecule when it is first met. */
@@ -51,6 +52,8 @@ typedef struct bs_explore_calls {
     /* May refuse a proposal or set its cost; NULL admits all. */
     bs_status (*admit)(void *payload, bs_ctx *cx, const char *product, bs_proposal *proposal,
                        bool *admitted);
+    /* Told of each answer before its proposals are merged; may be NULL. */
+    void (*merged)(void *payload, const bs_proposals *found);
     bs_status (*meet)(void *payload, bs_ctx *cx, const bs_mol *mol, const char *smiles,
                       bs_meeting *out);
     /*

@@ -16,12 +16,14 @@
 #define MOST_THREADS 256
 #define MOST_BEST 100000
 #define MOST_MOLECULES 50000000L
-#define ASK_TRIES 100   /* routes looked at beyond the pool, while the search goes on ... */
-#define LAST_TRIES 5000 /* ... and at its end */
-#define RANK_POOL 10  /* so many times `best` routes are ranked ... */
-#define RANK_MOST 200 /* ... but not more than this, unless `best` is */
+#define ASK_TRIES 100     /* routes looked at beyond the pool, while the search goes on ... */
+#define LAST_TRIES 5000   /* ... and at its end, ... */
+#define LAST_JUDGED 50000 /* ... where constraints judge them, which is cheap */
+#define RANK_POOL 10      /* so many times `best` routes are ranked ... */
+#define RANK_MOST 200     /* ... but not more than this, unless `best` is */
 
-/* ---- Options ---------------------------------------------------------------------------------- */
+/* ---- Options ----------------------------------------------------------------------------------
+ */
 
 static bs_status check_options(bs_ctx *cx, const bs_plan_opts *o)
 {
@@ -29,8 +31,10 @@ static bs_status check_options(bs_ctx *cx, const bs_plan_opts *o)
 
     if (l->depth < 0 || l->steps < 0 || l->molecules < 0 || l->molecules > MOST_MOLECULES ||
         !(l->seconds >= 0))
-        return bs_fail(cx, BS_EVALUE, "limits: depth, steps, molecules and seconds must be 0 or "
-                                      "more, molecules at most %ld", MOST_MOLECULES);
+        return bs_fail(cx, BS_EVALUE,
+                       "limits: depth, steps, molecules and seconds must be 0 or "
+                       "more, molecules at most %ld",
+                       MOST_MOLECULES);
     if (o->best < 0 || o->best > MOST_BEST)
         return bs_fail(cx, BS_EVALUE, "best: must be 1 to %d", MOST_BEST);
     if (o->has_step_cost && !(isfinite(o->step_cost) && o->step_cost >= 0))
@@ -70,8 +74,8 @@ static void read_options(bs_plan_state *plan)
 {
     const bs_plan_opts *o = plan->opts;
 
-    plan->rules_on = o->rules && bs_rules_count(o->rules) > 0 &&
-                     !(o->transforms && o->transform_count == 0);
+    plan->rules_on =
+        o->rules && bs_rules_count(o->rules) > 0 && !(o->transforms && o->transform_count == 0);
     plan->depth = o->limits.depth > 0 ? o->limits.depth : DEFAULT_DEPTH;
     plan->best = o->best > 0 ? o->best : DEFAULT_BEST;
     plan->step_cost = o->has_step_cost ? o->step_cost : BS_DEFAULT_STEP_COST;
@@ -85,7 +89,8 @@ static void read_options(bs_plan_state *plan)
     }
 }
 
-/* ---- Ends of the exploration ------------------------------------------------------------------- */
+/* ---- Ends of the exploration -------------------------------------------------------------------
+ */
 
 /* Whether the pool is full of routes that nothing still to be found can beat. */
 static bs_status is_enough(void *payload, bs_ctx *cx, double open_bound, bool *done)
@@ -109,9 +114,15 @@ static bs_status is_enough(void *payload, bs_ctx *cx, double open_bound, bool *d
 static void pass_progress(void *payload, const bs_plan_progress *now)
 {
     bs_plan_state *plan = payload;
+    bs_plan_progress more = *now;
+    bs_plan_event event = {.kind = BS_EVENT_LOOK, .now = &more};
 
+    more.routes = plan->routes_seen;
+    more.depth = (int)plan->deepest;
     if (plan->opts->progress)
-        plan->opts->progress(plan->opts->payload, now);
+        plan->opts->progress(plan->opts->payload, &more);
+    if (plan->opts->trace && plan->trace_status == BS_OK)
+        plan->trace_status = plan->opts->trace(plan->opts->payload, plan->cx, &event);
 }
 
 static bs_status explore(bs_plan_state *plan, const bs_mol *target, const char *smiles)
@@ -121,6 +132,7 @@ static bs_status explore(bs_plan_state *plan, const bs_mol *target, const char *
         .payload = plan,
         .expand = bs_plan__expand,
         .admit = bs_plan__admit,
+        .merged = bs_plan__merged,
         .meet = bs_plan__meet,
         .enough = is_enough,
         .progress = pass_progress,
@@ -165,8 +177,10 @@ static bs_status say_why(bs_plan_state *plan, bs_routes *list)
     case BS_END_EXHAUSTED:
     case BS_END_ENOUGH:
         if (plan->kbest_cut)
-            st = bs_text_puts(&text, "limits or keep leave out too many routes to find all the "
-                                     "others");
+            st = bs_text_printf(&text,
+                                "limits, constraints or keep leave out too many routes; "
+                                "the %ld cheapest were looked at",
+                                plan->looked_at);
         else if (plan->x.failed > 0)
             st = bs_text_printf(&text, "%lu molecules were too much for the rules",
                                 (unsigned long)plan->x.failed);
@@ -180,7 +194,8 @@ static bs_status say_why(bs_plan_state *plan, bs_routes *list)
     return st;
 }
 
-/* ---- The list of routes ------------------------------------------------------------------------ */
+/* ---- The list of routes ------------------------------------------------------------------------
+ */
 
 /* Fewer steps first among routes of the same cost, then as they were found. */
 static void settle_ties(bs_route **routes, int count)
@@ -227,13 +242,29 @@ static bs_status rank_routes(bs_plan_state *plan, bs_route **routes, int count)
     return BS_OK;
 }
 
+static bs_status trace_list(bs_plan_state *plan, const bs_routes *list)
+{
+    const bs_plan_opts *opts = plan->opts;
+    bs_plan_event event = {.kind = BS_EVENT_ROUTE};
+    bs_status st = plan->trace_status;
+
+    if (!opts->trace)
+        return BS_OK;
+    for (int i = 0; st == BS_OK && i < list->count; i++) {
+        event.route = list->items[i];
+        st = opts->trace(opts->payload, plan->cx, &event);
+    }
+    event = (bs_plan_event){.kind = BS_EVENT_END, .routes = list};
+    return st == BS_OK ? opts->trace(opts->payload, plan->cx, &event) : st;
+}
+
 static bs_status fill_list(bs_plan_state *plan, bs_arena *home, bs_routes **out)
 {
     int gaps = plan->opts->gaps ? plan->opts->gaps : DEFAULT_GAPS, count;
     bs_routes *list = NULL;
     bs_route **routes;
-    bs_status st = bs_plan__take_routes(plan, home, 20L * plan->pool + LAST_TRIES,
-                                        &routes, &count);
+    long tries = 20L * plan->pool + (plan->con.whole ? LAST_JUDGED : LAST_TRIES);
+    bs_status st = bs_plan__take_routes(plan, home, tries, &routes, &count);
 
     if (st != BS_OK)
         return st;
@@ -250,15 +281,26 @@ static bs_status fill_list(bs_plan_state *plan, bs_arena *home, bs_routes **out)
     list->steps = plan->x.graph.step_count;
     st = say_why(plan, list);
     if (st == BS_OK && plan->x.graph.mol_count > 0) {
-        const char *smiles = plan->x.nodes[plan->target].smiles;
+        const char *smiles;
         char *copy;
 
-        st = bs_copy_text(plan->cx, &list->arena, smiles, strlen(smiles), &copy);
-        list->target = copy;
+        st = bs_tag__plain(plan->cx, home, &plan->con.tags, plan->x.nodes[plan->target].smiles,
+                           &smiles);
+        if (st == BS_OK)
+            st = bs_copy_text(plan->cx, &list->arena, smiles, strlen(smiles), &copy);
+        if (st == BS_OK)
+            list->target = copy;
     }
+    if (st == BS_OK)
+        st = bs_plan__explain(plan, list);
+    if (st == BS_OK)
+        st = trace_list(plan, list);
     if (st == BS_OK && gaps > 0)
         st = bs_plan__find_gaps(&plan->x, &list->arena, plan->target, gaps, &list->gaps,
                                 &list->gap_count);
+    for (int i = 0; st == BS_OK && i < list->gap_count; i++)
+        st = bs_tag__plain(plan->cx, &list->arena, &plan->con.tags, list->gaps[i].smiles,
+                           &list->gaps[i].smiles);
     if (st != BS_OK)
         bs_routes_free(plan->cx, list);
     else
@@ -292,6 +334,8 @@ static void drop(bs_plan_state *plan)
     if (plan->x.cx)
         bs_explore__free(&plan->x);
     bs_guess__free(&plan->guess);
+    bs_constraint__free(plan);
+    bs_gate_free(plan->cx->gate, plan->tallies, plan->tally_room * sizeof *plan->tallies);
     bs_map_free(&plan->known_index);
     bs_map_free(&plan->detail_index);
     bs_gate_free(plan->cx->gate, plan->details, plan->detail_room * sizeof *plan->details);
@@ -312,7 +356,9 @@ bs_status bs_plan(bs_ctx *cx, const bs_mol *target, const bs_plan_opts *opts, bs
     bs_map_init(&plan.known_index, cx);
     bs_map_init(&plan.detail_index, cx);
     read_options(&plan);
-    if ((st = bs_known__read(&plan)) == BS_OK &&
+    if ((st = bs_constraint__init(&plan, target, &target)) == BS_OK &&
+        (st = bs_plan__start_counts(&plan)) == BS_OK &&
+        (st = bs_known__read(&plan)) == BS_OK &&
         (st = bs_guess__init(&plan.guess, cx, opts->shelf)) == BS_OK &&
         (st = bs_smiles_canonical(cx, &plan.arena, target, 0, &smiles)) == BS_OK &&
         (st = bs_smiles_read(cx, &plan.arena, smiles, strlen(smiles), NULL, &mol)) == BS_OK &&

@@ -3,6 +3,7 @@
 #define SEARCH_PLAN_H
 
 #include "backsaw/search.h"
+#include "search/constraint.h"
 #include "search/explore.h"
 #include "search/guess.h"
 
@@ -12,6 +13,10 @@
 /* A known step, read. Precursors are distinct. */
 typedef struct bs_known {
     const char *product;
+    const bs_mol *product_mol;
+    const bs_mol **entries; /* precursors as given, and how much of each */
+    double *entry_equivalents;
+    int entry_count;
     const char **smiles;
     const bs_mol **mols;
     double *equivalents;
@@ -20,6 +25,7 @@ typedef struct bs_known {
     bool has_cost;
     double yield; /* per cent */
     const char *name;
+    const bs_known_step *given; /* for its texts */
 } bs_known;
 
 /* What running the rule of a way again told; kept, since routes share steps. */
@@ -31,6 +37,17 @@ typedef struct bs_plan_detail {
     char **clashes;
     int clash_count;
 } bs_plan_detail;
+
+/* What became of the steps found for a molecule. */
+typedef struct bs_plan_tally {
+    uint32_t found, barred, disallowed;
+} bs_plan_tally;
+
+typedef enum bs_verdict_of {
+    BS_ADMITTED,
+    BS_REFUSED_BY_CONSTRAINT,
+    BS_REFUSED_BY_ALLOW
+} bs_verdict_of;
 
 typedef struct bs_plan_state {
     bs_ctx *cx;
@@ -47,8 +64,17 @@ typedef struct bs_plan_state {
     double admitted_cost; /* sum over the steps admitted so far, for the unit of guesses */
     double admitted_count;
     bs_guess guess;
+    bs_constraint con;
     bs_explore x;
     bool kbest_cut;
+    bs_plan_tally *tallies; /* by molecule of the graph */
+    size_t tally_room;
+    bs_transform_count *counts; /* by rule */
+    int count_count;
+    bs_status trace_status; /* of what is traced where nothing can fail */
+    uint32_t deepest;       /* depth of the molecules expanded so far */
+    int routes_seen;        /* by the last enumeration */
+    long looked_at;         /* routes, by the last enumeration */
     uint32_t target;
 } bs_plan_state;
 
@@ -60,8 +86,8 @@ const bs_known *bs_known__next(const bs_plan_state *plan, const char *product, s
                                int *index);
 
 /* The calls of the exploration; the payload is the plan. */
-bs_status bs_plan__expand(void *payload, bs_ctx *cx, bs_arena *home, int lane,
-                          const char *smiles, bool closed, bs_proposals *out);
+bs_status bs_plan__expand(void *payload, bs_ctx *cx, bs_arena *home, int lane, const char *smiles,
+                          bool closed, bs_proposals *out);
 bs_status bs_plan__admit(void *payload, bs_ctx *cx, const char *product, bs_proposal *proposal,
                          bool *admitted);
 bs_status bs_plan__meet(void *payload, bs_ctx *cx, const bs_mol *mol, const char *smiles,
@@ -78,9 +104,17 @@ bs_status bs_plan__count_clashes(const bs_plan_state *plan, bs_ctx *cx, const bs
 bs_status bs_plan__name_clashes(const bs_plan_state *plan, bs_ctx *cx, bs_arena *home,
                                 const bs_step *step, char ***names, int *count);
 
-/* Rivals as text: the products of each outcome joined by dots. */
-bs_status bs_plan__rivals(bs_ctx *cx, bs_arena *home, const bs_outcomes *rivals, char ***out,
-                          int *count);
+/* Rivals as text without tags: the products of each outcome joined by dots. */
+bs_status bs_plan__rivals(const bs_plan_state *plan, bs_ctx *cx, bs_arena *home,
+                          const bs_outcomes *rivals, char ***out, int *count);
+
+/*
+ * A proposal of a known step for a product with tags, which go to the precursors by the map
+ * numbers of the step. `*usable` is false if an atom of a marked bond has none.
+ */
+bs_status bs_known__tag(const bs_plan_state *plan, bs_ctx *cx, bs_arena *home,
+                        const bs_known *known, const bs_mol *tagged, bs_proposal *proposal,
+                        bool *usable);
 
 /*
  * The routes of the explored graph that limits and `keep` leave, cheapest first, at most the size
@@ -89,6 +123,13 @@ bs_status bs_plan__rivals(bs_ctx *cx, bs_arena *home, const bs_outcomes *rivals,
  */
 bs_status bs_plan__take_routes(bs_plan_state *plan, bs_arena *home, long tries, bs_route ***routes,
                                int *count);
+
+/* Counting what becomes of steps; and what is told of it in the end, which goes into the list. */
+bs_status bs_plan__start_counts(bs_plan_state *plan);
+bs_status bs_plan__count(bs_plan_state *plan, const char *product, uint32_t tag,
+                         bs_verdict_of whose);
+void bs_plan__merged(void *payload, const bs_proposals *found);
+bs_status bs_plan__explain(bs_plan_state *plan, bs_routes *list);
 
 /* Finds the gaps of the explored graph: at most `most`, strings in `home`. */
 bs_status bs_plan__find_gaps(const bs_explore *x, bs_arena *home, uint32_t target, int most,

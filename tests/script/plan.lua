@@ -51,12 +51,28 @@ print(fails(plan, { target = "CCN", catalogue = { "CCO" }, known = known, transf
 print(fails(plan, { target = "CCN", catalogue = { "CCO" }, known = bare, transforms = {},
     cost = function() return "dear" end })) --> plan: 'cost' must give a number, not string
 
+-- the same compounds under other conditions are another step; what a step says is kept
+local two = { { product = "CCN", from = { "CCBr", "N" }, cost = 5, yield = 50, conditions = "ethanol", name = "amination" },
+    { product = "CCN", from = { "N", "CCBr" }, cost = 5, yield = 40, conditions = "water", name = "amination",
+      recipe = "NH3, H2O, 60 °C", source = "notebook 12", reagents = { "ammonia" }, cautions = { "bromoethane" } } }
+routes = plan { target = "CCN", catalogue = { "CCBr" }, known = two, transforms = {} }
+print(#routes, routes[1] == routes[2], routes[1].cost, routes[2].cost) --> 2	false	12.0	15.0
+local step = routes[2]:steps()[1]
+print(step.conditions, step.recipe, step.source, step.reagents[1], step.cautions[1]) --> water	NH3, H2O, 60 °C	notebook 12	ammonia	bromoethane
+print(#routes:merge(routes), routes[1]:compare(routes[2]).steps.shared[1]) --> 2	nil
+
 -- by rules
 interconversion "test reduction of a nitrile" { target = "[CX4;H2:1]-[NX3;H2:2]", from = "[C:1]#[N:2]",
     yield = { 80, 80 } }
 routes = plan { target = "NCc1ccccc1", catalogue = { "N#Cc1ccccc1" }, limits = { depth = 1 },
     transforms = { "test reduction of a nitrile" } }
 print(#routes, routes[1].cost, routes[1]:steps()[1].transform) --> 1	63.75	test reduction of a nitrile
+
+-- known steps join the rules: (1 + 8) / 0.9 = 10 beats 63.75
+routes = plan { target = "NCc1ccccc1", catalogue = { "N#Cc1ccccc1" }, limits = { depth = 1 },
+    known = { { product = "NCc1ccccc1", from = "N#Cc1ccccc1", cost = 8, yield = 90, name = "own" } },
+    transforms = { "test reduction of a nitrile" } }
+print(#routes, routes[1].cost, routes[1]:steps()[1].known, routes[2]:steps()[1].known) --> 2	10.0	true	false
 
 -- what is refused
 print(fails(plan, {})) --> plan: 'target' is missing
