@@ -84,6 +84,7 @@ static void add_step(bs_json *json, const bs_route *route, const bs_route_step *
     bs_json__flag_field(json, "checked", step->checked);
     bs_json__strings_field(json, "rivals", (const char *const *)step->rivals, step->rival_count);
     bs_json__strings_field(json, "clashes", (const char *const *)step->clashes, step->clash_count);
+    bs_json__strings_field(json, "clashes", (const char *const *)step->clashes, step->clash_count);
     bs_json__key(json, "ways");
     bs_json__open(json, '[');
     for (int i = 0; i < step->way_count; i++)
