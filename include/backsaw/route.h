@@ -223,7 +223,8 @@ typedef struct bs_routes {
     long molecules;     /* explored: molecules, those expanded, steps */
     long expanded;
     long steps;
-    bs_gap *gaps; /* those that open most first; for the target alone */
+    bs_gap *gaps; /* those that open most first; for the target alone. In a very large graph only
+                     molecules that were met early are tried */
     int gap_count;
     bs_pack_name *packs; /* see bs_routes_set_packs() */
     int pack_count;

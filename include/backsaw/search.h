@@ -200,6 +200,50 @@ typedef struct bs_plan_opts {
  */
 bs_status bs_plan(bs_ctx *cx, const bs_mol *target, const bs_plan_opts *opts, bs_routes **out);
 
+/* ---- A search that is kept --------------------------------------------------------------- */
+
+/* What was explored, kept for going on and for ranking anew. */
+typedef struct bs_search bs_search;
+
+/*
+ * Prepares a search. The options and their arrays are copied; what they point to (rules, hooks,
+ * the shelf, molecules, patterns, texts) must stay for as long as the search is used. Errors as
+ * bs_plan().
+ */
+bs_status bs_search_new(bs_ctx *cx, const bs_mol *target, const bs_plan_opts *opts,
+                        bs_search **out);
+
+/* NULL is allowed. Lists of routes that it gave stay. */
+void bs_search_free(bs_search *search);
+
+/* Its options. Limits, `best`, threads, hooks, callbacks and payload may be changed between runs. */
+bs_plan_opts *bs_search_options(bs_search *search);
+
+/*
+ * Explores and lists the routes. Called again, perhaps with higher limits, it goes on where it
+ * stopped; where only the limit of molecules had stopped it, the result is that of one longer run.
+ * The limit of seconds counts for each run.
+ */
+bs_status bs_search_run(bs_search *search, bs_routes **out);
+
+/* What to change when routes are ranked anew. */
+typedef struct bs_rerank {
+    bool prices; /* ask the shelf of the options again for each molecule */
+    bool costs;  /* work the costs of the steps out again by the options */
+    bool steps;  /* ask `allow` again */
+    const bs_mol *const *without; /* compounds that no route may have */
+    int without_count;
+} bs_rerank;
+
+/*
+ * Lists the routes of what was explored by other options: a copy of the search's own in which
+ * shelf, cost, mode, allow, keep, rank, `best` and the limits of depth and steps may differ.
+ * Nothing is explored, and the search is as before. What the search's own `allow` refused is not
+ * there to be allowed.
+ */
+bs_status bs_search_rerank(bs_search *search, const bs_plan_opts *opts, const bs_rerank *what,
+                           bs_routes **out);
+
 /*
  * The default guess: how many steps it may take to make a molecule, 0 to 40. One for each four
  * heavy atoms beyond six, half a one for each ring beyond the first, three quarters for each

@@ -134,12 +134,13 @@ local function chosen_transforms(given)
     return list
 end
 
-local function at_hand(given)
+-- A list of molecules; one may stand alone.
+local function molecules(what, given)
     local list = {}
     if given == nil then return list end
     if type(given) ~= "table" then given = { given } end
-    for i, entry in ipairs(check.entries("plan: at_hand", given)) do
-        list[i] = molecule(string.format("plan: at_hand: entry %d", i), entry)
+    for i, entry in ipairs(check.entries(what, given)) do
+        list[i] = molecule(string.format("%s: entry %d", what, i), entry)
     end
     return list
 end
@@ -206,7 +207,7 @@ function planning.plan(given)
     end
     options.known = known_steps(options.known)
     options.transforms = chosen_transforms(options.transforms)
-    options.at_hand = at_hand(options.at_hand)
+    options.at_hand = molecules("plan: at_hand", options.at_hand)
     if options.constraints ~= nil then
         local longest
         options.constraints, longest = constraints.read(options.constraints, options.target)
@@ -219,6 +220,57 @@ function planning.plan(given)
     set_cost(options, cost)
     set_clashes(options)
     return core.plan(options)
+end
+
+-- ---- Searches that are kept ---------------------------------------------------------------
+
+-- A copy of the options that a list's search has.
+local function options_of(routes)
+    local copy = {}
+    for name, value in next, core.search_options(routes) do copy[name] = value end
+    return copy
+end
+
+local extend_fields = { depth = "count", steps = "count", molecules = "count", seconds = "amount",
+    memory = "count", best = "count", threads = "count", quiet = "flag" }
+
+-- rs:extend { molecules = ... }: goes on exploring where the search stopped
+function core.routes_methods.extend(routes, given)
+    local options = options_of(routes)
+    options.seconds, options.trace = nil, nil
+    for name, value in next, check.fields("extend", given or {}, extend_fields) do
+        options[name] = value
+    end
+    if options.quiet == false then options.quiet = nil end
+    return core.extend(options, routes)
+end
+
+local rerank_fields = { catalogue = "any", at_hand = "any", cost = "any", allow = "code",
+    keep = "code", rank = "code", without = "any", best = "count", limits = "any" }
+
+-- rs:rerank { cost = ... }: the routes of what was explored, by other prices, costs or filters
+function core.routes_methods.rerank(routes, given)
+    local options, what = options_of(routes), {}
+    given = check.fields("rerank", given or {}, rerank_fields)
+    if given.catalogue ~= nil or given.at_hand ~= nil then
+        what.prices = true
+        if given.catalogue ~= nil then options.sources = sources(given.catalogue) end
+        if given.at_hand ~= nil then options.at_hand = molecules("rerank: at_hand", given.at_hand) end
+    end
+    if given.cost ~= nil then
+        what.costs = true
+        options.cost, options.step_cost, options.additive = nil, nil, nil
+        set_cost(options, given.cost)
+    end
+    if given.allow then what.steps = true end
+    for _, name in ipairs { "allow", "keep", "rank", "best" } do
+        if given[name] ~= nil then options[name] = given[name] end
+    end
+    local limits = check.fields("rerank: limits", given.limits or {},
+        { depth = "count", steps = "count" })
+    for name, value in next, limits do options[name] = value end
+    what.without = molecules("rerank: without", given.without)
+    return core.rerank(options, routes, what)
 end
 
 -- ---- Lists of routes ---------------------------------------------------------------------

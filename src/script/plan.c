@@ -11,6 +11,7 @@
 #include <unistd.h>
 
 #define SHELF_TYPE "backsaw.shelf"
+#define SEARCH_TYPE "backsaw.search"
 #define LANES 8
 
 typedef struct shelf_box {
@@ -361,10 +362,15 @@ static void read_callbacks(lua_State *L, int i, bs_plan_opts *opts, planner *p)
 }
 
 /* Lends the catalogues of the options to the search (or takes them back), so that a callback
-   cannot close them. */
+   cannot close them. Raises before anything is lent if one is closed. */
 static void lend_catalogues(lua_State *L, int i, int change)
 {
     lua_getfield(L, i, "sources");
+    for (int k = (int)lua_rawlen(L, -1); change > 0 && k > 0; k--) {
+        lua_rawgeti(L, -1, k);
+        bsl_testcatalogue(L, -1);
+        lua_pop(L, 1);
+    }
     for (int k = (int)lua_rawlen(L, -1); k > 0; k--) {
         lua_rawgeti(L, -1, k);
         bsl_lend_catalogue(L, -1, change);
@@ -413,36 +419,67 @@ static void say_stopped(const bs_session *session, const bs_routes *routes)
         session->opts.say(session->opts.payload, line);
 }
 
-/* routes = core.plan(options) */
-static int core_plan(lua_State *L)
+/* ---- Searches that are kept --------------------------------------------------------------- */
+
+/* Large graphs that nobody holds any more are freed before a new one grows. */
+#define MUCH_MEMORY ((size_t)64 << 20)
+
+typedef struct search_box {
+    bs_search *search; /* NULL once freed */
+    bool running;
+} search_box;
+
+static int search_gc(lua_State *L)
+{
+    search_box *box = luaL_checkudata(L, 1, SEARCH_TYPE);
+
+    bs_search_free(box->search);
+    box->search = NULL;
+    return 0;
+}
+
+/* The box of the search behind the list at `i`, pushed. Its user values: options, shelf. */
+static bs_search *push_search(lua_State *L, int i)
+{
+    search_box *box = NULL;
+
+    if (lua_getiuservalue(L, i, 2) != LUA_TUSERDATA ||
+        !(box = luaL_testudata(L, -1, SEARCH_TYPE)) || !box->search)
+        bsl_error(L, BS_EVALUE, "this list of routes has no search behind it");
+    if (box->running)
+        bsl_error(L, BS_EVALUE, "the search is running");
+    return box->search;
+}
+
+/*
+ * Runs the search in the box at `at` by the options at 1, or ranks it anew, and pushes the list,
+ * which keeps the box. What the options point to on this stack is gone afterwards.
+ */
+static int run_search(lua_State *L, int at, bs_plan_opts *opts, const bs_rerank *what)
 {
     bsl_host *host = bsl_host_of(L);
     bs_session *session = host->session;
-    bs_mark mark = bs_arena_mark(&host->results);
-    bs_rule_hooks hooks = bsl_session_hooks(session);
+    search_box *box = lua_touserdata(L, at);
+    bs_rule_hooks hooks = bsl_session_hooks(session), lane_hooks[LANES];
     planner plan = { .L = L, .host = host, .options = 1 };
-    bs_plan_opts opts = { .rules = session->rules, .hooks = &hooks };
-    bs_rule_hooks lane_hooks[LANES];
     bsl_lane lanes[LANES];
     bs_routes *routes = NULL;
-    const bs_mol *target;
     bs_status st, closed;
 
-    luaL_checktype(L, 1, LUA_TTABLE);
-    luaL_checkstack(L, 20, "plan");
-    lua_settop(L, 1);
-    lua_getfield(L, 1, "target");
-    target = bsl_checkmol(L, 2);
-    opts.shelf = push_shelf(L, 1);
-    read_known_steps(L, 1, &opts);
-    read_transforms(L, 1, &opts);
-    opts.constraints = bsl_read_constraints(L, 1);
-    read_limits(L, 1, &opts);
+    opts->hooks = &hooks;
+    opts->lane_hooks = NULL;
+    opts->lane_count = opts->threads = 0;
+    opts->progress = NULL;
+    opts->trace = NULL;
     open_trace(L, 1, &plan);
-    read_callbacks(L, 1, &opts, &plan);
-    set_lanes(L, &opts, lanes, lane_hooks);
+    read_limits(L, 1, opts);
+    read_callbacks(L, 1, opts, &plan);
+    set_lanes(L, opts, lanes, lane_hooks);
     lend_catalogues(L, 1, 1);
-    st = bs_plan(host->cx, target, &opts, &routes);
+    box->running = true;
+    st = what ? bs_search_rerank(box->search, opts, what, &routes)
+              : bs_search_run(box->search, &routes);
+    box->running = false;
     lend_catalogues(L, 1, -1);
     for (int i = 0; i < LANES; i++)
         bsl_lane_free(&lanes[i]);
@@ -451,9 +488,8 @@ static int core_plan(lua_State *L)
         bs_routes_free(host->cx, routes);
         st = closed;
     }
-    if (opts.progress)
+    if (opts->progress)
         session->opts.progress(session->opts.payload, NULL);
-    bs_arena_rewind(&host->results, mark);
     if (atomic_load(host->cx->stop)) {
         /* The first Ctrl-C ends the search, whose routes are kept; the script goes on. */
         atomic_store(host->cx->stop, false);
@@ -465,14 +501,114 @@ static int core_plan(lua_State *L)
         return plan.failed ? bsl_raise_fault(L, &plan.fault) : bsl_raise(L, NULL, 0);
     st = bsl_name_packs(L, routes);
     bsl_push_routes(L, routes);
+    lua_pushvalue(L, at);
+    lua_setiuservalue(L, -2, 2);
     return st == BS_OK ? 1 : bsl_raise(L, NULL, 0);
+}
+
+/* routes = core.plan(options) */
+static int core_plan(lua_State *L)
+{
+    bsl_host *host = bsl_host_of(L);
+    bs_mark mark = bs_arena_mark(&host->results);
+    bs_plan_opts opts = { .rules = host->session->rules };
+    search_box *box;
+    bs_status st;
+
+    luaL_checktype(L, 1, LUA_TTABLE);
+    luaL_checkstack(L, 20, "plan");
+    lua_settop(L, 1);
+    if (atomic_load(&host->cx->gate->used) > MUCH_MEMORY)
+        lua_gc(L, LUA_GCCOLLECT);
+    box = lua_newuserdatauv(L, sizeof *box, 2);
+    *box = (search_box){ .search = NULL };
+    luaL_setmetatable(L, SEARCH_TYPE);
+    lua_pushvalue(L, 1);
+    lua_setiuservalue(L, 2, 1);
+    opts.shelf = push_shelf(L, 1);
+    lua_setiuservalue(L, 2, 2);
+    lua_getfield(L, 1, "target");
+    read_known_steps(L, 1, &opts);
+    read_transforms(L, 1, &opts);
+    opts.constraints = bsl_read_constraints(L, 1);
+    read_limits(L, 1, &opts);
+    st = bs_search_new(host->cx, bsl_checkmol(L, 3), &opts, &box->search);
+    bs_arena_rewind(&host->results, mark);
+    if (st != BS_OK)
+        return bsl_raise(L, NULL, 0);
+    lua_settop(L, 2);
+    return run_search(L, 2, bs_search_options(box->search), NULL);
+}
+
+/* options = core.search_options(routes) */
+static int core_search_options(lua_State *L)
+{
+    push_search(L, 1);
+    lua_getiuservalue(L, -1, 1);
+    return 1;
+}
+
+/* routes = core.extend(options, routes): the options are the search's own from now on */
+static int core_extend(lua_State *L)
+{
+    bs_search *search;
+
+    luaL_checktype(L, 1, LUA_TTABLE);
+    luaL_checkstack(L, 20, "plan");
+    lua_settop(L, 2);
+    search = push_search(L, 2);
+    lua_pushvalue(L, 1);
+    lua_setiuservalue(L, 3, 1);
+    return run_search(L, 3, bs_search_options(search), NULL);
+}
+
+/* routes = core.rerank(options, routes, { prices =, costs =, steps =, without = { molecules } }) */
+static int core_rerank(lua_State *L)
+{
+    bsl_host *host = bsl_host_of(L);
+    bs_mark mark = bs_arena_mark(&host->results);
+    bs_plan_opts opts;
+    bs_rerank what = { .prices = false };
+    const bs_mol **without;
+    int results;
+
+    luaL_checktype(L, 1, LUA_TTABLE);
+    luaL_checkstack(L, 20, "plan");
+    lua_settop(L, 3);
+    opts = *bs_search_options(push_search(L, 2));
+    what.prices = has_option(L, 3, "prices");
+    what.costs = has_option(L, 3, "costs");
+    what.steps = has_option(L, 3, "steps");
+    if (what.prices)
+        opts.shelf = push_shelf(L, 1);
+    lua_getfield(L, 3, "without");
+    what.without_count = (int)lua_rawlen(L, -1);
+    if (bs_new(host->cx, &host->results, what.without_count + 1, &without) != BS_OK)
+        return bsl_raise_from(L, mark, NULL, 0);
+    for (int i = 0; i < what.without_count; i++) {
+        lua_rawgeti(L, -1, i + 1);
+        without[i] = bsl_checkmol(L, -1);
+        lua_pop(L, 1);
+    }
+    what.without = without;
+    results = run_search(L, 4, &opts, &what);
+    bs_arena_rewind(&host->results, mark);
+    return results;
 }
 
 void bsl_open_plan(lua_State *L)
 {
     static const luaL_Reg meta[] = { { "__gc", shelf_gc }, { NULL, NULL } };
+    static const luaL_Reg search_meta[] = { { "__gc", search_gc }, { NULL, NULL } };
+    static const luaL_Reg functions[] = {
+        { "plan", core_plan },
+        { "search_options", core_search_options },
+        { "extend", core_extend },
+        { "rerank", core_rerank },
+        { NULL, NULL },
+    };
 
     bsl_new_type(L, SHELF_TYPE, NULL, meta);
-    lua_pushcfunction(L, core_plan);
-    lua_setfield(L, -2, "plan");
+    bsl_new_type(L, SEARCH_TYPE, NULL, search_meta);
+    luaL_setfuncs(L, functions, 0);
 }

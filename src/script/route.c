@@ -44,7 +44,7 @@ bs_route *bsl_checkroute(lua_State *L, int i)
 /* The protected part of making a list's value. */
 static int new_routes_box(lua_State *L)
 {
-    routes_box *box = lua_newuserdatauv(L, sizeof *box, 1);
+    routes_box *box = lua_newuserdatauv(L, sizeof *box, 2); /* route values, the search */
 
     box->routes = NULL;
     lua_newtable(L);
@@ -421,6 +421,8 @@ static int core_pick_routes(lua_State *L)
     if (st != BS_OK)
         return bsl_raise(L, NULL, 0);
     bsl_push_routes(L, picked);
+    lua_getiuservalue(L, 2, 2);
+    lua_setiuservalue(L, -2, 2);
     return 1;
 }
 

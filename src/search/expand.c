@@ -330,6 +330,22 @@ static bs_status show_around(bs_plan_state *plan, bs_ctx *cx, const char *produc
     return st;
 }
 
+bs_status bs_plan__ask(bs_plan_state *plan, bs_ctx *cx, const char *product,
+                       bs_proposal *proposal, bool *admitted)
+{
+    bs_verdict_of whose = BS_ADMITTED;
+    bs_arena home;
+    bs_route *view;
+    bs_status st;
+
+    bs_arena_init(&home, cx->gate);
+    if ((st = show(plan, cx, &home, product, proposal, &view)) == BS_OK)
+        st = ask(plan, cx, view, proposal, &whose);
+    bs_arena_free(&home);
+    *admitted = whose == BS_ADMITTED;
+    return st;
+}
+
 bs_status bs_plan__admit(void *payload, bs_ctx *cx, const char *product, bs_proposal *proposal,
                          bool *admitted)
 {

@@ -365,9 +365,9 @@ static bs_status go_round(bs_explore *x, bs_arena *home, bool *over)
             *over = true;
             return BS_OK;
         }
-        if ((st = ask_enough(x, &done)) != BS_OK)
-            return st;
     }
+    if (x->front.picked_at == 0 && (st = ask_enough(x, &done)) != BS_OK)
+        return st;
     if (done) {
         x->end = BS_END_ENOUGH;
         *over = true;
@@ -385,6 +385,8 @@ bs_status bs_explore__run(bs_explore *x, const bs_mol *target, const char *smile
     if (x->limits.batch < 1 || x->limits.lanes < 1 || x->limits.threads < 1)
         return bs_fail(x->cx, BS_EBUG, "batch, lanes and threads must be 1 or more");
     x->started = bs_explore__clock();
+    if (x->end == BS_END_ENOUGH)
+        x->next_enough = x->expanded; /* ask again at once */
     st = meet(x, target, smiles, &mol);
     if (st == BS_OK && !x->nodes[mol].expanded)
         x->nodes[mol].closed = false; /* the target is always worth it */

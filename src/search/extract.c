@@ -228,11 +228,11 @@ static bs_status add_ways(parts *p, const bs_graph_way *chosen, bs_route_step *s
 
     for (uint32_t w = graph->mols[chosen->product].first_way; w != BS_GRAPH_NONE;
          w = graph->ways[w].next)
-        count += graph->ways[w].step == chosen->step;
+        count += graph->ways[w].step == chosen->step && isfinite(graph->ways[w].cost);
     st = bs_new(cx, &cx->scratch, count, &step->ways);
     for (uint32_t w = graph->mols[chosen->product].first_way; st == BS_OK && w != BS_GRAPH_NONE;
          w = graph->ways[w].next) {
-        if (graph->ways[w].step == chosen->step)
+        if (graph->ways[w].step == chosen->step && isfinite(graph->ways[w].cost))
             st = add_way(p, &graph->ways[w], step);
     }
     return st;

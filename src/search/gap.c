@@ -5,9 +5,13 @@
 #include <math.h>
 #include <stdlib.h>
 
+/* When so many uses were looked at, the molecules met last are not tried. */
+#define MOST_LOOKED 20000000u
+
 /* Which molecules can be had, and how many precursors each way still lacks. */
 typedef struct closure {
     const bs_graph *graph;
+    uint64_t looked; /* uses */
     bool *had;
     uint32_t *lacking;
     uint32_t *queue;
@@ -26,6 +30,7 @@ static bs_status find_had(closure *c)
         for (uint32_t w = 0; w < c->graph->way_count; w++) {
             const bs_graph_way *way = &c->graph->ways[w];
 
+            c->lacking[w] = isinf(way->cost); /* struck */
             for (uint32_t use = way->first; use < way->first + way->count; use++)
                 c->lacking[w] += !c->had[c->graph->uses[use].mol];
         }
@@ -55,6 +60,7 @@ static bs_gap try_molecule(closure *c, uint32_t mol, uint32_t target)
              use = graph->uses[use].next) {
             uint32_t way = graph->uses[use].way, product = graph->ways[way].product;
 
+            c->looked++;
             gap.steps += at == mol;
             if (--c->lacking[way] > 0 || c->had[product])
                 continue;
@@ -100,7 +106,7 @@ static bs_status rank_molecules(const bs_explore *x, uint32_t target, ranked **l
         (st = bs_new(cx, &cx->scratch, x->graph.way_count, &c.lacking)) ||
         (st = bs_new(cx, &cx->scratch, n, list)) || (st = find_had(&c)))
         return st;
-    for (uint32_t m = 0; m < n; m++) {
+    for (uint32_t m = 0; m < n && c.looked < MOST_LOOKED; m++) {
         bs_gap gap;
 
         /* The target alone would open itself; a molecule that something makes is no gap. */

@@ -25,7 +25,7 @@
 /* ---- Options ----------------------------------------------------------------------------------
  */
 
-static bs_status check_options(bs_ctx *cx, const bs_plan_opts *o)
+bs_status bs_plan__check(bs_ctx *cx, const bs_plan_opts *o)
 {
     const bs_plan_limits *l = &o->limits;
 
@@ -70,7 +70,7 @@ static double least_step(const bs_plan_state *plan)
     return least;
 }
 
-static void read_options(bs_plan_state *plan)
+void bs_plan__read_options(bs_plan_state *plan)
 {
     const bs_plan_opts *o = plan->opts;
 
@@ -125,7 +125,7 @@ static void pass_progress(void *payload, const bs_plan_progress *now)
         plan->trace_status = plan->opts->trace(plan->opts->payload, plan->cx, &event);
 }
 
-static bs_status explore(bs_plan_state *plan, const bs_mol *target, const char *smiles)
+bs_status bs_plan__explore(bs_plan_state *plan)
 {
     const bs_plan_opts *o = plan->opts;
     bs_explore_calls calls = {
@@ -148,8 +148,10 @@ static bs_status explore(bs_plan_state *plan, const bs_mol *target, const char *
         .least_step = least_step(plan),
     };
 
-    bs_explore__init(&plan->x, plan->cx, &calls, &limits, o->mode);
-    return bs_explore__run(&plan->x, target, smiles);
+    if (!plan->x.cx)
+        bs_explore__init(&plan->x, plan->cx, &calls, &limits, o->mode);
+    plan->x.limits = limits;
+    return bs_explore__run(&plan->x, plan->mol, plan->smiles);
 }
 
 static bs_status say_why(bs_plan_state *plan, bs_routes *list)
@@ -312,7 +314,7 @@ static bs_status fill_list(bs_plan_state *plan, bs_arena *home, bs_routes **out)
  * Makes the list. After a stop the flag stays set, and whoever polls it would refuse to work, so
  * the context gets a flag at rest meanwhile; what remains to be done is bounded.
  */
-static bs_status finish(bs_plan_state *plan, bs_routes **out)
+bs_status bs_plan__finish(bs_plan_state *plan, bs_routes **out)
 {
     atomic_bool *stop = plan->cx->stop;
     atomic_bool rest;
@@ -326,44 +328,5 @@ static bs_status finish(bs_plan_state *plan, bs_routes **out)
     st = fill_list(plan, &home, out);
     bs_arena_free(&home);
     plan->cx->stop = stop;
-    return st;
-}
-
-static void drop(bs_plan_state *plan)
-{
-    if (plan->x.cx)
-        bs_explore__free(&plan->x);
-    bs_guess__free(&plan->guess);
-    bs_constraint__free(plan);
-    bs_gate_free(plan->cx->gate, plan->tallies, plan->tally_room * sizeof *plan->tallies);
-    bs_map_free(&plan->known_index);
-    bs_map_free(&plan->detail_index);
-    bs_gate_free(plan->cx->gate, plan->details, plan->detail_room * sizeof *plan->details);
-    bs_arena_free(&plan->arena);
-}
-
-bs_status bs_plan(bs_ctx *cx, const bs_mol *target, const bs_plan_opts *opts, bs_routes **out)
-{
-    bs_plan_state plan = {.cx = cx, .opts = opts};
-    bs_mol *mol;
-    char *smiles;
-    bs_status st;
-
-    *out = NULL;
-    if ((st = check_options(cx, opts)) != BS_OK)
-        return st;
-    bs_arena_init(&plan.arena, cx->gate);
-    bs_map_init(&plan.known_index, cx);
-    bs_map_init(&plan.detail_index, cx);
-    read_options(&plan);
-    if ((st = bs_constraint__init(&plan, target, &target)) == BS_OK &&
-        (st = bs_plan__start_counts(&plan)) == BS_OK &&
-        (st = bs_known__read(&plan)) == BS_OK &&
-        (st = bs_guess__init(&plan.guess, cx, opts->shelf)) == BS_OK &&
-        (st = bs_smiles_canonical(cx, &plan.arena, target, 0, &smiles)) == BS_OK &&
-        (st = bs_smiles_read(cx, &plan.arena, smiles, strlen(smiles), NULL, &mol)) == BS_OK &&
-        (st = explore(&plan, mol, smiles)) == BS_OK)
-        st = finish(&plan, out);
-    drop(&plan);
     return st;
 }

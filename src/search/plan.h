@@ -76,7 +76,25 @@ typedef struct bs_plan_state {
     int routes_seen;        /* by the last enumeration */
     long looked_at;         /* routes, by the last enumeration */
     uint32_t target;
+    bs_plan_opts own; /* that `opts` points to, but while a change is tried */
+    const bs_mol *mol; /* the target, with its SMILES */
+    char *smiles;
 } bs_plan_state;
+
+/* Checks options. Errors as bs_plan(). */
+bs_status bs_plan__check(bs_ctx *cx, const bs_plan_opts *opts);
+
+/* Works out what follows from the options. */
+void bs_plan__read_options(bs_plan_state *plan);
+
+/* Explores, or goes on. */
+bs_status bs_plan__explore(bs_plan_state *plan);
+
+/*
+ * Makes the list of routes from what was explored. After a stop it does so with a stop flag at
+ * rest.
+ */
+bs_status bs_plan__finish(bs_plan_state *plan, bs_routes **out);
 
 /* Reads the known steps of the options. Errors as bs_plan(). */
 bs_status bs_known__read(bs_plan_state *plan);
@@ -92,6 +110,10 @@ bs_status bs_plan__admit(void *payload, bs_ctx *cx, const char *product, bs_prop
                          bool *admitted);
 bs_status bs_plan__meet(void *payload, bs_ctx *cx, const bs_mol *mol, const char *smiles,
                         bs_meeting *out);
+
+/* Asks the user's functions whether a step may be used, and what it costs. */
+bs_status bs_plan__ask(bs_plan_state *plan, bs_ctx *cx, const char *product,
+                       bs_proposal *proposal, bool *admitted);
 
 /* Writes what the definition behind a tag says; strings are those of the definition. */
 void bs_plan__fill_way(const bs_plan_state *plan, uint32_t tag, bs_route_way *way);
