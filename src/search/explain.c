@@ -26,7 +26,7 @@ bs_status bs_plan__count(bs_plan_state *plan, const char *product, uint32_t tag,
     tally->found++;
     tally->barred += whose == BS_REFUSED_BY_CONSTRAINT;
     tally->disallowed += whose == BS_REFUSED_BY_ALLOW;
-    if (!(tag & BS_PLAN_KNOWN)) {
+    if ((int64_t)tag < plan->count_count) { /* no known step, nor a rule that came later */
         plan->counts[tag].found++;
         plan->counts[tag].refused += whose != BS_ADMITTED;
     }
