@@ -13,6 +13,7 @@ typedef struct saved {
     bs_graph_mol *mols;
     bs_graph_way *ways;
     double admitted_cost, admitted_count;
+    double step_cost, clash_cost;
 } saved;
 
 static bs_status save(bs_plan_state *plan, bs_arena *home, saved *s)
@@ -20,7 +21,12 @@ static bs_status save(bs_plan_state *plan, bs_arena *home, saved *s)
     const bs_graph *graph = &plan->x.graph;
     bs_status st;
 
-    *s = (saved){.admitted_cost = plan->admitted_cost, .admitted_count = plan->admitted_count};
+    *s = (saved){
+        .admitted_cost = plan->admitted_cost,
+        .admitted_count = plan->admitted_count,
+        .step_cost = plan->step_cost,
+        .clash_cost = plan->clash_cost,
+    };
     if ((st = bs_new(plan->cx, home, (size_t)graph->mol_count + 1, &s->mols)) != BS_OK ||
         (st = bs_new(plan->cx, home, (size_t)graph->way_count + 1, &s->ways)) != BS_OK)
         return st;
@@ -43,7 +49,8 @@ static void put_back(bs_plan_state *plan, const saved *s)
     plan->admitted_count = s->admitted_count;
 }
 
-/* ---- Prices ------------------------------------------------------------------------------------ */
+/* ---- Prices ------------------------------------------------------------------------------------
+ */
 
 /* Asks the shelf again; `*open` counts molecules that were not worth expanding and now are. */
 static bs_status set_prices(bs_plan_state *plan, uint32_t *open)
@@ -68,7 +75,20 @@ static bs_status set_prices(bs_plan_state *plan, uint32_t *open)
     return st;
 }
 
-/* ---- Steps ------------------------------------------------------------------------------------- */
+/* ---- Steps -------------------------------------------------------------------------------------
+ */
+
+/* Clashes that the cost of a way of a rule tells of; a cost function of the user's tells nothing.
+ */
+static double count_clashes(const bs_plan_state *plan, const saved *before, const bs_graph_way *way)
+{
+    double extra;
+
+    if ((way->tag & BS_PLAN_KNOWN) || plan->own.cost || !(before->clash_cost > 0))
+        return 0;
+    extra = before->step_cost + bs_rules_transform(plan->opts->rules, (int)way->tag)->step_cost;
+    return fmax(0, way->cost - extra) / before->clash_cost;
+}
 
 static double default_cost(const bs_plan_state *plan, uint32_t tag)
 {
@@ -108,7 +128,7 @@ static bs_status ask_way(bs_plan_state *plan, uint32_t w, bs_proposal *p)
     return st;
 }
 
-static bs_status set_costs(bs_plan_state *plan, const bs_rerank *what)
+static bs_status set_costs(bs_plan_state *plan, const bs_rerank *what, const saved *before)
 {
     bs_graph *graph = &plan->x.graph;
     bs_status st = BS_OK;
@@ -117,14 +137,17 @@ static bs_status set_costs(bs_plan_state *plan, const bs_rerank *what)
         bs_proposal p = {.cost = graph->ways[w].cost, .tag = graph->ways[w].tag};
 
         if (what->costs)
-            p.cost = graph->ways[w].cost = default_cost(plan, p.tag);
+            p.cost = graph->ways[w].cost =
+                default_cost(plan, p.tag) +
+                plan->clash_cost * count_clashes(plan, before, &before->ways[w]);
         if ((what->costs && plan->opts->cost) || (what->steps && plan->opts->allow))
             st = ask_way(plan, w, &p);
     }
     return st;
 }
 
-/* ---- Without ------------------------------------------------------------------------------------ */
+/* ---- Without ------------------------------------------------------------------------------------
+ */
 
 /* Nobody sells a struck compound, and no step makes or uses it. */
 static void strike(bs_graph *graph, uint32_t mol)
@@ -156,7 +179,8 @@ static bs_status strike_all(bs_plan_state *plan, const bs_rerank *what, bs_arena
     return st;
 }
 
-/* ---- All ---------------------------------------------------------------------------------------- */
+/* ---- All ----------------------------------------------------------------------------------------
+ */
 
 /* Why the list may miss routes that a new search would find. */
 static bs_status doubt(bs_plan_state *plan, uint32_t open, bs_routes *list)
@@ -180,8 +204,8 @@ static bs_status doubt(bs_plan_state *plan, uint32_t open, bs_routes *list)
     return st;
 }
 
-static bs_status rerank(bs_plan_state *plan, const bs_rerank *what, bs_arena *home,
-                        bs_routes **out)
+static bs_status rerank(bs_plan_state *plan, const bs_rerank *what, const saved *before,
+                        bs_arena *home, bs_routes **out)
 {
     uint32_t open = 0;
     bs_status st = BS_OK;
@@ -189,7 +213,7 @@ static bs_status rerank(bs_plan_state *plan, const bs_rerank *what, bs_arena *ho
     if (what->prices)
         st = set_prices(plan, &open);
     if (st == BS_OK)
-        st = set_costs(plan, what);
+        st = set_costs(plan, what, before);
     if (st == BS_OK)
         st = strike_all(plan, what, home);
     if (st == BS_OK)
@@ -219,7 +243,7 @@ bs_status bs_search_rerank(bs_search *search, const bs_plan_opts *opts, const bs
     if ((st = save(plan, &home, &before)) == BS_OK) {
         plan->opts = &changed;
         bs_plan__read_options(plan);
-        st = rerank(plan, what, &home, out);
+        st = rerank(plan, what, &before, &home, out);
         plan->opts = &plan->own;
         bs_plan__read_options(plan);
         put_back(plan, &before);

@@ -5,7 +5,8 @@
 
 #include <string.h>
 
-/* ---- Options ---------------------------------------------------------------------------------- */
+/* ---- Options ----------------------------------------------------------------------------------
+ */
 
 /* A copy of an array of the caller, or NULL. */
 static bs_status copy_array(bs_plan_state *plan, const void *from, int count, size_t size,
@@ -75,7 +76,8 @@ static bs_status copy_options(bs_plan_state *plan)
     return st;
 }
 
-/* ---- Life ------------------------------------------------------------------------------------- */
+/* ---- Life -------------------------------------------------------------------------------------
+ */
 
 static bs_status read_target(bs_plan_state *plan, const bs_mol *target)
 {
@@ -96,15 +98,13 @@ static bs_status start(bs_search *search, const bs_mol *target)
 
     bs_plan__read_options(plan);
     if (st == BS_OK && (st = bs_constraint__init(plan, target, &target)) == BS_OK &&
-        (st = bs_plan__start_counts(plan)) == BS_OK &&
-        (st = bs_known__read(plan)) == BS_OK &&
+        (st = bs_plan__start_counts(plan)) == BS_OK && (st = bs_known__read(plan)) == BS_OK &&
         (st = bs_guess__init(&plan->guess, plan->cx, plan->own.shelf)) == BS_OK)
         st = read_target(plan, target);
     return st;
 }
 
-bs_status bs_search_new(bs_ctx *cx, const bs_mol *target, const bs_plan_opts *opts,
-                        bs_search **out)
+bs_status bs_search_new(bs_ctx *cx, const bs_mol *target, const bs_plan_opts *opts, bs_search **out)
 {
     bs_search *search;
     bs_status st;
