@@ -105,7 +105,7 @@ disconnection "cyclic-amine-from-amino-ketone" {
 
 disconnection "cyclic-amine-from-amino-alcohol" {
     about = "Ring closure of an amino alcohol by activation of the hydroxyl group; five- or six-membered ring",
-    target = "[NX3;r5,r6;+0;!$(N-[C,S]=[O,S,N]);!$(N-[N,O]):1]-;@[CX4;H2,H1;r5,r6;!$(C-[#7,#8,#16]~[CX3]=O);$([CH2]),$([CH]-c):2]",
+    target = "[NX3;r5,r6;+0;!$(N-[C,S]=[O,S,N]);!$(N-[N,O]):1]-;@[CX4;H2,H1;r5,r6;!$(C-[#7,#8,#16]~[CX3]=O);$([CH]-!@c):2]",
     from = "([N:1].[C:2]O)",
     conditions = "socl2",
     also_attacks = { "other alcohol", "free acid", "other primary amine" },
@@ -114,7 +114,7 @@ disconnection "cyclic-amine-from-amino-alcohol" {
     cautions = { "thionyl chloride" },
     source = "March's Advanced Organic Chemistry; from memory",
     example { "CN1CCCC1c1cccnc1", from = { "CNCCCC(O)c1cccnc1" } },
-    example { "C1CCN(CC1)Cc1ccccc1", from = { "OCCCCCNCc1ccccc1" } },
+    example { "C1CC(NC1)c1ccccc1", from = { "NCCCC(O)c1ccccc1" } },
     refuse { "O=C1CCCN1C" }, -- a lactam
 }
 
@@ -290,4 +290,83 @@ disconnection "n-amino-hydrazone" {
     example { "O=C1CN(N=Cc2ccc([N+](=O)[O-])o2)C(=O)N1", from = { "NN1CC(=O)NC1=O", "O=Cc1ccc([N+](=O)[O-])o1" } },
     example { "O=C1OCCN1N=Cc1ccco1", from = { "NN1CCOC1=O", "O=Cc1ccco1" } },
     refuse { "CN(C)N=Cc1ccccc1" }, -- a simple hydrazine
+}
+
+disconnection "haloamide-amine-branched" {
+    about = "Amine from an α-chloro or α-bromo amide at a secondary carbon",
+    target = "[NX3;!$(N-[C,S]=[O,S,N]);!$(N-c);!$(N-[N,O]):1]-!@[CX4;H1:2](-[CX4:5])-[CX3:3](=[OX1:4])-[NX3:6]",
+    cut = { 2, 1 },
+    acceptor = { 2, "secondary-halide" },
+    donor = { 1, "amine" },
+    conditions = "amine-heat",
+    also_attacks = { "other primary amine", "other alkyl halide", "acyl halide", "thiol", "free acid" },
+    recipe = "amine (2-3 equiv.), K2CO3, MeCN or toluene, 80 °C; KI with the chloride",
+    yield = { 60, 85 },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "CCCNC(C)C(=O)Nc1ccccc1C", from = { "CCCN", "CC(Br)C(=O)Nc1ccccc1C" } },
+    example { "CC(N1CCOCC1)C(=O)Nc1ccccc1", from = { "C1COCCN1", "CC(Br)C(=O)Nc1ccccc1" } },
+    refuse { "CC(NC(C)=O)C(=O)N(C)C" }, -- an amide nitrogen
+}
+
+disconnection "amino-ester-from-halo-ester" {
+    about = "Amine from an α-halo ester at a benzylic or secondary carbon",
+    target = "[NX3;!$(N-[C,S]=[O,S,N]);!$(N-c);!$(N-[N,O]):1]-!@[CX4;H1:2](-[#6;c,CX4:5])-[CX3:3](=[OX1:4])-[OX2;H0:6]",
+    cut = { 2, 1 },
+    acceptor = { 2, "secondary-halide" },
+    donor = { 1, "amine" },
+    conditions = "alkylation",
+    also_attacks = { "other primary amine", "other alkyl halide", "acyl halide", "thiol", "phenol",
+        "free acid" },
+    recipe = "K2CO3 or NaHCO3, MeCN, MeOH or DMF, rt to 60 °C; racemic",
+    yield = { 60, 88 },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "COC(=O)C(c1ccccc1Cl)N1CCc2sccc2C1", from = { "C1CNCc2ccsc12", "COC(=O)C(Br)c1ccccc1Cl" } },
+    example { "CCOC(=O)C(C)N1CCOCC1", from = { "C1COCCN1", "CCOC(=O)C(C)Br" } },
+    refuse { "COC(=O)C(C)NC(C)=O" }, -- an amide nitrogen
+}
+
+disconnection "primary-carbamate" {
+    about = "Primary carbamate from an alcohol and cyanate (or chlorosulfonyl isocyanate)",
+    target = "[CX4:1][OX2:2]-[CX3:3](=[OX1:4])-[NX3;H2:5]",
+    from = "[C:1][O:2].[N:5]=[C:3]=[O:4]",
+    conditions = "acid-dry-strong",
+    also_attacks = { "primary amine", "other alcohol", "acetal", "Boc amine" },
+    recipe = "NaOCN, CF3CO2H, CH2Cl2 or toluene; also: ClSO2NCO, then water",
+    yield = { 70, 92 },
+    source = "Loev, Kormendy, J. Org. Chem. 1963, 28, 3421; from memory",
+    example { "CCCC(C)(COC(N)=O)CO", from = { "CCCC(C)(CO)CO", "N=C=O" } },
+    example { "NC(=O)OCc1ccccc1", from = { "OCc1ccccc1", "N=C=O" } },
+    refuse { "CCOC(=O)NC" }, -- a substituted nitrogen
+}
+
+disconnection "trityl-azole" {
+    about = "N-Tritylation of imidazole, triazole or another azole",
+    target = "[n;X3;+0;r5:1]-!@[CX4;H0:2](-[c:3])(-[c:4])-[c:5]",
+    cut = { 2, 1 },
+    acceptor = { 2, "secondary-halide" },
+    donor = { 1, "azole" },
+    conditions = "alkylation",
+    also_attacks = { "primary amine", "thiol", "other azole NH", "primary alcohol" },
+    recipe = "Et3N or K2CO3, MeCN or DMF, rt to 60 °C",
+    yield = { 75, 95 },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "Clc1ccccc1C(c1ccccc1)(c1ccccc1)n1ccnc1",
+        from = { "ClC(c1ccccc1)(c1ccccc1)c1ccccc1Cl", "c1c[nH]cn1" } },
+    example { "c1ccc(cc1)C(c1ccccc1)(c1ccccc1)n1ccnc1", from = { "ClC(c1ccccc1)(c1ccccc1)c1ccccc1", "c1c[nH]cn1" } },
+    refuse { "CC(C)(C)n1ccnc1" }, -- a tertiary alkyl halide eliminates
+}
+
+disconnection "leuckart-formamide" {
+    about = "Formamide from a ketone by the Leuckart reaction",
+    target = "[CX4;H1:1]([#6;c,CX4:2])([#6;c,CX4:3])-[NX3;H1:4]-[CX3;H1:5]=[OX1:6]",
+    from = "[C:1](=O)([#6:2])[#6:3].[N:4]-[C:5]=[O:6]",
+    conditions = "heat-200",
+    also_attacks = { "aldehyde", "ester", "imine", "nitro" },
+    recipe = "formamide or ammonium formate, HCO2H, 160-185 °C",
+    yield = { 60, 85 },
+    cautions = { "formic acid", "formamide" },
+    source = "Ingersoll, Org. Synth. Coll. Vol. 2, 503; from memory",
+    example { "CC(NC=O)c1ccc(Br)cc1", from = { "CC(=O)c1ccc(Br)cc1", "NC=O" } },
+    example { "O=CNC1CCCCC1", from = { "O=C1CCCCC1", "NC=O" } },
+    refuse { "CCNC=O" }, -- a primary carbon
 }

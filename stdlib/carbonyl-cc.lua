@@ -239,7 +239,7 @@ disconnection "dieckmann" {
 
 disconnection "nitroaldol-condensation" {
     about = "Nitroalkene from an aromatic aldehyde; E alkene",
-    target = "[c:1]/[CX3;H1;!R:2]=[CX3;!R:3]/[NX3+:4](=[OX1:5])-[O-:6]",
+    target = "[c:1]/?[CX3;H1;!R:2]=[CX3;!R:3]/?[NX3+:4](=[OX1:5])-[O-:6]",
     cut = { 2, 3 },
     acceptor = { 2, "alkylidene" },
     donor = { 3, "nitronate" },
@@ -1208,7 +1208,7 @@ disconnection "nitrile-lda-alkylation" {
 disconnection "claisen-schmidt" {
     about = "Claisen-Schmidt condensation; E alkene",
     rxno = "RXNO:0000595",
-    target = "[c:1]/[CX3;H1;!R:2]=[CX3;H1;!R:3]/[CX3;$(C([#6])[#6]):4]=[OX1:5]",
+    target = "[c:1]/?[CX3;H1;!R:2]=[CX3;H1;!R:3]/?[CX3;$(C([#6])[#6]):4]=[OX1:5]",
     cut = { 2, 3 },
     acceptor = { 2, "alkylidene" },
     donor = { 3, "enolate" },
@@ -1257,7 +1257,7 @@ disconnection "knoevenagel" {
 disconnection "doebner" {
     about = "Doebner reaction; E alkene",
     rxno = "RXNO:0000126",
-    target = "[#6;$(c),$([CX4]):1]/[CX3;H1;!R:2]=[CX3;H1;!R:3]/[CX3:4](=[OX1:5])-[OX2H1:6]",
+    target = "[#6;$(c),$([CX4]):1]/?[CX3;H1;!R:2]=[CX3;H1;!R:3]/?[CX3:4](=[OX1:5])-[OX2H1:6]",
     from = "[#6:1][C:2]=O.[C:3]([C:4](=[O:5])[O:6])C(=O)O",
     conditions = "base-aq-mild",
     also_attacks = { "other aldehyde", "acyl halide" },
@@ -1324,7 +1324,7 @@ disconnection "michael-malonate" {
 disconnection "perkin" {
     about = "Perkin reaction; E alkene",
     rxno = "RXNO:0000003",
-    target = "[c:1]/[CX3;H1;!R:2]=[CX3;H1;!R:3]/[CX3:4](=[OX1:5])-[OX2H1:6]",
+    target = "[c:1]/?[CX3;H1;!R:2]=[CX3;H1;!R:3]/?[CX3:4](=[OX1:5])-[OX2H1:6]",
     from = "[c:1][C:2]=O.[C:3][C:4](=[O:5])[O:6]C(C)=O",
     conditions = "heat-200",
     also_attacks = { "free alcohol", "phenol", "primary amine", "secondary amine" },
@@ -1440,7 +1440,7 @@ disconnection "wittig-z" {
 disconnection "wittig-stabilised" {
     about = "Wittig reaction with a stabilised ylide; E alkene; aldehydes only",
     rxno = "RXNO:0000015",
-    target = "[#6:1]/[CX3;H1;!R:2]=[CX3;!R:3]/[CX3;$(C(=O)([#6])[#6]),$(C(=O)[OX2][#6]),H1:4]=[OX1:5]",
+    target = "[#6:1]/?[CX3;H1;!R:2]=[CX3;!R:3]/?[CX3;$(C(=O)([#6])[#6]),$(C(=O)[OX2][#6]),H1:4]=[OX1:5]",
     cut = { 2, 3 },
     acceptor = { 2, "alkylidene" },
     donor = { 3, "ylide" },
@@ -1476,7 +1476,7 @@ disconnection "wittig-methylenation" {
 disconnection "hwe-e" {
     about = "Horner-Wadsworth-Emmons reaction; E alkene",
     rxno = "RXNO:0000056",
-    target = "[#6:1]/[CX3;H1;!R:2]=[CX3;!R:3]/[#6;$([CX3](=O)([#6])[#6]),$([CX3](=O)[OX2][#6]),$([CX3](=O)[NX3]),$([CX2]#N):4]",
+    target = "[#6:1]/?[CX3;H1;!R:2]=[CX3;!R:3]/?[#6;$([CX3](=O)([#6])[#6]),$([CX3](=O)[OX2][#6]),$([CX3](=O)[NX3]),$([CX2]#N):4]",
     cut = { 2, 3 },
     acceptor = { 2, "alkylidene" },
     donor = { 3, "phosphonate" },
@@ -1494,7 +1494,7 @@ disconnection "hwe-e" {
 disconnection "hwe-benzylic" {
     about = "Horner-Wadsworth-Emmons reaction of a benzylic phosphonate (E-stilbene); E",
     rxno = "RXNO:0000056",
-    target = "[c:1]/[C;X3;H1;!R:2]=[C;X3;H1;!R:3]/[c:4]",
+    target = "[c:1]/?[C;X3;H1;!R:2]=[C;X3;H1;!R:3]/?[c:4]",
     cut = { 2, 3 },
     acceptor = { 2, "alkylidene" },
     donor = { 3, "phosphonate" },

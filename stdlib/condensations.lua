@@ -456,3 +456,64 @@ interconversion "pyrazole-nitration" {
     example { "O=[N+]([O-])c1cn[nH]c1", from = { "c1cn[nH]c1", "O[N+](=O)[O-]" } },
     refuse { "Cn1ccc([N+](=O)[O-])n1" }, -- C3: a neighbour of nitrogen
 }
+
+disconnection "erlenmeyer-azlactone" {
+    about = "Erlenmeyer azlactone from an aromatic aldehyde and an acylglycine; Z",
+    target = "[c:1]-[CX3;H1:2]=[CX3:3]1-[CX3:4](=[OX1:5])-[OX2:6]-[CX3:7](-[#6:8])=[NX2:9]-1",
+    from = "[c:1][C:2]=O.[C:3]([N:9][C:7](=[O:6])[#6:8])[C:4](=[O:5])O",
+    conditions = "acylation",
+    also_attacks = { "alcohol", "phenol", "primary amine", "other aldehyde" },
+    recipe = "NaOAc, Ac2O, 100 °C",
+    yield = { 60, 85 },
+    cautions = { "acetic anhydride" },
+    source = "Buck, Ide, Org. Synth. Coll. Vol. 2, 55; from memory",
+    example { "O=C1OC(c2ccccc2)=NC1=Cc1ccc(OC)c(OC)c1", from = { "O=Cc1ccc(OC)c(OC)c1", "O=C(O)CNC(=O)c1ccccc1" } },
+    example { "CC1=NC(=Cc2ccccc2)C(=O)O1", from = { "O=Cc1ccccc1", "CC(=O)NCC(=O)O" } },
+    refuse { "CC1=NCC(=O)O1" }, -- no arylidene group
+}
+
+interconversion "azlactone-hydrolysis" {
+    about = "α-Acylamino cinnamic acid from an azlactone by mild hydrolysis",
+    target = "[c:1][CX3;H1:2]=[CX3:3]([NX3;H1:9][CX3:7](=[OX1:6])[#6:8])[CX3:4](=[OX1:5])[OX2H]",
+    from = "[c:1][C:2]=[C:3]1[C:4](=[O:5])[O:6][C:7]([#6:8])=[N:9]1",
+    conditions = "base-aq-mild",
+    also_attacks = { "other ester", "acyl halide", "anhydride" },
+    recipe = "water-acetone, reflux, or 1 % NaOH, warm",
+    yield = { 80, 95 },
+    source = "Herbst, Shemin, Org. Synth. Coll. Vol. 2, 1; from memory",
+    example { "CC(=O)NC(=Cc1ccccc1)C(=O)O", from = { "CC1=NC(=Cc2ccccc2)C(=O)O1" } },
+    example { "O=C(NC(=Cc1ccccc1)C(=O)O)c1ccccc1", from = { "O=C1OC(c2ccccc2)=NC1=Cc1ccccc1" } },
+    refuse { "CC(=O)NCC(=O)O" }, -- no double bond
+}
+
+disconnection "chroman-from-allylic-alcohol" {
+    about = "2,2-Disubstituted chroman from a phenol and a tertiary allylic alcohol (vitamin E type)",
+    target = "[OX2;r6:1]1-[c:2]:[c:3]-[CX4;H2:4]-[CX4;H2:5]-[CX4;H0:6]1(-[CH3:7])-[CX4:8]",
+    from = "[O:1]-[c:2]:[cH:3].[C:4]=[C:5]-[C:6](O)(-[C:7])-[C:8]",
+    conditions = "lewis-acid",
+    also_attacks = { "other alkene", "alcohol", "acetal" },
+    recipe = "ZnCl2 or BF3·OEt2, HCl, toluene or AcOEt, 40-100 °C",
+    yield = { 65, 92 },
+    cautions = { "zinc chloride" },
+    source = "Karrer, Fritzsche, Ringier, Salomon, Helv. Chim. Acta 1938, 21, 520; from memory",
+    example { "Cc1c(C)c2OC(C)(CCCC(C)C)CCc2c(C)c1O", from = { "Cc1cc(O)c(C)c(C)c1O", "C=CC(C)(O)CCCC(C)C" } },
+    example { "CC1(C)CCc2cc(O)ccc2O1", from = { "Oc1ccc(O)cc1", "C=CC(C)(C)O" } },
+    refuse { "C1Cc2ccccc2OC1" }, -- no geminal groups
+}
+
+disconnection "picoline-condensation" {
+    about = "Condensation of 2- or 4-methylpyridine (or quinoline) with an aromatic aldehyde; E",
+    target = "[c;$(c1nc[c,n]cc1),$(c1ccncc1),$(c1nc2ccccc2cc1):1]/?[CX3;H1:2]=[CX3;H1:3]/?[c:4]",
+    cut = { 3, 2 },
+    acceptor = { 3, "alkylidene" },
+    donor = { 2, "stabilised-carbanion" },
+    conditions = "acid-hot-dry",
+    also_attacks = { "other aldehyde", "alcohol", "primary amine" },
+    recipe = "Ac2O or ZnCl2, reflux; also: KOtBu, DMF",
+    yield = { 55, 85 },
+    cautions = { "acetic anhydride" },
+    source = "Joule, Mills, Heterocyclic Chemistry; from memory",
+    example { "C(=Cc1ccccn1)c1ccccc1", from = { "O=Cc1ccccc1", "Cc1ccccn1" } },
+    example { "C(=Cc1ccncc1)c1ccccc1", from = { "O=Cc1ccccc1", "Cc1ccncc1" } },
+    refuse { "C(=Cc1cccnc1)c1ccccc1" }, -- 3-methylpyridine is not acidic enough
+}

@@ -555,7 +555,7 @@ disconnection "sonogashira" {
 disconnection "heck-acrylate" {
     about = "Heck reaction with an electron-poor alkene; β carbon of the acceptor, E",
     rxno = "RXNO:0000024",
-    target = "[c:1]/[CX3;H1;!R:2]=[CX3;H1;!R:3]/[#6;$([CX3](=O)([#6])[#6]),$([CX3](=O)[OX2][#6]),$([CX3](=O)[NX3]),$([CX2]#N):4]",
+    target = "[c:1]/?[CX3;H1;!R:2]=[CX3;H1;!R:3]/?[#6;$([CX3](=O)([#6])[#6]),$([CX3](=O)[OX2][#6]),$([CX3](=O)[NX3]),$([CX2]#N):4]",
     cut = { 1, 2 },
     acceptor = { 1, "aryl-halide" },
     donor = { 2, "alkene" },

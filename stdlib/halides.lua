@@ -464,3 +464,18 @@ disconnection "ritter-bromide" {
     example { "CC(=O)NC(C)(C)C", from = { "CC(C)(C)Br", "CC#N" } },
     refuse { "CC(=O)NCC" }, -- a primary carbon
 }
+
+interconversion "trityl-chloride" {
+    about = "Triarylmethyl chloride from the carbinol",
+    target = "[CX4;H0:1](-[c:2])(-[c:3])(-[c:4])-[ClX1]",
+    from = "[C:1](-[c:2])(-[c:3])(-[c:4])[OH]",
+    conditions = "socl2",
+    also_attacks = { "alcohol", "free acid", "primary amide" },
+    recipe = "SOCl2 or AcCl, toluene, 50-80 °C",
+    yield = { 85, 97 },
+    cautions = { "thionyl chloride" },
+    source = "Bachmann, Org. Synth. Coll. Vol. 3, 841; from memory",
+    example { "ClC(c1ccccc1)(c1ccccc1)c1ccccc1Cl", from = { "OC(c1ccccc1)(c1ccccc1)c1ccccc1Cl" } },
+    example { "ClC(c1ccccc1)(c1ccccc1)c1ccccc1", from = { "OC(c1ccccc1)(c1ccccc1)c1ccccc1" } },
+    refuse { "CC(C)(Cl)c1ccccc1" }, -- one aryl group only
+}

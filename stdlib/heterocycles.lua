@@ -166,7 +166,7 @@ interconversion "fischer-indole-from-hydrazone" {
 
 disconnection "hantzsch-thiazole-chloride" {
     about = "Hantzsch thiazole synthesis with an α-chloro ketone or chloroacetaldehyde; S to the carbon that bears Cl",
-    target = "[s;R1:1]1:[c;R1;$(c-[#6,#7]):2]:[nX2:3]:[c;R1:4]:[c;R1:5]:1",
+    target = "[s;R1:1]1:[c;R1;$(c-[#6,#7]),H1:2]:[nX2:3]:[c;R1:4]:[c;R1:5]:1",
     from = "[S:1]=[C:2]-[N:3].O=[C:4]-[C:5]Cl",
     conditions = "amine-heat",
     also_attacks = { "other alkyl halide", "primary amine", "thiol" },
@@ -1811,4 +1811,93 @@ interconversion "quinolone-decarboxylation" {
     example { "O=c1cc[nH]c2cc(Cl)ccc12", from = { "OC(=O)c1c[nH]c2cc(Cl)ccc2c1=O" } },
     example { "O=c1cc[nH]c2ccccc12", from = { "OC(=O)c1c[nH]c2ccccc2c1=O" } },
     refuse { "c1ccc2ncccc2c1" }, -- no oxo group
+}
+
+disconnection "pyrazolidinedione" {
+    about = "Pyrazolidine-3,5-dione from a malonate and a 1,2-diarylhydrazine",
+    target = "[NX3:1]1(-[c:6])-[NX3:2](-[c:7])-[CX3:3](=[OX1:8])-[CX4:4]-[CX3:5]1=[OX1:9]",
+    from = "[N:1](-[c:6])-[N:2]-[c:7].CCO[C:3](=[O:8])[C:4][C:5](=[O:9])OCC",
+    conditions = "alkoxide",
+    also_attacks = { "other ester", "aldehyde", "alkyl halide", "acyl halide" },
+    recipe = "NaOEt, xylene, 130-150 °C, ethanol distilled off; also: malonyl chloride, pyridine",
+    yield = { 55, 80 },
+    cautions = { "sodium ethoxide" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "CCCCC1C(=O)N(c2ccccc2)N(c2ccccc2)C1=O",
+        from = { "c1ccc(NNc2ccccc2)cc1", "CCCCC(C(=O)OCC)C(=O)OCC" } },
+    example { "O=C1CC(=O)N(c2ccccc2)N1c1ccccc1", from = { "c1ccc(NNc2ccccc2)cc1", "CCOC(=O)CC(=O)OCC" } },
+    refuse { "O=C1CCNN1" }, -- one carbonyl group only
+}
+
+disconnection "phthalazinone" {
+    about = "Phthalazin-1-one from a 2-acylbenzoic acid and hydrazine",
+    target = "[nH:1]1:[n:2]:[c:3]:[c;$(c1ccccc1):4]:[c;$(c1ccccc1):5]:[c:6]1=[OX1:7]",
+    from = "[N:1][N:2].O=[C:3]-[c:4]:[c:5]-[C:6](=[O:7])O",
+    conditions = "hydrazine",
+    also_attacks = { "other ketone", "other ester", "acyl halide" },
+    recipe = "N2H4·H2O, EtOH or AcOH, reflux",
+    yield = { 80, 96 },
+    cautions = { "hydrazine" },
+    source = "Joule, Mills, Heterocyclic Chemistry; from memory",
+    example { "O=c1[nH]ncc2ccccc12", from = { "NN", "O=Cc1ccccc1C(=O)O" } },
+    example { "O=c1[nH]nc(c2ccccc12)-c1ccccc1", from = { "NN", "O=C(O)c1ccccc1C(=O)c1ccccc1" } },
+    refuse { "O=c1cccn[nH]1" }, -- no benzo ring
+}
+
+disconnection "pyrrolidinone-from-chlorobutyryl" {
+    about = "N-Substituted pyrrolidinone from a primary amine or amide and 4-chlorobutyryl chloride",
+    target = "[NX3:1]1(-[CX4,c:2])-[CX3:3](=[OX1:4])-[CX4;H2:5]-[CX4;H2:6]-[CX4;H2:7]-1",
+    from = "[N:1]-[#6:2].Cl[C:3](=[O:4])[C:5][C:6][C:7]Cl",
+    conditions = "alkoxide",
+    also_attacks = { "other primary amine", "alcohol", "phenol", "thiol", "other alkyl halide" },
+    recipe = "Et3N or KOH, CH2Cl2, 0 °C; then KOH, Bu4NBr, or KOtBu",
+    yield = { 65, 90 },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "CCC(C(N)=O)N1CCCC1=O", from = { "CCC(N)C(N)=O", "O=C(Cl)CCCCl" } },
+    example { "O=C1CCCN1c1ccccc1", from = { "Nc1ccccc1", "O=C(Cl)CCCCl" } },
+    refuse { "O=C1CCCN1" }, -- nothing on nitrogen
+}
+
+disconnection "friedlaender-nitrile" {
+    about = "4-Aminoquinoline from a 2-aminobenzonitrile and a ketone (tacrine)",
+    target = "[nX2:1]1:[c;$(c1ccccc1):2]:[c;$(c1ccccc1):3]:[c:4](-[NX3;H2:7]):[c:5]:[c;$(c-[#6]):6]:1",
+    from = "[N:1]-[c:2]:[c:3]-[C:4]#[N:7].[C:5]-[C:6]=O",
+    conditions = "lewis-acid",
+    also_attacks = { "acetal", "alcohol", "other ketone", "aldehyde" },
+    recipe = "ZnCl2, neat, 120 °C, or BF3·OEt2, toluene, reflux",
+    yield = { 60, 88 },
+    cautions = { "zinc chloride" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "Nc1c2CCCCc2nc2ccccc12", from = { "Nc1ccccc1C#N", "O=C1CCCCC1" } },
+    example { "Nc1c2CCCc2nc2ccccc12", from = { "Nc1ccccc1C#N", "O=C1CCCC1" } },
+    refuse { "Nc1ccnc2ccccc12" }, -- nothing at C2
+}
+
+disconnection "thiazolidinedione" {
+    about = "Thiazolidine-2,4-dione from chloroacetic acid and thiourea",
+    target = "[NX3;H1:1]1-[CX3:2](=[OX1:3])-[CX4;H2,H1:4]-[SX2:5]-[CX3:6]1=[OX1]",
+    from = "[N:1]-[C:6](=[S:5])N.[O:3]=[C:2](O)[C:4]Cl",
+    conditions = "acid-aq-strong",
+    also_attacks = { "ester", "nitrile", "acetal", "Boc carbamate" },
+    recipe = "water, conc. HCl, reflux",
+    yield = { 75, 92 },
+    cautions = { "chloroacetic acid" },
+    source = "Kleemann and Engel, Pharmaceutical Substances; from memory",
+    example { "O=C1CSC(=O)N1", from = { "NC(N)=S", "OC(=O)CCl" } },
+    refuse { "O=C1CSCN1" }, -- one carbonyl group only
+}
+
+interconversion "azinone-thionation" {
+    about = "Thionation of an azinone or purinone (oxo NH form) with phosphorus pentasulfide",
+    target = "[c:1](=[SX1:2]):[nH:3]",
+    from = "[c:1](=O):[nH:3]",
+    conditions = "heat-200",
+    also_attacks = { "ketone", "amide", "alcohol", "ester", "aldehyde" },
+    recipe = "P4S10, pyridine or dioxane, reflux; also: Lawesson reagent",
+    yield = { 65, 92 },
+    cautions = { "phosphorus pentasulfide" },
+    source = "Elion, Burgi, Hitchings, J. Am. Chem. Soc. 1952, 74, 411; from memory",
+    example { "S=c1[nH]cnc2[nH]cnc12", from = { "O=c1[nH]cnc2[nH]cnc12" } },
+    example { "S=c1cccc[nH]1", from = { "O=c1cccc[nH]1" } },
+    refuse { "Sc1ccccc1" }, -- no ring nitrogen
 }

@@ -854,3 +854,18 @@ disconnection "arylacetonitrile-secondary-alkylation" {
     example { "CC(C)C(C#N)c1ccccc1", from = { "N#CCc1ccccc1", "CC(C)Br" } },
     refuse { "CC(C)C(C#N)C" }, -- no aryl group
 }
+
+interconversion "azlactone-to-amino-acid" {
+    about = "Amino acid from an azlactone by reduction and hydrolysis with hydrogen iodide and phosphorus",
+    target = "[NX3;H2:1][CX4;H1:2]([CX4;H2:3][c:4])[CX3:5](=[OX1:6])[OX2H]",
+    from = "[N:1]1=C(c2ccccc2)O[C:5](=[O:6])[C:2]1=[C:3][c:4]",
+    conditions = "acid-aq-strong",
+    also_attacks = { "aryl methyl ether", "nitro", "alkene", "acetal", "ester" },
+    recipe = "red P, HI, Ac2O or AcOH, reflux; racemic; aryl methyl ethers are cleaved",
+    yield = { 60, 80 },
+    cautions = { "hydriodic acid", "phosphorus" },
+    source = "Gillespie, Snyder, Org. Synth. Coll. Vol. 2, 489; from memory",
+    example { "NC(Cc1ccccc1)C(=O)O", from = { "O=C1OC(c2ccccc2)=NC1=Cc1ccccc1" } },
+    example { "NC(Cc1ccc(F)cc1)C(=O)O", from = { "O=C1OC(c2ccccc2)=NC1=Cc1ccc(F)cc1" } },
+    refuse { "NC(C)C(=O)O" }, -- no arylmethyl group
+}

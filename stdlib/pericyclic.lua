@@ -492,7 +492,7 @@ disconnection "ring-closing-metathesis" {
 disconnection "cross-metathesis" {
     about = "Cross metathesis with an acrylate; E (> 20:1)",
     rxno = "RXNO:0000280",
-    target = "[CX4:1]/[CX3;H1;!R:2]=[CX3;H1;!R:3]/[CX3;$(C(=O)[#6,OX2]):4]",
+    target = "[CX4:1]/?[CX3;H1;!R:2]=[CX3;H1;!R:3]/?[CX3;$(C(=O)[#6,OX2]):4]",
     from = "[C:1]-[C:2]=C.C=[C:3]-[C:4]",
     conditions = "pd0",
     also_attacks = { "primary amine", "other terminal alkene" },
