@@ -88,6 +88,7 @@ disconnection "indole-n-acylation" {
     cut = { 2, 1 },
     acceptor = { 2, "acyl" },
     donor = { 1, "azole" },
+    when = function(m) return not m.molecule:has "[$([CX3](=O)[OX2H]),$([OX2H][CX4]),$([OX2H]c)]" end,
     conditions = "base-hindered",
     also_attacks = { "primary amine", "secondary amine", "free alcohol", "phenol", "thiol", "free acid" },
     recipe = "NaH, DMF, 0 °C, then RCOCl; also: NaOH, Bu4NHSO4, CH2Cl2",
