@@ -4,6 +4,7 @@
 
 #include "backsaw/core.h"
 #include "backsaw/mol.h"
+#include "backsaw/descriptor.h"
 #include "backsaw/draft.h"
 #include "backsaw/layout.h"
 #include "backsaw/format.h"

@@ -1,4 +1,5 @@
 /* Tests on the shape of a match: hands, double bonds, hybridisation. */
+#include "chem/hybrid.h"
 #include "match/search.h"
 
 /* ---- Hands ----------------------------------------------------------------------------- */
@@ -126,62 +127,10 @@ bool bs_search__stereo_fits(bs_search *s, const bs_frame *f)
     return true;
 }
 
-/* ---- Hybridisation --------------------------------------------------------------------- */
-
-/* Electrons in the outer shell of a main-group element, 0 for others. */
-static int outer_electrons(int element)
-{
-    static const uint8_t noble[] = {2, 10, 18, 36, 54, 86, 118};
-    int below = 0;
-
-    if (element <= 2)
-        return element;
-    for (int i = 0; noble[i] < element; i++)
-        below = noble[i];
-    element -= below;
-    /* Below argon each row has ten, then fourteen more elements between its blocks. */
-    if (below >= 54 && element > 2 + 24)
-        return element - 24;
-    if (below >= 18 && below < 54 && element > 2 + 10)
-        return element - 10;
-    return element <= 2 || below < 18 ? element : 0;
-}
-
-/* Whether a lone pair of the atom lies beside a double, triple or aromatic bond. */
-static bool is_conjugated(const bs_search *s, uint32_t atom)
-{
-    const bs_link *links = s->links + s->offsets[atom];
-
-    for (int k = 0; k < s->atoms[atom].degree; k++) {
-        uint32_t other = links[k].atom;
-        const bs_link *more = s->links + s->offsets[other];
-
-        if (s->atoms[other].element > 9 && !(s->atoms[other].flags & BS_ATOM_AROMATIC))
-            continue;
-        for (int j = 0; j < s->atoms[other].degree; j++) {
-            const bs_bond *bond = &s->bonds[more[j].bond];
-
-            if (more[j].atom != atom && (bond->order > 1 || bond->flags & BS_BOND_AROMATIC))
-                return true;
-        }
-    }
-    return false;
-}
-
-/* Neighbours and lone pairs (VSEPR), less one where a lone pair is conjugated. */
 int bs_search__hybridisation(const bs_search *s, uint32_t atom)
 {
     const bs_atom *a = &s->atoms[atom];
     int folded = a->hydrogens - (s->spelt_hydrogens ? a->label : 0);
-    int connections = a->degree + folded, outer = outer_electrons(a->element);
-    int pairs = outer > 0 ? (outer - a->charge - a->valence) / 2 : 0, steric;
 
-    if (a->flags & BS_ATOM_AROMATIC)
-        return 2;
-    steric = connections + (pairs > 0 ? pairs : 0);
-    if (connections == 0 || steric < 2)
-        return 0;
-    if (steric == 4 && pairs > 0 && a->element >= 7 && a->element <= 8 && is_conjugated(s, atom))
-        steric = 3;
-    return steric - 1 > 5 ? 5 : steric - 1;
+    return bs_hybrid__of(s->atoms, s->bonds, s->offsets, s->links, atom, a->degree + folded);
 }
