@@ -13,6 +13,9 @@
 
 #include <string.h>
 
+/* SMILES has one digit for them; [ReH9-2] is the record. */
+enum { MOST_HYDROGENS = 9 };
+
 typedef struct finish {
     bs_ctx *cx;
     const bs_draft *draft;
@@ -246,9 +249,15 @@ static bs_status fill_valences(finish *f)
         int sum = bs_spelling__bond_sum(f->mol, i);
         int total;
 
-        if (f->stated[i] == BS_DRAFT_IMPLIED)
+        if (a->element == 1 && a->hydrogens > 0)
+            return bs_fail_at(f->cx, BS_EVALUE, f->origin[i],
+                              "a hydrogen cannot have a hydrogen count");
+        if (f->stated[i] == BS_DRAFT_IMPLIED && a->element != 1)
             a->hydrogens = (uint8_t)(a->hydrogens + bs_valence__implied(a->element, a->charge,
                                                                         sum + a->hydrogens));
+        if (a->hydrogens > MOST_HYDROGENS)
+            return bs_fail_at(f->cx, BS_EVALUE, f->origin[i], "an atom has at most %d hydrogens",
+                              MOST_HYDROGENS);
         total = sum + a->hydrogens;
         if (total > UINT8_MAX)
             return bs_fail_at(f->cx, BS_ELIMIT, f->origin[i], "a valence is at most 255");
