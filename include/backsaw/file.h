@@ -108,6 +108,35 @@ long bs_file_record_line(const bs_file *file);
 /* Closes; NULL is allowed. */
 void bs_file_close(bs_file *file);
 
+/* ---- Writing files --------------------------------------------------------------------- */
+
+typedef struct bs_file_writer bs_file_writer;
+
+/*
+ * Begins a file of molecules; its name tells the kind as for reading. The file is there under its
+ * name, in place of one that was, once bs_file_finish() has given BS_OK. The context is used until
+ * then.
+ *
+ *   errors   BS_EFILE    cannot be written
+ *            BS_EVALUE   the name does not tell the kind
+ *            BS_ENOMEM
+ */
+bs_status bs_file_create(bs_ctx *cx, const char *path, bs_file_writer **out);
+
+/*
+ * Writes a record. Of a list of SMILES molecule and name count, labels are written; of other files
+ * what bs_sdf_write() takes. After an error the file is as before the record, save BS_EFILE.
+ *
+ *   lost    if not NULL, gets the number of stereo elements that a molfile cannot hold
+ */
+bs_status bs_file_put(bs_file_writer *writer, const bs_record *record, int *lost);
+
+/* Puts the file in its place; the writer is gone, with BS_EFILE as well. */
+bs_status bs_file_finish(bs_file_writer *writer);
+
+/* Removes what was written; NULL is allowed. */
+void bs_file_abandon(bs_file_writer *writer);
+
 /* ---- Molfiles in memory ---------------------------------------------------------------- */
 
 /*

@@ -1,4 +1,4 @@
--- mol.read and mol.each: the molecules of a file.
+-- mol.read, mol.each, mol.write and mol.writer: the molecules of a file.
 local core = ...
 local check = core.module "check"
 local files = {}
@@ -40,6 +40,22 @@ function files.each(path, refused)
         local m = following(file, refused)
         return m
     end, nil, nil, file
+end
+
+-- w = mol.writer(path): w:write(m [, { name = ..., fields = { ... } }]), w:close()
+function files.writer(path)
+    check.path("mol.writer", path)
+    return core.create_molecules(path)
+end
+
+-- mol.write(path, list): the molecules of a list into a file
+function files.write(path, list)
+    check.path("mol.write", path)
+    if type(list) ~= "table" then
+        check.fail("mol.write: a list of molecules is expected, not a %s", type(list))
+    end
+    local writer <close> = core.create_molecules(path)
+    for _, m in ipairs(list) do writer:write(m) end
 end
 
 return files

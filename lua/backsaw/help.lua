@@ -11,11 +11,15 @@ m:doubts()                           a list of what is strange: valences, stereo
 m:complexity()                       Bertz's index: the larger, the more involved
 m:has(p) m:count(p) m:find(p)        p is a pattern or SMARTS; find gives lists of atom numbers
 m:atoms() m:bonds() m:rings() m:fragments()
+m:ring_systems() m:skeleton()          rings that share bonds; rings and what joins them
+m:environment(atom, radius)            what lies around an atom; equal keys mean alike
+m:similarity(n) m:fingerprint()        how alike two molecules are, 0 to 1
 a == b                               the same compound, however it was written
 m:polarity(a, b)                     a and d labels of a bond, or how two heteroatoms stand
 mol.read "list.sdf"                  the molecules of a file as a list: .smi .mol .sdf, also .gz
 for m in mol.each "list.sdf" do      one after the other, for files of any length
 m.name  m.fields["CAS"]              what the file says of it
+mol.write("list.sdf", list)          w = mol.writer(path), w:write(m), w:close() for long files
 m:molfile()  m:molfile "V3000"       a molfile with a flat drawing]],
 patterns = [[
 p = pattern "[NX3;H2]"               a pattern from SMARTS; print(p) gives the SMARTS

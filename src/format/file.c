@@ -3,6 +3,7 @@
 
 #include "backsaw/format.h"
 #include "core/lines.h"
+#include "format/kind.h"
 #include "format/sdf.h"
 #include "format/utf8.h"
 
@@ -46,7 +47,12 @@ static bool has_ending(const char *name, size_t cut, const char *ending)
     return true;
 }
 
-static bs_file_kind kind_of_name(const char *path)
+bool bs_file__is_gzip(const char *path)
+{
+    return has_ending(path, 0, ".gz");
+}
+
+bs_file_kind bs_file__kind(const char *path)
 {
     static const struct {
         const char *ending;
@@ -69,7 +75,7 @@ bs_status bs_file_open(bs_ctx *cx, const char *path, const bs_file_options *opti
 {
     static const bs_file_options usual;
     const bs_file_options *o = options ? options : &usual;
-    bs_file_kind kind = o->kind == BS_FILE_BY_NAME ? kind_of_name(path) : o->kind;
+    bs_file_kind kind = o->kind == BS_FILE_BY_NAME ? bs_file__kind(path) : o->kind;
     bs_file *file;
     bs_status st;
 

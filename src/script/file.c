@@ -32,7 +32,7 @@ static void make_fault(lua_State *L, int i, const file_box *box, bsl_fault *faul
     const char *path;
     size_t length;
 
-    *fault = (bsl_fault){ .code = error->code, .line = error->line };
+    *fault = (bsl_fault){.code = error->code, .line = error->line};
     bsl_where(L, fault->where, sizeof fault->where);
     if (!of_text || !box->file) {
         snprintf(fault->message, sizeof fault->message, "%s", error->message);
@@ -47,8 +47,7 @@ static void make_fault(lua_State *L, int i, const file_box *box, bsl_fault *faul
     else
         snprintf(place, sizeof place, "record %ld from line %ld on",
                  bs_file_record_number(box->file), bs_file_record_line(box->file));
-    snprintf(fault->message, sizeof fault->message, "%s: %s, %.180s", shown, place,
-             error->message);
+    snprintf(fault->message, sizeof fault->message, "%s: %s, %.180s", shown, place, error->message);
 }
 
 /* f = core.open_molecules(path) */
@@ -123,14 +122,40 @@ static void push_doubts(lua_State *L, const bs_record *record)
     }
 }
 
+/* Pushes the stereo groups: a list of { kind = ..., number = ..., atoms = { ... } }. */
+static void push_groups(lua_State *L, const bs_record *record)
+{
+    static const char *const kinds[] = {"absolute", "relative", "racemic"};
+
+    lua_createtable(L, record->group_count, 0);
+    for (int i = 0; i < record->group_count; i++) {
+        const bs_stereo_group *group = &record->groups[i];
+
+        lua_createtable(L, 0, 3);
+        lua_pushstring(L, kinds[group->kind]);
+        lua_setfield(L, -2, "kind");
+        lua_pushinteger(L, group->number);
+        lua_setfield(L, -2, "number");
+        lua_createtable(L, group->atom_count, 0);
+        for (int k = 0; k < group->atom_count; k++) {
+            lua_pushinteger(L, (lua_Integer)group->atoms[k] + 1);
+            lua_rawseti(L, -2, k + 1);
+        }
+        lua_setfield(L, -2, "atoms");
+        lua_rawseti(L, -2, i + 1);
+    }
+}
+
 static void push_record(lua_State *L, const bs_record *record)
 {
     bsl_pushmol(L, record->mol, NULL);
-    lua_createtable(L, 0, 3);
+    lua_createtable(L, 0, 4);
     lua_pushlstring(L, record->name, record->name_length);
     lua_setfield(L, -2, "name");
     push_fields(L, record);
     lua_setfield(L, -2, "fields");
+    push_groups(L, record);
+    lua_setfield(L, -2, "stereo_groups");
     push_doubts(L, record);
     lua_setfield(L, -2, "doubts");
     lua_setiuservalue(L, -2, BSL_MOL_RECORD);
@@ -184,9 +209,9 @@ static int file_close(lua_State *L)
  */
 static int mol_molfile(lua_State *L)
 {
-    static const char *const names[] = { "auto", "V2000", "V3000", NULL };
-    static const bs_molfile_version versions[] = { BS_MOLFILE_AUTO, BS_MOLFILE_V2000,
-                                                   BS_MOLFILE_V3000 };
+    static const char *const names[] = {"auto", "V2000", "V3000", NULL};
+    static const bs_molfile_version versions[] = {BS_MOLFILE_AUTO, BS_MOLFILE_V2000,
+                                                  BS_MOLFILE_V3000};
     const bs_mol *mol = bsl_checkmol(L, 1);
     int choice = luaL_checkoption(L, 2, "auto", names), lost = 0;
     const char *name = NULL;
@@ -212,14 +237,14 @@ static int mol_molfile(lua_State *L)
 void bsl_open_file(lua_State *L)
 {
     static const luaL_Reg methods[] = {
-        { "next", file_next },
-        { "close", file_close },
-        { NULL, NULL },
+        {"next", file_next},
+        {"close", file_close},
+        {NULL, NULL},
     };
     static const luaL_Reg meta[] = {
-        { "__gc", file_close },
-        { "__close", file_close },
-        { NULL, NULL },
+        {"__gc", file_close},
+        {"__close", file_close},
+        {NULL, NULL},
     };
 
     bsl_new_type(L, FILE_TYPE, methods, meta);

@@ -124,6 +124,7 @@ static int open_state(lua_State *L)
     bsl_open_rewrite(L);
     bsl_open_polarity(L);
     bsl_open_why(L);
+    bsl_open_descriptor(L);
     open_kinds(L);
     bsl_open_define(L);
     bsl_open_group(L);
@@ -132,6 +133,7 @@ static int open_state(lua_State *L)
     bsl_open_pack(L);
     if (host->kind == BSL_MAIN) {
         bsl_open_file(L);
+        bsl_open_writer(L);
         bsl_open_catalogue(L);
         bsl_open_route(L);
         bsl_open_report(L);

@@ -163,6 +163,7 @@ void bsl_open_pattern(lua_State *L);
 void bsl_open_rewrite(lua_State *L);
 void bsl_open_polarity(lua_State *L); /* after bsl_open_mol() */
 void bsl_open_why(lua_State *L);
+void bsl_open_descriptor(lua_State *L); /* after bsl_open_mol() */
 void bsl_open_define(lua_State *L);
 void bsl_open_group(lua_State *L); /* after that of molecules, to which it adds methods */
 void bsl_open_clash(lua_State *L);
@@ -173,6 +174,7 @@ void bsl_open_route(lua_State *L);
 void bsl_open_explain(lua_State *L);
 void bsl_open_report(lua_State *L); /* after that of routes, to which it adds methods */
 void bsl_open_pack(lua_State *L);
+void bsl_open_writer(lua_State *L);
 void bsl_open_file(lua_State *L); /* after that of molecules, to which it adds methods */
 
 /* Makes the locked metatable of a type ("backsaw." and a word) from methods and metamethods, and
@@ -211,7 +213,7 @@ const char *bsl_push_canonical(lua_State *L, int i);
 const bs_pattern *bsl_topattern(lua_State *L, int i);
 
 /* Pushes the matches of a pattern as a list of lists of atoms, or their number; returns 1. */
-int bsl_push_matches(lua_State *L, const bs_mol *mol, const bs_pattern *pattern);
+int bsl_push_matches(lua_State *L, const bs_mol *mol, const bs_pattern *pattern, int options);
 int bsl_count_matches(lua_State *L, const bs_mol *mol, const bs_pattern *pattern);
 
 /*

@@ -300,10 +300,10 @@ static int mol_count(lua_State *L)
     return bsl_count_matches(L, bsl_checkmol(L, 1), bsl_topattern(L, 2));
 }
 
-/* lists = m:find(p): for each match the atoms in the order of the pattern */
+/* lists = m:find(p [, limit or { limit = ..., all = true }]): for each match the atoms in the order of the pattern */
 static int mol_find(lua_State *L)
 {
-    return bsl_push_matches(L, bsl_checkmol(L, 1), bsl_topattern(L, 2));
+    return bsl_push_matches(L, bsl_checkmol(L, 1), bsl_topattern(L, 2), 3);
 }
 
 const int *bsl_symmetry(lua_State *L, const bs_mol *mol, bs_mark mark)
@@ -320,7 +320,7 @@ void bsl_push_atom(lua_State *L, const bs_mol *mol, const int *classes, int atom
 {
     const char *symbol = bs_element_symbol(bs_mol_atom_element(mol, atom));
 
-    lua_createtable(L, 0, 10);
+    lua_createtable(L, 0, 11);
     lua_pushstring(L, symbol ? symbol : "*");
     lua_setfield(L, -2, "element");
     lua_pushinteger(L, bs_mol_atom_hydrogens(mol, atom));
@@ -341,6 +341,8 @@ void bsl_push_atom(lua_State *L, const bs_mol *mol, const int *classes, int atom
     lua_setfield(L, -2, "label");
     lua_pushinteger(L, classes[atom] + 1);
     lua_setfield(L, -2, "symmetry");
+    lua_pushinteger(L, bs_mol_atom_hybridisation(mol, atom));
+    lua_setfield(L, -2, "hybridisation");
 }
 
 /* The CIP labels of a molecule; NULL where it is too large for them. */
@@ -417,27 +419,6 @@ static int mol_bonds(lua_State *L)
     return 1;
 }
 
-/* lists = m:rings(): for each ring of a smallest set its atoms in order around it */
-static int mol_rings(lua_State *L)
-{
-    const bs_mol *mol = bsl_checkmol(L, 1);
-    int count = bs_mol_ring_count(mol);
-
-    lua_createtable(L, count, 0);
-    for (int i = 0; i < count; i++) {
-        const uint32_t *atoms;
-        int size = bs_mol_ring(mol, i, &atoms);
-
-        lua_createtable(L, size, 0);
-        for (int k = 0; k < size; k++) {
-            lua_pushinteger(L, (lua_Integer)atoms[k] + 1);
-            lua_rawseti(L, -2, k + 1);
-        }
-        lua_rawseti(L, -2, i + 1);
-    }
-    return 1;
-}
-
 /* list = m:fragments(): the connected pieces */
 static int mol_fragments(lua_State *L)
 {
@@ -487,7 +468,6 @@ void bsl_open_mol(lua_State *L)
         { "find", mol_find },
         { "atoms", mol_atoms },
         { "bonds", mol_bonds },
-        { "rings", mol_rings },
         { "fragments", mol_fragments },
         { NULL, NULL },
     };

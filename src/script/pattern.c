@@ -72,13 +72,35 @@ const bs_pattern *bsl_topattern(lua_State *L, int i)
     return check_pattern(L, i);
 }
 
-int bsl_push_matches(lua_State *L, const bs_mol *mol, const bs_pattern *pattern)
+/* The options of find: nothing, a limit, or { limit = ..., all = ... }. */
+static void check_find_options(lua_State *L, int i, bs_match_opts *opts)
+{
+    lua_Integer limit = 0;
+
+    *opts = (bs_match_opts){0};
+    if (lua_istable(L, i)) {
+        lua_getfield(L, i, "all");
+        opts->every_embedding = lua_toboolean(L, -1);
+        lua_getfield(L, i, "limit");
+        if (!lua_isnil(L, -1))
+            limit = luaL_checkinteger(L, -1);
+        lua_pop(L, 2);
+    } else {
+        limit = luaL_optinteger(L, i, 0);
+    }
+    luaL_argcheck(L, limit >= 0 && limit <= INT32_MAX, i, "a limit is 1 or more, or 0 for none");
+    opts->limit = (int)limit;
+}
+
+int bsl_push_matches(lua_State *L, const bs_mol *mol, const bs_pattern *pattern, int options)
 {
     bsl_host *host = bsl_host_of(L);
     bs_mark mark = bs_arena_mark(&host->results);
+    bs_match_opts opts;
     bs_matches matches;
 
-    if (bs_pattern_find(host->cx, &host->results, pattern, mol, NULL, &matches) != BS_OK)
+    check_find_options(L, options, &opts);
+    if (bs_pattern_find(host->cx, &host->results, pattern, mol, &opts, &matches) != BS_OK)
         return bsl_raise_from(L, mark, NULL, 0);
     lua_createtable(L, matches.count, 0);
     for (int i = 0; i < matches.count; i++) {
@@ -122,12 +144,12 @@ static int core_pattern(lua_State *L)
     return 1;
 }
 
-/* lists = p:find(m) */
+/* lists = p:find(m [, limit or { limit = ..., all = true }]) */
 static int pattern_find(lua_State *L)
 {
     const bs_pattern *pattern = check_pattern(L, 1);
 
-    return bsl_push_matches(L, bsl_tomol(L, 2), pattern);
+    return bsl_push_matches(L, bsl_tomol(L, 2), pattern, 3);
 }
 
 /* n = p:count(m) */
@@ -170,15 +192,15 @@ static int pattern_gc(lua_State *L)
 void bsl_open_pattern(lua_State *L)
 {
     static const luaL_Reg methods[] = {
-        { "find", pattern_find },
-        { "count", pattern_count },
-        { "has", pattern_has },
-        { NULL, NULL },
+        {"find", pattern_find},
+        {"count", pattern_count},
+        {"has", pattern_has},
+        {NULL, NULL},
     };
     static const luaL_Reg meta[] = {
-        { "__tostring", pattern_tostring },
-        { "__gc", pattern_gc },
-        { NULL, NULL },
+        {"__tostring", pattern_tostring},
+        {"__gc", pattern_gc},
+        {NULL, NULL},
     };
 
     bsl_new_type(L, PATTERN_TYPE, methods, meta);

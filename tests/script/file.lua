@@ -35,6 +35,36 @@ local racemic = "\n\n\n  0  0  0     0  0            999 V3000\nM  V30 BEGIN CTA
 local halon = mol.read(write(".racemic.mol", racemic))[1]
 print(halon:formula(), #halon:doubts(), halon:doubts()[1]) --> CHBrClF	1	atom 1: a mixture of both configurations in the file, as drawn here
 
+local group = halon.stereo_groups[1]
+print(#halon.stereo_groups, group.kind, group.number, group.atoms[1]) --> 1	racemic	1	1
+
+-- writing: fields in order, the stereo group, a name of one's own
+local out <const> = base .. ".out.sdf"
+made[#made + 1] = out
+local writer = mol.writer(out)
+writer:write(halon)
+writer:write(mol "C[C@H](N)C(=O)O", { name = "alanine", fields = { "CAS", CAS = "338-69-2", purity = 99, about = "an\namine" } })
+print(short(select(2, pcall(io.lines, out)))) --> cannot open file 'FILE.out.sdf' (No such file or directory)
+writer:close()
+local back = mol.read(out)
+print(#back, back[1] == halon, back[1].stereo_groups[1].kind, back[2].name, back[2] == mol "C[C@H](N)C(=O)O") --> 2	true	racemic	alanine	true
+print(table.concat(back[2].fields, " "), back[2].fields.CAS, back[2].fields.purity, (back[2].fields.about:gsub("\n", "|"))) --> CAS about purity	338-69-2	99	an|amine
+local good = {}
+for _, ending in ipairs { ".a.smi", ".b.smi.gz", ".c.sdf.gz", ".d.mol" } do
+    made[#made + 1] = base .. ending
+    mol.write(base .. ending, back)
+    local again = mol.read(base .. ending)
+    good[#good + 1] = #again == 2 and again[1] == back[1] and again[2] == back[2] and again[2].name
+end
+print(table.concat(good, " ")) --> alanine alanine alanine alanine
+print(pcall(function()
+    local w <close> = mol.writer(base .. ".e.sdf")
+    w:write(back[1])
+    error("stopped", 0)
+end)) --> false	stopped
+print(short(select(2, io.open(base .. ".e.sdf")))) --> FILE.e.sdf: No such file or directory
+print(short(select(2, pcall(mol.writer, base .. ".pdf")).message)) --> the name 'FILE.pdf' does not tell what to write; .sdf, .mol or .smi was expected, or one of them with .gz
+
 -- lists of SMILES
 local smi = write(".smi", "# invented\nOCC ethanol\n\nCC(=O)O acetic acid\nC\n")
 local list = mol.read(smi)

@@ -44,6 +44,25 @@ print(#pieces, pieces[1] == mol "[Na+]", pieces[2] == mol "N#[C-]", pieces[3] ==
 print(benzocaine:has "[NX3;H2]", benzocaine:has(pattern "S"), benzocaine:count "[CX3](=O)[OX2]") --> true	false	1
 print(table.concat(mol("OCCO"):find("CO")[2], " "), #mol("CC"):find "N") --> 3 4	0
 
+-- matches: a limit, and every embedding (a benzene ring lies on itself in 12 ways)
+print(#mol("CCO"):find("C", 1), #mol("CCO"):find("C"), #mol("c1ccccc1"):find("c1ccccc1"), #mol("c1ccccc1"):find("c1ccccc1", { all = true })) --> 1	2	1	12
+print(#pattern("cc"):find("c1ccccc1", { all = true, limit = 5 })) --> 5
+
+-- rings and skeleton: cubane has six faces, five of them make a smallest set; spiro rings share no bond
+local cubane = mol "C12C3C4C1C5C2C3C45"
+print(#cubane:rings(), #cubane:rings "smallest", #cubane:rings "relevant", #cubane:ring_systems()) --> 5	5	6	1
+print(#mol("C1CC12CCC2"):ring_systems(), #mol("CCO"):ring_systems()) --> 2	0
+print(mol("CC(=O)Nc1ccc(CC2CC2)cc1"):skeleton() == mol "c1ccc(CC2CC2)cc1", mol("CCO"):skeleton()) --> true	nil
+print(mol("O=C1CCCC1C"):skeleton() == mol "O=C1CCCC1") --> true
+
+-- environments and likeness
+local around = mol("CC(=O)OCC"):environment(4, 1)
+print(table.concat(around.atoms, " "), table.concat(around.distances, " "), #around.bonds) --> 4 2 5	0 1 1	2
+print(mol("CCCO"):environment(4, 2).key == mol("OCCC"):environment(1, 2).key, mol("CCCO"):environment(4).key == mol("CCCN"):environment(4).key) --> true	false
+print(mol("CC=O"):environment({ 2, 3 }, 0).key == mol("O=CCC"):environment({ 1, 2 }, 0).key) --> true
+print(mol("CCO"):similarity "OCC", mol("CCO"):similarity "c1ccccc1", #mol("CC"):fingerprint(0)) --> 1.0	0.0	1
+print(mol("CC=O"):atoms()[2].hybridisation, mol("CC#N"):atoms()[3].hybridisation) --> 2	1
+
 -- doubts
 print(#mol("CCO"):doubts(), mol("C[C@H](C)O"):doubts()[1]) --> 0	atom 2 (C): it was marked as a stereo centre, but is none
 
@@ -53,4 +72,6 @@ print(string.format("%.5f %.5f %.1f", mol("CC(=O)Oc1ccccc1C(=O)O"):complexity(),
 -- locked, and deaf to strangers
 print(getmetatable(benzocaine)) --> false
 print(fails(benzocaine.formula)) --> argument 1: molecule expected, got nothing
+print(fails(benzocaine.find, benzocaine, "C", -1)) --> bad argument #3 to '?' (a limit is 1 or more, or 0 for none)
+print(fails(benzocaine.environment, benzocaine, 99)) --> bad argument #2 to '?' (no such atom)
 print(fails(mol)) --> mol: argument 1: molecule or SMILES expected, got nil
