@@ -21,7 +21,7 @@ for name in "$@"; do
         longest=4000
     fi
     printf '%s: ' "$name"
-    "$build/tests/fuzz/fuzz_$name" -max_total_time="$seconds" -timeout=20 -rss_limit_mb=2048 \
+    "$build/tests/fuzz/fuzz_$name" -max_total_time="$seconds" -timeout=60 -rss_limit_mb=2048 \
         -max_len="$longest" -dict="$here/smiles.dict" -artifact_prefix="$corpus.found-" \
         -print_final_stats=1 "$corpus" "$here/seeds/$name" >"$corpus.log" 2>&1 || {
         tail -n 40 "$corpus.log"

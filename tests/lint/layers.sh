@@ -15,6 +15,7 @@ BEGIN {
     # Public headers that are not named after their layer.
     module["mol"] = "chem"
     module["draft"] = "chem"
+    module["descriptor"] = "chem"
     module["polarity"] = "rule"
     module["group"] = "rule"
     module["why"] = "rule"
