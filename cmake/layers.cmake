@@ -21,6 +21,10 @@ function(backsaw_flags target)
     if(BACKSAW_FUZZ)
         target_compile_options(${target} PRIVATE -fsanitize=fuzzer-no-link)
     endif()
+    # Nobody replaces a function of the library at run time, so the compiler may inline it.
+    if(CMAKE_C_COMPILER_ID STREQUAL "GNU")
+        target_compile_options(${target} PRIVATE -fno-semantic-interposition)
+    endif()
     # The tests and the installed archive link without a linker plugin.
     if(CMAKE_INTERPROCEDURAL_OPTIMIZATION AND CMAKE_C_COMPILER_ID STREQUAL "GNU")
         target_compile_options(${target} PRIVATE -ffat-lto-objects)

@@ -14,19 +14,20 @@
 
 int bs_feature__class(int element)
 {
-    static const uint8_t table[119] = {
-        [0] = BS_CLASS_OTHER,   [1] = BS_CLASS_H,       [3] = BS_CLASS_ALKALI,
-        [4] = BS_CLASS_ALKALI,  [5] = BS_CLASS_B,       [6] = BS_CLASS_C,
-        [7] = BS_CLASS_N,       [8] = BS_CLASS_O,       [9] = BS_CLASS_F,
-        [11] = BS_CLASS_ALKALI, [12] = BS_CLASS_ALKALI, [14] = BS_CLASS_SI,
-        [15] = BS_CLASS_P,      [16] = BS_CLASS_S,      [17] = BS_CLASS_CL,
-        [19] = BS_CLASS_ALKALI, [20] = BS_CLASS_ALKALI, [34] = BS_CLASS_SE,
-        [35] = BS_CLASS_BR,     [37] = BS_CLASS_ALKALI, [38] = BS_CLASS_ALKALI,
-        [53] = BS_CLASS_I,      [55] = BS_CLASS_ALKALI, [56] = BS_CLASS_ALKALI,
+    /* One more than the class; 0 stands for those that are not listed. */
+    static const uint8_t table[256] = {
+        [1] = BS_CLASS_H + 1,       [3] = BS_CLASS_ALKALI + 1,  [4] = BS_CLASS_ALKALI + 1,
+        [5] = BS_CLASS_B + 1,       [6] = BS_CLASS_C + 1,       [7] = BS_CLASS_N + 1,
+        [8] = BS_CLASS_O + 1,       [9] = BS_CLASS_F + 1,       [11] = BS_CLASS_ALKALI + 1,
+        [12] = BS_CLASS_ALKALI + 1, [14] = BS_CLASS_SI + 1,     [15] = BS_CLASS_P + 1,
+        [16] = BS_CLASS_S + 1,      [17] = BS_CLASS_CL + 1,     [19] = BS_CLASS_ALKALI + 1,
+        [20] = BS_CLASS_ALKALI + 1, [34] = BS_CLASS_SE + 1,     [35] = BS_CLASS_BR + 1,
+        [37] = BS_CLASS_ALKALI + 1, [38] = BS_CLASS_ALKALI + 1, [53] = BS_CLASS_I + 1,
+        [55] = BS_CLASS_ALKALI + 1, [56] = BS_CLASS_ALKALI + 1,
     };
-    int class = element >= 0 && element < 119 ? table[element] : BS_CLASS_OTHER;
+    int found = table[element & 0xFF];
 
-    return class == BS_CLASS_C && element != 6 ? BS_CLASS_OTHER : class;
+    return found ? found - 1 : BS_CLASS_OTHER;
 }
 
 int bs_feature__element(int class)
@@ -259,13 +260,49 @@ static void add(bs_features *sum, bs_features more)
     sum->word[1] |= more.word[1];
 }
 
-static void add_atom(const bs_mol *mol, uint32_t index, bool has_hydrogens, bs_features *sum)
+/*
+ * Atoms and bonds that are alike have the same bits, so those of a kind are found once: `seen`
+ * keeps the kind that came last at each place.
+ */
+enum { PLACES = 32 };
+
+typedef struct kind {
+    uint64_t word[2]; /* all that the bits depend on; never 0 */
+} kind;
+
+static bool is_new(kind *seen, kind k)
+{
+    kind *at = &seen[(k.word[0] * 0x9E3779B97F4A7C15u ^ k.word[1] * 0xC2B2AE3D27D4EB4Fu) >> 59];
+
+    if (at->word[0] == k.word[0] && at->word[1] == k.word[1])
+        return false;
+    *at = k;
+    return true;
+}
+
+static kind atom_kind(bs_atom atom, int hydrogens)
+{
+    kind k;
+
+    atom.hydrogens = (uint8_t)hydrogens;
+    atom.flags &= BS_ATOM_AROMATIC | BS_ATOM_RING;
+    atom.isotope = atom.label = 0;
+    atom.valence = atom.ring_count = 0;
+    atom.perm = 1; /* so that no kind is 0 */
+    memcpy(&k, &atom, sizeof k);
+    return k;
+}
+
+static void add_atom(const bs_mol *mol, uint32_t index, bool has_hydrogens, kind *seen,
+                     bs_features *sum)
 {
     const bs_atom *atom = &mol->atoms[index];
     bool aromatic = (atom->flags & BS_ATOM_AROMATIC) != 0;
     int class = bs_feature__class(atom->element);
     int hydrogens = has_hydrogens ? bs_mol__total_hydrogens(mol, index) : atom->hydrogens;
 
+    if (!is_new(seen, atom_kind(*atom, hydrogens)))
+        return;
     add(sum, bs_feature__atom(class, aromatic));
     add(sum, bs_feature__hydrogens(class, aromatic, hydrogens));
     add(sum, bs_feature__charge(class, (atom->charge > 0) - (atom->charge < 0)));
@@ -278,9 +315,29 @@ static void add_atom(const bs_mol *mol, uint32_t index, bool has_hydrogens, bs_f
         sum->word[0] |= BIT(BS_FEATURE_HAND);
 }
 
+static void add_bond(const bs_mol *mol, const bs_bond *bond, kind *seen, bs_features *sum)
+{
+    const bs_atom *a = &mol->atoms[bond->a], *b = &mol->atoms[bond->b];
+    kind k = {{(uint64_t)a->element << 32 | (uint64_t)b->element << 24 |
+                   (uint64_t)(a->flags & BS_ATOM_AROMATIC) << 17 |
+                   (uint64_t)(b->flags & BS_ATOM_AROMATIC) << 16 | (uint64_t)bond->order << 8 |
+                   bond->flags,
+               1}};
+
+    if (!is_new(seen, k))
+        return;
+    add(sum,
+        bs_feature__bond(bs_feature__class(a->element), a->flags & BS_ATOM_AROMATIC,
+                         bs_feature__class(b->element), b->flags & BS_ATOM_AROMATIC, bond->order,
+                         bond->flags & BS_BOND_AROMATIC, bond->flags & BS_BOND_RING));
+    if (bond->flags & (BS_BOND_CIS | BS_BOND_TRANS))
+        sum->word[0] |= BIT(BS_FEATURE_GEOMETRY);
+}
+
 void bs_mol__features(bs_mol *mol)
 {
     const bs_bond *bonds = bs_mol__bonds(mol);
+    kind seen[PLACES] = {{{0, 0}}};
     int classes[BS_CLASS_COUNT] = {0}, aromatic = 0;
     bs_features sum = {{0, 0}};
 
@@ -289,17 +346,10 @@ void bs_mol__features(bs_mol *mol)
         aromatic += (mol->atoms[i].flags & BS_ATOM_AROMATIC) != 0;
     }
     for (uint32_t i = 0; i < mol->atom_count; i++)
-        add_atom(mol, i, classes[BS_CLASS_H] > 0, &sum);
-    for (uint32_t i = 0; i < mol->bond_count; i++) {
-        const bs_atom *a = &mol->atoms[bonds[i].a], *b = &mol->atoms[bonds[i].b];
-
-        add(&sum, bs_feature__bond(bs_feature__class(a->element), a->flags & BS_ATOM_AROMATIC,
-                                   bs_feature__class(b->element), b->flags & BS_ATOM_AROMATIC,
-                                   bonds[i].order, bonds[i].flags & BS_BOND_AROMATIC,
-                                   bonds[i].flags & BS_BOND_RING));
-        if (bonds[i].flags & (BS_BOND_CIS | BS_BOND_TRANS))
-            sum.word[0] |= BIT(BS_FEATURE_GEOMETRY);
-    }
+        add_atom(mol, i, classes[BS_CLASS_H] > 0, seen, &sum);
+    memset(seen, 0, sizeof seen);
+    for (uint32_t i = 0; i < mol->bond_count; i++)
+        add_bond(mol, &bonds[i], seen, &sum);
     add(&sum, bs_feature__counts(classes, aromatic));
     memcpy(mol->features, sum.word, sizeof mol->features);
 }

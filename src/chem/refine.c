@@ -214,13 +214,55 @@ static void cut_by_label(bs_canon_cells *cells, const bs_canon_graph *graph)
     cut_cells(cells);
 }
 
+/*
+ * Sorts the atoms by key into `lab`. Few keys are different as a rule, so one atom of each is
+ * sorted and the others are counted in; false, with nothing done, if there are many.
+ */
+static bool sort_by_few_keys(bs_canon_cells *cells, const uint64_t *key)
+{
+    enum { MOST = 64 };
+    uint8_t last[64] = {0}; /* by hash of the key: its number + 1 */
+    uint32_t first[MOST], size[MOST] = {0}, start[MOST];
+    uint32_t n = cells->atom_count, count = 0, next = 0;
+
+    for (uint32_t i = 0; i < n; i++) {
+        uint8_t *place = &last[key[i] * 0x9E3779B97F4A7C15u >> 58];
+        uint32_t k = *place ? *place - 1u : 0;
+
+        if (!*place || key[first[k]] != key[i])
+            for (k = 0; k < count && key[first[k]] != key[i]; k++)
+                ;
+        if (k == count) {
+            if (count == MOST)
+                return false;
+            first[count++] = i;
+        }
+        *place = (uint8_t)(k + 1);
+        cells->members[i] = k;
+        size[k]++;
+    }
+    memcpy(cells->lab, first, count * sizeof *first);
+    bs_canon__sort(cells->lab, count, key);
+    for (uint32_t k = 0; k < count; k++) {
+        uint32_t number = cells->members[cells->lab[k]];
+
+        start[number] = next;
+        next += size[number];
+    }
+    for (uint32_t i = 0; i < n; i++)
+        cells->lab[start[cells->members[i]]++] = i;
+    return true;
+}
+
 void bs_canon__cells_start(bs_canon_cells *cells, const bs_canon_graph *graph)
 {
     uint32_t n = cells->atom_count, start = 0;
 
-    for (uint32_t i = 0; i < n; i++)
-        cells->lab[i] = i;
-    bs_canon__sort(cells->lab, n, graph->key);
+    if (!sort_by_few_keys(cells, graph->key)) {
+        for (uint32_t i = 0; i < n; i++)
+            cells->lab[i] = i;
+        bs_canon__sort(cells->lab, n, graph->key);
+    }
     cells->cell_count = 0;
     cells->split_count = 0;
     clear_queue(cells);

@@ -37,7 +37,7 @@ static void remove_mark(strip *s, bs_canon_element *element)
 
     element->perm = 0;
     if (element->kind == BS_CANON_DOUBLE) {
-        bonds[element->source].flags &= (uint8_t)~(BS_BOND_CIS | BS_BOND_TRANS);
+        bonds[element->source].flags &= (uint8_t) ~(BS_BOND_CIS | BS_BOND_TRANS);
         return;
     }
     s->mol->atoms[element->source].stereo = BS_STEREO_NONE;
@@ -67,7 +67,7 @@ static bool remove_misfits(bs_mol *mol)
         if (bs_canon__bond_element(mol, i, &element))
             left = true;
         else
-            bonds[i].flags &= (uint8_t)~(BS_BOND_CIS | BS_BOND_TRANS);
+            bonds[i].flags &= (uint8_t) ~(BS_BOND_CIS | BS_BOND_TRANS);
     }
     return left;
 }
@@ -111,9 +111,8 @@ static bs_status can_turn(strip *s, uint32_t index, const uint32_t *fixed, uint3
                           bool *turns)
 {
     bs_canon_element *element = &s->graph.element[index];
-    uint32_t variants = element->kind == BS_CANON_DOUBLE
-                            ? 2
-                            : (uint32_t)bs_stereo__perm_count(element->kind);
+    uint32_t variants =
+        element->kind == BS_CANON_DOUBLE ? 2 : (uint32_t)bs_stereo__perm_count(element->kind);
     uint8_t perm = element->perm;
     bs_mark temp = bs_arena_mark(&s->cx->scratch);
     bs_canon_order before, after;
@@ -172,6 +171,92 @@ static bs_status strip_once(strip *s, uint32_t *removed)
     return BS_OK;
 }
 
+/* ---- At a glance --------------------------------------------------------------------------- */
+
+enum { ROUNDS = 6 };
+
+static uint32_t mix(uint32_t sum, uint32_t value)
+{
+    sum = (sum ^ value) * 0x9E3779B1u;
+    return sum ^ sum >> 15;
+}
+
+static void colour_atoms(const bs_mol *mol, uint32_t *colour)
+{
+    for (uint32_t i = 0; i < mol->atom_count; i++) {
+        const bs_atom *a = &mol->atoms[i];
+        uint32_t value = a->element;
+
+        value = value << 8 | (uint8_t)a->charge;
+        value = value << 8 | a->hydrogens;
+        value = value << 8 | (uint32_t)(a->degree << 1) | (a->flags & BS_ATOM_AROMATIC);
+        colour[i] = mix(mix(0, value), a->isotope);
+    }
+}
+
+/* Colours each atom by its colour and those of its neighbours. */
+static void colour_anew(const bs_mol *mol, const uint32_t *colour, uint32_t *next)
+{
+    const bs_bond *bonds = bs_mol__bonds(mol);
+
+    for (uint32_t i = 0; i < mol->atom_count; i++) {
+        const bs_link *links = bs_mol__links(mol, i);
+        uint32_t sum = 0;
+
+        for (uint32_t k = 0; k < mol->atoms[i].degree; k++) {
+            const bs_bond *b = &bonds[links[k].bond];
+            uint32_t type = b->flags & BS_BOND_AROMATIC ? (uint32_t)BS_CANON_AROMATIC : b->order;
+
+            sum += mix(colour[links[k].atom], type);
+        }
+        next[i] = mix(colour[i], sum);
+    }
+}
+
+/*
+ * Whether a few rounds of colours tell the ligands of every element apart, without regard to
+ * stereo. Colours are hashes of what lies around an atom, so those that differ prove a difference.
+ */
+static bs_status all_apparent(bs_ctx *cx, const bs_mol *mol, bool *apparent)
+{
+    const bs_bond *bonds = bs_mol__bonds(mol);
+    uint32_t *colour, *next, marks = 0, open = 0, kept;
+    bs_canon_element *elements;
+    bs_status st;
+
+    for (uint32_t i = 0; i < mol->atom_count; i++)
+        marks += mol->atoms[i].stereo != BS_STEREO_NONE;
+    for (uint32_t i = 0; i < mol->bond_count; i++)
+        marks += (bonds[i].flags & (BS_BOND_CIS | BS_BOND_TRANS)) != 0;
+    if ((st = bs_new(cx, &cx->scratch, mol->atom_count, &colour)) != BS_OK ||
+        (st = bs_new(cx, &cx->scratch, mol->atom_count, &next)) != BS_OK ||
+        (st = bs_new(cx, &cx->scratch, marks, &elements)) != BS_OK)
+        return st;
+    for (uint32_t i = 0; i < mol->atom_count; i++)
+        open += mol->atoms[i].stereo && bs_canon__atom_element(mol, i, &elements[open]);
+    for (uint32_t i = 0; i < mol->bond_count; i++)
+        open += bonds[i].flags & (BS_BOND_CIS | BS_BOND_TRANS) &&
+                bs_canon__bond_element(mol, i, &elements[open]);
+    colour_atoms(mol, colour);
+    for (int round = 0; round < ROUNDS && open > 0; round++) {
+        uint32_t *swap = colour;
+
+        colour_anew(mol, colour, next);
+        colour = next;
+        next = swap;
+        kept = 0;
+        for (uint32_t k = 0; k < open; k++) {
+            if (bs_canon__code(&elements[k], colour) == 0)
+                elements[kept++] = elements[k];
+        }
+        open = kept;
+    }
+    *apparent = open == 0;
+    return BS_OK;
+}
+
+/* ---- By symmetry ---------------------------------------------------------------------------- */
+
 static bs_status strip_piece(strip *s, const bs_canon_pieces *pieces, uint32_t piece)
 {
     uint32_t removed = 1;
@@ -201,11 +286,13 @@ bs_status bs_mol__strip_meaningless_stereo(bs_ctx *cx, bs_mol *mol)
     bs_mark temp = bs_arena_mark(&cx->scratch);
     strip s = {.cx = cx, .mol = mol, .work_left = WORK_LIMIT};
     bs_canon_pieces pieces;
+    bool apparent;
     bs_status st;
 
     if (!remove_misfits(mol))
         return BS_OK;
-    if ((st = bs_canon__pieces(cx, mol, &pieces)) != BS_OK)
+    if ((st = all_apparent(cx, mol, &apparent)) != BS_OK || apparent ||
+        (st = bs_canon__pieces(cx, mol, &pieces)) != BS_OK)
         goto done;
     for (uint32_t p = 0; p < pieces.count; p++) {
         bs_mark piece_mark = bs_arena_mark(&cx->scratch);

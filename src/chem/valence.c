@@ -1,6 +1,8 @@
 /* The valence model. Valences of uncharged atoms: OpenSMILES, section on the organic subset. */
 #include "chem/valence.h"
 
+#include <stddef.h>
+
 static const uint8_t none[] = {0};
 static const uint8_t one[] = {1, 0};
 static const uint8_t two[] = {2, 0};
@@ -12,33 +14,13 @@ static const uint8_t two_four_six[] = {2, 4, 6, 0};
 /* The group of a main-group element that has normal valences, else 0. */
 static int group_of(int element)
 {
-    switch (element) {
-    case 5:
-        return 13;
-    case 6:
-    case 14:
-    case 32:
-    case 50:
-        return 14;
-    case 7:
-    case 15:
-    case 33:
-    case 51:
-        return 15;
-    case 8:
-    case 16:
-    case 34:
-    case 52:
-        return 16;
-    case 9:
-    case 17:
-    case 35:
-    case 53:
-    case 85:
-        return 17;
-    default:
-        return 0;
-    }
+    static const uint8_t groups[] = {
+        [5] = 13,  [6] = 14,  [7] = 15,  [8] = 16,  [9] = 17,  [14] = 14,
+        [15] = 15, [16] = 16, [17] = 17, [32] = 14, [33] = 15, [34] = 16,
+        [35] = 17, [50] = 14, [51] = 15, [52] = 16, [53] = 17, [85] = 17,
+    };
+
+    return element >= 0 && (size_t)element < sizeof groups ? groups[element] : 0;
 }
 
 /* Elements of the second row do not expand their octet, save nitrogen as written without charge. */
@@ -77,6 +59,8 @@ const uint8_t *bs_valence__normal(int element, int charge)
 
 int bs_valence__implied(int element, int charge, int bonds)
 {
+    if (element == 6 && charge == 0)
+        return bonds < 4 ? 4 - bonds : 0;
     for (const uint8_t *v = bs_valence__normal(element, charge); *v; v++) {
         if (*v >= bonds)
             return *v - bonds;
@@ -86,9 +70,12 @@ int bs_valence__implied(int element, int charge, int bonds)
 
 bool bs_valence__is_usual(int element, int charge, int valence)
 {
-    const uint8_t *v = bs_valence__normal(element, charge);
+    const uint8_t *v;
     int group = group_of(element);
 
+    if (element == 6 && charge == 0)
+        return valence == 4;
+    v = bs_valence__normal(element, charge);
     if (group == 0 && element != 1)
         return true;
     if (element == 7 && charge == 0 && valence == 5)

@@ -139,7 +139,8 @@ static bool add_chunk(bs_arena *arena, size_t size)
         chunk = arena->spare;
         arena->spare = NULL;
     } else {
-        chunk = bs_gate_alloc(arena->gate, header_bytes() + room);
+        /* Not cleared: what wants zeros clears its own part. */
+        chunk = bs_gate_resize(arena->gate, NULL, 0, header_bytes() + room);
         if (!chunk)
             return false;
         chunk->room = room;

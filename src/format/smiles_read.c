@@ -27,7 +27,7 @@ bs_status smiles_unexpected(smiles_reader *r, uint32_t at, const char *expected)
 
 static bool is_bond_symbol(char c)
 {
-    return c != '\0' && strchr("-=#$:/\\", c) != NULL;
+    return c == '=' || c == '-' || c == '#' || c == ':' || c == '/' || c == '\\' || c == '$';
 }
 
 /* Order of a bond between two atoms for a symbol, 0 where none was written. */

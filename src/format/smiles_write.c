@@ -18,14 +18,35 @@ typedef struct writer {
     uint32_t *stack;
 } writer;
 
+/* Elements as bits: those above 63 are in none of the sets. */
+static bool is_in(uint64_t set, int element)
+{
+    return element < 64 && (set >> element & 1);
+}
+
+#define BIT(n) ((uint64_t)1 << (n))
+
+/* Adds a byte; there is room nearly always. */
+static inline bs_status put(writer *w, char c)
+{
+    bs_text *text = &w->text;
+
+    if (text->length + 1 >= text->room)
+        return bs_text_putc(text, c);
+    text->data[text->length++] = c;
+    text->data[text->length] = '\0';
+    return BS_OK;
+}
+
 /* ---- Atoms ---------------------------------------------------------------------------------- */
 
 /* The symbol of an atom as it is written, in lower case for aromatic ones that have such a form. */
 static bool is_lower(const bs_atom *a)
 {
-    static const uint8_t elements[] = {5, 6, 7, 8, 14, 15, 16, 33, 34, 52};
+    const uint64_t elements = BIT(5) | BIT(6) | BIT(7) | BIT(8) | BIT(14) | BIT(15) | BIT(16) |
+                              BIT(33) | BIT(34) | BIT(52);
 
-    return (a->flags & BS_ATOM_AROMATIC) && memchr(elements, a->element, sizeof elements);
+    return (a->flags & BS_ATOM_AROMATIC) && is_in(elements, a->element);
 }
 
 /* Bonds of an atom as a reader of the string would count them before placing double bonds. */
@@ -66,11 +87,10 @@ static int bare_hydrogens(const bs_mol *mol, uint32_t atom)
 
 static bool needs_bracket(const smiles_plan *plan, uint32_t atom, bool has_mark)
 {
-    static const uint8_t organic[] = {0, 5, 6, 7, 8, 9, 15, 16, 17, 35, 53};
-    static const uint8_t organic_lower[] = {5, 6, 7, 8, 15, 16};
+    const uint64_t lower = BIT(5) | BIT(6) | BIT(7) | BIT(8) | BIT(15) | BIT(16);
+    const uint64_t upper = lower | BIT(0) | BIT(9) | BIT(17) | BIT(35) | BIT(53);
     const bs_atom *a = &plan->mol->atoms[atom];
-    bool known = is_lower(a) ? memchr(organic_lower, a->element, sizeof organic_lower) != NULL
-                             : memchr(organic, a->element, sizeof organic) != NULL;
+    bool known = is_in(is_lower(a) ? lower : upper, a->element);
 
     return !known || has_mark || a->charge != 0 || a->isotope != 0 ||
            (a->label != 0 && (plan->flags & BS_SMILES_LABELS)) ||
@@ -179,7 +199,7 @@ static void write_mark(const smiles_plan *plan, uint32_t atom, char mark[8])
     else
         perm = bs_stereo__permute(a->stereo, a->perm, count, around, written);
     if (perm > 0 && a->stereo <= BS_STEREO_ALLENE)
-        snprintf(mark, 8, "%s", perm == 1 ? "@" : "@@");
+        strcpy(mark, perm == 1 ? "@" : "@@");
     else if (perm > 0)
         snprintf(mark, 8, "@%s%u", names[a->stereo], (unsigned)perm & 0xff);
 }
@@ -187,13 +207,11 @@ static void write_mark(const smiles_plan *plan, uint32_t atom, char mark[8])
 static bs_status write_symbol(writer *w, const bs_atom *a)
 {
     const char *symbol = bs_element_symbol(a->element);
-    char lower[3];
+    bs_status st = put(w, is_lower(a) ? (char)(*symbol - 'A' + 'a') : *symbol);
 
-    if (!is_lower(a))
-        return bs_text_puts(&w->text, symbol);
-    snprintf(lower, sizeof lower, "%s", symbol);
-    lower[0] = (char)(lower[0] - 'A' + 'a');
-    return bs_text_puts(&w->text, lower);
+    while (st == BS_OK && *++symbol)
+        st = put(w, *symbol);
+    return st;
 }
 
 static bs_status write_charge(writer *w, int charge)
@@ -203,7 +221,7 @@ static bs_status write_charge(writer *w, int charge)
     if (charge == 0)
         return BS_OK;
     if (size == 1)
-        return bs_text_putc(&w->text, charge < 0 ? '-' : '+');
+        return put(w, charge < 0 ? '-' : '+');
     return bs_text_printf(&w->text, "%c%d", charge < 0 ? '-' : '+', size);
 }
 
@@ -213,11 +231,11 @@ static bs_status write_bracket(writer *w, uint32_t atom, const char *mark)
     int hydrogens = a->hydrogens - (w->plan->hydrogen[atom] != 0);
     bs_status st;
 
-    if ((st = bs_text_putc(&w->text, '[')) != BS_OK ||
+    if ((st = put(w, '[')) != BS_OK ||
         (a->isotope && (st = bs_text_printf(&w->text, "%u", a->isotope)) != BS_OK) ||
         (st = write_symbol(w, a)) != BS_OK || (st = bs_text_puts(&w->text, mark)) != BS_OK)
         return st;
-    if (hydrogens > 0 && (st = bs_text_putc(&w->text, 'H')) != BS_OK)
+    if (hydrogens > 0 && (st = put(w, 'H')) != BS_OK)
         return st;
     if (hydrogens > 1 && (st = bs_text_printf(&w->text, "%d", hydrogens)) != BS_OK)
         return st;
@@ -226,7 +244,7 @@ static bs_status write_bracket(writer *w, uint32_t atom, const char *mark)
     if (a->label && (w->plan->flags & BS_SMILES_LABELS) &&
         (st = bs_text_printf(&w->text, ":%u", a->label)) != BS_OK)
         return st;
-    return bs_text_putc(&w->text, ']');
+    return put(w, ']');
 }
 
 static bs_status write_atom(writer *w, uint32_t atom)
@@ -274,13 +292,13 @@ static bs_status write_bond(writer *w, uint32_t bond)
 {
     char symbol = bond_symbol(w->plan, bond);
 
-    return symbol ? bs_text_putc(&w->text, symbol) : BS_OK;
+    return symbol ? put(w, symbol) : BS_OK;
 }
 
 static bs_status write_number(writer *w, int number)
 {
     if (number < 10)
-        return bs_text_putc(&w->text, (char)('0' + number));
+        return put(w, (char)('0' + number));
     return bs_text_printf(&w->text, "%%%d", number);
 }
 
@@ -347,7 +365,7 @@ static bs_status write_piece(writer *w, uint32_t root)
         int first;
 
         if (atom == CLOSE_BRANCH) {
-            st = bs_text_putc(&w->text, ')');
+            st = put(w, ')');
             continue;
         }
         if (plan->entry[atom] != UINT32_MAX) {
@@ -355,7 +373,7 @@ static bs_status write_piece(writer *w, uint32_t root)
             const bs_link *last =
                 smiles_plan_links(plan, before) + plan->mol->atoms[before].degree - 1;
 
-            if (last->atom != atom && (st = bs_text_putc(&w->text, '(')) != BS_OK)
+            if (last->atom != atom && (st = put(w, '(')) != BS_OK)
                 break;
             if ((st = write_bond(w, plan->entry[atom])) != BS_OK)
                 break;

@@ -77,16 +77,17 @@ bs_status bs_edit__open_aromatic(bs_edit *edit)
     return BS_OK;
 }
 
-/* ---- Counting ---------------------------------------------------------------------------------- */
+/* ---- Counting ----------------------------------------------------------------------------------
+ */
 
 /* The bonds of an atom after the edit. */
 typedef struct tally {
-    int sum;      /* of orders; opened bonds with their old ones, fresh aromatic ones as 1 */
-    int doubles;  /* bonds of order 2 or more that are not aromatic */
-    int sigma;    /* bonds */
-    bool fresh;   /* aromatic by the rule */
-    bool lost;    /* an aromatic bond went or became another one */
-    bool open;    /* has an opened aromatic bond */
+    int sum;     /* of orders; opened bonds with their old ones, fresh aromatic ones as 1 */
+    int doubles; /* bonds of order 2 or more that are not aromatic */
+    int sigma;   /* bonds */
+    bool fresh;  /* aromatic by the rule */
+    bool lost;   /* an aromatic bond went or became another one */
+    bool open;   /* has an opened aromatic bond */
 } tally;
 
 static void count_end(const bs_edit *edit, uint32_t index, tally *t)
@@ -176,17 +177,25 @@ bs_status bs_edit__count_hydrogens(bs_edit *edit)
 {
     bs_mark temp = bs_arena_mark(&edit->cx->scratch);
     const bs_draft *draft = &edit->draft;
+    const unsigned touched = BS_EDIT_TOUCHED | BS_EDIT_CREATED;
     tally *tallies;
     bs_status st = bs_new(edit->cx, &edit->cx->scratch, draft->atom_count + 1, &tallies);
 
     if (st != BS_OK)
         return st;
+    /* Nothing changes at an atom that the edit has not touched. */
     for (uint32_t i = 0; i < draft->bond_count; i++) {
-        count_end(edit, i, &tallies[draft->bonds[i].a]);
-        count_end(edit, i, &tallies[draft->bonds[i].b]);
+        uint32_t a = draft->bonds[i].a, b = draft->bonds[i].b;
+
+        if (edit->atoms[a] & touched)
+            count_end(edit, i, &tallies[a]);
+        if (edit->atoms[b] & touched)
+            count_end(edit, i, &tallies[b]);
     }
-    for (uint32_t i = 0; i < draft->atom_count; i++)
-        count_atom(edit, i, &tallies[i]);
+    for (uint32_t i = 0; i < draft->atom_count; i++) {
+        if (edit->atoms[i] & touched)
+            count_atom(edit, i, &tallies[i]);
+    }
     bs_arena_rewind(&edit->cx->scratch, temp);
     return BS_OK;
 }
