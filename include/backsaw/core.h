@@ -124,6 +124,7 @@ typedef struct bs_ctx {
     bs_arena scratch;
     atomic_bool *stop;
     atomic_bool own_stop;
+    long *budget; /* work that may still be done, see bs_spend(); NULL for any amount */
 } bs_ctx;
 
 /* Makes a context that uses `gate`, or a gate of its own if NULL. Cannot fail. */
@@ -158,8 +159,21 @@ static inline bs_status bs_fail__code(bs_status reported, bs_status code)
     bs_fail__code((bs_fail_at)((cx), (code), (offset), __VA_ARGS__), (code))
 #define bs_fail_memory(cx) bs_fail__code((bs_fail_memory)(cx), BS_ENOMEM)
 
-/* BS_ESTOPPED with a message if the stop flag is set, else BS_OK. Cheap. */
+/*
+ * BS_ESTOPPED with a message if the stop flag is set, BS_ELIMIT if the context has a budget and it is
+ * used up, else BS_OK. Cheap.
+ */
 bs_status bs_poll(bs_ctx *cx);
+
+/*
+ * Takes work from the budget of a context that has one, so that what C does for untrusted code
+ * counts as well. A unit is about an instruction of Lua, 10 ns; the next poll sees what is left.
+ */
+static inline void bs_spend(bs_ctx *cx, size_t work)
+{
+    if (cx->budget)
+        *cx->budget -= work < (size_t)1 << 40 ? (long)work : 1L << 40;
+}
 
 /*
  * Writes the line of `text` that holds error.offset, with a caret under the character, into

@@ -5,8 +5,9 @@ core.module "step"
 local transforms = core.module "transform"
 local words = core.module "pack"
 local group_words = core.module("group").words
-core.module "why"
 if core.packed then return end
+
+core.module "why"
 
 local planning = core.module "plan"
 local catalogues = core.module "catalogue"

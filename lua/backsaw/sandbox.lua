@@ -9,6 +9,8 @@ local sandbox = {}
 local rep, format, find, type, tostring = string.rep, string.format, string.find, type, tostring
 local sort, concat = table.sort, table.concat
 
+local LONGEST = 256 * 1024 -- bytes of a string, as for all strings of a pack
+
 -- The text of a value without an address.
 local function text_of(value)
     local kind = type(value)
@@ -19,8 +21,8 @@ end
 local function bounded_rep(text, count, separator)
     separator = separator or ""
     if type(text) == "string" and type(count) == "number" and type(separator) == "string"
-        and count > 0 and (count > 1e6 or (#text + #separator) * count > 1e6) then
-        core.fail("limit reached", "string.rep: more than a million bytes")
+        and count > 0 and (count > LONGEST or (#text + #separator) * count > LONGEST) then
+        core.fail("limit reached", "string.rep: more than 256 KiB")
     end
     return rep(text, count, separator)
 end

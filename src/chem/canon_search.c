@@ -485,7 +485,9 @@ bs_status bs_canon__search(bs_ctx *cx, const bs_canon_graph *graph, const bs_can
     for (uint32_t k = 0; k < task->fixed_count; k++)
         bs_canon__set_apart(&s.cells, &graph->element[task->fixed[k]]);
     bs_canon__refine(&s.cells, graph);
-    if ((st = walk(&s)) != BS_OK)
+    st = walk(&s);
+    bs_spend(cx, s.cells.work);
+    if (st != BS_OK)
         return st;
     return report(&s, out);
 }

@@ -359,6 +359,7 @@ bs_status bs_draft_finish(bs_draft *draft, bs_arena *home, uint32_t **order, bs_
     bs_status st = bs_new(cx, order ? home : &cx->scratch, draft->atom_count, &f.order);
 
     *out = NULL;
+    bs_spend(cx, 100 + 20 * (size_t)draft->atom_count);
     if (st == BS_OK && (st = assemble(&f)) == BS_OK && (st = perceive(&f)) == BS_OK)
         st = pack(&f, home, out);
     /* A result in the scratch arena lies above the working memory, which then stays too. */

@@ -93,6 +93,8 @@ bs_status bs_poll(bs_ctx *cx)
 {
     if (atomic_load_explicit(cx->stop, memory_order_relaxed))
         return bs_fail(cx, BS_ESTOPPED, "stopped");
+    if (cx->budget && *cx->budget < 0)
+        return bs_fail(cx, BS_ELIMIT, "the limit of work is reached");
     return BS_OK;
 }
 

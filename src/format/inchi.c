@@ -231,6 +231,7 @@ bs_status bs_inchi(bs_ctx *cx, bs_arena *home, const bs_mol *mol, bool key, char
     bs_status st;
 
     *out = NULL;
+    bs_spend(cx, 20000 + 2000 * (size_t)mol->atom_count);
     if (mol->atom_count == 0)
         return bs_fail(cx, BS_EVALUE, "no InChI for a molecule without atoms");
     st = fill_input(cx, mol, &input);

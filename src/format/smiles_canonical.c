@@ -115,6 +115,7 @@ bs_status bs_smiles_canonical_order(bs_ctx *cx, bs_arena *home, const bs_mol *mo
     bs_status st = BS_OK;
 
     *out = NULL;
+    bs_spend(cx, 100 + 20 * (size_t)mol->atom_count);
     if (!(flags & BS_SMILES_LABELS))
         st = fold_labelled(cx, &plan.mol, &became);
     if (st == BS_OK && (flags & BS_SMILES_NO_STEREO))

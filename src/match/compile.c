@@ -291,6 +291,7 @@ static bs_status compile(bs_ctx *cx, bs_arena *home, const bs_query *query, bs_p
     int root;
     bs_status st;
 
+    bs_spend(cx, 500 + 200 * (size_t)query->atom_count);
     if ((st = bs_new(cx, home, 1, &c.pattern)) != BS_OK)
         return st;
     c.pattern->query = query;
@@ -328,6 +329,7 @@ bs_status bs_pattern_read(bs_ctx *cx, bs_arena *home, const char *text, size_t l
     bs_query *query;
     bs_status st = bs_query_read(cx, home, text, length, 0, &query);
 
+    bs_spend(cx, 20 * length);
     if (st == BS_OK)
         st = compile(cx, home, query, out);
     if (st != BS_OK)

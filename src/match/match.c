@@ -146,6 +146,7 @@ bs_status bs_pattern_find(bs_ctx *cx, bs_arena *home, const bs_pattern *pattern,
     st = bs_search__begin(&s, cx, pattern, mol, opts->steps);
     if (st == BS_OK)
         st = run(&s, opts, &all);
+    bs_spend(cx, bs_search__work(&s));
     bs_arena_rewind(&cx->scratch, temp);
     if (st == BS_OK && all.count > 0)
         st = bs_new_array(cx, home, (size_t)all.count, (size_t)all.width * sizeof *all.atoms,
@@ -176,6 +177,7 @@ bs_status bs_pattern_has(bs_ctx *cx, const bs_pattern *pattern, const bs_mol *mo
         *yes = bs_search__next(&s, &f);
         st = s.status;
     }
+    bs_spend(cx, bs_search__work(&s));
     bs_arena_rewind(&cx->scratch, temp);
     return st;
 }

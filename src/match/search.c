@@ -77,7 +77,7 @@ bs_status bs_search__begin(bs_search *s, bs_ctx *cx, const bs_pattern *pattern, 
     s->spelt_hydrogens = false;
     s->memo = NULL;
     s->component = NULL;
-    s->steps = steps > 0 ? steps : BS_SEARCH_STEPS;
+    s->given = s->steps = steps > 0 ? steps : BS_SEARCH_STEPS;
     s->status = BS_OK;
     s->placed = s->small;
     s->iter = s->small + BS_SEARCH_SMALL;

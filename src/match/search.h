@@ -26,7 +26,7 @@ typedef struct bs_search {
     uint32_t *iter;       /* next candidate by slot */
     uint8_t *memo;        /* part * atoms + atom: 0 unknown, 1 no, 2 yes; NULL without parts */
     uint32_t *component;  /* of each atom; NULL unless the pattern has groups */
-    long steps;           /* left */
+    long given, steps;    /* at the beginning, and left */
     bs_status status;
     uint32_t small[2 * BS_SEARCH_SMALL];
 } bs_search;
@@ -58,6 +58,14 @@ static inline bool bs_search__may_match(const bs_pattern *pattern, const bs_mol 
 /* Begins a search; its memory is in scratch, the caller rewinds. `steps` 0 for the default. */
 bs_status bs_search__begin(bs_search *s, bs_ctx *cx, const bs_pattern *pattern, const bs_mol *mol,
                            long steps);
+
+/* What a search has cost, for bs_spend(). */
+static inline size_t bs_search__work(const bs_search *s)
+{
+    size_t parts = (size_t)s->pattern->part_count;
+
+    return 10 + (parts > 1 ? parts * s->mol->atom_count / 16 : 0) + (size_t)(s->given - s->steps);
+}
 
 /* A frame for the whole pattern, or with an order of its own. */
 void bs_search__frame(const bs_search *s, const bs_order *order, uint32_t anchor, bs_frame *f);

@@ -335,6 +335,7 @@ bs_status bs_polarity_of_pair(bs_ctx *cx, bs_arena *home, const bs_mol *mol, int
         goto done;
     memset(c.on_path, 0, room * sizeof *c.on_path);
     follow_chains(&c, a);
+    bs_spend(cx, (size_t)c.steps);
     qsort(c.lengths, (size_t)c.count, sizeof *c.lengths, compare_ints);
     *out = (bs_relation){.lengths = c.lengths,
                          .chain = c.best,

@@ -214,6 +214,7 @@ static int core_synthon(lua_State *L)
     luaL_checktype(L, 1, LUA_TTABLE);
     if (host->kind == BSL_LANE)
         return 0;
+    bsl_check_growth(L);
     def.name = bsl_text_field(L, 1, "name");
     def.origin = bsl_text_field(L, 1, "origin");
     kind = bsl_text_field(L, 1, "kind");
@@ -307,6 +308,7 @@ static int core_transform(lua_State *L)
     def.hook_prefer = hook_field(L, 1, "prefer");
     if (host->kind == BSL_LANE)
         return 0;
+    bsl_check_growth(L);
     read_transform(L, &def);
     def.pack = bsl_pack_name(host);
     if (add_transform(host, &def, &index) != BS_OK) {

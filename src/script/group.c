@@ -65,6 +65,7 @@ static int core_group(lua_State *L)
     bs_group_test *tests;
 
     luaL_checktype(L, 1, LUA_TTABLE);
+    bsl_check_growth(L);
     if (host->kind == BSL_LANE)
         return 0;
     def.name = bsl_text_field(L, 1, "name");
@@ -102,6 +103,7 @@ static int core_conditions(lua_State *L)
     bs_conditions_def def = { 0 };
 
     luaL_checktype(L, 1, LUA_TTABLE);
+    bsl_check_growth(L);
     if (host->kind == BSL_LANE)
         return 0;
     def.name = bsl_text_field(L, 1, "name");
@@ -129,6 +131,7 @@ static int core_verdict(lua_State *L)
     int count;
 
     luaL_checktype(L, 1, LUA_TTABLE);
+    bsl_check_growth(L);
     if (host->kind == BSL_LANE)
         return 0;
     classes = bsl_words_field(L, 1, "conditions");
@@ -149,6 +152,7 @@ static int core_protecting(lua_State *L)
     bs_protecting_def def = { 0 };
 
     luaL_checktype(L, 1, LUA_TTABLE);
+    bsl_check_growth(L);
     if (host->kind == BSL_LANE)
         return 0;
     def.name = bsl_text_field(L, 1, "name");
@@ -180,6 +184,7 @@ static int core_incompatible(lua_State *L)
     bs_incompatible_def def = { 0 };
 
     luaL_checktype(L, 1, LUA_TTABLE);
+    bsl_check_growth(L);
     if (host->kind == BSL_LANE)
         return 0;
     def.name = bsl_text_field(L, 1, "name");

@@ -8,6 +8,24 @@
 
 #define HOOK_PERIOD 1000
 #define PACK_MEMORY_LIMIT ((size_t)256 << 20)
+#define PACK_STRING_LIMIT (((size_t)256 << 10) + 64) /* a header goes with the bytes */
+#define BYTES_A_UNIT 64 /* taking memory costs as much as an instruction for so many bytes */
+
+/* Whether a pack state may have another block; what it costs is taken from its budget. */
+static bool may_grow(bsl_host *host, size_t old, size_t new_size, bool is_string)
+{
+    if (!host->memory_limit)
+        return true;
+    host->budget -= (long)(new_size / BYTES_A_UNIT);
+    if (host->memory + host->boxed > host->memory_limit ||
+        new_size - old > host->memory_limit - host->memory - host->boxed)
+        host->breach = "the memory limit of 256 MiB for packs is reached";
+    else if (is_string && new_size > PACK_STRING_LIMIT)
+        host->breach = "a string of more than 256 KiB in a pack";
+    else
+        return true;
+    return false;
+}
 
 /* Lua's allocator contract: freeing and shrinking never fail; with a NULL block the old size is
    the type of the object. */
@@ -22,16 +40,41 @@ static void *allocate(void *payload, void *block, size_t old_size, size_t new_si
         host->memory -= old;
         return NULL;
     }
-    if (new_size > old && host->memory_limit &&
-        (host->memory > host->memory_limit || new_size - old > host->memory_limit - host->memory)) {
-        host->breached = true;
+    if (new_size > old && !may_grow(host, old, new_size, !block && old_size == LUA_TSTRING))
         return NULL;
-    }
     fresh = realloc(block, new_size);
     if (!fresh)
         return new_size <= old ? block : NULL;
     host->memory += new_size - old;
     return fresh;
+}
+
+void bsl_box(lua_State *L, const bs_arena *arena)
+{
+    bsl_host *host = bsl_host_of(L);
+
+    host->boxed += arena->live;
+    if (host->memory_limit && host->memory + host->boxed > host->memory_limit) {
+        host->breach = "the memory limit of 256 MiB for packs is reached";
+        bsl_error(L, BS_ELIMIT, "%s", host->breach);
+    }
+}
+
+void bsl_unbox(lua_State *L, const bs_arena *arena)
+{
+    bsl_host_of(L)->boxed -= arena->live;
+}
+
+void bsl_check_growth(lua_State *L)
+{
+    bsl_host *host = bsl_host_of(L);
+    size_t used = atomic_load(&host->session->cx.gate->used);
+
+    if (host->kind == BSL_PACKS && used > host->grown_from &&
+        used - host->grown_from > PACK_MEMORY_LIMIT) {
+        host->breach = "the memory limit of 256 MiB for packs is reached";
+        bsl_error(L, BS_ELIMIT, "%s", host->breach);
+    }
 }
 
 static void stop_hook(lua_State *L, lua_Debug *ar)
@@ -49,8 +92,8 @@ static void count_hook(lua_State *L, lua_Debug *ar)
     (void)ar;
     host->budget -= HOOK_PERIOD;
     if (host->budget < 0) {
-        host->breached = true;
-        bsl_error(L, BS_ELIMIT, "the limit of instructions for a pack is reached");
+        host->breach = "the limit of instructions for a pack is reached";
+        bsl_error(L, BS_ELIMIT, "%s", host->breach);
     }
     if (atomic_load(host->cx->stop))
         bsl_error(L, BS_ESTOPPED, "stopped");
@@ -193,15 +236,18 @@ void bsl_host_free(bsl_host *host)
 int bsl_call(bsl_host *host, lua_State *L, int arguments, int results, long budget)
 {
     bs_mark mark = bs_arena_mark(&host->results);
-    long kept = host->budget;
+    bs_ctx *cx = host->cx;
+    long kept = host->budget, *outer = cx->budget;
     int status;
 
     if (host->kind != BSL_MAIN) {
         if (budget)
             host->budget = budget;
+        cx->budget = &host->budget;
         lua_sethook(L, count_hook, LUA_MASKCOUNT, HOOK_PERIOD);
     }
     status = lua_pcall(L, arguments, results, 0);
+    cx->budget = outer;
     if (budget)
         host->budget = kept;
     bs_arena_rewind(&host->results, mark);

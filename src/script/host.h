@@ -43,8 +43,10 @@ typedef struct bsl_host {
     int pack;         /* number of the pack that is being read, 0 in the main state */
     int hook_next;    /* functions of that pack so far */
     size_t memory, memory_limit;
-    long budget;      /* instructions left, in a pack state */
-    bool breached;
+    size_t boxed;     /* bytes outside of Lua that its values hold */
+    long budget;      /* instructions left, in a pack state; work of the library counts too */
+    size_t grown_from;  /* memory in use when the pack at hand began to be read */
+    const char *breach; /* the limit that was reached, in words; or NULL */
     size_t said;      /* bytes that packs have printed */
     lua_State *calls; /* the thread on which functions of rules run */
     int depth;        /* of such calls in one another */
@@ -105,6 +107,16 @@ bsl_host *bsl_host_of(lua_State *L);
  * may be used (0: as many as are left). The error value is on the stack after a failure.
  */
 int bsl_call(bsl_host *host, lua_State *L, int arguments, int results, long budget);
+
+/*
+ * Counts the arena that a value holds outside of Lua, once it is filled, and takes it off the count
+ * before it is freed. Counting raises when a pack state holds too much.
+ */
+void bsl_box(lua_State *L, const bs_arena *arena);
+void bsl_unbox(lua_State *L, const bs_arena *arena);
+
+/* Raises when what a pack has defined takes too much memory. */
+void bsl_check_growth(lua_State *L);
 
 /* Makes the running main state stop at its next instruction (signal-safe), or takes that back. */
 void bsl_interrupt(bsl_host *host);

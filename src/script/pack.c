@@ -15,7 +15,7 @@
 #include <sys/stat.h>
 
 #define PACK_SIZE_LIMIT ((size_t)8 << 20)
-#define PACK_BUDGET 100000000L
+#define PACK_BUDGET 20000000L
 #define PACK_LIMIT 4096
 #define LIBRARY_LIMIT 1000
 
@@ -127,6 +127,7 @@ static bs_status run_pack(bsl_host *host, const char *shown, const char *text, s
     int status;
 
     snprintf(chunk, sizeof chunk, "@%s", shown);
+    host->breach = NULL;
     lua_checkstack(L, 10);
     lua_pushcfunction(L, load_chunk);
     lua_pushlightuserdata(L, (void *)text);
@@ -139,7 +140,7 @@ static bs_status run_pack(bsl_host *host, const char *shown, const char *text, s
         return BS_OK;
     bsl_take_fault(L, fault);
     if (status == LUA_ERRMEM)
-        fail(fault, BS_ELIMIT, "the memory limit of 256 MiB for packs is reached%s", "");
+        fail(fault, BS_ELIMIT, "%s", host->breach ? host->breach : "out of memory");
     if (!fault->where[0] && !strstr(fault->message, ".lua:"))
         snprintf(fault->where, sizeof fault->where, "%s", shown);
     return fault->code == BS_OK ? BS_ESCRIPT : fault->code;
@@ -235,6 +236,8 @@ static bs_status load_pack(bs_session *session, const char *path, const char *sh
     } else {
         host->pack = *pack;
         host->hook_next = 0;
+        if (outer == 0)
+            host->grown_from = atomic_load(&session->cx.gate->used);
         st = run_pack(host, shown, text, length, fault);
         host->pack = outer;
         host->hook_next = outer_hook;

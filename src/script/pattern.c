@@ -44,6 +44,7 @@ static void read_pattern(lua_State *L, const char *text, size_t length)
         box->pattern = NULL;
         bsl_raise(L, text, length);
     }
+    bsl_box(L, &box->arena);
 }
 
 const bs_pattern *bsl_topattern(lua_State *L, int i)
@@ -185,6 +186,7 @@ static int pattern_gc(lua_State *L)
     pattern_box *box = luaL_checkudata(L, 1, PATTERN_TYPE);
 
     box->pattern = NULL;
+    bsl_unbox(L, &box->arena);
     bs_arena_free(&box->arena);
     return 0;
 }

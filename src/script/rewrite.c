@@ -43,6 +43,7 @@ static int core_rewrite(lua_State *L)
         box->rewrite = NULL;
         return bsl_raise(L, text, length);
     }
+    bsl_box(L, &box->arena);
     return 1;
 }
 
@@ -98,6 +99,7 @@ static int rewrite_gc(lua_State *L)
     rewrite_box *box = luaL_checkudata(L, 1, REWRITE_TYPE);
 
     box->rewrite = NULL;
+    bsl_unbox(L, &box->arena);
     bs_arena_free(&box->arena);
     return 0;
 }

@@ -24,8 +24,16 @@ end
 
 print(try "pack { name = 'try-1' }") --> fine
 print(try "while true do end") --> PACK:1: the limit of instructions for a pack is reached
-print(try "local t = {} for i = 1, 1e9 do t[i] = { i } end") --> PACK: the memory limit of 256 MiB for packs is reached
-print(try "local t = 'x' while true do t = t .. t end") --> PACK: the memory limit of 256 MiB for packs is reached
+print(try "local t = {} for i = 1, 1e9 do t[i] = ('x'):rep(2^17) .. i end") --> PACK: the memory limit of 256 MiB for packs is reached
+print(try "local t = 'x' while true do t = t .. t end") --> PACK: a string of more than 256 KiB in a pack
+
+-- what the library does for a pack counts as well, in work and in memory
+print(try "while true do mol(('C'):rep(1000)) end") --> PACK:1: the limit of instructions for a pack is reached
+print((try "local m = mol(('C1CC1'):rep(300)) while true do m:count '*~*~*~*~*~*~*~*' end":gsub("instructions for a pack", "work"))) --> PACK:1: the limit of work is reached
+print(try "local s = ('x'):rep(2^18) while true do local t = s:reverse() end") --> PACK:1: the limit of instructions for a pack is reached
+print((try "local t = {} for i = 1, 1e9 do t[i] = pattern('[#6:' .. i % 900 .. ']' .. ('~*'):rep(i % 500)) end":gsub("instructions for a pack", "work"))) --> PACK:1: the limit of work is reached
+print((try "for i = 1, 1e9 do synthon('s' .. i) { kind = 'donor', equivalents = { { attach = 'Cl' } } } end":gsub("instructions for a pack", "work"))) --> PACK:1: the limit of work is reached
+print(try "assert(not mol('C').ideas and not mol('C').molfile)") --> fine
 print(try "assert(not io and not os and not load and not pcall and not getmetatable and not debug and not require)") --> fine
 print(try "assert(not coroutine and not setmetatable and not rawset and not next and not dofile and not math.random)") --> fine
 print(try "assert(not ('x').gsub and not ('x').find and not string.dump and not plan and not catalogue)") --> fine
@@ -37,7 +45,7 @@ print(try "mol.read '/etc/passwd'") --> PACK:1: mol.read: a pack reads no files
 print(try "mol.read '/no/such/file'") --> PACK:1: mol.read: a pack reads no files
 print(try "mol.each 'x.sdf'") --> PACK:1: mol.each: a pack reads no files
 print(try "assert(mol('OCC') == mol 'CCO' and mol('C').molfile == nil)") --> fine
-print(try "('x'):rep(1e9)") --> PACK:1: string.rep: more than a million bytes
+print(try "('x'):rep(1e9)") --> PACK:1: string.rep: more than 256 KiB
 print(try "assert(tostring({}) == 'table' and ('%s'):format(print) == 'function')") --> fine
 print(try "local s = '' for k in pairs { b = 1, a = 2, 30, 20 } do s = s .. tostring(k) end assert(s == '12ab')") --> fine
 print(try "pack { name = 'quay' }") --> PACK:1: a pack named 'quay' is already in use
