@@ -136,6 +136,9 @@ bs_status bs_route_verify(bs_ctx *cx, const bs_route *route, const bs_rules *rul
  */
 bool bs_route_same(const bs_route *a, const bs_route *b);
 
+/* Whether step j of b is step i of a in this sense. */
+bool bs_route_same_step(const bs_route *a, int i, const bs_route *b, int j);
+
 /*
  * Sets `checked` and the rule of every step anew, as the rules at hand have it (NULL: none): for a
  * route that comes from elsewhere and that nobody else looks at yet.

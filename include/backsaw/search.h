@@ -134,6 +134,15 @@ typedef struct bs_constraints {
     bool convergent;  /* a step is outside of the longest linear sequence */
 } bs_constraints;
 
+/* What the search is for, and so which molecule comes next. */
+typedef enum bs_strategy {
+    BS_STRATEGY_CHEAPEST, /* best-first by known cost and guess */
+    BS_STRATEGY_PROOF,    /* whether the target can be made at all; ends with the first route:
+                             proof-number search (Allis, van der Meulen & van den Herik, Artif.
+                             Intell. 1994, 66, 91), one molecule at a time */
+    BS_STRATEGY_BREADTH   /* by depth, then as they were met */
+} bs_strategy;
+
 /*
  * What to plan and how. All zero but `shelf` is a sound default without rules. Steps are shown to
  * the callbacks as a route of that one step: steps[0], its product molecules[0], precursors
@@ -159,6 +168,14 @@ typedef struct bs_plan_opts {
     int known_count;
     const bs_constraints *constraints; /* or NULL */
     bs_plan_limits limits;
+    bs_strategy strategy;
+    /*
+     * Routes must differ: a route is left out if of the disconnections of a cheaper one in the
+     * list it has more than this share (k shortest paths with limited overlap: Chondrogiannis,
+     * Bouros, Gamper & Leser, EDBT 2015). Known steps count if they join two compounds with carbon.
+     */
+    bool has_overlap;
+    double overlap; /* 0 to 1 */
     bs_cost_mode mode;
     bool has_step_cost;
     double step_cost; /* of each step, 0 or more; without has_step_cost BS_DEFAULT_STEP_COST; the
@@ -174,6 +191,9 @@ typedef struct bs_plan_opts {
     bs_status (*allow)(void *payload, bs_ctx *cx, const bs_route *step, bool *allowed);
     /* Step cost, 0 or more, in place of step_cost. Known steps with a cost are not asked. */
     bs_status (*cost)(void *payload, bs_ctx *cx, const bs_route *step, double *cost);
+    /* What a mole costs that is sold at `price`, 0 or more, in place of it. */
+    bs_status (*leaf)(void *payload, bs_ctx *cx, const bs_mol *mol, const char *smiles,
+                      double price, double *cost);
     /* Cost expected for a molecule that is not explored and not sold, 0 or more. */
     bs_status (*guess)(void *payload, bs_ctx *cx, const bs_mol *mol, const char *smiles,
                        double *cost);

@@ -8,7 +8,8 @@ local planning = {}
 
 local fields = { target = "any", catalogue = "any", limits = "any", cost = "any", allow = "code",
     keep = "code", rank = "code", guess = "code", known = "any", transforms = "any",
-    constraints = "any", clashes = "text", clash_cost = "amount", best = "count", at_hand = "any",
+    constraints = "any", clashes = "text", clash_cost = "amount",
+    strategy = "text", diverse = "amount", best = "count", at_hand = "any",
     quiet = "flag", trace = "text", threads = "count" }
 
 local limit_fields = { depth = "count", steps = "count", molecules = "count", seconds = "amount",
@@ -148,15 +149,47 @@ end
 -- Cost models are tables known by this one.
 local models = setmetatable({}, { __mode = "k" })
 
+-- The step cost with terms added: { weight, function(step) } each, none of which may lower it.
+local function with_terms(what, step, terms)
+    if terms == nil then return nil end
+    if type(terms) ~= "table" then check.fail("%s: 'terms' must be a list", what) end
+    local list = {}
+    for i, term in ipairs(check.entries(what .. ": terms", terms)) do
+        local weight, f
+        if type(term) == "table" then weight, f = term[1], term[2] end
+        if type(weight) ~= "number" or not (weight >= 0 and weight < math.huge)
+            or type(f) ~= "function" then
+            check.fail("%s: term %d: { weight, function(step) } is expected, the weight 0 or more",
+                what, i)
+        end
+        list[i] = { weight, f }
+    end
+    return function(s)
+        local sum = s.cost
+        if type(step) == "function" then sum = step(s) end
+        for i, term in ipairs(list) do
+            local value = term[2](s)
+            if type(value) ~= "number" or not (value >= 0 and value < math.huge) then
+                check.fail("%s: term %d: must give a number of 0 or more, not %s", what, i,
+                    tostring(value))
+            end
+            sum = sum + term[1] * value
+        end
+        return sum
+    end
+end
+
 local function cost_model(mode)
     return function(given)
-        local model = check.fields("cost." .. mode, given or {}, { step = "any" })
+        local model = check.fields("cost." .. mode, given or {},
+            { step = "any", terms = "any", leaf = "code" })
         local step = model.step
         if step ~= nil and type(step) ~= "function"
             and not (type(step) == "number" and step >= 0 and step < math.huge) then
             check.fail("cost.%s: 'step' must be a number of 0 or more, or a function", mode)
         end
-        model = { mode = mode, step = step }
+        model = { mode = mode, step = step, leaf = model.leaf,
+            total = with_terms("cost." .. mode, step, model.terms) }
         models[model] = true
         return model
     end
@@ -172,6 +205,7 @@ local function set_cost(options, cost)
             check.fail("plan: 'cost' must be cost.per_mole{...}, cost.additive{...} or a function")
         end
         step = cost.step
+        options.leaf = cost.leaf
         if cost.mode == "additive" then options.additive = true end
     end
     if type(step) == "function" then
@@ -179,6 +213,7 @@ local function set_cost(options, cost)
     else
         options.step_cost = step
     end
+    if type(cost) == "table" and cost.total then options.cost = cost.total end
 end
 
 -- As the library numbers them.
@@ -215,6 +250,12 @@ function planning.plan(given)
     end
     if options.trace then check.path("plan: trace", options.trace) end
     if options.quiet == false then options.quiet = nil end
+    local strategy = options.strategy
+    if strategy == "proof" or strategy == "breadth" then
+        options[strategy] = true
+    elseif strategy ~= nil and strategy ~= "cheapest" then
+        check.fail("plan: 'strategy' must be cheapest, proof or breadth, not '%s'", strategy)
+    end
     local cost = options.cost
     options.cost = nil
     set_cost(options, cost)
@@ -246,7 +287,8 @@ function core.routes_methods.extend(routes, given)
 end
 
 local rerank_fields = { catalogue = "any", at_hand = "any", cost = "any", allow = "code",
-    keep = "code", rank = "code", without = "any", best = "count", limits = "any" }
+    keep = "code", rank = "code", without = "any", best = "count", limits = "any",
+    diverse = "amount" }
 
 -- rs:rerank { cost = ... }: the routes of what was explored, by other prices, costs or filters
 function core.routes_methods.rerank(routes, given)
@@ -259,11 +301,14 @@ function core.routes_methods.rerank(routes, given)
     end
     if given.cost ~= nil then
         what.costs = true
-        options.cost, options.step_cost, options.additive = nil, nil, nil
+        if options.leaf or type(given.cost) == "table" and given.cost.leaf then
+            what.prices = true
+        end
+        options.cost, options.step_cost, options.additive, options.leaf = nil, nil, nil, nil
         set_cost(options, given.cost)
     end
     if given.allow then what.steps = true end
-    for _, name in ipairs { "allow", "keep", "rank", "best" } do
+    for _, name in ipairs { "allow", "keep", "rank", "best", "diverse" } do
         if given[name] ~= nil then options[name] = given[name] end
     end
     local limits = check.fields("rerank: limits", given.limits or {},
@@ -301,6 +346,55 @@ local function merge_sort(list, before)
     end
     table.move(a, i, #a, #merged + 1, merged)
     return table.move(b, j, #b, #merged + 1, merged)
+end
+
+-- What a list may be measured by, the lower the better.
+local measures = {}
+for _, name in ipairs { "cost", "steps", "longest", "leaves", "runs" } do
+    measures[name] = function(route) return route:measure()[name] end
+end
+
+function measures.cautions(route)
+    local seen, count = {}, 0
+    for _, step in ipairs(route:steps()) do
+        for _, caution in ipairs(step.cautions) do
+            if not seen[caution] then seen[caution], count = true, count + 1 end
+        end
+    end
+    return count
+end
+
+-- rs:pareto { "cost", "steps" }: the routes that no other beats in one measure and equals or
+-- beats in all; a function(route) is a measure, too
+function core.routes_methods.pareto(routes, given)
+    local list, points, kept = {}, {}, {}
+    for i, measure in ipairs(check.entries("pareto", given or { "cost", "steps", "cautions" })) do
+        list[i] = type(measure) == "function" and measure or measures[measure]
+        if not list[i] then check.fail("pareto: no measure named '%s'", tostring(measure)) end
+    end
+    for i, route in ipairs(routes) do
+        points[i] = {}
+        for k, measure in ipairs(list) do
+            points[i][k] = measure(route)
+            if type(points[i][k]) ~= "number" then
+                check.fail("pareto: measure %d must give a number", k)
+            end
+        end
+    end
+    local function beats(a, b)
+        local better = false
+        for k = 1, #list do
+            if a[k] > b[k] then return false end
+            better = better or a[k] < b[k]
+        end
+        return better
+    end
+    for i, route in ipairs(routes) do
+        local beaten = false
+        for j = 1, #points do beaten = beaten or beats(points[j], points[i]) end
+        if not beaten then kept[#kept + 1] = route end
+    end
+    return core.pick_routes(kept, routes)
 end
 
 -- rs:sort(f): a new list; f(route) gives a number or a string, the lowest first, or f(a, b) says

@@ -46,8 +46,7 @@ static bool same_notes(const bs_route_way *a, const bs_route_way *b)
            same_text(a->recipe, b->recipe);
 }
 
-/* Whether step j of b has the product and, in whatever order, the precursors of step i of a. */
-static bool same_step(const bs_route *a, int i, const bs_route *b, int j)
+bool bs_route_same_step(const bs_route *a, int i, const bs_route *b, int j)
 {
     const bs_route_step *p = &a->steps[i], *q = &b->steps[j];
 
@@ -75,7 +74,7 @@ bool bs_route_same(const bs_route *a, const bs_route *b)
     for (int i = 0; i < a->step_count; i++) {
         int j = 0;
 
-        while (j < b->step_count && !same_step(a, i, b, j))
+        while (j < b->step_count && !bs_route_same_step(a, i, b, j))
             j++;
         if (j == b->step_count)
             return false;

@@ -34,6 +34,7 @@ typedef struct question {
     bool as_step;
     const bs_mol *mol;
     const char *smiles;
+    const double *price; /* a second argument, or NULL */
     bool yes;
     double number;
     bool wants_number;
@@ -63,7 +64,9 @@ static int run_question(lua_State *L)
         bsl_push_route_step(L, ask->route, 0);
     else
         bsl_push_route(L, ask->route);
-    lua_call(L, 1, 1);
+    if (ask->price)
+        lua_pushnumber(L, *ask->price);
+    lua_call(L, ask->price ? 2 : 1, 1);
     ask->yes = lua_toboolean(L, -1);
     if (!ask->wants_number)
         return 0;
@@ -113,6 +116,18 @@ static bs_status ask_guess(void *payload, bs_ctx *cx, const bs_mol *mol, const c
                            double *cost)
 {
     question ask = { .function = "guess", .mol = mol, .smiles = smiles, .wants_number = true };
+    bs_status st = put_question(payload, cx, &ask);
+
+    *cost = ask.number;
+    return st;
+}
+
+static bs_status ask_leaf(void *payload, bs_ctx *cx, const bs_mol *mol, const char *smiles,
+                          double price, double *cost)
+{
+    question ask = {
+        .function = "leaf", .mol = mol, .smiles = smiles, .price = &price, .wants_number = true
+    };
     bs_status st = put_question(payload, cx, &ask);
 
     *cost = ask.number;
@@ -343,6 +358,11 @@ static void read_limits(lua_State *L, int i, bs_plan_opts *opts)
     opts->has_clash_cost = has_option(L, i, "clash_cost");
     opts->clash_cost = number_option(L, i, "clash_cost");
     opts->mode = has_option(L, i, "additive") ? BS_COST_ADDITIVE : BS_COST_PER_MOLE;
+    opts->strategy = has_option(L, i, "proof")     ? BS_STRATEGY_PROOF
+                     : has_option(L, i, "breadth") ? BS_STRATEGY_BREADTH
+                                                   : BS_STRATEGY_CHEAPEST;
+    opts->has_overlap = has_option(L, i, "diverse");
+    opts->overlap = number_option(L, i, "diverse");
 }
 
 static void read_callbacks(lua_State *L, int i, bs_plan_opts *opts, planner *p)
@@ -353,6 +373,7 @@ static void read_callbacks(lua_State *L, int i, bs_plan_opts *opts, planner *p)
     opts->allow = has_option(L, i, "allow") ? ask_allow : NULL;
     opts->cost = has_option(L, i, "cost") ? ask_cost : NULL;
     opts->guess = has_option(L, i, "guess") ? ask_guess : NULL;
+    opts->leaf = has_option(L, i, "leaf") ? ask_leaf : NULL;
     opts->keep = has_option(L, i, "keep") ? ask_keep : NULL;
     opts->rank = has_option(L, i, "rank") ? ask_rank : NULL;
     if (session->opts.progress && !has_option(L, i, "quiet"))

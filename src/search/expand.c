@@ -420,6 +420,13 @@ static bs_status meet_plain(bs_plan_state *plan, bs_ctx *cx, const bs_mol *mol, 
 
     if (st != BS_OK)
         return st;
+    if (opts->leaf && isfinite(out->price)) {
+        st = opts->leaf(opts->payload, cx, plain, smiles, out->price, &out->price);
+        if (st == BS_OK && !(isfinite(out->price) && out->price >= 0))
+            st = bs_fail(cx, BS_EVALUE, "leaf: must be a number of 0 or more");
+        if (st != BS_OK)
+            return st;
+    }
     bs_constraint__offer(plan, mol, smiles, &may, &must);
     if (must && isinf(out->price))
         out->price = 0;

@@ -35,7 +35,7 @@ void bs_explore__init(bs_explore *x, bs_ctx *cx, const bs_explore_calls *calls,
     bs_arena_init(&x->arena, cx->gate);
     bs_graph__init(&x->graph, cx);
     bs_map_init(&x->index, cx);
-    bs_frontier__init(&x->front, &x->graph, mode);
+    bs_frontier__init(&x->front, &x->graph, mode, limits->strategy == BS_STRATEGY_PROOF);
 }
 
 void bs_explore__free(bs_explore *x)
@@ -350,29 +350,38 @@ static bs_status expand_batch(bs_explore *x, bs_arena *home, bool *over)
     return st;
 }
 
+/* Whether what was looked at ends the search; tells why. */
+static bs_status look_for_end(bs_explore *x, bool *over)
+{
+    bool done = false;
+    bs_status st = BS_OK;
+
+    *over = true;
+    if (x->limits.strategy == BS_STRATEGY_PROOF && isfinite(x->front.had.items[0].value)) {
+        x->end = BS_END_PROVED;
+    } else if (x->front.picked_count == 0) {
+        x->end = BS_END_EXHAUSTED;
+    } else {
+        st = ask_enough(x, &done);
+        *over = done;
+        if (done)
+            x->end = BS_END_ENOUGH;
+    }
+    return st;
+}
+
 /* One round: look, perhaps end, expand a batch. */
 static bs_status go_round(bs_explore *x, bs_arena *home, bool *over)
 {
-    bool done = false;
     bs_status st;
 
     if (x->front.picked_at == x->front.picked_count) {
         if ((st = bs_frontier__look(x)) != BS_OK)
             return st;
         report(x);
-        if (x->front.picked_count == 0) {
-            x->end = BS_END_EXHAUSTED;
-            *over = true;
-            return BS_OK;
-        }
     }
-    if (x->front.picked_at == 0 && (st = ask_enough(x, &done)) != BS_OK)
+    if (x->front.picked_at == 0 && ((st = look_for_end(x, over)) != BS_OK || *over))
         return st;
-    if (done) {
-        x->end = BS_END_ENOUGH;
-        *over = true;
-        return BS_OK;
-    }
     return expand_batch(x, home, over);
 }
 

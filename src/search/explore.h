@@ -73,6 +73,7 @@ typedef struct bs_explore_limits {
     int lanes;          /* 1 or more; the lane of a molecule is its place in the batch modulo it */
     int threads;        /* 1 or more */
     double least_step;  /* no step costs less */
+    bs_strategy strategy;
 } bs_explore_limits;
 
 typedef struct bs_explore_node {
@@ -86,6 +87,7 @@ typedef struct bs_explore_node {
 typedef enum bs_explore_end {
     BS_END_EXHAUSTED, /* nothing is left to expand within the depth */
     BS_END_ENOUGH,    /* nothing left could be cheaper than what `enough` has */
+    BS_END_PROVED, /* there is a route, and the strategy was to find out */
     BS_END_MOLECULES,
     BS_END_SECONDS,
     BS_END_MEMORY,

@@ -419,6 +419,63 @@ static bool is_taken(const bs_plan_state *plan, bs_route *const *routes, int cou
     return false;
 }
 
+/* ---- Diversity ----------------------------------------------------------------------------- */
+
+static bool has_carbon_atom(const char *smiles)
+{
+    for (const char *c = smiles; *c; c++) {
+        if ((*c == 'C' || *c == 'c') && !(c[0] == 'C' && strchr("laroudsemnf", c[1]) && c[1]))
+            return true;
+    }
+    return false;
+}
+
+/* Whether a step is a key disconnection: it joins what stands apart. */
+static bool is_key(const bs_plan_state *plan, const bs_route *route, const bs_route_step *step)
+{
+    int carbon = 0;
+
+    if (!step->known)
+        return bs_rules_transform(plan->opts->rules, step->ways[0].rule)->kind == BS_DISCONNECTION;
+    for (int i = 0; i < step->precursor_count; i++)
+        carbon += has_carbon_atom(route->molecules[step->precursors[i]].smiles);
+    return carbon > 1;
+}
+
+/* Whether two routes have too many key disconnections in common, measured by those of `kept`. */
+static bool overlaps(const bs_plan_state *plan, const bs_route *kept, const bs_route *route)
+{
+    int keys = 0, shared = 0, others = 0;
+
+    for (int i = 0; i < route->step_count; i++)
+        others += is_key(plan, route, &route->steps[i]);
+    for (int i = 0; i < kept->step_count; i++) {
+        bool same = false;
+
+        if (!is_key(plan, kept, &kept->steps[i]))
+            continue;
+        keys++;
+        for (int k = 0; k < route->step_count; k++)
+            same = same || bs_route_same_step(kept, i, route, k);
+        shared += same;
+    }
+    if (keys == 0)
+        return others == 0;
+    return shared > plan->opts->overlap * keys;
+}
+
+static bool is_like_another(const bs_plan_state *plan, bs_route *const *routes, int count,
+                            const bs_route *route)
+{
+    for (int i = 0; plan->opts->has_overlap && i < count; i++) {
+        if (overlaps(plan, routes[i], route))
+            return true;
+    }
+    return false;
+}
+
+/* ---- The list ------------------------------------------------------------------------------- */
+
 bs_status bs_plan__take_routes(bs_plan_state *plan, bs_arena *home, long tries, bs_route ***routes,
                                int *count)
 {
@@ -445,7 +502,8 @@ bs_status bs_plan__take_routes(bs_plan_state *plan, bs_arena *home, long tries, 
         }
         plan->looked_at++;
         st = consider(plan, home, &answer, &route);
-        if (st == BS_OK && route && !is_taken(plan, *routes, *count, route))
+        if (st == BS_OK && route && !is_taken(plan, *routes, *count, route) &&
+            !is_like_another(plan, *routes, *count, route))
             (*routes)[(*count)++] = route;
     }
     plan->routes_seen = *count;

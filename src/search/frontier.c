@@ -3,15 +3,16 @@
 
 #include "search/cheapest.h"
 #include "search/explore.h"
+#include "search/proof.h"
 
 #include <math.h>
 #include <string.h>
 
-void bs_frontier__init(bs_frontier *front, const bs_graph *graph, bs_cost_mode mode)
+void bs_frontier__init(bs_frontier *front, const bs_graph *graph, bs_cost_mode mode, bool proof)
 {
     *front = (bs_frontier){.depth = 0};
     bs_values__init(&front->had, graph, mode, false);
-    bs_values__init(&front->hoped, graph, mode, false);
+    bs_values__init(&front->hoped, graph, mode, proof);
 }
 
 void bs_frontier__free(bs_frontier *front)
@@ -23,6 +24,7 @@ void bs_frontier__free(bs_frontier *front)
     cx = front->had.graph->cx;
     bs_gate_free(cx->gate, front->reach, front->reach_room * sizeof *front->reach);
     bs_gate_free(cx->gate, front->picked, front->picked_room * sizeof *front->picked);
+    bs_gate_free(cx->gate, front->disproof, front->disproof_room * sizeof *front->disproof);
     bs_heap__free(&front->urgent, cx);
     bs_heap__free(&front->heap, cx);
     bs_heap__free(&front->ready, cx);
@@ -46,16 +48,18 @@ static bs_status refresh(bs_explore *x, uint32_t mol)
     bs_frontier *front = &x->front;
     bs_explore_node *node = &x->nodes[mol];
     double price = x->graph.mols[mol].price;
-    bool open = is_open(x, mol);
-    bs_status st;
+    bool open = is_open(x, mol), breadth = x->limits.strategy == BS_STRATEGY_BREADTH;
+    double guess = front->hoped.counts ? 1 : node->guess;
+    bs_status st = BS_OK;
 
     if (open == node->open)
         return BS_OK;
     node->open = open;
     front->open += open ? 1 : -1u;
-    st = bs_values__set_leaf(&front->hoped, mol, open && isinf(price) ? node->guess : price);
-    if (st == BS_OK && open && node->urgent)
-        st = bs_heap__push(&front->urgent, x->cx, 0, mol);
+    if (isinf(price))
+        st = bs_values__set_leaf(&front->hoped, mol, open ? guess : price);
+    if (st == BS_OK && open && (node->urgent || breadth))
+        st = bs_heap__push(&front->urgent, x->cx, breadth ? node->depth : 0, mol);
     return st;
 }
 
@@ -225,12 +229,37 @@ static bs_status pick_cheapest(bs_explore *x)
     return st;
 }
 
+static bs_status pick_proving(bs_explore *x)
+{
+    uint32_t mol = bs_proof__pick(x);
+
+    if (mol != BS_GRAPH_NONE)
+        pick(x, mol);
+    return BS_OK;
+}
+
+static bs_status pick_rest(bs_explore *x)
+{
+    switch (x->limits.strategy) {
+    case BS_STRATEGY_BREADTH:
+        return BS_OK; /* the urgent ones are all */
+    case BS_STRATEGY_PROOF:
+        return x->front.picked_count > 0 ? BS_OK : pick_proving(x);
+    case BS_STRATEGY_CHEAPEST:
+        break;
+    }
+    return pick_cheapest(x);
+}
+
 bs_status bs_frontier__look(bs_explore *x)
 {
     bs_frontier *front = &x->front;
+    uint32_t first_new = front->mols;
     bs_status st;
 
     if ((st = take_in(x)) != BS_OK ||
+        (x->limits.strategy == BS_STRATEGY_PROOF &&
+         (st = bs_proof__update(x, first_new)) != BS_OK) ||
         (st = bs_graph__reserve(x->cx, &front->picked, &front->picked_room, (size_t)x->limits.batch,
                                 sizeof *front->picked)) != BS_OK)
         return st;
@@ -241,7 +270,7 @@ bs_status bs_frontier__look(bs_explore *x)
         if (x->nodes[mol].open)
             pick(x, mol);
     }
-    return is_full(x) ? BS_OK : pick_cheapest(x);
+    return is_full(x) ? BS_OK : pick_rest(x);
 }
 
 /* ---- Bound --------------------------------------------------------------------------------- */

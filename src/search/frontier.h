@@ -24,7 +24,7 @@ typedef struct bs_frontier {
     uint32_t mols, ways; /* of the graph taken in so far */
     uint32_t depth;      /* the limit that was taken in */
     uint32_t open;       /* molecules that could be expanded */
-    bs_heap urgent;      /* open molecules that come before all others */
+    bs_heap urgent;      /* open molecules that come before all others; by depth, all of them */
     bs_reach *reach;     /* by molecule */
     size_t reach_room;
     uint32_t look;
@@ -33,9 +33,12 @@ typedef struct bs_frontier {
     size_t picked_room;
     uint32_t picked_count, picked_at; /* ... of which so many are done */
     uint64_t walked;                  /* molecules that looks came by, ever */
+    double *disproof; /* by molecule, for proof-number search (proof.h) */
+    size_t disproof_room;
 } bs_frontier;
 
-void bs_frontier__init(bs_frontier *front, const bs_graph *graph, bs_cost_mode mode);
+/* With `proof`, front->hoped counts the open molecules that must be had. */
+void bs_frontier__init(bs_frontier *front, const bs_graph *graph, bs_cost_mode mode, bool proof);
 void bs_frontier__free(bs_frontier *front);
 
 /*
@@ -44,7 +47,7 @@ void bs_frontier__free(bs_frontier *front);
  * bottom-up half is front->hoped, the top-down half a Dijkstra search over the same ways that
  * ends when it has the batch; it carries the moles that the target needs along the best way, and
  * is exact where no molecule is needed twice. Ties go to the molecule met first. Molecules that
- * the owner calls urgent come before.
+ * the owner calls urgent come before. Other strategies pick by depth, or by proof numbers.
  */
 bs_status bs_frontier__look(bs_explore *x);
 

@@ -41,6 +41,8 @@ bs_status bs_plan__check(bs_ctx *cx, const bs_plan_opts *o)
         return bs_fail(cx, BS_EVALUE, "cost: the step cost must be a number of 0 or more");
     if (o->has_clash_cost && !(isfinite(o->clash_cost) && o->clash_cost >= 0))
         return bs_fail(cx, BS_EVALUE, "clash_cost: must be a number of 0 or more");
+    if (o->has_overlap && !(o->overlap >= 0 && o->overlap <= 1))
+        return bs_fail(cx, BS_EVALUE, "diverse: must be 0 to 1");
     if (o->threads < 0 || o->threads > MOST_THREADS)
         return bs_fail(cx, BS_EVALUE, "threads: must be 1 to %d", MOST_THREADS);
     if (o->batch < 0 || o->transform_count < 0 || (o->lane_hooks && o->lane_count < 1))
@@ -146,6 +148,7 @@ bs_status bs_plan__explore(bs_plan_state *plan)
         .lanes = o->lane_hooks ? o->lane_count : DEFAULT_LANES,
         .threads = o->threads > 1 && (!o->hooks || o->lane_hooks) ? o->threads : 1,
         .least_step = least_step(plan),
+        .strategy = o->strategy,
     };
 
     if (!plan->x.cx)
@@ -175,6 +178,9 @@ static bs_status say_why(bs_plan_state *plan, bs_routes *list)
         break;
     case BS_END_STOPPED:
         st = bs_text_puts(&text, "the search was stopped");
+        break;
+    case BS_END_PROVED:
+        st = bs_text_puts(&text, "the search ended with the proof that there is a route");
         break;
     case BS_END_EXHAUSTED:
     case BS_END_ENOUGH:

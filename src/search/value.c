@@ -84,11 +84,14 @@ bs_status bs_values__grow(bs_values *values)
     const bs_graph *graph = values->graph;
     bs_status st = bs_graph__reserve(graph->cx, &values->items, &values->room, graph->mol_count,
                                      sizeof *values->items);
+    double price;
 
     for (; st == BS_OK && values->mols < graph->mol_count; values->mols++) {
         values->items[values->mols] = (bs_value){
             .value = INFINITY, .now = INFINITY, .leaf = INFINITY, .choice = BS_GRAPH_NONE};
-        st = bs_values__set_leaf(values, values->mols, graph->mols[values->mols].price);
+        price = graph->mols[values->mols].price;
+        st = bs_values__set_leaf(values, values->mols,
+                                 values->counts && isfinite(price) ? 0 : price);
     }
     while (st == BS_OK && values->ways < graph->way_count)
         st = offer(values, values->ways++);

@@ -56,3 +56,47 @@ print(fails(routes.extend, routes, { molecules = 0 })) --> extend: 'molecules' m
 print(fails(routes.rerank, routes, { without = 3 })) --> rerank: without: entry 1: a molecule or SMILES is expected, not a number
 print(fails(plan, { target = "CCN", catalogue = { "CCO" }, known = known, transforms = {}, quiet = true,
     keep = function(route) return routes:rerank { keep = function() return #routes:rerank() end } end })) --> the search is running
+
+-- whether it can be made at all; by depth
+local proof = plan { target = "CCN", catalogue = { "CCO", "CCBr" }, known = known, transforms = {}, strategy = "proof", quiet = true }
+print(#proof, proof[1].cost, proof.reason) --> 1	22.0	the search ended with the proof that there is a route
+print(#plan { target = "CCN", catalogue = { "CCCl" }, known = known, transforms = {}, strategy = "proof" }) --> 0
+local breadth = plan { target = "CCN", catalogue = { "CCO", { "CC=O", per_mole = 30 } }, known = known,
+    transforms = {}, strategy = "breadth", quiet = true }
+print(#breadth, breadth[1].cost, breadth.complete) --> 2	32.5	true
+print(fails(plan, { target = "CCN", strategy = "depth" })) --> plan: 'strategy' must be cheapest, proof or breadth, not 'depth'
+
+-- terms and leaves: CCBr: (1 + 3 + 2 * 5) / 1 = 14; CCN: (14 + 3 + 2 * 5) / 1 = 27; with leaves at ten times
+-- their price and nothing for what is free: (10 + 3) / 1 = 13, 16
+local bare = { { product = "CCN", from = { "CCBr", "N" }, yield = 100 }, { product = "CCBr", from = "CCO", yield = 100 } }
+local function priced(cost)
+    return plan { target = "CCN", catalogue = { "CCO" }, known = bare, transforms = {}, cost = cost, quiet = true }
+end
+print(priced(cost.per_mole { step = 3, terms = { { 2, function() return 5 end } } })[1].cost) --> 27.0
+local plain = priced(cost.per_mole { step = 3 })
+print(plain[1].cost, plain:rerank { cost = cost.per_mole { step = 3, terms = { { 2, function() return 5 end } } } }[1].cost) --> 7.0	27.0
+local tenfold = cost.per_mole { step = 3, leaf = function(molecule, price) return 10 * price end }
+print(priced(tenfold)[1].cost, plain:rerank { cost = tenfold }[1].cost, priced(tenfold):rerank { cost = cost.per_mole { step = 3 } }[1].cost) --> 16.0	16.0	7.0
+print(fails(priced, cost.per_mole { terms = { { 2, function() return -5 end } } })) --> cost.per_mole: term 1: must give a number of 0 or more, not -5
+print(fails(priced, cost.per_mole { leaf = function() return -1 end })) --> leaf: must be a number of 0 or more
+print(fails(priced, function() return -1 end)) --> cost: a step must cost a number of 0 or more
+print(fails(cost.per_mole, { terms = { { -1, print } } })) --> cost.per_mole: term 1: { weight, function(step) } is expected, the weight 0 or more
+
+-- routes that differ: the two ways to the ether share no joining step; the third shares its last one with the first
+local ethers = {
+    { product = "CCOCCC", from = { "CCBr", "CCCO" }, cost = 10, yield = 100, cautions = { "a", "b" } },
+    { product = "CCOCCC", from = { "CCO", "CCCBr" }, cost = 20, yield = 100 },
+    { product = "CCBr", from = "CCO", cost = 1, yield = 100 },
+    { product = "CCBr", from = "CC", cost = 2, yield = 100 },
+    { product = "CCCBr", from = "CCCO", cost = 1, yield = 100 },
+}
+local all = plan { target = "CCOCCC", catalogue = { "CCO", "CCCO", "CC" }, known = ethers, transforms = {}, quiet = true }
+print(#all, all[1].cost, all[2].cost, all[3].cost) --> 3	13.0	14.0	23.0
+local diverse = all:rerank { diverse = 0.5 }
+print(#diverse, diverse[1].cost, diverse[2].cost, #all:rerank { diverse = 1 }) --> 2	13.0	23.0	3
+print(fails(all.rerank, all, { diverse = 2 })) --> diverse: must be 0 to 1
+
+-- the front: the dearer route by the same step is beaten, the one without cautions is not
+local front = all:pareto { "cost", "cautions" }
+print(#front, front[1].cost, front[2].cost, #all:pareto { "cost" }) --> 2	13.0	23.0	1
+print(#all:pareto { function(route) return -route.cost end }, fails(all.pareto, all, { "beauty" })) --> 1	pareto: no measure named 'beauty'

@@ -353,6 +353,34 @@ static void explore__goes_on_after_a_stop(void **state)
     bs_explore__free(&one);
 }
 
+/*
+ * By depth: the parts of 16 before theirs. By proof: sums with a 1, and of equal parts, are one
+ * molecule to prove, so it is done before all is expanded.
+ */
+static void explore__other_strategies(void **state)
+{
+    fixture *f = *state;
+    bs_explore_limits limits = {.depth = 100, .molecules = 1000, .batch = 4, .lanes = 3, .threads = 1};
+    numbers n = {.guess_factor = 1}, m = {.guess_factor = 1}, none = {.guess_factor = 1, .fail_at = 2};
+    bs_explore x;
+
+    limits.strategy = BS_STRATEGY_BREADTH;
+    explore(f, &x, &n, &limits, "16");
+    assert_string_equal(n.order, "16 15 2 14 3 13 4 12 5 11 6 10 7 9 8 ");
+    assert_int_equal(x.end, BS_END_EXHAUSTED);
+    bs_explore__free(&x);
+    limits.strategy = BS_STRATEGY_PROOF;
+    explore(f, &x, &m, &limits, "16");
+    assert_int_equal(x.end, BS_END_PROVED);
+    assert_true(isfinite(cheapest(f, &x)));
+    assert_true(m.expanded < 15);
+    bs_explore__free(&x);
+    explore(f, &x, &none, &limits, "16");
+    assert_int_equal(x.end, BS_END_EXHAUSTED);
+    assert_true(isinf(cheapest(f, &x)));
+    bs_explore__free(&x);
+}
+
 static void explore__every_failed_allocation_leaks_nothing(void **state)
 {
     fixture *f = *state;
@@ -388,6 +416,7 @@ int main(void)
         check_case(explore__threads_change_nothing),
         check_case(explore__goes_on_as_in_one_go),
         check_case(explore__goes_on_after_a_stop),
+        check_case(explore__other_strategies),
         check_case(explore__every_failed_allocation_leaks_nothing),
     };
 
