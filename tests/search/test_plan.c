@@ -494,6 +494,77 @@ static bs_status break_down(void *payload, bs_ctx *cx, const bs_route *step, boo
     return bs_fail(cx, BS_ESCRIPT, "the notebook is closed");
 }
 
+typedef struct countdown {
+    int left;
+    atomic_bool *stop;
+} countdown;
+
+static bs_status count_down(void *payload, bs_ctx *cx, const bs_route *step, bool *allowed)
+{
+    countdown *c = payload;
+
+    (void)cx;
+    (void)step;
+    *allowed = true;
+    if (--c->left == 0)
+        atomic_store(c->stop, true);
+    return BS_OK;
+}
+
+/* Stopped after the n-th step is found, a search gives routes of the whole search, and may go on. */
+static void stop_after(fixture *f, const problem *p, bs_plan_opts opts, const bs_routes *whole,
+                       int n)
+{
+    countdown c = {n, f->cx.stop};
+    bs_search *search;
+    bs_routes *part;
+
+    opts.allow = count_down;
+    opts.payload = &c;
+    check_ok(f, bs_search_new(&f->cx, read(f, p->names[p->target]), &opts, &search));
+    for (int run = 0; run < 2; run++) {
+        check_ok(f, bs_search_run(search, &part));
+        assert_true(part->count <= whole->count);
+        assert_true(run == 0 || part->count == whole->count);
+        for (int i = 0; i < part->count; i++) {
+            int k = 0;
+
+            while (k < whole->count && !bs_route_same(part->items[i], whole->items[k]))
+                k++;
+            assert_true(k < whole->count);
+        }
+        bs_routes_free(&f->cx, part);
+        atomic_store(f->cx.stop, false);
+    }
+    bs_search_free(search);
+}
+
+static void plan__stopped_anywhere_its_routes_are_routes(void **state)
+{
+    fixture *f = *state;
+    json_error_t error;
+    json_t *root = json_load_file(BACKSAW_TEST_DATA "/checks/search.json", 0, &error), *entry;
+    size_t i;
+
+    assert_non_null(root);
+    json_array_foreach(json_object_get(root, "graphs"), i, entry) {
+        problem p;
+        bs_plan_opts opts = {.limits = {.depth = 50}, .best = 400};
+        bs_routes *whole;
+
+        load(f, entry, &p);
+        opts.shelf = p.shelf;
+        opts.known = p.steps;
+        opts.known_count = p.step_count;
+        check_ok(f, bs_plan(&f->cx, read(f, p.names[p.target]), &opts, &whole));
+        for (int n = 1; whole->count < 100 && n <= p.step_count && n <= 12; n++)
+            stop_after(f, &p, opts, whole, n);
+        bs_routes_free(&f->cx, whole);
+        bs_shelf_free(p.shelf);
+    }
+    json_decref(root);
+}
+
 static void plan__an_error_of_a_callback_is_passed_on(void **state)
 {
     fixture *f = *state;
@@ -546,6 +617,7 @@ int main(void)
         check_case(plan__two_known_steps_with_the_same_compounds_stay_two),
         check_case(plan__bad_known_steps_are_refused),
         check_case(plan__a_stop_gives_what_was_found),
+        check_case(plan__stopped_anywhere_its_routes_are_routes),
         check_case(plan__an_error_of_a_callback_is_passed_on),
         check_case(plan__the_same_input_gives_the_same_text),
     };
