@@ -28,16 +28,16 @@ static uint32_t flood(const bs_mol *mol, uint32_t seed, uint32_t label, uint32_t
 
 bs_status bs_canon__pieces(bs_ctx *cx, const bs_mol *mol, bs_canon_pieces *pieces)
 {
-    uint32_t n = mol->atom_count;
+    size_t n = mol->atom_count;
     uint32_t *piece_of;
     bs_status st;
 
     memset(pieces, 0, sizeof *pieces);
-    if ((st = bs_new(cx, &cx->scratch, n + 1, &pieces->start)) != BS_OK ||
-        (st = bs_new(cx, &cx->scratch, n, &pieces->atoms)) != BS_OK ||
-        (st = bs_new(cx, &cx->scratch, n, &pieces->local)) != BS_OK ||
-        (st = bs_new(cx, &cx->scratch, n, &piece_of)) != BS_OK)
+    if ((st = bs_new(cx, &cx->scratch, 4 * n + 1, &pieces->start)) != BS_OK)
         return st;
+    pieces->atoms = pieces->start + n + 1;
+    pieces->local = pieces->atoms + n;
+    piece_of = pieces->local + n;
     memset(piece_of, 0xFF, n * sizeof *piece_of);
     for (uint32_t atom = 0; atom < n; atom++) {
         if (piece_of[atom] != BS_CANON_NONE)
@@ -112,16 +112,14 @@ static uint32_t atom_elements(const bs_canon_graph *graph, uint32_t atom, const 
     bs_canon_element element;
     uint32_t count = 0;
 
-    if (mol->atoms[atom].stereo != BS_STEREO_NONE &&
-        bs_canon__atom_element(mol, atom, &element)) {
+    if (mol->atoms[atom].stereo != BS_STEREO_NONE && bs_canon__atom_element(mol, atom, &element)) {
         localise(&element, local);
         if (out)
             out[count] = element;
         count++;
     }
     for (uint32_t k = 0; k < mol->atoms[atom].degree; k++) {
-        if (links[k].atom < atom ||
-            !(bonds[links[k].bond].flags & (BS_BOND_CIS | BS_BOND_TRANS)) ||
+        if (links[k].atom < atom || !(bonds[links[k].bond].flags & (BS_BOND_CIS | BS_BOND_TRANS)) ||
             !bs_canon__bond_element(mol, links[k].bond, &element))
             continue;
         localise(&element, local);

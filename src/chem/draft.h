@@ -54,4 +54,10 @@ static inline bs_bond *bs_mol__bonds_mutable(bs_mol *mol)
     return (bs_bond *)((char *)mol + mol->bonds_at);
 }
 
+/*
+ * bs_draft_finish() without the features that match asks for: for a molecule that is only cut into
+ * its pieces (bs_mol_fragments() finds theirs).
+ */
+bs_status bs_draft__finish_plain(bs_draft *draft, bs_arena *home, uint32_t **order, bs_mol **out);
+
 #endif

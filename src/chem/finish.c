@@ -25,6 +25,7 @@ typedef struct finish {
     int16_t *stated; /* by atom: stated hydrogens or BS_DRAFT_IMPLIED */
     bool *wish;      /* by atom: written as aromatic */
     bs_rings rings;
+    bool plain; /* leave the features out */
 } finish;
 
 static bool bond_stands(const bs_draft *draft, const bs_draft_bond *bond)
@@ -316,7 +317,8 @@ static bs_status pack(finish *f, bs_arena *home, bs_mol **out)
         memcpy((char *)mol + mol->rings_at, f->rings.offsets, (rings + 1) * sizeof(uint32_t));
         memcpy((char *)mol + mol->ring_atoms_at, f->rings.atoms, ring_atoms * sizeof(uint32_t));
     }
-    bs_mol__features(mol);
+    if (!f->plain)
+        bs_mol__features(mol);
     *out = mol;
     return BS_OK;
 }
@@ -350,10 +352,11 @@ static bs_status perceive(finish *f)
     return BS_OK;
 }
 
-bs_status bs_draft_finish(bs_draft *draft, bs_arena *home, uint32_t **order, bs_mol **out)
+static bs_status finish_draft(bs_draft *draft, bs_arena *home, bool plain, uint32_t **order,
+                              bs_mol **out)
 {
     bs_ctx *cx = draft->cx;
-    finish f = {.cx = cx, .draft = draft};
+    finish f = {.cx = cx, .draft = draft, .plain = plain};
     bs_mark kept = bs_arena_mark(home);
     bs_mark temp = bs_arena_mark(&cx->scratch);
     bs_status st = bs_new(cx, order ? home : &cx->scratch, draft->atom_count, &f.order);
@@ -370,4 +373,14 @@ bs_status bs_draft_finish(bs_draft *draft, bs_arena *home, uint32_t **order, bs_
     if (order)
         *order = st == BS_OK ? f.order : NULL;
     return st;
+}
+
+bs_status bs_draft_finish(bs_draft *draft, bs_arena *home, uint32_t **order, bs_mol **out)
+{
+    return finish_draft(draft, home, false, order, out);
+}
+
+bs_status bs_draft__finish_plain(bs_draft *draft, bs_arena *home, uint32_t **order, bs_mol **out)
+{
+    return finish_draft(draft, home, true, order, out);
 }

@@ -482,20 +482,20 @@ bs_status smiles_write_plan(const smiles_plan *plan, bool sorted, bs_arena *home
 {
     writer w = {.plan = plan};
     bs_arena *scratch = &plan->cx->scratch;
+    size_t atoms = plan->mol->atom_count;
     piece_text *pieces;
-    piece_text *spare;
     bs_status st;
 
     bs_text_init(&w.text, plan->cx);
-    if ((st = bs_new(plan->cx, scratch, plan->mol->atom_count, &w.at)) == BS_OK &&
+    if ((st = bs_new(plan->cx, scratch, 3 * atoms + 1, &w.at)) == BS_OK &&
         (st = bs_new(plan->cx, scratch, plan->mol->bond_count, &w.number)) == BS_OK &&
-        (st = bs_new(plan->cx, scratch, 2 * (size_t)plan->mol->atom_count + 1, &w.stack)) ==
-            BS_OK &&
-        (st = bs_new(plan->cx, scratch, plan->piece_count, &pieces)) == BS_OK &&
-        (st = bs_new(plan->cx, scratch, plan->piece_count, &spare)) == BS_OK &&
-        (st = write_pieces(&w, pieces)) == BS_OK) {
-        if (sorted)
-            sort_pieces(w.text.data, pieces, spare, plan->piece_count);
+        (st = bs_new(plan->cx, scratch, 2 * (size_t)plan->piece_count, &pieces)) == BS_OK) {
+        w.stack = w.at + atoms;
+        st = write_pieces(&w, pieces);
+    }
+    if (st == BS_OK) {
+        if (sorted && plan->piece_count > 1)
+            sort_pieces(w.text.data, pieces, pieces + plan->piece_count, plan->piece_count);
         st = assemble(&w, pieces, home, out, order, at);
     }
     bs_text_free(&w.text);

@@ -9,6 +9,8 @@
 
 #include <string.h>
 
+#include "chem/draft.h"
+
 /* ---- The bench ---------------------------------------------------------------------------- */
 
 static bs_status count_molecules(bs_ctx *cx, bs_arena *home, bs_bench *bench)
@@ -127,7 +129,8 @@ static void place_slots(bs_edit *edit, const uint32_t *where)
         edit->slot[i] = edit->bench->base[from->atoms[i].part] + where[i];
 }
 
-/* ---- Atoms ------------------------------------------------------------------------------------ */
+/* ---- Atoms ------------------------------------------------------------------------------------
+ */
 
 /* Hydrogens are written as all of them; those that are atoms count. */
 static int hydrogen_atoms(const bs_edit *edit, uint32_t atom)
@@ -222,7 +225,8 @@ static void remove_atoms(bs_edit *edit)
     }
 }
 
-/* ---- Bonds ------------------------------------------------------------------------------------ */
+/* ---- Bonds ------------------------------------------------------------------------------------
+ */
 
 static bs_draft_bond *find_bond(bs_edit *edit, uint32_t a, uint32_t b)
 {
@@ -287,7 +291,8 @@ static bs_status change_bonds(bs_edit *edit)
     return st;
 }
 
-/* ---- What stays ------------------------------------------------------------------------------- */
+/* ---- What stays -------------------------------------------------------------------------------
+ */
 
 static uint32_t root_of(uint32_t *parent, uint32_t atom)
 {
@@ -335,7 +340,8 @@ static bs_status keep_products(bs_edit *edit, uint32_t *parent, bool *possible)
     return BS_OK;
 }
 
-/* ---- Products --------------------------------------------------------------------------------- */
+/* ---- Products ---------------------------------------------------------------------------------
+ */
 
 /* Whether all atoms that the edit touched have valences that chemists know. */
 static bool valences_pass(const bs_edit *edit, const uint32_t *order, const bs_mol *mol)
@@ -399,14 +405,16 @@ static bs_status finish_products(bs_edit *edit, bs_arena *home, uint32_t *parent
     bs_mol *whole;
     bs_mol **pieces;
     int count = 1;
-    bs_status st = bs_draft_finish(&edit->draft, &edit->cx->scratch, &order, &whole);
+    bool cut = edit->bench->reading->to->part_count > 1;
+    bs_status st = cut ? bs_draft__finish_plain(&edit->draft, &edit->cx->scratch, &order, &whole)
+                       : bs_draft_finish(&edit->draft, &edit->cx->scratch, &order, &whole);
 
     *possible = false;
     if (st == BS_EVALUE)
         return BS_OK;
     if (st != BS_OK || !valences_pass(edit, order, whole))
         return st;
-    if (edit->bench->reading->to->part_count > 1) {
+    if (cut) {
         st = bs_mol_fragments(edit->cx, home, whole, &pieces, &count);
     } else {
         pieces = &whole;
@@ -418,7 +426,8 @@ static bs_status finish_products(bs_edit *edit, bs_arena *home, uint32_t *parent
     return *possible ? sort_products(edit, home, parent, order, pieces, count, out) : BS_OK;
 }
 
-/* ---- All together ------------------------------------------------------------------------------- */
+/* ---- All together -------------------------------------------------------------------------------
+ */
 
 static bs_status attempt(bs_edit *edit, bs_arena *home, const uint32_t *where, bs_result *out,
                          bool *possible)
