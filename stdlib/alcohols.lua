@@ -6,7 +6,7 @@ pack {
     version = "0.1.0",
     licence = "CC0-1.0",
     about = "Alcohols, diols and epoxides: reductions, hydrations, oxidations of alkenes",
-    needs = { "synthons" },
+    needs = { "synthons", "preferences" },
 }
 
 -- Two neighbouring ring carbons with a hydroxyl group each, on one side or on both sides of the ring.
@@ -118,7 +118,7 @@ interconversion "oxymercuration-demercuration" {
     target = "[CX4;H0,H1;!$(C[!#6;!#1;!$([OX2H])]):1]([OX2H:3])[CX4;!H0;!$(C[!#6;!#1]):2]",
     from = "[C:1]=[C:2]",
     when = function(m) return m.atom[1].carbons > m.atom[2].carbons end,
-    prefer = function(product, m) return m.atom[1].carbons end,
+    prefer = { "markovnikov", carbon = 1 },
     conditions = "oxymercuration",
     also_attacks = { "alkene", "alkyne" },
     recipe = "Hg(OAc)2, THF-H2O, then NaBH4, NaOH",
@@ -135,7 +135,7 @@ interconversion "acid-hydration-of-alkene" {
     target = "[CX4;H0;!$(C[!#6;!#1;!$([OX2H])]):1]([OX2H:3])[CX4;!H0;!$(C[!#6;!#1]):2]",
     from = "[C:1]=[C:2]",
     when = function(m) return m.atom[1].carbons > m.atom[2].carbons end,
-    prefer = function(product, m) return m.atom[1].carbons end,
+    prefer = { "markovnikov", carbon = 1 },
     conditions = "acid-aq-strong",
     also_attacks = { "alkene", "epoxide", "acetal", "silyl ether", "free alcohol", "Boc amine",
         "tert-butyl ester" },
@@ -158,7 +158,7 @@ interconversion "hydroboration-oxidation" {
         return m.atom[1].carbons < m.atom[2].carbons
             and not lies(m, CIS_ALKYL, 2, 4, m.atom[1].index, m.atom[2].index)
     end,
-    prefer = function(product, m) return -m.atom[1].carbons end,
+    prefer = { "anti-markovnikov", carbon = 1 },
     conditions = "borane",
     also_attacks = { "alkene", "alkyne", "aldehyde", "ketone", "free acid" },
     recipe = "9-BBN or BH3·THF, THF, then H2O2, NaOH; also: BH3·SMe2, Cy2BH",

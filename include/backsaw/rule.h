@@ -37,14 +37,33 @@ typedef struct bs_rewrite bs_rewrite;
 bs_status bs_rewrite_read(bs_ctx *cx, bs_arena *home, const char *text, size_t length,
                           bs_rewrite **out);
 
-/* Number of reactants that bs_rewrite_apply() wants: dot-separated parts of L, groups counted once. */
+/* Number of reactants that bs_rewrite_apply() wants: dot-separated parts of L, groups counted once.
+ */
 int bs_rewrite_reactant_count(const bs_rewrite *rewrite);
 
 /*
+ * How a product set stands to the wanted one: the same group reacted elsewhere or the other way
+ * round (regio), another group reacted (chemo), only stereo differs, or the wanted product reacted
+ * again under the same conditions.
+ */
+typedef enum bs_rival_kind {
+    BS_RIVAL_NONE,
+    BS_RIVAL_REGIO,
+    BS_RIVAL_CHEMO,
+    BS_RIVAL_STEREO,
+    BS_RIVAL_OVER
+} bs_rival_kind;
+
+/* The kind in a word: "regio", "chemo", "stereo", "over-reaction"; NULL for none. */
+const char *bs_rival_word(bs_rival_kind kind);
+
+/*
  * One result of a rewriting: a set of product molecules. `site` gives for each atom of L, in the
- * order of the text, where it lay: the number of the reactant and the atom.
+ * order of the text, where it lay: the number of the reactant and the atom; UINT32_MAX as reactant
+ * for atoms of a reagent that was not given.
  */
 typedef struct bs_outcome {
+    bs_rival_kind kind; /* of product sets of transforms */
     bs_mol **products;
     char **smiles; /* canonical, same order */
     int product_count;
@@ -109,7 +128,8 @@ typedef struct bs_words {
 /*
  * A transform as its author wrote it. Either `from` is set (rewriting) or `cut` with synthons.
  * Strings are copied. `hook_when`, `hook_prefer` are numbers of functions that the hooks below
- * resolve, or -1.
+ * resolve, or -1. Instead of `hook_prefer` a shared preference may be named: `prefer`, with a map
+ * number for each of its roles.
  */
 typedef struct bs_transform_def {
     const char *name;
@@ -127,8 +147,19 @@ typedef struct bs_transform_def {
     bs_words spares, also_attacks, cautions, reagents;
     const char *source, *rxno, *pack;
     int hook_when, hook_prefer;
-    const char *origin; /* pack and line */
+    const char *prefer;     /* name of a preference, or NULL */
+    bs_words prefer_roles;  /* its roles, and */
+    const int *prefer_maps; /* for each of them the map number of an atom of the target */
+    const char *origin;     /* pack and line */
 } bs_transform_def;
+
+/* A function that says which product is favoured, for use by many rules. */
+typedef struct bs_preference_def {
+    const char *name;
+    bs_words roles; /* names of the atoms that it asks about */
+    int hook;
+    const char *origin;
+} bs_preference_def;
 
 /* ---- The rule book --------------------------------------------------------------------- */
 
@@ -151,6 +182,9 @@ bs_status bs_rules_add_synthon(bs_ctx *cx, bs_rules *rules, const bs_synthon_def
 bs_status bs_rules_add_transform(bs_ctx *cx, bs_rules *rules, const bs_transform_def *def,
                                  int *index);
 
+/* Adds a preference; errors as for synthons. */
+bs_status bs_rules_add_preference(bs_ctx *cx, bs_rules *rules, const bs_preference_def *def);
+
 int bs_rules_count(const bs_rules *rules);
 
 /* Index of a transform by name or by one of its other names; -1 if there is none. */
@@ -164,7 +198,7 @@ const bs_transform_def *bs_rules_transform(const bs_rules *rules, int index);
  * again, and the memory stays with the book.
  */
 typedef struct bs_rules_mark {
-    int synthons, transforms;
+    int synthons, transforms, preferences;
     int shelves[4], rulings; /* what group.h adds */
 } bs_rules_mark;
 
@@ -181,11 +215,16 @@ void bs_rules_retire_synthon(bs_rules *rules, const char *name, bool retired);
 
 /* ---- Hooks ----------------------------------------------------------------------------- */
 
-/* Where a target pattern lies in a product: atoms by map number, ascending. */
+/*
+ * Where a target pattern lies in a product: atoms by map number, ascending. For a shared preference
+ * `roles` are the names that some of the maps have there.
+ */
 typedef struct bs_site {
     const int *maps;
     const uint32_t *atoms;
     int count;
+    bs_words roles;
+    const int *role_maps;
 } bs_site;
 
 /* Functions of a rule that live elsewhere (in Lua). Both may be NULL if no rule has a hook. */
@@ -207,7 +246,8 @@ typedef struct bs_rule_hooks {
  * One use of a transform on a product. Precursors are distinct compounds, each with its canonical
  * SMILES and its moles a mole of product, in the order of their SMILES. A salt is one compound.
  * `rivals` are the other product sets of the forward run. With `stereo_open` the reaction does not
- * settle stereo that the product states (or settles some that it leaves open).
+ * settle stereo that the product states (or settles some that it leaves open). With `minor` the
+ * rule's preference favours a rival.
  */
 typedef struct bs_step {
     int transform;
@@ -219,6 +259,7 @@ typedef struct bs_step {
     bs_site site;
     bs_outcomes rivals;
     bool stereo_open;
+    bool minor;
 } bs_step;
 
 typedef struct bs_steps {
@@ -227,23 +268,34 @@ typedef struct bs_steps {
 } bs_steps;
 
 enum {
-    BS_BACK_UNCHECKED = 1 /* leave out the forward run: no rivals, and steps that fail it stay */
+    BS_BACK_UNCHECKED = 1, /* leave out the forward run: no rivals, and steps that fail it stay */
+    BS_BACK_MINOR = 2,     /* keep steps of which the product is not the major one */
+    BS_BACK_KINDS = 4      /* tell the kinds of rivals */
 };
 
 /*
  * The steps that make `product` by one transform (or by all, with -1, in the order of the book).
- * Each step was run forwards and gave the product. Precursors with a bond that their rings cannot
- * hold (bs_mol_strain()) make no step, unless the product has one. Steps with the same precursors by the same
- * transform are given once.
+ * Each step was run forwards and gave the product, and unless asked for, no rival is favoured over
+ * it. Precursors with a bond that their rings cannot hold (bs_mol_strain()) make no step, unless the
+ * product has one. Steps with the same precursors by the same transform are given once.
  */
 bs_status bs_rules_back(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int transform,
                         const bs_mol *product, const bs_rule_hooks *hooks, unsigned flags,
                         bs_steps *out);
 
+/*
+ * The further products that the product of a step gives with the same reagents, by the step's own
+ * transform: over-reactions.
+ */
+bs_status bs_rules_again(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int transform,
+                         const bs_mol *product, const bs_mol *const *precursors, int count,
+                         const bs_rule_hooks *hooks, bs_outcomes *out);
+
 /* A set of products of one forward run. `score` is that of `prefer`, 0 without. */
 typedef struct bs_product_set {
     int transform;
-    bool expected; /* passes all tests of the target */
+    bool expected; /* passes all tests of the target, and no other set is favoured more */
+    bool major;    /* of the transform's sets none is favoured more */
     double score;
     bs_outcome outcome;
 } bs_product_set;
@@ -255,8 +307,9 @@ typedef struct bs_product_sets {
 
 /*
  * What a transform (or with -1 each one) makes of these reactants, in any order; reactants that
- * the transform does not need may not be given. Asked of each one, a transform whose
- * product sets are rivals only is left out. Expected sets first, by score, then rivals.
+ * the transform does not need may not be given, and reagents that it writes out in full (nitric
+ * acid, carbon dioxide) need not be. Asked of each one, a transform whose product sets are rivals
+ * only is left out. Expected sets first, by score, then rivals; those of kind BS_RIVAL_OVER last.
  */
 bs_status bs_rules_forth(bs_ctx *cx, bs_arena *home, const bs_rules *rules, int transform,
                          const bs_mol *const *reactants, int count, const bs_rule_hooks *hooks,

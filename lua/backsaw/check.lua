@@ -67,6 +67,16 @@ local function sorted_keys(t)
 end
 check.sorted_keys = sorted_keys
 
+-- The keys of a table that are texts, in order.
+function check.sorted_texts(t)
+    local keys = {}
+    for key in next, t do
+        if type(key) == "string" then keys[#keys + 1] = key end
+    end
+    sort(keys)
+    return keys
+end
+
 local function shown(key)
     return type(key) == "string" and sub(key, 1, 60) or type(key) == "number" and tostring(key)
         or type(key)

@@ -33,8 +33,8 @@ t:forth(m, ...)                      what it makes of these: sets with products 
 t:why(m)                             why it gives steps to m, or none; m:ideas() asks all
 t:check()                            its self-tests: true, or false and the failures
 back(m)  forth(m, ...)               the same with every transform in use
-A step has product, precursors, equivalents, transform, conditions, recipe, yield, rivals, clashes,
-worries, and uses(reagent).]],
+A step has product, precursors, equivalents, transform, conditions, recipe, yield, rivals, minor,
+clashes, worries, and uses(reagent).]],
 packs = [[
 use "./ours.lua"                     a pack by file, or use "ours" by name: beside the script,
                                      on BACKSAW_PATH, in the standard library

@@ -105,10 +105,43 @@ words.synthon = named("synthon", function(name, given)
     core.synthon { name = name, kind = fields.kind, equivalents = list, origin = core.where() }
 end)
 
+-- preference "name" { roles = { "carbon" }, score = function(product, m) return ... end }
+words.preference = named("preference", function(name, given)
+    local what = format('preference "%s"', name)
+    local fields = check.fields(what, given,
+        { roles = "texts", score = "code", about = "text", source = "text" })
+    if #check.entries(what, given) > 0 then check.fail("%s: named fields are expected", what) end
+    if not fields.score then check.fail("%s: 'score' is missing, a function", what) end
+    core.preference { name = name, roles = fields.roles or {}, score = fields.score,
+        origin = core.where() }
+end)
+
+-- A function of the rule's own, the name of a preference, or { "name", role = map, ... }.
+local function read_prefer(what, given)
+    if given == nil or type(given) == "function" then return given end
+    if type(given) == "string" then given = { given } end
+    if type(given) ~= "table" then
+        check.fail("%s: 'prefer' must be a function or name a preference, not a %s", what, type(given))
+    end
+    local entries = check.entries(what .. ": prefer", given)
+    if #entries ~= 1 or type(entries[1]) ~= "string" then
+        check.fail("%s: 'prefer' names one preference, such as { \"markovnikov\", carbon = 1 }", what)
+    end
+    local roles, maps = {}, {}
+    for _, key in ipairs(check.sorted_texts(given)) do
+        local map = given[key]
+        if math.type(map) ~= "integer" or map < 1 or map > 999 then
+            check.fail("%s: prefer: '%s' must be a map number", what, key)
+        end
+        roles[#roles + 1], maps[#maps + 1] = key, map
+    end
+    return { name = entries[1], roles = roles, maps = maps }
+end
+
 local transform = { target = "text", from = "any", cut = "maps", acceptor = "stop", donor = "stop",
     conditions = "text", recipe = "text", yield = "percent", step_cost = "number",
     spares = "texts", also_attacks = "texts", cautions = "texts", reagents = "texts",
-    source = "text", rxno = "text", also = "texts", when = "code", prefer = "code",
+    source = "text", rxno = "text", also = "texts", when = "code", prefer = "any",
     about = "text" }
 
 -- The self-tests among the numbered entries of a definition.
@@ -148,6 +181,7 @@ local function define_transform(kind, name, given)
     if fields.step_cost and not (fields.step_cost >= 0 and fields.step_cost < math.huge) then
         check.fail("%s: 'step_cost' must be 0 or more", what)
     end
+    fields.prefer = read_prefer(what, fields.prefer)
     fields.name, fields.kind, fields.origin = name, kind, core.where()
     local index = core.transform(fields)
     if not core.packed then return core.nth_transform(index) end

@@ -24,7 +24,7 @@ pattern, rewrite = core.pattern, core.rewrite
 transform, back, forth = transforms.fetch, core.back, core.forth
 pack, synthon, disconnection, interconversion = words.pack, words.synthon, words.disconnection,
     words.interconversion
-example, refuse = words.example, words.refuse
+example, refuse, preference = words.example, words.refuse, words.preference
 group, conditions, verdict = group_words.group, group_words.conditions, group_words.verdict
 protecting, incompatible = group_words.protecting, group_words.incompatible
 catalogue, plan, cost = catalogues, planning.plan, planning.cost

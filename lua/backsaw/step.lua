@@ -45,16 +45,20 @@ local readers = {
     worries = of_origin "worries",
     product = function(text) return core.mol(text.product) end,
     precursors = function(text) return read_all(text.precursors) end,
-    rivals = function(text)
-        local rivals = {}
-        for i, smiles in ipairs(text.rivals) do
-            rivals[i] = core.mol(smiles):fragments()
-        end
-        return rivals
-    end,
 }
 
+-- What else the same conditions give, worked out when it is asked for. Known steps have no rule to ask.
+local function find_rivals(step)
+    local t = step.transform and core.find_transform(step.transform)
+    return t and core.rivals(t, step.product, table.unpack(step.precursors)) or {}
+end
+
 function core.step_type.__index(step, key)
+    if key == "rivals" then
+        local rivals = find_rivals(step)
+        rawset(step, key, rivals)
+        return rivals
+    end
     local text = rawget(step, core)
     if text and readers[key] then
         local value = readers[key](text, step)

@@ -64,6 +64,13 @@ local function test_one(t, test)
     for _, step in ipairs(steps) do
         if pieces(step.precursors) == wanted then return end
     end
+    for _, step in ipairs(t:back(product, { minor = true })) do
+        if step.minor and pieces(step.precursors) == wanted then
+            local major = t:forth(table.unpack(step.precursors))[1]
+            return string.format("%s is not the major product from %s%s", test.product, wanted,
+                major and major.major and ", but " .. pieces(major.products) or "")
+        end
+    end
     return string.format("%s is not made from %s; %s", test.product, wanted,
         #steps == 0 and "no step" or "but from " .. pieces(steps[1].precursors))
 end

@@ -300,7 +300,8 @@ static bs_status add_step(bs_ctx *cx, back *b, const inputs *list, const bs_resu
     bs_step step = {.transform = b->transform,
                     .precursor_count = list->count,
                     .rivals = verdict->rivals,
-                    .stereo_open = verdict->stereo_open};
+                    .stereo_open = verdict->stereo_open,
+                    .minor = verdict->minor};
     bs_status st;
 
     if ((st = make_room(cx, b)) != BS_OK ||
@@ -441,11 +442,11 @@ static bs_status take_result(void *payload, bs_ctx *cx, const uint32_t *where,
     if (b->hooks && b->hooks->tried)
         b->hooks->tried[b->transform]++;
     if (!(b->flags & BS_BACK_UNCHECKED))
-        st = bs_check__step(cx, b->home, b->tr, b->kase, result->products, smiles, b->piece->mol,
-                            b->smiles, where, &verdict);
+        st = bs_check__step(cx, b->home, b->tr, b->kase, b->hooks, b->flags, result->products,
+                            smiles, b->piece->mol, b->smiles, where, &verdict);
     if (st != BS_OK)
         return st;
-    if (!verdict.passed)
+    if (!verdict.passed || (verdict.minor && !(b->flags & BS_BACK_MINOR)))
         return tell(cx, b, BS_REFUSED_FORWARD, where, smiles, result->product_count);
     b->tried[index] = -1;
     *keep = true;

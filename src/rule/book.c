@@ -18,7 +18,8 @@ bs_status bs_blame(bs_ctx *cx, bs_status status, const char *field)
     return status;
 }
 
-/* ---- Life -------------------------------------------------------------------------------------- */
+/* ---- Life --------------------------------------------------------------------------------------
+ */
 
 bs_status bs_rules_new(bs_ctx *cx, bs_rules **out)
 {
@@ -42,10 +43,10 @@ void bs_rules_free(bs_rules *rules)
     bs_gate_free(rules->gate, rules, sizeof *rules);
 }
 
-/* ---- Names --------------------------------------------------------------------------------------- */
+/* ---- Names
+ * --------------------------------------------------------------------------------------- */
 
-/* A name as names are compared: no case, spaces and hyphens. */
-static bs_status fold_name(bs_ctx *cx, bs_arena *home, const char *name, char **out)
+bs_status bs_book__fold_name(bs_ctx *cx, bs_arena *home, const char *name, char **out)
 {
     size_t length = 0;
     bs_status st = bs_new(cx, home, strlen(name) + 1, out);
@@ -90,7 +91,7 @@ static int next_byte(const char **name)
     return **name >= 'A' && **name <= 'Z' ? *(*name)++ + ('a' - 'A') : *(*name)++;
 }
 
-static bool same_name(const char *a, const char *b)
+bool bs_book__same_name(const char *a, const char *b)
 {
     int x, y;
 
@@ -107,7 +108,7 @@ int bs_rules_find(const bs_rules *rules, const char *name)
         const bs_transform *tr = rules->transforms[i];
 
         for (int k = 0; k < tr->key_count; k++) {
-            if (same_name(name, tr->keys[k]))
+            if (bs_book__same_name(name, tr->keys[k]))
                 return i;
         }
     }
@@ -124,11 +125,14 @@ const bs_transform_def *bs_rules_transform(const bs_rules *rules, int index)
     return &rules->transforms[index]->def;
 }
 
-/* ---- Taking back --------------------------------------------------------------------------------- */
+/* ---- Taking back
+ * --------------------------------------------------------------------------------- */
 
 bs_rules_mark bs_rules_grown(const bs_rules *rules)
 {
-    bs_rules_mark mark = {.synthons = rules->synthon_count, .transforms = rules->transform_count};
+    bs_rules_mark mark = {.synthons = rules->synthon_count,
+                          .transforms = rules->transform_count,
+                          .preferences = rules->preference_count};
 
     bs_shelves__mark(&rules->shelves, &mark);
     return mark;
@@ -140,6 +144,8 @@ void bs_rules_rewind(bs_rules *rules, bs_rules_mark mark)
         rules->synthon_count = mark.synthons;
     if (mark.transforms < rules->transform_count)
         rules->transform_count = mark.transforms;
+    if (mark.preferences < rules->preference_count)
+        rules->preference_count = mark.preferences;
     bs_shelves__rewind(&rules->shelves, mark);
 }
 
@@ -162,14 +168,15 @@ void bs_rules_retire_transform(bs_rules *rules, int index, bool retired)
 void bs_rules_retire_synthon(bs_rules *rules, const char *name, bool retired)
 {
     for (int i = rules->synthon_count - 1; i >= 0; i--) {
-        if (!same_name(name, rules->synthons[i]->key))
+        if (!bs_book__same_name(name, rules->synthons[i]->key))
             continue;
         rules->synthons[i]->retired = retired;
         return;
     }
 }
 
-/* ---- Copies of definitions ----------------------------------------------------------------------- */
+/* ---- Copies of definitions
+ * ----------------------------------------------------------------------- */
 
 bs_status bs_rules__copy_string(bs_ctx *cx, bs_arena *home, const char **string)
 {
@@ -204,11 +211,11 @@ bs_status bs_rules__copy_words(bs_ctx *cx, bs_arena *home, bs_words *words)
 
 static bs_status copy_transform(bs_ctx *cx, bs_arena *home, bs_transform_def *def)
 {
-    const char **strings[] = {&def->name,   &def->target,     &def->from,   &def->acceptor,
-                              &def->donor,  &def->conditions, &def->recipe, &def->source,
-                              &def->rxno,   &def->pack,       &def->origin};
-    bs_words *lists[] = {&def->also,     &def->spares,   &def->also_attacks,
-                         &def->cautions, &def->reagents};
+    const char **strings[] = {&def->name,  &def->target,     &def->from,   &def->acceptor,
+                              &def->donor, &def->conditions, &def->recipe, &def->source,
+                              &def->rxno,  &def->pack,       &def->origin, &def->prefer};
+    bs_words *lists[] = {&def->also, &def->spares, &def->also_attacks, &def->cautions,
+                         &def->reagents};
     bs_status st = BS_OK;
 
     for (size_t i = 0; i < sizeof strings / sizeof *strings && st == BS_OK; i++)
@@ -218,7 +225,8 @@ static bs_status copy_transform(bs_ctx *cx, bs_arena *home, bs_transform_def *de
     return st;
 }
 
-/* ---- Synthons ------------------------------------------------------------------------------------- */
+/* ---- Synthons
+ * ------------------------------------------------------------------------------------- */
 
 static bs_status copy_equivalents(bs_ctx *cx, bs_arena *home, bs_synthon_def *def)
 {
@@ -269,7 +277,7 @@ static bs_status make_synthon(bs_ctx *cx, bs_rules *rules, const bs_synthon_def 
         return st;
     synthon = *out;
     synthon->def = *def;
-    if ((st = fold_name(cx, &rules->arena, def->name, &synthon->key)) != BS_OK)
+    if ((st = bs_book__fold_name(cx, &rules->arena, def->name, &synthon->key)) != BS_OK)
         return st;
     if (find_synthon(rules, synthon->key))
         return bs_fail(cx, BS_EVALUE, "the synthon \"%s\" is there already", def->name);
@@ -291,8 +299,7 @@ static bs_status make_synthon(bs_ctx *cx, bs_rules *rules, const bs_synthon_def 
     return st;
 }
 
-/* Room for one more pointer in a list of the book; what was there moves. */
-static bs_status make_room(bs_ctx *cx, bs_rules *rules, void *list, int count, int *room)
+bs_status bs_book__make_room(bs_ctx *cx, bs_rules *rules, void *list, int count, int *room)
 {
     int wanted = *room ? *room * 2 : 64;
     void **old;
@@ -316,8 +323,8 @@ bs_status bs_rules_add_synthon(bs_ctx *cx, bs_rules *rules, const bs_synthon_def
     bs_mark temp = bs_arena_mark(&cx->scratch);
     bs_synthon *synthon;
     bs_mark kept;
-    bs_status st = make_room(cx, rules, &rules->synthons, rules->synthon_count,
-                             &rules->synthon_room);
+    bs_status st =
+        bs_book__make_room(cx, rules, &rules->synthons, rules->synthon_count, &rules->synthon_room);
 
     if (st != BS_OK)
         return st;
@@ -330,7 +337,8 @@ bs_status bs_rules_add_synthon(bs_ctx *cx, bs_rules *rules, const bs_synthon_def
     return st;
 }
 
-/* ---- Transforms ----------------------------------------------------------------------------------- */
+/* ---- Transforms
+ * ----------------------------------------------------------------------------------- */
 
 bs_status bs_case__make(bs_ctx *cx, bs_arena *home, const bs_query *target, const bs_query *source,
                         bs_case *out)
@@ -354,7 +362,7 @@ bs_status bs_case__make(bs_ctx *cx, bs_arena *home, const bs_query *target, cons
         return st;
     for (int i = 0; i < out->source.part_count; i++)
         out->equivalents[i] = 1;
-    return BS_OK;
+    return bs_reagent__find(cx, home, out);
 }
 
 /* Every mapped atom of the precursors has to be one of the target. */
@@ -394,7 +402,7 @@ static bs_status named_synthon(bs_ctx *cx, const bs_rules *rules, const char *na
 
     if (!name)
         return bs_fail(cx, BS_EVALUE, "%s: expected the name of a synthon", field);
-    if ((st = fold_name(cx, &cx->scratch, name, &key)) != BS_OK)
+    if ((st = bs_book__fold_name(cx, &cx->scratch, name, &key)) != BS_OK)
         return st;
     *out = find_synthon(rules, key);
     bs_arena_rewind(&cx->scratch, temp);
@@ -485,7 +493,7 @@ static bs_status take_names(bs_ctx *cx, bs_rules *rules, bs_transform *tr)
     for (int i = 0; i < def->also.count + 1; i++) {
         const char *name = i == 0 ? def->name : def->also.items[i - 1];
 
-        if ((st = fold_name(cx, &rules->arena, name, &tr->keys[i])) != BS_OK)
+        if ((st = bs_book__fold_name(cx, &rules->arena, name, &tr->keys[i])) != BS_OK)
             return st;
         if (find_key(rules, tr->keys[i]) >= 0)
             return bs_fail(cx, BS_EVALUE, "the transform \"%s\" is there already", name);
@@ -505,7 +513,9 @@ static bs_status make_transform(bs_ctx *cx, bs_rules *rules, const bs_transform_
     if ((st = copy_transform(cx, &rules->arena, &(*out)->def)) != BS_OK ||
         (st = take_names(cx, rules, *out)) != BS_OK)
         return st;
-    return compile(cx, rules, *out);
+    if ((st = compile(cx, rules, *out)) != BS_OK)
+        return st;
+    return bs_preference__resolve(cx, rules, *out);
 }
 
 bs_status bs_rules_add_transform(bs_ctx *cx, bs_rules *rules, const bs_transform_def *def,
@@ -514,8 +524,8 @@ bs_status bs_rules_add_transform(bs_ctx *cx, bs_rules *rules, const bs_transform
     bs_mark temp = bs_arena_mark(&cx->scratch);
     bs_transform *transform;
     bs_mark kept;
-    bs_status st = make_room(cx, rules, &rules->transforms, rules->transform_count,
-                             &rules->transform_room);
+    bs_status st = bs_book__make_room(cx, rules, &rules->transforms, rules->transform_count,
+                                      &rules->transform_room);
 
     if (st != BS_OK)
         return st;

@@ -16,6 +16,7 @@ typedef struct bs_case {
     bs_side source; /* the precursors */
     bs_reading back, forth;
     double *equivalents; /* for each part of `source` */
+    bs_mol **reagents;   /* for each part the one compound that it can be, or NULL */
 } bs_case;
 
 typedef struct bs_synthon {
@@ -23,6 +24,11 @@ typedef struct bs_synthon {
     char *key; /* the name as names are compared */
     bool retired;
 } bs_synthon;
+
+typedef struct bs_preference {
+    bs_preference_def def;
+    char *key;
+} bs_preference;
 
 typedef struct bs_transform {
     bs_transform_def def;
@@ -46,10 +52,33 @@ struct bs_rules {
     int synthon_count, synthon_room;
     int transform_count, transform_room;
     bs_shelves shelves;
+    bs_preference **preferences;
+    int preference_count, preference_room;
 };
 
 /* Map numbers from here on are the compiler's; the author's are smaller. */
 enum { BS_OWN_MAPS = 1000 };
+
+/* A name as names are compared: no case, spaces and hyphens. */
+bs_status bs_book__fold_name(bs_ctx *cx, bs_arena *home, const char *name, char **out);
+bool bs_book__same_name(const char *a, const char *b);
+
+/* Room for one more pointer in a list of the book, which `list` points to; what was there moves. */
+bs_status bs_book__make_room(bs_ctx *cx, bs_rules *rules, void *list, int count, int *room);
+
+/*
+ * Looks up the preference that a transform names, and takes its function; copies the roles.
+ *
+ *   errors  BS_ENOTFOUND  nobody defined it
+ *           BS_EVALUE     a role that it lacks or that is missing, a map that the target lacks
+ */
+bs_status bs_preference__resolve(bs_ctx *cx, bs_rules *rules, bs_transform *tr);
+
+/*
+ * Fills the reagents of a case: for each part of the precursors that the rule writes out in full
+ * the compound that it is; counter-ions and other parts get NULL.
+ */
+bs_status bs_reagent__find(bs_ctx *cx, bs_arena *home, bs_case *kase);
 
 /* Reads both sides of a reaction SMARTS; `*right_at` is the offset of the right one. */
 bs_status bs_rewrite__read_sides(bs_ctx *cx, bs_arena *home, const char *text, size_t length,
@@ -109,11 +138,11 @@ bs_status bs_azole__forms(bs_ctx *cx, bs_arena *home, const bs_mol *mol, bs_azol
 bs_status bs_site__fill(bs_ctx *cx, bs_arena *home, const bs_transform *tr, const uint32_t *atom_of,
                         bs_site *out);
 
-/* One set of products of a forward run. */
+/* One set of products of a forward run. Where several places give it, the best of each counts. */
 typedef struct bs_made {
     bs_outcome outcome;
     bs_spot *spots; /* of the atoms of the target */
-    bool expected;
+    bool expected;  /* passes the tests of the target */
     double score;
 } bs_made;
 
@@ -126,7 +155,8 @@ typedef struct bs_made_list {
 typedef struct bs_forward {
     const bs_transform *tr;
     const bs_rule_hooks *hooks; /* NULL: nothing is judged */
-    bool judge;                 /* find out which products are expected, and their scores */
+    bool judge;                 /* find out which products are expected */
+    bool score;                 /* ask the rule which product it favours */
     bs_arena *home;
     bs_seen seen;
     bs_made_list made;
@@ -137,7 +167,8 @@ typedef struct bs_forward {
     uint32_t moved_to; /* results count only if this atom of it reacts */
 } bs_forward;
 
-/* Starts and ends a forward run. */
+/* Starts and ends a forward run. The rule's preference is asked if it has one and hooks are given.
+ */
 void bs_forward__init(bs_forward *run, bs_ctx *cx, bs_arena *home, const bs_transform *tr,
                       const bs_rule_hooks *hooks, bool judge);
 void bs_forward__free(bs_forward *run);
@@ -169,10 +200,21 @@ bs_status bs_back__watched(bs_ctx *cx, bs_arena *home, const bs_rules *rules, in
                            const bs_mol *product, const bs_rule_hooks *hooks, unsigned flags,
                            const bs_watch *watch, bs_steps *out);
 
+/*
+ * How the product set `other` stands to the wanted one. `mols` are the molecules that the numbers
+ * in `site_reactant` mean; numbers from `count` on mean reagents.
+ */
+bs_status bs_rival__kind(bs_ctx *cx, const bs_outcome *wanted, const bs_outcome *other,
+                         const bs_mol *const *mols, int count, bs_rival_kind *kind);
+
+/* Scores that differ by less are equal. */
+#define BS_SCORE_NOISE 1e-6
+
 /* What a forward check found. */
 typedef struct bs_verdict {
     bool passed;
     bool stereo_open; /* the reaction leaves open what the product says about stereo */
+    bool minor;       /* a rival is favoured */
     bs_outcomes rivals;
 } bs_verdict;
 
@@ -181,9 +223,11 @@ typedef struct bs_verdict {
  *
  *   parts   one molecule for each part of the case's source
  *   where   the atom of the product for each atom of the target
+ *   flags   BS_BACK_KINDS counts
  */
 bs_status bs_check__step(bs_ctx *cx, bs_arena *home, const bs_transform *tr, const bs_case *kase,
-                         bs_mol *const *parts, char *const *smiles, const bs_mol *product,
-                         const char *product_smiles, const uint32_t *where, bs_verdict *out);
+                         const bs_rule_hooks *hooks, unsigned flags, bs_mol *const *parts,
+                         char *const *smiles, const bs_mol *product, const char *product_smiles,
+                         const uint32_t *where, bs_verdict *out);
 
 #endif

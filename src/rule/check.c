@@ -136,7 +136,8 @@ static bs_status same_but_stereo(bs_ctx *cx, const bs_case *kase, const bs_made 
     return st;
 }
 
-/* ---- The other hand ------------------------------------------------------------------------------ */
+/* ---- The other hand
+ * ------------------------------------------------------------------------------ */
 
 /*
  * The product of a forward run with all centres turned that the rule makes: what the mirror image
@@ -184,7 +185,8 @@ static bs_status same_but_turned(bs_ctx *cx, const bs_case *kase, const bs_made 
     bs_status st = turned_product(cx, kase, made, &mol);
 
     *same = *open = false;
-    if (st == BS_OK && mol && (st = bs_smiles_canonical(cx, &cx->scratch, mol, 0, &smiles)) == BS_OK) {
+    if (st == BS_OK && mol &&
+        (st = bs_smiles_canonical(cx, &cx->scratch, mol, 0, &smiles)) == BS_OK) {
         turned.outcome.products = &mol;
         turned.outcome.smiles = &smiles;
         *same = strcmp(smiles, product_smiles) == 0;
@@ -197,7 +199,8 @@ static bs_status same_but_turned(bs_ctx *cx, const bs_case *kase, const bs_made 
     return st;
 }
 
-/* ---- Running -------------------------------------------------------------------------------------- */
+/* ---- Running
+ * -------------------------------------------------------------------------------------- */
 
 /* The next order of `count` numbers in the manner of a dictionary; false after the last. */
 static bool next_order(int *order, int count)
@@ -283,20 +286,45 @@ static bs_status find_product(bs_ctx *cx, const bs_forward *run, const bs_case *
 }
 
 static bs_status list_rivals(bs_ctx *cx, bs_arena *home, const bs_forward *run, int found,
-                             bs_outcomes *out)
+                             bs_mol *const *parts, bool kinds, bs_outcomes *out)
 {
+    int part_count = run->kase->source.part_count;
+    const bs_outcome *wanted = &run->made.items[found].outcome;
     bs_status st = bs_new(cx, home, run->made.count + 1, &out->items);
 
     for (int i = 0; i < run->made.count && st == BS_OK; i++) {
-        if (i != found)
-            out->items[out->count++] = run->made.items[i].outcome;
+        bs_outcome *rival = &out->items[out->count];
+
+        if (i == found)
+            continue;
+        *rival = run->made.items[i].outcome;
+        out->count++;
+        if (kinds)
+            st = bs_rival__kind(cx, wanted, rival, (const bs_mol *const *)parts, part_count,
+                                &rival->kind);
     }
     return st;
 }
 
+/* Whether the rule favours a rival, other than one of the precursors themselves. */
+static bool is_minor(const bs_forward *run, int found, char *const *smiles, int part_count)
+{
+    for (int i = 0; i < run->made.count; i++) {
+        const bs_made *made = &run->made.items[i];
+        bool precursor = false;
+
+        for (int p = 0; p < part_count; p++)
+            precursor = precursor || strcmp(made->outcome.smiles[0], smiles[p]) == 0;
+        if (!precursor && made->score > run->made.items[found].score + BS_SCORE_NOISE)
+            return true;
+    }
+    return false;
+}
+
 bs_status bs_check__step(bs_ctx *cx, bs_arena *home, const bs_transform *tr, const bs_case *kase,
-                         bs_mol *const *parts, char *const *smiles, const bs_mol *product,
-                         const char *product_smiles, const uint32_t *where, bs_verdict *out)
+                         const bs_rule_hooks *hooks, unsigned flags, bs_mol *const *parts,
+                         char *const *smiles, const bs_mol *product, const char *product_smiles,
+                         const uint32_t *where, bs_verdict *out)
 {
     bs_mark temp = bs_arena_mark(&cx->scratch);
     bs_forward run;
@@ -304,14 +332,16 @@ bs_status bs_check__step(bs_ctx *cx, bs_arena *home, const bs_transform *tr, con
     bs_status st;
 
     *out = (bs_verdict){0};
-    bs_forward__init(&run, cx, home, tr, NULL, false);
+    bs_forward__init(&run, cx, home, tr, hooks, false);
     st = run_orders(cx, &run, kase, parts, smiles);
     if (st == BS_OK)
-        st = find_product(cx, &run, kase, product, product_smiles, where, &found,
-                          &out->stereo_open);
+        st =
+            find_product(cx, &run, kase, product, product_smiles, where, &found, &out->stereo_open);
     out->passed = found >= 0;
-    if (st == BS_OK && out->passed)
-        st = list_rivals(cx, home, &run, found, &out->rivals);
+    if (st == BS_OK && out->passed) {
+        out->minor = is_minor(&run, found, smiles, kase->source.part_count);
+        st = list_rivals(cx, home, &run, found, parts, flags & BS_BACK_KINDS, &out->rivals);
+    }
     bs_forward__free(&run);
     bs_arena_rewind(&cx->scratch, temp);
     return st;

@@ -12,6 +12,7 @@ void bs_forward__init(bs_forward *run, bs_ctx *cx, bs_arena *home, const bs_tran
                       const bs_rule_hooks *hooks, bool judge)
 {
     *run = (bs_forward){.tr = tr, .hooks = hooks, .judge = judge, .home = home};
+    run->score = hooks && hooks->prefer && tr->def.hook_prefer >= 0;
     bs_seen__init(&run->seen, cx);
 }
 
@@ -28,7 +29,7 @@ bs_status bs_site__fill(bs_ctx *cx, bs_arena *home, const bs_transform *tr, cons
 
     for (int i = 0; i < tr->map_count && st == BS_OK; i++)
         atoms[i] = atom_of[tr->map_atoms[i]];
-    *out = (bs_site){tr->maps, atoms, tr->map_count};
+    *out = (bs_site){.maps = tr->maps, .atoms = atoms, .count = tr->map_count};
     return st;
 }
 
@@ -75,28 +76,44 @@ static bs_status fill_site(bs_ctx *cx, const bs_forward *run, const bs_spot *spo
     return bs_site__fill(cx, &cx->scratch, run->tr, atom_of, site);
 }
 
-static bs_status judge(bs_ctx *cx, const bs_forward *run, const bs_result *result, bool *expected,
-                       double *score)
+/* Asks the functions of the rule about a product that passes the tests of the target, or not. */
+static bs_status ask_hooks(bs_ctx *cx, const bs_forward *run, const bs_result *result,
+                           bool *expected, double *score)
 {
     const bs_transform_def *def = &run->tr->def;
     const bs_rule_hooks *hooks = run->hooks;
-    bs_mark temp = bs_arena_mark(&cx->scratch);
     const bs_mol *product = result->products[0];
     bs_site site;
-    bs_status st = target_passes(cx, run->kase, product, result->spots, expected);
+    bs_status st = fill_site(cx, run, result->spots, &site);
 
-    if (st == BS_OK && hooks && (def->hook_when >= 0 || def->hook_prefer >= 0)) {
-        st = fill_site(cx, run, result->spots, &site);
-        if (st == BS_OK && *expected && hooks->when && def->hook_when >= 0)
-            st = hooks->when(hooks->payload, cx, def->hook_when, product, &site, expected);
-        if (st == BS_OK && hooks->prefer && def->hook_prefer >= 0)
-            st = hooks->prefer(hooks->payload, cx, def->hook_prefer, product, &site, score);
+    if (st == BS_OK && *expected && hooks->when && def->hook_when >= 0)
+        st = hooks->when(hooks->payload, cx, def->hook_when, product, &site, expected);
+    if (st == BS_OK && run->score) {
+        site.roles = def->prefer_roles;
+        site.role_maps = def->prefer_maps;
+        st = hooks->prefer(hooks->payload, cx, def->hook_prefer, product, &site, score);
     }
+    return st;
+}
+
+static bs_status judge(bs_ctx *cx, const bs_forward *run, const bs_result *result, bool *expected,
+                       double *score)
+{
+    bs_mark temp = bs_arena_mark(&cx->scratch);
+    bs_status st = BS_OK;
+
+    *expected = false;
+    *score = 0;
+    if (run->judge)
+        st = target_passes(cx, run->kase, result->products[0], result->spots, expected);
+    if (st == BS_OK && run->hooks && (run->score || (*expected && run->tr->def.hook_when >= 0)))
+        st = ask_hooks(cx, run, result, expected, score);
     bs_arena_rewind(&cx->scratch, temp);
     return st;
 }
 
-/* ---- Collecting ------------------------------------------------------------------------------- */
+/* ---- Collecting -------------------------------------------------------------------------------
+ */
 
 static bs_status make_room(bs_ctx *cx, bs_forward *run)
 {
@@ -129,12 +146,12 @@ static bool moved_reacts(const bs_forward *run, const uint32_t *where)
     return run->moved_part < 0;
 }
 
-static bs_status add_made(void *payload, bs_ctx *cx, const uint32_t *where,
-                          const bs_result *result, bool *keep)
+static bs_status add_made(void *payload, bs_ctx *cx, const uint32_t *where, const bs_result *result,
+                          bool *keep)
 {
     bs_forward *run = payload;
-    bool expected = false;
-    double score = 0;
+    bool expected;
+    double score;
     char **smiles;
     bs_made *made;
     int index;
@@ -145,15 +162,14 @@ static bs_status add_made(void *payload, bs_ctx *cx, const uint32_t *where,
     if ((st = bs_result__smiles(cx, run->home, result, &smiles)) != BS_OK ||
         (st = bs_seen__add(cx, &run->seen, smiles, result->product_count, &index, keep)) != BS_OK)
         return st;
-    if (!*keep && (!run->judge || run->made.items[index].expected))
+    if (!*keep && !run->score && (!run->judge || run->made.items[index].expected))
         return BS_OK;
-    if (run->judge && (st = judge(cx, run, result, &expected, &score)) != BS_OK)
+    if ((st = judge(cx, run, result, &expected, &score)) != BS_OK)
         return st;
     if (!*keep) {
-        if (!expected)
-            return BS_OK;
-        run->made.items[index].expected = true;
-        run->made.items[index].score = score;
+        made = &run->made.items[index];
+        made->expected = made->expected || expected;
+        made->score = score > made->score ? score : made->score;
         return BS_OK;
     }
     if ((st = make_room(cx, run)) != BS_OK)

@@ -127,7 +127,9 @@ static bs_status find_instead(why *w, char *const *smiles, int count, bs_reason 
         return st;
     reason->precursor_count = count;
     st = bs_rules_forth(w->cx, w->home, w->rules, w->transform, mols, count, w->hooks, &sets);
-    for (int i = 0; i < sets.count && i < MAX_INSTEAD && st == BS_OK; i++)
+    for (int i = 0; i < sets.count && i < MAX_INSTEAD && st == BS_OK &&
+                    sets.items[i].outcome.kind != BS_RIVAL_OVER;
+         i++)
         st = join_products(w, &sets.items[i].outcome, &reason->instead[reason->instead_count++]);
     return st;
 }

@@ -1,8 +1,8 @@
 /*
  * Definitions: synthons and transforms on their way from Lua tables into the rule book. The
  * tables come from the embedded module `pack`, which has checked names of fields and the types
- * of values, so what is wrong here is wrong chemically. A lane reads packs only for their functions:
- * there, nothing is added to the book.
+ * of values, so what is wrong here is wrong chemically. A lane reads packs only for their
+ * functions: there, nothing is added to the book.
  */
 #include "script/host.h"
 
@@ -43,7 +43,7 @@ static double number_field(lua_State *L, int i, const char *field)
 bs_words bsl_words_field(lua_State *L, int i, const char *field)
 {
     bsl_host *host = bsl_host_of(L);
-    bs_words words = { NULL, 0 };
+    bs_words words = {NULL, 0};
     const char **items;
 
     if (lua_getfield(L, i, field) == LUA_TTABLE) {
@@ -126,7 +126,8 @@ const char *bsl_pack_name(const bsl_host *host)
     return host->pack > 0 ? host->session->pack_list[host->pack].name : NULL;
 }
 
-/* Raises the error of the book, in whose message the name of the field tells which text is meant. */
+/* Raises the error of the book, in whose message the name of the field tells which text is meant.
+ */
 static int raise_definition(lua_State *L, const char *name, const char *target, const char *from)
 {
     bs_ctx *cx = bsl_host_of(L)->cx;
@@ -207,7 +208,7 @@ static int core_synthon(lua_State *L)
 {
     bsl_host *host = bsl_host_of(L);
     bs_mark mark = bs_arena_mark(&host->results);
-    bs_synthon_def def = { 0 };
+    bs_synthon_def def = {0};
     bs_equivalent_def *items;
     const char *kind;
 
@@ -256,12 +257,35 @@ static void keep_examples(lua_State *L, int index, const char *origin)
         if (bs_new(&session->cx, &session->home, from.count + 1, &example->from) != BS_OK)
             bsl_raise(L, NULL, 0);
         for (int n = 0; n < from.count; n++)
-            example->from[example->from_count++] = bsl_keep(L, from.items[n],
-                                                            strlen(from.items[n]));
+            example->from[example->from_count++] =
+                bsl_keep(L, from.items[n], strlen(from.items[n]));
         *session->examples_end = example;
         session->examples_end = &example->next;
         lua_pop(L, 1);
     }
+}
+
+/* The field prefer = { preference, roles = { ... }, maps = { ... } } that names a shared one. */
+static void read_prefer(lua_State *L, bs_transform_def *def)
+{
+    bsl_host *host = bsl_host_of(L);
+    int *maps;
+
+    if (lua_getfield(L, 1, "prefer") == LUA_TTABLE) {
+        def->prefer = bsl_text_field(L, -1, "name");
+        def->prefer_roles = bsl_words_field(L, lua_gettop(L), "roles");
+        if (bs_new(host->cx, &host->results, def->prefer_roles.count + 1, &maps) != BS_OK)
+            bsl_raise(L, NULL, 0);
+        lua_getfield(L, -1, "maps");
+        for (int i = 0; i < def->prefer_roles.count; i++) {
+            lua_rawgeti(L, -1, i + 1);
+            maps[i] = (int)lua_tointeger(L, -1);
+            lua_pop(L, 1);
+        }
+        lua_pop(L, 1);
+        def->prefer_maps = maps;
+    }
+    lua_pop(L, 1);
 }
 
 static void read_transform(lua_State *L, bs_transform_def *def)
@@ -293,6 +317,27 @@ static void read_transform(lua_State *L, bs_transform_def *def)
     def->source = bsl_text_field(L, 1, "source");
     def->rxno = bsl_text_field(L, 1, "rxno");
     def->origin = bsl_text_field(L, 1, "origin");
+    read_prefer(L, def);
+}
+
+/* core.preference{ name=, roles={...}, score=function, origin= } */
+static int core_preference(lua_State *L)
+{
+    bsl_host *host = bsl_host_of(L);
+    bs_mark mark = bs_arena_mark(&host->results);
+    bs_preference_def def = {0};
+
+    luaL_checktype(L, 1, LUA_TTABLE);
+    def.hook = hook_field(L, 1, "score");
+    if (host->kind == BSL_LANE)
+        return 0;
+    def.name = bsl_text_field(L, 1, "name");
+    def.origin = bsl_text_field(L, 1, "origin");
+    def.roles = bsl_words_field(L, 1, "roles");
+    if (bs_rules_add_preference(host->cx, host->session->rules, &def) != BS_OK)
+        return raise_definition(L, def.name, NULL, NULL);
+    bs_arena_rewind(&host->results, mark);
+    return 0;
 }
 
 /* index = core.transform{...}: the fields of a transform; 0-based, nil in a lane */
@@ -300,7 +345,7 @@ static int core_transform(lua_State *L)
 {
     bsl_host *host = bsl_host_of(L);
     bs_mark mark = bs_arena_mark(&host->results);
-    bs_transform_def def = { 0 };
+    bs_transform_def def = {0};
     int index;
 
     luaL_checktype(L, 1, LUA_TTABLE);
@@ -352,10 +397,11 @@ static int core_examples(lua_State *L)
 
 void bsl_open_define(lua_State *L)
 {
-    static const luaL_Reg functions[] = { { "synthon", core_synthon },
-                                          { "transform", core_transform },
-                                          { "examples", core_examples },
-                                          { NULL, NULL } };
+    static const luaL_Reg functions[] = {{"synthon", core_synthon},
+                                         {"transform", core_transform},
+                                         {"preference", core_preference},
+                                         {"examples", core_examples},
+                                         {NULL, NULL}};
 
     luaL_setfuncs(L, functions, 0);
     lua_newtable(L);

@@ -20,7 +20,7 @@ typedef struct hook_call {
     double score;
 } hook_call;
 
-/* Pushes { molecule =, atom = { [map] = ... } }; the molecule is at `molecule`. */
+/* Pushes { molecule =, atom = { [map] = ..., [role] = ... } }; the molecule is at `molecule`. */
 static void push_site(lua_State *L, int molecule, const bs_mol *mol, const bs_site *site)
 {
     bsl_host *host = bsl_host_of(L);
@@ -32,10 +32,16 @@ static void push_site(lua_State *L, int molecule, const bs_mol *mol, const bs_si
     lua_setfield(L, -2, "molecule");
     lua_createtable(L, site->count, 0);
     for (int i = 0; i < site->count; i++) {
+        if (site->atoms[i] == UINT32_MAX)
+            continue;
         bsl_push_atom(L, mol, classes, (int)site->atoms[i]);
         lua_pushinteger(L, (lua_Integer)site->atoms[i] + 1);
         lua_setfield(L, -2, "index");
         lua_rawseti(L, -2, site->maps[i]);
+    }
+    for (int i = 0; i < site->roles.count; i++) {
+        lua_rawgeti(L, -1, site->role_maps[i]);
+        lua_setfield(L, -2, site->roles.items[i]);
     }
     lua_setfield(L, -2, "atom");
     bs_arena_rewind(&host->results, mark);
@@ -101,7 +107,7 @@ static bsl_host *session_host(bs_session *session, int hook)
 static bs_status session_when(void *payload, bs_ctx *cx, int hook, const bs_mol *product,
                               const bs_site *site, bool *allowed)
 {
-    hook_call call = { .hook = hook, .is_when = true, .product = product, .site = site };
+    hook_call call = {.hook = hook, .is_when = true, .product = product, .site = site};
     bs_status st = call_hook(session_host(payload, hook), cx, &call);
 
     *allowed = call.allowed;
@@ -111,7 +117,7 @@ static bs_status session_when(void *payload, bs_ctx *cx, int hook, const bs_mol 
 static bs_status session_prefer(void *payload, bs_ctx *cx, int hook, const bs_mol *product,
                                 const bs_site *site, double *score)
 {
-    hook_call call = { .hook = hook, .product = product, .site = site };
+    hook_call call = {.hook = hook, .product = product, .site = site};
     bs_status st = call_hook(session_host(payload, hook), cx, &call);
 
     *score = call.score;
@@ -150,7 +156,7 @@ static bs_status ready_lane(bsl_lane *lane, bs_ctx *cx, int hook)
 static bs_status lane_when(void *payload, bs_ctx *cx, int hook, const bs_mol *product,
                            const bs_site *site, bool *allowed)
 {
-    hook_call call = { .hook = hook, .is_when = true, .product = product, .site = site };
+    hook_call call = {.hook = hook, .is_when = true, .product = product, .site = site};
     bsl_lane *lane = payload;
     bs_status st = ready_lane(lane, cx, hook);
 
@@ -163,7 +169,7 @@ static bs_status lane_when(void *payload, bs_ctx *cx, int hook, const bs_mol *pr
 static bs_status lane_prefer(void *payload, bs_ctx *cx, int hook, const bs_mol *product,
                              const bs_site *site, double *score)
 {
-    hook_call call = { .hook = hook, .product = product, .site = site };
+    hook_call call = {.hook = hook, .product = product, .site = site};
     bsl_lane *lane = payload;
     bs_status st = ready_lane(lane, cx, hook);
 
@@ -186,5 +192,5 @@ void bsl_lane_free(bsl_lane *lane)
         lane->host->cx = &session->cx;
     bsl_host_free(lane->host);
     bs_gate_free(session->cx.gate, lane->replayed, (size_t)session->pack_count);
-    *lane = (bsl_lane){ .session = session };
+    *lane = (bsl_lane){.session = session};
 }

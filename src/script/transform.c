@@ -5,6 +5,7 @@
 #include "script/host.h"
 
 #include <math.h>
+#include <string.h>
 
 #define TRANSFORM_TYPE "backsaw.transform"
 #define STEP_TYPE "backsaw.step"
@@ -205,30 +206,46 @@ void bsl_push_step(lua_State *L, int product, const bs_step *step)
         lua_rawseti(L, -2, i + 1);
     }
     lua_setfield(L, -2, "equivalents");
-    lua_createtable(L, step->rivals.count, 0);
-    for (int i = 0; i < step->rivals.count; i++) {
-        const bs_outcome *rival = &step->rivals.items[i];
-
-        bsl_push_mols(L, rival->products, rival->smiles, rival->product_count);
-        lua_rawseti(L, -2, i + 1);
-    }
-    lua_setfield(L, -2, "rivals");
     bsl_set_clashes(L, step);
+    lua_pushboolean(L, step->minor);
+    lua_setfield(L, -2, "minor");
     set_definition(L, def);
     set_polarity(L, bsl_checkmol(L, product), def, &step->site);
     luaL_setmetatable(L, STEP_TYPE);
 }
 
-/* Steps of one transform (or of all, with -1) on the molecule at index `i`. */
+/* Whether the options { minor = true } at index `i` are there. */
+static unsigned read_flags(lua_State *L, int i)
+{
+    unsigned flags = 0;
+
+    if (lua_isnoneornil(L, i))
+        return 0;
+    luaL_checktype(L, i, LUA_TTABLE);
+    lua_pushnil(L);
+    while (lua_next(L, i)) {
+        if (lua_type(L, -2) != LUA_TSTRING || strcmp(lua_tostring(L, -2), "minor") != 0)
+            bsl_error(L, BS_EVALUE, "back: the only option is 'minor'");
+        if (lua_type(L, -1) != LUA_TBOOLEAN)
+            bsl_error(L, BS_EVALUE, "back: 'minor' must be true or false, not a %s",
+                      luaL_typename(L, -1));
+        flags = lua_toboolean(L, -1) ? BS_BACK_MINOR : 0;
+        lua_pop(L, 1);
+    }
+    return flags;
+}
+
+/* Steps of one transform (or of all, with -1) on the molecule at index `i`; options behind it. */
 static int push_back(lua_State *L, int transform, int i)
 {
+    unsigned flags = read_flags(L, i + 1);
     bsl_host *host = bsl_host_of(L);
     const bs_mol *mol = bsl_tomol(L, i);
     bs_rule_hooks hooks = bsl_session_hooks(host->session);
     bs_mark mark = bs_arena_mark(&host->results);
     bs_steps steps;
 
-    if (bs_rules_back(host->cx, &host->results, host->session->rules, transform, mol, &hooks, 0,
+    if (bs_rules_back(host->cx, &host->results, host->session->rules, transform, mol, &hooks, flags,
                       &steps) != BS_OK)
         return bsl_raise_from(L, mark, NULL, 0);
     lua_createtable(L, steps.count, 0);
@@ -259,11 +276,14 @@ static int push_forth(lua_State *L, int transform, int first)
     for (int i = 0; i < sets.count; i++) {
         const bs_product_set *set = &sets.items[i];
 
-        lua_createtable(L, 0, 4);
+        lua_createtable(L, 0, 5);
         bsl_push_mols(L, set->outcome.products, set->outcome.smiles, set->outcome.product_count);
         lua_setfield(L, -2, "products");
         lua_pushboolean(L, set->expected);
         lua_setfield(L, -2, "expected");
+        lua_pushboolean(L, set->major);
+        lua_setfield(L, -2, "major");
+        set_text(L, "kind", bs_rival_word(set->outcome.kind));
         set_text(L, "transform", bs_rules_transform(rules, set->transform)->name);
         lua_rawseti(L, -2, i + 1);
     }
@@ -271,7 +291,78 @@ static int push_forth(lua_State *L, int transform, int first)
     return 1;
 }
 
-/* steps = t:back(m) */
+static bool same_precursors(const bs_step *step, const bs_outcome *wanted)
+{
+    bool same = step->precursor_count == wanted->product_count;
+
+    for (int i = 0; i < step->precursor_count && same; i++)
+        same = strcmp(step->smiles[i], wanted->smiles[i]) == 0;
+    return same;
+}
+
+static void push_rivals(lua_State *L, const bs_outcomes *rivals, int from)
+{
+    for (int i = 0; i < rivals->count; i++) {
+        const bs_outcome *rival = &rivals->items[i];
+
+        bsl_push_mols(L, rival->products, rival->smiles, rival->product_count);
+        set_text(L, "kind", bs_rival_word(rival->kind));
+        lua_rawseti(L, -2, from + i + 1);
+    }
+}
+
+/* Finds the step from the precursors once more, with its rivals, and what the product gives again.
+ */
+static bs_status find_rivals(bsl_host *host, int transform, const bs_mol *product,
+                             const bs_outcome *from, bs_outcomes out[2])
+{
+    bs_rule_hooks hooks = bsl_session_hooks(host->session);
+    bs_steps steps;
+    bs_status st = bs_rules_back(host->cx, &host->results, host->session->rules, transform, product,
+                                 &hooks, BS_BACK_MINOR | BS_BACK_KINDS, &steps);
+
+    for (int i = 0; i < steps.count && st == BS_OK; i++) {
+        if (same_precursors(&steps.items[i], from)) {
+            out[0] = steps.items[i].rivals;
+            break;
+        }
+    }
+    if (st == BS_OK)
+        st = bs_rules_again(host->cx, &host->results, host->session->rules, transform, product,
+                            (const bs_mol *const *)from->products, from->product_count, &hooks,
+                            &out[1]);
+    return st;
+}
+
+/* rivals = core.rivals(t, product, precursor, ...): lists of molecules, each with its kind */
+static int core_rivals(lua_State *L)
+{
+    bsl_host *host = bsl_host_of(L);
+    bs_mark mark = bs_arena_mark(&host->results);
+    int transform = check_transform(L, 1);
+    const bs_mol *product = bsl_tomol(L, 2);
+    bs_outcomes rivals[2] = {{NULL, 0}, {NULL, 0}};
+    bs_outcome from = {0};
+    const bs_mol **mols = bsl_collect_mols(L, 3, &from.product_count);
+    bs_status st;
+
+    from.products = (bs_mol **)mols;
+    st = bs_new(host->cx, &host->results, from.product_count + 1, &from.smiles);
+    for (int i = 0; i < from.product_count && st == BS_OK; i++)
+        st = bs_smiles_canonical(host->cx, &host->results, mols[i], 0, &from.smiles[i]);
+    if (st == BS_OK)
+        st = find_rivals(host, transform, product, &from, rivals);
+    if (st != BS_OK)
+        return bsl_raise_from(L, mark, NULL, 0);
+    luaL_checkstack(L, 8, "rivals");
+    lua_createtable(L, rivals[0].count + rivals[1].count, 0);
+    push_rivals(L, &rivals[0], 0);
+    push_rivals(L, &rivals[1], rivals[0].count);
+    bs_arena_rewind(&host->results, mark);
+    return 1;
+}
+
+/* steps = t:back(m [, { minor = true }]) */
 static int transform_back(lua_State *L)
 {
     return push_back(L, check_transform(L, 1), 2);
@@ -287,7 +378,7 @@ static int transform_forth(lua_State *L)
     return push_forth(L, index, 2);
 }
 
-/* steps = core.back(m): of every transform in use */
+/* steps = core.back(m [, { minor = true }]): of every transform in use */
 static int core_back(lua_State *L)
 {
     return push_back(L, -1, 1);
@@ -320,6 +411,7 @@ void bsl_open_transform(lua_State *L)
         {"describe", core_describe},
         {"back", core_back},
         {"forth", core_forth},
+        {"rivals", core_rivals},
         {NULL, NULL},
     };
 
