@@ -8,6 +8,7 @@
 #include "backsaw/draft.h"
 #include "backsaw/layout.h"
 #include "backsaw/format.h"
+#include "backsaw/direct.h"
 #include "backsaw/file.h"
 #include "backsaw/match.h"
 #include "backsaw/polarity.h"

@@ -120,6 +120,13 @@ typedef struct bs_synthon_def {
 
 typedef enum bs_transform_kind { BS_DISCONNECTION, BS_INTERCONVERSION } bs_transform_kind;
 
+/* How two atoms come to a double bond: from the same face or from opposite ones. */
+typedef enum bs_addition_way {
+    BS_ADDITION_NONE,
+    BS_ADDITION_SYN,
+    BS_ADDITION_ANTI
+} bs_addition_way;
+
 typedef struct bs_words {
     const char *const *items;
     int count;
@@ -140,6 +147,8 @@ typedef struct bs_transform_def {
     int cut[2]; /* map numbers; 0 if `from` is used */
     int acceptor_map, donor_map;
     const char *acceptor, *donor; /* names of synthons */
+    bs_addition_way addition;     /* of the reaction, to the bond between two maps: */
+    int addition_maps[2];
     const char *conditions;       /* class of conditions */
     const char *recipe;           /* in words */
     double yield_low, yield_high; /* per cent; 0 if not given */

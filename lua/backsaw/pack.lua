@@ -138,10 +138,23 @@ local function read_prefer(what, given)
     return { name = entries[1], roles = roles, maps = maps }
 end
 
+-- addition = { "syn", 1, 2 } or { "anti", 1, 2 }
+local function read_addition(what, given)
+    if given == nil then return nil end
+    local fault = '%s: \'addition\' must be { "syn", map, map } or { "anti", map, map }'
+    if type(given) ~= "table" then check.fail(fault, what) end
+    local way, a, b = rawget(given, 1), rawget(given, 2), rawget(given, 3)
+    if (way ~= "syn" and way ~= "anti") or math.type(a) ~= "integer" or math.type(b) ~= "integer"
+        or a < 1 or b < 1 or a > 999 or b > 999 then
+        check.fail(fault, what)
+    end
+    return { way = way, maps = { a, b } }
+end
+
 local transform = { target = "text", from = "any", cut = "maps", acceptor = "stop", donor = "stop",
     conditions = "text", recipe = "text", yield = "percent", step_cost = "number",
     spares = "texts", also_attacks = "texts", cautions = "texts", reagents = "texts",
-    source = "text", rxno = "text", also = "texts", when = "code", prefer = "any",
+    source = "text", rxno = "text", also = "texts", when = "code", prefer = "any", addition = "any",
     about = "text" }
 
 -- The self-tests among the numbered entries of a definition.
@@ -182,6 +195,7 @@ local function define_transform(kind, name, given)
         check.fail("%s: 'step_cost' must be 0 or more", what)
     end
     fields.prefer = read_prefer(what, fields.prefer)
+    fields.addition = read_addition(what, fields.addition)
     fields.name, fields.kind, fields.origin = name, kind, core.where()
     local index = core.transform(fields)
     if not core.packed then return core.nth_transform(index) end

@@ -481,6 +481,32 @@ static bs_status compile(bs_ctx *cx, bs_rules *rules, bs_transform *tr)
     return BS_OK;
 }
 
+/* Tells the readings of all cases of the rule's syn or anti addition. */
+static bs_status set_addition(bs_ctx *cx, bs_transform *tr)
+{
+    const bs_transform_def *def = &tr->def;
+
+    for (int i = 0; i < tr->case_count && def->addition != BS_ADDITION_NONE; i++) {
+        bs_case *kase = &tr->cases[i];
+        int a = bs_side__find(&kase->target, def->addition_maps[0]);
+        int b = bs_side__find(&kase->target, def->addition_maps[1]);
+        int c = bs_side__find(&kase->source, def->addition_maps[0]);
+        int d = bs_side__find(&kase->source, def->addition_maps[1]);
+
+        if (a < 0 || b < 0 || c < 0 || d < 0 || !bs_side__bond(&kase->target, a, b) ||
+            !bs_side__bond(&kase->source, c, d))
+            return bs_fail(cx, BS_EVALUE, "addition: expected two maps with a bond on both sides");
+        /* Of an elimination only the way forwards tells stereo. */
+        if (bs_side__bond(&kase->target, a, b)->says.order == 2) {
+            kase->forth.addition = (bs_addition){def->addition, c, d, false};
+            continue;
+        }
+        kase->back.addition = (bs_addition){def->addition, a, b, false};
+        kase->forth.addition = (bs_addition){def->addition, c, d, true};
+    }
+    return BS_OK;
+}
+
 static bs_status take_names(bs_ctx *cx, bs_rules *rules, bs_transform *tr)
 {
     const bs_transform_def *def = &tr->def;
@@ -513,7 +539,7 @@ static bs_status make_transform(bs_ctx *cx, bs_rules *rules, const bs_transform_
     if ((st = copy_transform(cx, &rules->arena, &(*out)->def)) != BS_OK ||
         (st = take_names(cx, rules, *out)) != BS_OK)
         return st;
-    if ((st = compile(cx, rules, *out)) != BS_OK)
+    if ((st = compile(cx, rules, *out)) != BS_OK || (st = set_addition(cx, *out)) != BS_OK)
         return st;
     return bs_preference__resolve(cx, rules, *out);
 }

@@ -207,8 +207,8 @@ bs_status bs_back__watched(bs_ctx *cx, bs_arena *home, const bs_rules *rules, in
 bs_status bs_rival__kind(bs_ctx *cx, const bs_outcome *wanted, const bs_outcome *other,
                          const bs_mol *const *mols, int count, bs_rival_kind *kind);
 
-/* Scores that differ by less are equal. */
-#define BS_SCORE_NOISE 1e-6
+/* Products whose scores differ by less form side by side; each is a major one. */
+#define BS_SCORE_NOISE 0.25
 
 /* What a forward check found. */
 typedef struct bs_verdict {

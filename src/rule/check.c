@@ -139,6 +139,18 @@ static bs_status same_but_stereo(bs_ctx *cx, const bs_case *kase, const bs_made 
 /* ---- The other hand
  * ------------------------------------------------------------------------------ */
 
+/* Whether the rule makes a centre at this slot. */
+static bool is_made(const bs_reading *forth, int slot)
+{
+    const bs_addition *addition = &forth->addition;
+
+    for (int i = 0; i < forth->hand_edits; i++) {
+        if (forth->hands[i].way == BS_HAND_MAKE && forth->hands[i].slot == slot)
+            return true;
+    }
+    return addition->way != BS_ADDITION_NONE && (slot == addition->x || slot == addition->y);
+}
+
 /*
  * The product of a forward run with all centres turned that the rule makes: what the mirror image
  * of the reagent gives, or an attack from the other face. `*out` is NULL if the rule makes none.
@@ -155,19 +167,16 @@ static bs_status turned_product(bs_ctx *cx, const bs_case *kase, const bs_made *
     bs_draft_init(&draft, cx, &cx->scratch);
     if ((st = bs_draft_from_mol(&draft, mol)) != BS_OK)
         return st;
-    for (int i = 0; i < forth->hand_edits; i++) {
-        for (int k = 0; k < forth->to->atom_count; k++) {
-            if (forth->hands[i].way != BS_HAND_MAKE || forth->to_slot[k] != forth->hands[i].slot)
-                continue;
-            for (uint32_t n = 0; n < draft.stereo_count; n++) {
-                bs_draft_stereo *element = &draft.stereo[n];
+    for (int k = 0; k < forth->to->atom_count; k++) {
+        if (!is_made(forth, forth->to_slot[k]))
+            continue;
+        for (uint32_t n = 0; n < draft.stereo_count; n++) {
+            bs_draft_stereo *element = &draft.stereo[n];
 
-                if (element->kind != BS_STEREO_TETRAHEDRAL ||
-                    element->centre != made->spots[k].atom)
-                    continue;
-                element->perm = (uint8_t)(3 - element->perm);
-                turned++;
-            }
+            if (element->kind != BS_STEREO_TETRAHEDRAL || element->centre != made->spots[k].atom)
+                continue;
+            element->perm = (uint8_t)(3 - element->perm);
+            turned++;
         }
     }
     return turned > 0 ? bs_draft_finish(&draft, &cx->scratch, NULL, out) : BS_OK;

@@ -453,6 +453,10 @@ static bs_status attempt(bs_edit *edit, bs_arena *home, const uint32_t *where, b
         (st = bs_edit__count_hydrogens(edit)) != BS_OK ||
         (st = bs_edit__move_stereo(edit)) != BS_OK)
         return st;
+    if (edit->barred) {
+        *possible = false;
+        return BS_OK;
+    }
     return finish_products(edit, home, parent, out, possible);
 }
 

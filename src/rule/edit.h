@@ -69,14 +69,15 @@ typedef struct bs_edit {
     bs_ctx *cx;
     const bs_bench *bench;
     bs_draft draft;
-    uint32_t *slot;  /* draft atom of each slot */
-    uint8_t *atoms;  /* flags */
-    uint8_t *bonds;  /* flags */
-    uint8_t *kekule; /* order before the aromatic bonds were opened */
-    bool open_all;   /* open every aromatic system with a touched atom */
-    bool can_open;   /* there are such systems that are not open */
-    int extra_hydrogen; /* which of the new aromatic nitrogens gets a hydrogen; -1 for none */
+    uint32_t *slot;      /* draft atom of each slot */
+    uint8_t *atoms;      /* flags */
+    uint8_t *bonds;      /* flags */
+    uint8_t *kekule;     /* order before the aromatic bonds were opened */
+    bool open_all;       /* open every aromatic system with a touched atom */
+    bool can_open;       /* there are such systems that are not open */
+    int extra_hydrogen;  /* which of the new aromatic nitrogens gets a hydrogen; -1 for none */
     int fresh_nitrogens; /* how many there are */
+    bool barred;         /* an addition or elimination cannot run this way */
 } bs_edit;
 
 /* Opens the Kekulé forms that the edit disturbs. */
@@ -84,6 +85,9 @@ bs_status bs_edit__open_aromatic(bs_edit *edit);
 
 /* Counts the hydrogens of touched atoms. */
 bs_status bs_edit__count_hydrogens(bs_edit *edit);
+
+/* Makes the stereo elements of a syn or anti addition, or of its reverse. */
+bs_status bs_edit__add_faces(bs_edit *edit);
 
 /* Brings the stereo elements of the draft up to date, and makes those that the rule writes. */
 bs_status bs_edit__move_stereo(bs_edit *edit);

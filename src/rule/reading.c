@@ -99,8 +99,8 @@ static bs_status edit_atoms(bs_ctx *cx, bs_arena *home, bs_reading *r, bool reve
         return st;
     for (int i = 0; i < r->to->atom_count; i++) {
         int slot = r->to_slot[i];
-        bs_atom_edit edit = slot < r->from->atom_count ? persisting_edit(r, slot, i, reverse)
-                                                       : created_edit(r, i);
+        bs_atom_edit edit =
+            slot < r->from->atom_count ? persisting_edit(r, slot, i, reverse) : created_edit(r, i);
 
         if (edit.created && (edit.element == BS_UNSAID || edit.element > 118))
             return bs_fail_at(cx, BS_EVALUE, r->to->query->atoms[i].offset,

@@ -11,6 +11,7 @@
 #ifndef RULE_READING_H
 #define RULE_READING_H
 
+#include "backsaw/rule.h"
 #include "rule/side.h"
 
 /* What becomes of an atom; BS_UNSAID leaves a property as it is. Atoms that come have all of it. */
@@ -41,17 +42,25 @@ typedef struct bs_slope_edit {
     int x, y, rx, ry, perm;
 } bs_slope_edit;
 
+/* An addition to the double bond between two slots, or with `adding` false its reverse. */
+typedef struct bs_addition {
+    bs_addition_way way;
+    int x, y;
+    bool adding;
+} bs_addition;
+
 typedef struct bs_reading {
     const bs_side *from, *to;
     int slot_count;
-    int *to_slot;  /* for each atom of `to` */
-    int *from_to;  /* for each atom of `from`: the atom of `to`, or -1 if it goes */
-    bool *active;  /* for each atom of `from`: whether the result depends on where it lies */
+    int *to_slot; /* for each atom of `to` */
+    int *from_to; /* for each atom of `from`: the atom of `to`, or -1 if it goes */
+    bool *active; /* for each atom of `from`: whether the result depends on where it lies */
     bs_atom_edit *atoms;
     bs_bond_edit *bonds;
     bs_hand_edit *hands;
     bs_slope_edit *slopes;
     int atom_edits, bond_edits, hand_edits, slope_edits;
+    bs_addition addition;
 } bs_reading;
 
 /*

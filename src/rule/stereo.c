@@ -59,7 +59,8 @@ static const bs_hand_edit *hand_edit_of(const bs_edit *edit, uint32_t centre)
     return NULL;
 }
 
-/* ---- Centres ------------------------------------------------------------------------------------ */
+/* ---- Centres ------------------------------------------------------------------------------------
+ */
 
 /* Exchanges one neighbour of the element for another; false if more than that has changed. */
 static bool exchange(const bs_edit *edit, bs_draft_stereo *element)
@@ -70,7 +71,8 @@ static bool exchange(const bs_edit *edit, bs_draft_stereo *element)
     bool held_hydrogen = false;
 
     look_around(edit, element->centre, &now);
-    if (now.count == 3 && !now.hydrogen && has_lone_pair(edit->draft.atoms[element->centre].element))
+    if (now.count == 3 && !now.hydrogen &&
+        has_lone_pair(edit->draft.atoms[element->centre].element))
         now.hydrogen = true;
     if (now.count + now.hydrogen != 4)
         return false;
@@ -158,13 +160,13 @@ static bs_status make_centre(bs_edit *edit, const bs_hand_edit *hand)
         if (!is_near(&now, element.around[i]))
             return BS_OK;
     }
-    if (unwritten >= 0 &&
-        !find_rest(edit, &now, &element, unwritten, &element.around[unwritten]))
+    if (unwritten >= 0 && !find_rest(edit, &now, &element, unwritten, &element.around[unwritten]))
         return BS_OK;
     return bs_draft_add_stereo(&edit->draft, element);
 }
 
-/* ---- Double bonds ------------------------------------------------------------------------------- */
+/* ---- Double bonds -------------------------------------------------------------------------------
+ */
 
 static bool is_double_still(const bs_edit *edit, uint32_t a, uint32_t b)
 {
@@ -199,7 +201,7 @@ static uint32_t other_before(const bs_edit *edit, uint32_t end, uint32_t not, ui
         const bs_draft_bond *bond = &edit->bench->bonds[i];
         uint32_t atom = bond->a == end ? bond->b : bond->a;
 
-        if ((bond->a == end || bond->b == end) && atom != not && atom != reference)
+        if ((bond->a == end || bond->b == end) && atom != not &&atom != reference)
             return atom;
     }
     return BS_NOWHERE;
@@ -254,7 +256,8 @@ static bs_status make_double(bs_edit *edit, const bs_slope_edit *slope)
     return bs_draft_add_stereo(&edit->draft, element);
 }
 
-/* ---- All ------------------------------------------------------------------------------------------ */
+/* ---- All
+ * ------------------------------------------------------------------------------------------ */
 
 /* Allenes, squares and the like stay only where nothing near them changed. */
 static void move_other(const bs_edit *edit, bs_draft_stereo *element)
@@ -297,5 +300,5 @@ bs_status bs_edit__move_stereo(bs_edit *edit)
     }
     for (int i = 0; i < r->slope_edits && st == BS_OK; i++)
         st = make_double(edit, &r->slopes[i]);
-    return st;
+    return st == BS_OK ? bs_edit__add_faces(edit) : st;
 }

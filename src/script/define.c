@@ -318,6 +318,15 @@ static void read_transform(lua_State *L, bs_transform_def *def)
     def->rxno = bsl_text_field(L, 1, "rxno");
     def->origin = bsl_text_field(L, 1, "origin");
     read_prefer(L, def);
+    if (lua_getfield(L, 1, "addition") == LUA_TTABLE) {
+        const char *way = bsl_text_field(L, -1, "way");
+
+        def->addition = way && strcmp(way, "syn") == 0 ? BS_ADDITION_SYN : BS_ADDITION_ANTI;
+        pair_field(L, lua_gettop(L), "maps", pair);
+        def->addition_maps[0] = (int)pair[0];
+        def->addition_maps[1] = (int)pair[1];
+    }
+    lua_pop(L, 1);
 }
 
 /* core.preference{ name=, roles={...}, score=function, origin= } */

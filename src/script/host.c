@@ -168,6 +168,7 @@ static int open_state(lua_State *L)
     bsl_open_polarity(L);
     bsl_open_why(L);
     bsl_open_descriptor(L);
+    bsl_open_direct(L);
     open_kinds(L);
     bsl_open_define(L);
     bsl_open_group(L);

@@ -176,6 +176,7 @@ void bsl_open_rewrite(lua_State *L);
 void bsl_open_polarity(lua_State *L); /* after bsl_open_mol() */
 void bsl_open_why(lua_State *L);
 void bsl_open_descriptor(lua_State *L); /* after bsl_open_mol() */
+void bsl_open_direct(lua_State *L);         /* the same */
 void bsl_open_define(lua_State *L);
 void bsl_open_group(lua_State *L); /* after that of molecules, to which it adds methods */
 void bsl_open_clash(lua_State *L);

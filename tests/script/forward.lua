@@ -59,3 +59,39 @@ print(fails(prefer, { "t markovnikov", carbon = 1, wood = 2 })) --> t mistake: p
 print(fails(prefer, { "t markovnikov", carbon = "1" })) --> interconversion "t mistake": prefer: 'carbon' must be a map number
 print(fails(prefer, 1)) --> interconversion "t mistake": 'prefer' must be a function or name a preference, not a number
 print(fails(preference, "t empty", {})) --> preference "t empty": 'score' is missing, a function
+
+-- Syn and anti addition (Clayden, Greeves, Warren, Organic Chemistry; from memory): E gives the meso dibromide, Z the
+-- racemic one; a ring of six gives the trans dibromide; the epoxide keeps the geometry, forwards and backwards
+local function adding(way, target, from)
+    return interconversion("t addition " .. way) { target = target, from = from, addition = { way, 1, 2 } }
+end
+local anti = adding("anti", "[C:1]([Br:3])[C:2][Br:4]", "[C:1]=[C:2]")
+local syn = adding("syn", "[C:1]1[O:3][C:2]1", "[C:1]=[C:2]")
+print(anti:forth(mol "C/C=C/C")[1].products[1] == mol "C[C@@H](Br)[C@@H](Br)C") --> true
+print(anti:forth(mol "C/C=C\\C")[1].products[1] == mol "C[C@@H](Br)[C@@H](Br)C") --> false
+print(#anti:back(mol "Br[C@@H]1CCCC[C@H]1Br"), #anti:back(mol "Br[C@H]1CCCC[C@H]1Br")) --> 1	0
+print(anti:back(mol "C[C@@H](Br)[C@@H](Br)C")[1].precursors[1]) --> C/C=C/C
+print(syn:back(mol "C[C@@H]1O[C@@H]1C")[1].precursors[1]) --> C/C=C\C
+print(syn:forth(mol "C/C=C\\C")[1].products[1] == mol "C[C@@H]1O[C@@H]1C") --> true
+print(fails(adding, "over", "[C:1][C:2]", "[C:1]=[C:2]")) --> interconversion "t addition over": 'addition' must be { "syn", map, map } or { "anti", map, map }
+print(fails(adding, "syn", "[C:1][O:3][C:2]", "[C:1]=[C:2]")) --> t addition syn: addition: expected two maps with a bond on both sides
+
+-- E2 in a ring wants hydrogen and halogen anti: menthyl chloride (the same source)
+local e2 = interconversion "t e2" { target = "[C:1]=[C:2]", from = "[C:1](Cl)[C;!H0:2]", addition = { "anti", 1, 2 } }
+print(#e2:forth(mol "C[C@@H]1CC[C@H]([C@@H](C1)Cl)C(C)C"), #e2:forth(mol "CC1CCC(C(C1)Cl)C(C)C")) --> 1	2
+
+-- Where electrophiles go (Clayden, Greeves, Warren; Joule, Mills, Heterocyclic Chemistry; from memory)
+local function first(smiles)
+    local m, best, at = mol(smiles), -1000, 0
+    for i, atom in ipairs(m:atoms()) do
+        if atom.aromatic and atom.element == "C" and atom.hydrogens > 0 and m:rate(i, "electrophile") > best + 1e-6 then
+            best, at = m:rate(i, "electrophile"), i
+        end
+    end
+    return at
+end
+print(first "c1ccc2ccccc2c1", first "c1ccc2[nH]ccc2c1", first "c1ccncc1", first "[O-][n+]1ccccc1") --> 3	7	2	5
+print(first "c1ccoc1", first "c1ccsc1", first "O=[N+]([O-])c1ccccc1", first "c1ccc2cnccc2c1") --> 3	3	6	10
+print(fails(mol("CC").rate, mol "CC", 1, "electrophile")) --> atom 1 is no aromatic carbon
+print(fails(mol("CC").stability, mol "CC", 3, "cation")) --> the molecule has no atom 3
+print(#mol("CCO"):neighbours(2), mol("CCO"):neighbours(2)[2].element) --> 2	O
