@@ -158,7 +158,8 @@ interconversion "hydroboration-oxidation" {
         return m.atom[1].carbons < m.atom[2].carbons
             and not lies(m, CIS_ALKYL, 2, 4, m.atom[1].index, m.atom[2].index)
     end,
-    prefer = { "anti-markovnikov", carbon = 1 },
+    prefer = { "anti-markovnikov", carbon = 1, hydrogen = 2 },
+    addition = { "syn", 1, 2 },
     conditions = "borane",
     also_attacks = { "alkene", "alkyne", "aldehyde", "ketone", "free acid" },
     recipe = "9-BBN or BH3·THF, THF, then H2O2, NaOH; also: BH3·SMe2, Cy2BH",
@@ -189,6 +190,7 @@ interconversion "syn-dihydroxylation" {
     target = "[C;X4;H1;R:1]([#6;R:5])([O;X2;H1])[C;X4;H1;R:3]([#6;R:6])[O;X2;H1]",
     from = "[C;X3;H1;R:1]([#6;R:5])=[C;X3;H1;R:3][#6;R:6]",
     when = function(m) return not lies(m, TRANS_DIOL, 2, 4, m.atom[1].index, m.atom[3].index) end,
+    addition = { "syn", 1, 3 },
     conditions = "oso4",
     also_attacks = { "alkene", "thiol", "thioether" },
     recipe = "OsO4 (cat), NMO, acetone-H2O, rt; also: K2OsO4",
@@ -220,6 +222,8 @@ interconversion "prilezhaev-epoxidation" {
     rxno = "RXNO:0000405",
     target = "[C;X4;r3;!$(C[C,S]=O);!$(CC#N):1]1[O;X2;r3][C;X4;r3;!$(C[C,S]=O);!$(CC#N):3]1",
     from = "[C;X3:1]=[C;X3:3]",
+    addition = { "syn", 1, 3 },
+    prefer = { "electron-rich alkene", first = 1, second = 3 },
     conditions = "mcpba",
     also_attacks = { "alkene", "primary amine", "secondary amine", "tertiary amine", "thiol", "thioether",
         "imine", "aldehyde" },

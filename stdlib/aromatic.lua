@@ -6,7 +6,7 @@ pack {
     version = "0.1.0",
     licence = "CC0-1.0",
     about = "Substitution on arenes: electrophilic, nucleophilic, through diazonium salts; side chains",
-    needs = { "synthons" },
+    needs = { "synthons", "preferences" },
 }
 
 -- Groups that direct ortho and para: donors, alkyl, halogen.
@@ -32,6 +32,7 @@ interconversion "nitration-directed" {
     target = "[c;" .. BENZENE .. ";$(c:c-" .. GIVE .. "),$(c1:c:c:c(-" .. GIVE .. "):c:c:1);!$(c1:c:c(-" .. STRONG ..
         "):c:c:c:1):1]-[NX3+:2](=[OX1:3])-[O-:4]",
     from = "[cH:1].O[N+:2](=[O:3])[O-:4]",
+    prefer = { "aromatic electrophilic, small", carbon = 1 },
     conditions = "nitration",
     also_attacks = { "phenol", "primary amine", "secondary amine", "aldehyde", "alkene", "sulfide",
         "other electron-rich arene" },
@@ -857,6 +858,7 @@ interconversion "nitration-meta" {
     target = "[c;" .. BENZENE .. ";$(c1:c:c(-" .. PULL .. "):c:c:c:1);!$(c:c-" .. GIVE .. ");!$(c1:c:c:c(-" .. GIVE ..
         "):c:c:1):1]-[NX3+:2](=[OX1:3])-[O-:4]",
     from = "[cH:1].O[N+:2](=[O:3])[O-:4]",
+    prefer = { "aromatic electrophilic, small", carbon = 1 },
     conditions = "nitration",
     also_attacks = { "phenol", "primary amine", "secondary amine", "aldehyde", "alkene", "sulfide",
         "other electron-rich arene" },
@@ -873,6 +875,7 @@ interconversion "bromination-directed" {
     about = "Bromination of an arene, ortho/para to a donor; para over ortho",
     target = "[c;" .. BENZENE .. ";$(c:c-" .. GIVE .. "),$(c1:c:c:c(-" .. GIVE .. "):c:c:1):1]-Br",
     from = "[cH:1]",
+    prefer = { "aromatic electrophilic", carbon = 1 },
     conditions = "br2",
     also_attacks = { "alkene", "phenol", "primary amine", "enolisable ketone", "other electron-rich arene" },
     recipe = "Br2, AcOH or FeBr3; NBS, MeCN (activated arenes), 0-25 °C",
@@ -889,6 +892,7 @@ interconversion "bromination-meta" {
     target = "[c;" .. BENZENE .. ";$(c1:c:c(-" .. PULL .. "):c:c:c:1);!$(c:c-" .. GIVE .. ");!$(c1:c:c:c(-" .. GIVE ..
         "):c:c:1):1]-Br",
     from = "[cH:1]",
+    prefer = { "aromatic electrophilic", carbon = 1 },
     conditions = "br2",
     also_attacks = { "alkene", "phenol", "primary amine", "other electron-rich arene" },
     recipe = "Br2, Fe, 120-140 °C; or NBS, H2SO4; DBDMH, H2SO4",
@@ -904,6 +908,7 @@ interconversion "chlorination-directed" {
     about = "Chlorination of an arene, ortho/para to a donor; para, then ortho",
     target = "[c;" .. BENZENE .. ";$(c:c-" .. STRONG .. "),$(c1:c:c:c(-" .. STRONG .. "):c:c:1):1]-Cl",
     from = "[cH:1]",
+    prefer = { "aromatic electrophilic", carbon = 1 },
     conditions = "br2",
     also_attacks = { "alkene", "phenol", "primary amine", "sulfide", "other electron-rich arene" },
     recipe = "SO2Cl2, CH2Cl2 or AcOH; NCS, MeCN; Cl2",
@@ -919,6 +924,7 @@ interconversion "iodination-directed" {
     about = "Iodination of an electron-rich arene; para to O or N donors",
     target = "[c;" .. BENZENE .. ";$(c:c-" .. STRONG .. "),$(c1:c:c:c(-" .. STRONG .. "):c:c:1):1]-I",
     from = "[cH:1]",
+    prefer = { "aromatic electrophilic", carbon = 1 },
     conditions = "br2",
     also_attacks = { "alkene", "phenol", "thiol", "other electron-rich arene" },
     recipe = "I2, AgOAc or HIO3; NIS, TFA; ICl, AcOH",
@@ -935,6 +941,7 @@ interconversion "sulfonation" {
     target = "[c;$(c:c-" .. GIVE .. "),$(c1:c:c:c(-" .. GIVE ..
         "):c:c:1),$(c1(-*):[cH]:[cH]:[cH]:[cH]:[cH]:1):1]-[SX4:2](=[OX1:3])(=[OX1:4])-[OX2H1:5]",
     from = "[cH:1].[S:2](=[O:3])(=[O:4])=[O:5]",
+    prefer = { "aromatic electrophilic", carbon = 1 },
     conditions = "so3",
     also_attacks = { "free alcohol", "alkene", "acid-labile acetal", "primary amine" },
     recipe = "H2SO4 or oleum, 25-100 °C",
@@ -951,6 +958,7 @@ interconversion "chlorosulfonation" {
     target = "[c;$(c:c-" .. GIVE .. "),$(c1:c:c:c(-" .. GIVE ..
         "):c:c:1),$(c1(-*):[cH]:[cH]:[cH]:[cH]:[cH]:1):1]-[SX4:2](=[OX1:3])(=[OX1:4])-Cl",
     from = "[cH:1].O[S:2](=[O:3])(=[O:4])Cl",
+    prefer = { "aromatic electrophilic", carbon = 1 },
     conditions = "so3",
     also_attacks = { "free alcohol", "primary amine", "alkene", "acid-labile acetal", "ester" },
     recipe = "ClSO3H (excess), 0-80 °C",
@@ -971,6 +979,7 @@ disconnection "fc-alkylation-tertiary" {
     cut = { 2, 1 },
     acceptor = { 2, "carbocation" },
     donor = { 1, "arene" },
+    prefer = { "aromatic electrophilic, bulky", carbon = 1 },
     conditions = "lewis-acid",
     also_attacks = { "free alcohol", "primary amine", "alkene", "other electron-rich arene",
         "acid-labile acetal" },
@@ -1012,6 +1021,7 @@ disconnection "fc-acylation" {
     cut = { 2, 1 },
     acceptor = { 2, "acyl" },
     donor = { 1, "arene" },
+    prefer = { "aromatic electrophilic, bulky", carbon = 1 },
     conditions = "lewis-acid",
     also_attacks = { "free alcohol", "primary amine", "alkene", "other electron-rich arene",
         "acid-labile acetal" },
@@ -1031,6 +1041,7 @@ disconnection "vilsmeier" {
     cut = { 2, 1 },
     acceptor = { 2, "formyl" },
     donor = { 1, "arene" },
+    prefer = { "aromatic electrophilic", carbon = 1 },
     conditions = "acylation",
     also_attacks = { "free alcohol", "free acid", "primary amine", "enolisable ketone", "primary amide" },
     recipe = "POCl3, DMF, 0-80 °C, then aq. NaOAc; also: N-methylformanilide",

@@ -101,6 +101,7 @@ interconversion "alkene-dibromination" {
     target = "[C;X4;H1:1]([#6:5])([Br;X1])[C;X4;H1:3]([#6:6])[Br;X1]",
     from = "[C;X3;H1:1]([#6:5])=[C;X3;H1:3][#6:6]",
     when = function(m) return not is_cis_dibromide(m) end,
+    addition = { "anti", 1, 3 },
     conditions = "br2",
     also_attacks = { "alkene", "alkyne", "phenol", "aniline", "ketone", "aldehyde", "thiol", "thioether",
         "enol ether" },

@@ -6,7 +6,7 @@ pack {
     version = "0.1.0",
     licence = "CC0-1.0",
     about = "Rings with nitrogen, oxygen and sulfur",
-    needs = { "synthons" },
+    needs = { "synthons", "preferences" },
 }
 
 disconnection "fischer-indole" {
@@ -14,6 +14,7 @@ disconnection "fischer-indole" {
     rxno = "RXNO:0000064",
     target = "[nX3;+0:1]1:[c;$(c1ccccc1):2]:[c;$(c1ccccc1):3]:[c:4]:[c;$(c-[#6]):5]:1",
     from = "[N:1](N)-[c:2]:[cH:3].O=[C:5]-[C:4]",
+    prefer = { "thermodynamic enolate", carbon = 4, new = 3 },
     conditions = "acid-aq-strong",
     also_attacks = { "acid-labile acetal", "other ketone", "aldehyde", "tert-butyl ester", "Boc carbamate" },
     recipe = "AcOH or HCl/EtOH reflux, ZnCl2, PPA",

@@ -6,7 +6,7 @@ pack {
     version = "0.1.0",
     licence = "CC0-1.0",
     about = "Pericyclic reactions",
-    needs = { "synthons" },
+    needs = { "synthons", "preferences" },
 }
 
 disconnection "diels-alder" {
@@ -14,6 +14,8 @@ disconnection "diels-alder" {
     rxno = "RXNO:0000006",
     target = "[CX4:1]1-[CX3:2]=[CX3:3]-[CX4;!x3:4]-[CX4;$(C-[$([CX3]=O),$(C#N),$([N+](=O)[O-])]):5]-[CX4:6]-1",
     from = "[C:1]=[C:2]-[C:3]=[C:4].[C:5]=[C:6]",
+    addition = { "syn", 5, 6 },
+    prefer = { "diels-alder", first = 1, near = 2, far = 3, last = 4, active = 5, other = 6 },
     conditions = "heat-200",
     also_attacks = { "other diene", "other activated alkene", "thiol", "primary amine" },
     recipe = "toluene, 80-140 °C; Et2AlCl or AlCl3, CH2Cl2, 0 °C",
@@ -517,4 +519,19 @@ disconnection "corey-chaykovsky-epoxide-sulfoxonium" {
     example { "Fc1ccc(c(F)c1)C1(Cn2cncn2)CO1", from = { "[I-].C[S+](C)(C)=O", "O=C(Cn1cncn1)c1ccc(F)cc1F" } },
     example { "CC1(CO1)c1ccccc1", from = { "[I-].C[S+](C)(C)=O", "CC(=O)c1ccccc1" } },
     refuse { "CC1OC1C" }, -- an internal epoxide
+}
+
+disconnection "diels-alder-endo-ring" {
+    about = "Diels-Alder reaction of a cyclic diene with maleic anhydride or an imide: endo",
+    rxno = "RXNO:0000006",
+    target = "[O:8]=[C:7]1[OX2,NX3:9][C:10](=[O:11])[C@H:6]2[C@@H:5]1[C@H:4]1[CX3:3]=[CX3:2][C@@H:1]2[CX4:12]1",
+    from = "[C:1]1=[C:2]-[C:3]=[C:4]-[C:12]-1.[CH:5]1-[C:7](=[O:8])-[*:9]-[C:10](=[O:11])-[CH:6]=1",
+    conditions = "heat-200",
+    also_attacks = { "other diene", "primary amine", "thiol", "free alcohol" },
+    recipe = "Et2O or toluene, 0-25 °C",
+    yield = { 85, 98 },
+    cautions = { "maleic anhydride" },
+    source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
+    example { "O=C1OC(=O)[C@H]2[C@@H]1[C@H]1C=C[C@@H]2C1", from = { "C1=CCC=C1", "O=C1C=CC(=O)O1" } },
+    refuse { "O=C1OC(=O)[C@H]2[C@@H]1[C@@H]1C=C[C@H]2C1" }, -- exo
 }

@@ -6,7 +6,7 @@ pack {
     version = "0.1.0",
     licence = "CC0-1.0",
     about = "Protecting groups on and off",
-    needs = { "synthons" },
+    needs = { "synthons", "preferences" },
 }
 
 interconversion "boc-protection" {
@@ -203,6 +203,7 @@ interconversion "tbs-protection" {
     rxno = "RXNO:0000328",
     target = "[C;X4;!$(C([#8])[#7,#8,#16]):1][O;X2:2][Si;X4:3]([C;H3:4])([C;H3:5])[C;X4;H0:6]([C;H3:7])([C;H3:8])[C;H3:9]",
     from = "[C;X4:1][O;X2;H1:2].[Cl;X1][Si;X4:3]([C;H3:4])([C;H3:5])[C;X4;H0:6]([C;H3:7])([C;H3:8])[C;H3:9]",
+    prefer = { "less hindered alcohol", carbon = 1 },
     conditions = "silylation",
     also_attacks = { "free alcohol", "phenol", "free acid", "thiol", "primary amine", "secondary amine" },
     recipe = "TBSCl, imidazole, DMF, rt; also: TBSOTf, 2,6-lutidine, CH2Cl2, -78 °C",
