@@ -17,6 +17,7 @@ BEGIN {
     module["draft"] = "chem"
     module["descriptor"] = "chem"
     module["polarity"] = "rule"
+    module["direct"] = "rule"
     module["group"] = "rule"
     module["why"] = "rule"
     module["file"] = "format"
