@@ -19,8 +19,8 @@ if [ $# -eq 0 ]; then
     set -- "$folder/molecules.smi" "$folder/larger.smi"
 fi
 
-# About a hundred transforms.
-hundred="-l acyl-transfer -l alcohols -l alkenes-alkynes -l amines -l aromatic"
+# Three packs with 111 transforms at the time of writing.
+hundred="-l acyl-transfer -l alcohols -l amines"
 
 for file in "$@"; do
     run=0
