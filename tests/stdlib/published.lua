@@ -1,5 +1,6 @@
 -- Plans published syntheses with each entry's own start compounds as the only catalogue, and counts those whose
--- steps stand among the first 25 routes. Usage: backsaw published.lua DATA LEAST [ID...]
+-- steps stand among the first 25 routes. With a catalogue that is on the shelf as well, less the target and the
+-- intermediates, it is the open setting. Usage: backsaw published.lua DATA LEAST [open=CATALOGUE] [ID...]
 --
 -- Two steps are the same if they have the same product and the same precursors, each compared once, by canonical
 -- structure. Precursors without carbon are left out on both sides, except ammonia, hydroxylamine and hydrazine; the
@@ -8,8 +9,15 @@
 
 local data, least = arg[1], tonumber(arg[2])
 local entries = dofile(data)
-local chosen, any_chosen = {}, arg[3] ~= nil
-for i = 3, #arg do chosen[arg[i]] = true end
+local chosen, any_chosen, shelf = {}, false, nil
+for i = 3, #arg do
+    local path = arg[i]:match "^open=(.+)$"
+    if path then
+        shelf = catalogue.open(path)
+    else
+        chosen[arg[i]], any_chosen = true, true
+    end
+end
 
 local cyanides = {}
 for _, smiles in ipairs { "[Na+].[C-]#N", "[K+].[C-]#N", "C#N" } do
@@ -73,11 +81,18 @@ local function route_steps(route)
     return set
 end
 
+local function products(entry)
+    local list = {}
+    for i, step in ipairs(entry.steps) do list[i] = step.product end
+    return list
+end
+
 local function place(entry)
     local wanted = published_steps(entry)
     local routes = plan {
         target = mol(entry.target),
-        catalogue = entry.start,
+        catalogue = shelf and { entry.start, shelf } or entry.start,
+        constraints = shelf and { not_bought = products(entry) },
         limits = { depth = 8, molecules = 3000 },
         best = 25,
         quiet = true,
@@ -91,9 +106,10 @@ end
 local found, tried, missing = 0, 0, {}
 for _, entry in ipairs(entries) do
     if not any_chosen or chosen[entry.id] then
+        local clock = os.clock()
         local at, count = place(entry)
-        print(string.format("%-28s %s", entry.id, at and "place " .. at .. " of " .. count
-            or "not found among " .. count))
+        print(string.format("%-28s %-22s %6.1f s", entry.id, at and "place " .. at .. " of " .. count
+            or "not found among " .. count, os.clock() - clock))
         tried = tried + 1
         if at then found = found + 1 else missing[#missing + 1] = entry.id end
     end
