@@ -233,4 +233,7 @@ void bs_text_clear(bs_text *text);
 bs_status bs_read_file(bs_ctx *cx, bs_arena *home, const char *path, size_t limit, char **data,
                        size_t *length);
 
+/* The SHA-256 digest (FIPS 180-4) of a text, in hexadecimal with a NUL behind. */
+void bs_sha256(const void *data, size_t length, char hex[65]);
+
 #endif

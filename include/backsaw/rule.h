@@ -202,6 +202,11 @@ int bs_rules_find(const bs_rules *rules, const char *name);
 /* The definition as kept by the book. */
 const bs_transform_def *bs_rules_transform(const bs_rules *rules, int index);
 
+int bs_rules_synthon_count(const bs_rules *rules);
+
+/* The definition of a synthon as kept by the book; NULL if it is out of use. */
+const bs_synthon_def *bs_rules_synthon(const bs_rules *rules, int index);
+
 /*
  * How far a book has grown. Rewinding it forgets all that was added later; the names are free
  * again, and the memory stays with the book.

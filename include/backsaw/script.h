@@ -20,6 +20,7 @@ typedef struct bs_session_opts {
     const char *script_folder;  /* where the script lies, to find packs beside it; or NULL */
     const char *pack_path;      /* folders to find packs in, separated by colons; or NULL */
     bool bare;                  /* leave the standard library out */
+    bool later;                 /* the command that is run loads the standard library itself */
     void *payload;
     void (*progress)(void *payload, const bs_plan_progress *now); /* NULL `now`: the plan ended */
     void (*say)(void *payload, const char *line); /* what packs print; NULL drops it */

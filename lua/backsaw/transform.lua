@@ -36,7 +36,7 @@ end
 
 -- The compounds of a list of SMILES as one text: pieces sorted, each once. Salts may be written
 -- as one compound or as two.
-local function pieces(list)
+function transforms.pieces(list)
     local seen, texts = {}, {}
     for _, entry in ipairs(list) do
         for _, piece in ipairs(core.mol(entry):fragments()) do
@@ -50,6 +50,8 @@ local function pieces(list)
     table.sort(texts)
     return table.concat(texts, " + ")
 end
+
+local pieces = transforms.pieces
 
 local function test_one(t, test)
     local ok, product = pcall(core.mol, test.product)

@@ -11,6 +11,7 @@
 #include <stdlib.h>
 #include <string.h>
 #include <sys/ioctl.h>
+#include <sys/stat.h>
 #include <unistd.h>
 
 static const char usage_text[] =
@@ -28,7 +29,7 @@ static const char usage_text[] =
     "  --version   name and version\n"
     "\n"
     "commands (each with --help):\n"
-    "  check PACK...                     read packs and run their self-tests\n"
+    "  check PACK...                     read packs, run their self-tests, lint them\n"
     "  catalogue build IN... -o OUT      make a catalogue from lists of compounds\n"
     "  plan SMILES [-c CATALOGUE]...     plan routes and print them\n"
     "\n"
@@ -202,6 +203,30 @@ static bool program_folder(char *out, size_t size)
     return true;
 }
 
+/*
+ * The commands that look at packs load the standard library after them, if at all, so that another
+ * version of a standard pack can be looked at; what a pack needs is looked for beside it first.
+ */
+static void prepare_study(const options *o, int argc, char **argv, char *folder, size_t size,
+                          bs_session_opts *opts)
+{
+    if (!o->command || (strcmp(o->command, "check") != 0 && strcmp(o->command, "pack") != 0))
+        return;
+    opts->later = true;
+    for (int i = o->rest; i < argc && strcmp(o->command, "check") == 0; i++) {
+        struct stat st;
+
+        if (argv[i][0] == '-' || stat(argv[i], &st) != 0)
+            continue;
+        if (S_ISDIR(st.st_mode))
+            snprintf(folder, size, "%s", argv[i]);
+        else
+            folder_of(argv[i], folder, size);
+        opts->script_folder = folder;
+        return;
+    }
+}
+
 /* Prints why the session failed and gives the exit status. */
 static int failed(const bs_session *session)
 {
@@ -268,6 +293,7 @@ int main(int argc, char **argv)
         folder_of(o.script, script, sizeof script);
         opts.script_folder = script;
     }
+    prepare_study(&o, argc, argv, script, sizeof script, &opts);
     opts.program_folder = program_folder(program, sizeof program) ? program : NULL;
     opts.pack_path = getenv("BACKSAW_PATH");
     opts.bare = o.bare;

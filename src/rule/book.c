@@ -125,8 +125,19 @@ const bs_transform_def *bs_rules_transform(const bs_rules *rules, int index)
     return &rules->transforms[index]->def;
 }
 
-/* ---- Taking back
- * --------------------------------------------------------------------------------- */
+int bs_rules_synthon_count(const bs_rules *rules)
+{
+    return rules->synthon_count;
+}
+
+const bs_synthon_def *bs_rules_synthon(const bs_rules *rules, int index)
+{
+    const bs_synthon *synthon = rules->synthons[index];
+
+    return synthon->retired ? NULL : &synthon->def;
+}
+
+/* ---- Taking back ----------------------------------------------------------------------- */
 
 bs_rules_mark bs_rules_grown(const bs_rules *rules)
 {

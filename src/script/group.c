@@ -263,6 +263,7 @@ static int core_nth_conditions(lua_State *L)
     set_text(L, "used_for", def->used_for);
     set_text(L, "source", def->source);
     set_text(L, "pack", def->pack);
+    set_text(L, "origin", def->origin);
     return 1;
 }
 

@@ -190,6 +190,9 @@ void bsl_open_pack(lua_State *L);
 void bsl_open_writer(lua_State *L);
 void bsl_open_file(lua_State *L); /* after that of molecules, to which it adds methods */
 
+/* What the commands that study packs need besides; adds to the private table. */
+void bsl_open_study(lua_State *L);
+
 /* Makes the locked metatable of a type ("backsaw." and a word) from methods and metamethods, and
    registers it. */
 void bsl_new_type(lua_State *L, const char *type, const luaL_Reg *methods, const luaL_Reg *meta);

@@ -116,7 +116,7 @@ bs_status bs_session_new(const bs_session_opts *opts, bs_session **out)
         bsl_host_new(session, &session->cx, BSL_PACKS, &session->packs) != BS_OK ||
         bsl_host_new(session, &session->cx, BSL_MAIN, &session->main) != BS_OK)
         return keep_error(session);
-    if (!opts->bare && bsl_use_library(session, &fault) != BS_OK)
+    if (!opts->bare && !opts->later && bsl_use_library(session, &fault) != BS_OK)
         return keep_fault(session, &fault);
     return BS_OK;
 }
@@ -414,6 +414,7 @@ static int job_command(lua_State *L)
 {
     bsl_job *job = lua_touserdata(L, 1);
 
+    bsl_open_study(L);
     bsl_push_module(L, job->name);
     luaL_checkstack(L, job->count + 4, "arguments");
     for (int i = 0; i < job->count; i++)

@@ -95,6 +95,27 @@ static void set_pair(lua_State *L, const char *field, double low, double high)
     lua_setfield(L, -2, field);
 }
 
+static void set_number(lua_State *L, const char *field, double value)
+{
+    if (value == 0)
+        return;
+    bsl_push_number(L, value);
+    lua_setfield(L, -2, field);
+}
+
+/* Sets what says where a disconnection cuts, and which functions a rule has. */
+static void set_cut(lua_State *L, const bs_transform_def *def)
+{
+    set_pair(L, "cut", def->cut[0], def->cut[1]);
+    set_number(L, "acceptor_map", def->acceptor_map);
+    set_number(L, "donor_map", def->donor_map);
+    set_number(L, "step_cost", def->step_cost);
+    lua_pushboolean(L, def->hook_when >= 0);
+    lua_setfield(L, -2, "when");
+    lua_pushboolean(L, def->hook_prefer >= 0);
+    lua_setfield(L, -2, "prefer");
+}
+
 /* table = core.describe(t): what its author wrote */
 static int core_describe(lua_State *L)
 {
@@ -115,6 +136,7 @@ static int core_describe(lua_State *L)
     set_text(L, "pack", def->pack);
     set_text(L, "origin", def->origin);
     set_pair(L, "yield", def->yield_low, def->yield_high);
+    set_cut(L, def);
     bsl_push_words(L, def->also.items, def->also.count);
     lua_setfield(L, -2, "also");
     bsl_push_words(L, def->cautions.items, def->cautions.count);
