@@ -30,6 +30,7 @@ static const char usage_text[] =
     "\n"
     "commands (each with --help):\n"
     "  check PACK...                     read packs, run their self-tests, lint them\n"
+    "  pack list|show|new|hash|diff      what packs there are, what is in them, what changed\n"
     "  catalogue build IN... -o OUT      make a catalogue from lists of compounds\n"
     "  plan SMILES [-c CATALOGUE]...     plan routes and print them\n"
     "\n"
@@ -59,7 +60,7 @@ static int wrong_usage(const char *format, const char *what)
 static bool is_command(const char *word)
 {
     return strcmp(word, "check") == 0 || strcmp(word, "catalogue") == 0 ||
-           strcmp(word, "plan") == 0;
+           strcmp(word, "pack") == 0 || strcmp(word, "plan") == 0;
 }
 
 /* Takes the value of -e or -l, joined to the option or behind it. Returns 0 or an exit status. */

@@ -40,7 +40,7 @@ check({ "--bare", "plan", "C", "-n", "none" }, 2, "^$", "whole number")
 check({ "--bare", "plan", "C", "-c" }, 2, "^$", "a value is expected")
 
 -- help of the commands
-for _, command in ipairs { "check", "catalogue", "plan" } do
+for _, command in ipairs { "check", "pack", "catalogue", "plan" } do
     check({ "--bare", command, "--help" }, 0, "^usage: backsaw " .. command, "^$")
 end
 
