@@ -2,6 +2,7 @@
 # small beside its dependencies, and before version 1.0 it promises no binary interface.
 
 install(TARGETS backsaw ARCHIVE DESTINATION ${CMAKE_INSTALL_LIBDIR})
+install(DIRECTORY ${PROJECT_SOURCE_DIR}/editor DESTINATION ${CMAKE_INSTALL_DATADIR}/backsaw)
 install(DIRECTORY ${PROJECT_SOURCE_DIR}/include/ DESTINATION ${CMAKE_INSTALL_INCLUDEDIR}
     FILES_MATCHING PATTERN "*.h")
 configure_file(${PROJECT_SOURCE_DIR}/cmake/backsaw.pc.in ${PROJECT_BINARY_DIR}/backsaw.pc @ONLY)

@@ -81,6 +81,19 @@ check({ "pack", "diff", old, new }, 1, { "version: 1.0.0 -> 1.1.0", "renamed: ol
 -- a pack that cannot be read says why
 check({ "pack", "show", put("bad.lua", 'pack { name = "bad" }\nsynthon "x" {}\n') }, 1, nil, nil, "bad.lua:2: synthon")
 check({ "pack", "show", put("loop.lua", "while true do end") }, 1, nil, nil, "limit")
+
+-- docs/packs.md followed literally: the first block of Lua goes into a file, which loads, passes the
+-- strict check, and plans
+local guide = assert(io.open(os.getenv "BACKSAW_CLI" .. "/../../docs/packs.md"))
+local block = guide:read("a"):match "\n```lua\n(pack {.-)\n```\n"
+guide:close()
+path = put("quayside.lua", block)
+check({ "check", "--strict", path }, 0, { "quayside: 2 transforms, 5 self-tests, 0 failed" }, { "warning" })
+local list = put("shelf.tsv", "smiles\tname\nOCc1ccc(F)cc1\talcohol\n[Na+].[C-]#N\tcyanide\n")
+check({ "catalogue", "build", list, "-o", folder .. "/shelf" }, 0)
+result = run { "--bare", "-l", path, "plan", "N#CCc1ccc(F)cc1", "-c", folder .. "/shelf", "--quiet" }
+expect("plans", result, result.status == 0 and result.out:find("quayside benzyl cyanide", 1, true)
+    and result.out:find("quayside benzyl chloride", 1, true))
 os.execute("rm -r '" .. folder .. "'")
 
 program.finish()
