@@ -1,8 +1,9 @@
--- backsaw pack list|show|new|hash|diff: what packs there are, what is in them, and what changed.
+-- backsaw pack list|show|new|hash|diff|pages: what packs there are, what is in them, and what changed.
 local core = ...
 local check = core.module "check"
 local compare = core.module "packdiff"
 local skeleton = core.module "skeleton"
+local page = core.module "packpage"
 
 local usage = [[
 usage: backsaw pack list
@@ -10,6 +11,7 @@ usage: backsaw pack list
        backsaw pack new NAME [FILE]
        backsaw pack hash PACK...
        backsaw pack diff OLD NEW
+       backsaw pack pages FOLDER
 
 A PACK is a file, or a name on the path: beside the script, in the folders of BACKSAW_PATH, in the
 standard library.
@@ -19,10 +21,10 @@ standard library.
   new    a commented skeleton to start from, on standard output or in a new FILE
   hash   the SHA-256 of the text of each pack, and its file
   diff   what changed from one version to another: rules that came, went, or do something else
+  pages  a page in Markdown for each pack of the standard library, and README.md, into a folder
 
 Exit status: 0 done (diff: no difference), 1 failed (diff: they differ), 2 wrong usage.]]
 
-local function base_of(path) return string.match(path, "[^/]*$") end
 local function folder_of(path) return string.match(path, "^(.*)/[^/]*$") or "." end
 
 local function is_file(path)
@@ -133,6 +135,18 @@ function commands.show(name)
     return 0
 end
 
+-- Writes a file; nothing is left of one that cannot be written.
+local function write_file(path, text)
+    local file, problem = io.open(path, "wb")
+    if not file then core.fail("file error", problem) end
+    local ok = file:write(text)
+    ok = file:close() and ok
+    if not ok then
+        os.remove(path)
+        core.fail("file error", path .. ": cannot be written")
+    end
+end
+
 function commands.new(name, path)
     local text = skeleton(name)
     if not path then
@@ -142,14 +156,7 @@ function commands.new(name, path)
     if is_file(path) then
         core.fail("file error", string.format("%s is there already; nothing was written", path))
     end
-    local file, problem = io.open(path, "wb")
-    if not file then core.fail("file error", problem) end
-    local ok = file:write(text)
-    ok = file:close() and ok
-    if not ok then
-        os.remove(path)
-        core.fail("file error", path .. ": cannot be written")
-    end
+    write_file(path, text)
     return 0
 end
 
@@ -167,13 +174,30 @@ function commands.diff(old, new)
     return #lines == 0 and 0 or 1
 end
 
+function commands.pages(folder)
+    local _, library = core.places()
+    if not library then core.fail("not found", "no standard library is found") end
+    local files = core.folder(library)
+    table.sort(files)
+    local index = { "# The standard library\n", "| pack | rules | what |", "| --- | --- | --- |" }
+    for _, file in ipairs(files) do
+        local pack, name = inspect(library .. "/" .. file), string.gsub(file, "%.lua$", ".md")
+        write_file(folder .. "/" .. name, page(pack))
+        index[#index + 1] = string.format("| [%s](%s) | %d | %s |", pack.name, name, #pack.transforms,
+            pack.about or "")
+    end
+    write_file(folder .. "/README.md", table.concat(index, "\n") .. "\n")
+    return 0
+end
+
 -- How many arguments each takes.
-local arity = { list = { 0, 0 }, show = { 1, 1 }, new = { 1, 2 }, hash = { 1, math.huge }, diff = { 2, 2 } }
-local order = { "list", "show", "new", "hash", "diff" }
+local arity = { list = { 0, 0 }, show = { 1, 1 }, new = { 1, 2 }, hash = { 1, math.huge }, diff = { 2, 2 },
+    pages = { 1, 1 } }
+local order = { "list", "show", "new", "hash", "diff", "pages" }
 
 local function wrong(...)
     io.stderr:write("backsaw pack: ", string.format(...), "\n",
-        "usage: backsaw pack list|show|new|hash|diff ... (--help tells more)\n")
+        "usage: backsaw pack list|show|new|hash|diff|pages ... (--help tells more)\n")
     return 2
 end
 
@@ -185,7 +209,7 @@ local function main(command, ...)
             return 0
         end
     end
-    if not command then return wrong("one of list, show, new, hash, diff is expected") end
+    if not command then return wrong("one of list, show, new, hash, diff, pages is expected") end
     if not commands[command] then
         return wrong("unknown command '%s'%s", command, check.meant(command, order))
     end
@@ -195,6 +219,7 @@ local function main(command, ...)
     if #arguments < arity[command][1] or #arguments > arity[command][2] then
         return wrong("%s: %s expected", command, command == "list" and "no argument is"
             or command == "diff" and "two packs are" or command == "new" and "a name, and perhaps a file, is"
+            or command == "pages" and "a folder is"
             or "a pack is")
     end
     return commands[command](...)

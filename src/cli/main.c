@@ -30,7 +30,7 @@ static const char usage_text[] =
     "\n"
     "commands (each with --help):\n"
     "  check PACK...                     read packs, run their self-tests, lint them\n"
-    "  pack list|show|new|hash|diff      what packs there are, what is in them, what changed\n"
+    "  pack list|show|new|hash|diff|pages   what packs there are, what is in them, what changed\n"
     "  catalogue build IN... -o OUT      make a catalogue from lists of compounds\n"
     "  plan SMILES [-c CATALOGUE]...     plan routes and print them\n"
     "\n"

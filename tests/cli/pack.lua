@@ -25,7 +25,7 @@ local function put(name, text)
 end
 
 -- wrong usage
-check({ "pack" }, 2, nil, nil, "one of list, show, new, hash, diff is expected")
+check({ "pack" }, 2, nil, nil, "one of list, show, new, hash, diff, pages is expected")
 check({ "pack", "hsah" }, 2, nil, nil, "unknown command 'hsah'; did you mean 'hash'?")
 check({ "pack", "show" }, 2, nil, nil, "a pack is expected")
 check({ "pack", "diff", "x" }, 2, nil, nil, "two packs are expected")
@@ -77,6 +77,23 @@ check({ "pack", "diff", old, new }, 1, { "version: 1.0.0 -> 1.1.0", "renamed: ol
     "  target: [CX4:1]Br -> [CX4;H2,H3:1]Br", "  yield: 50-70 % -> 60-70 %", "  recipe: HBr -> PBr3",
     "  - refuse CCl", "  + refuse CC(C)Br", "changed: synthon half: donor, [Na] -> donor, [Na] [Li]" },
     { "example", "from:" })
+
+-- pages: one a pack, with what the pack says
+check({ "pack", "pages", folder .. "/none" }, 1, nil, nil, "No such file")
+assert(os.execute("mkdir '" .. folder .. "/pages'"))
+check({ "pack", "pages", folder .. "/pages" }, 0)
+local function page_has(name, wanted)
+    local page = assert(io.open(folder .. "/pages/" .. name))
+    local content = page:read "a"
+    page:close()
+    expect(name .. ": " .. wanted, { command = "pack pages", status = 0, out = content:sub(1, 500), err = "" },
+        content:find(wanted, 1, true))
+end
+page_has("README.md", "[cross-coupling](cross-coupling.md)")
+page_has("cross-coupling.md", "### suzuki-biaryl")
+page_has("cross-coupling.md", "acceptor at 1: aryl-halide; donor at 2: organoboron")
+page_has("cross-coupling.md", "- refuses: `c1ccc(-c2ccccn2)nc1`")
+page_has("synthons.md", "- **acyl**: acceptor; Cl")
 
 -- a pack that cannot be read says why
 check({ "pack", "show", put("bad.lua", 'pack { name = "bad" }\nsynthon "x" {}\n') }, 1, nil, nil, "bad.lua:2: synthon")
