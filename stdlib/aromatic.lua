@@ -560,6 +560,22 @@ interconversion "chloroazine-from-azinone" {
     refuse { "Clc1cccnc1" }, -- the 3-position of pyridine is not activated
 }
 
+interconversion "chloroazine-from-nh-azinone" {
+    about = "The same from the lactam tautomer, as azinones with the oxo group next to an N-H are sold and drawn",
+    target = "[c;r6:1](Cl):[n;X2;+0;r6:2]",
+    from = "[c:1](=O):[nH:2]",
+    conditions = "socl2",
+    also_attacks = { "free alcohol", "free acid", "primary amide", "primary amine", "phenol", "aldehyde",
+        "other azinone" },
+    recipe = "POCl3, N,N-diethylaniline or iPr2NEt, toluene, 80-110 °C",
+    yield = { 75, 95 },
+    cautions = { "phosphorus oxychloride" },
+    source = "Joule and Mills, Heterocyclic Chemistry; from memory",
+    example { "Clc1ncnc2ccccc12", from = { "O=c1[nH]cnc2ccccc12" } },
+    example { "Clc1ccccn1", from = { "O=c1cccc[nH]1" } },
+    refuse { "Clc1cccnc1" }, -- no N-H next to the oxo group
+}
+
 interconversion "chloropyridine-from-n-oxide" {
     about = "2-Chloropyridine from a pyridine N-oxide; α and γ mixtures; next to an acceptor at C3",
     target = "[n;X2;+0:2]:[c;r6;$(c:c-[$(C=O),$(C#N),$([N+](=O)[O-])]):1]Cl",

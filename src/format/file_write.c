@@ -31,12 +31,12 @@ static bs_status cannot_write(const bs_file_writer *w)
 }
 
 /* Makes a file that is not there yet. */
-static bs_status make_beside(bs_file_writer *w)
+static bs_status make_beside(bs_file_writer *w, const char *path)
 {
-    size_t length = strlen(w->path);
-    bool gzip = bs_file__is_gzip(w->path);
+    size_t length = strlen(path);
+    bool gzip = bs_file__is_gzip(path);
     int file = -1;
-    bs_status st = bs_copy_text(w->cx, &w->names, w->path, length, &w->path);
+    bs_status st = bs_copy_text(w->cx, &w->names, path, length, &w->path);
 
     if (st != BS_OK || (st = bs_new(w->cx, &w->names, length + 48, &w->beside)) != BS_OK)
         return st;
@@ -72,10 +72,10 @@ bs_status bs_file_create(bs_ctx *cx, const char *path, bs_file_writer **out)
     w = bs_gate_alloc(cx->gate, sizeof *w);
     if (!w)
         return bs_fail_memory(cx);
-    *w = (bs_file_writer){.cx = cx, .kind = kind, .path = (char *)(uintptr_t)path};
+    *w = (bs_file_writer){.cx = cx, .kind = kind};
     bs_text_init(&w->text, cx);
     bs_arena_init(&w->names, cx->gate);
-    if ((st = make_beside(w)) != BS_OK) {
+    if ((st = make_beside(w, path)) != BS_OK) {
         bs_file_abandon(w);
         return st;
     }

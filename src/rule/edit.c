@@ -161,6 +161,10 @@ static void change_atom(bs_edit *edit, const bs_atom_edit *change)
         atom->charge = (int8_t)change->charge;
         edit->atoms[index] |= BS_EDIT_TOUCHED;
     }
+    if (change->stays_aromatic)
+        edit->atoms[index] |= BS_EDIT_RING;
+    if (change->recount)
+        edit->atoms[index] |= BS_EDIT_TOUCHED;
     if (change->isotope != BS_UNSAID)
         atom->isotope = (uint16_t)change->isotope;
     if (change->hydrogens != BS_UNSAID) {

@@ -56,7 +56,8 @@ enum {
     BS_EDIT_TOUCHED = 1, /* a bond, the charge or the element changed */
     BS_EDIT_STATED = 2,  /* its hydrogens are written by the rule */
     BS_EDIT_CREATED = 4,
-    BS_EDIT_SEED = 8 /* an atom of `to` */
+    BS_EDIT_SEED = 8, /* an atom of `to` */
+    BS_EDIT_RING = 16 /* written as aromatic before and after */
 };
 
 enum {

@@ -151,7 +151,7 @@ static int hint_for(const bs_edit *edit, uint32_t atom)
 static void count_atom(bs_edit *edit, uint32_t index, const tally *t)
 {
     bs_draft_atom *atom = &edit->draft.atoms[index];
-    bool ring = t->fresh || (t->lost && t->open);
+    bool ring = t->fresh || (t->open && (t->lost || (edit->atoms[index] & BS_EDIT_RING)));
     int hint = BS_UNSAID;
 
     if (atom->gone)

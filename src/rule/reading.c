@@ -50,12 +50,15 @@ static bs_atom_edit persisting_edit(const bs_reading *r, int slot, int to_atom, 
     edit.isotope = changed(a->isotope, b->isotope);
     edit.hydrogens = reverse ? BS_UNSAID : b->hydrogens;
     edit.hydrogen_hint = hydrogen_hint(b);
+    edit.stays_aromatic = a->aromatic == 1 && b->aromatic == 1;
     if (reverse) {
         /* What the one side set, the other unsets. */
         if (b->charge == BS_UNSAID && a->charge != BS_UNSAID && a->charge != 0)
             edit.charge = 0;
         if (b->isotope == BS_UNSAID && a->isotope != BS_UNSAID && a->isotope != 0)
             edit.isotope = 0;
+        edit.recount = edit.stays_aromatic && a->hydrogens != BS_UNSAID &&
+                       a->hydrogens != b->hydrogens;
     }
     return edit;
 }
@@ -78,7 +81,7 @@ static bool says_nothing(const bs_atom_edit *edit)
 {
     return !edit->created && edit->element == BS_UNSAID && edit->charge == BS_UNSAID &&
            edit->hydrogens == BS_UNSAID && edit->isotope == BS_UNSAID &&
-           edit->aromatic == BS_UNSAID;
+           edit->aromatic == BS_UNSAID && !edit->recount;
 }
 
 /* Whether an edit can change an atom that passes the tests of `from`. */
@@ -107,7 +110,7 @@ static bs_status edit_atoms(bs_ctx *cx, bs_arena *home, bs_reading *r, bool reve
                               "this atom has to be made, so it must name one element");
         if (!edit.created && changes(r, &edit))
             r->active[slot] = true;
-        if (!says_nothing(&edit) || edit.hydrogen_hint != BS_UNSAID)
+        if (!says_nothing(&edit) || edit.hydrogen_hint != BS_UNSAID || edit.stays_aromatic)
             r->atoms[r->atom_edits++] = edit;
     }
     for (int i = 0; i < r->from->atom_count; i++)

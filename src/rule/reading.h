@@ -19,6 +19,8 @@ typedef struct bs_atom_edit {
     int slot;
     bool created;
     int element, aromatic, charge, hydrogens, isotope;
+    bool stays_aromatic; /* both sides write it so */
+    bool recount;        /* one side set its hydrogens, the other leaves them to the ring */
     int hydrogen_hint; /* hydrogens of a nitrogen with two bonds in a new aromatic ring */
 } bs_atom_edit;
 

@@ -48,7 +48,7 @@ static bool is_closed(const bs_case *kase, int part)
 
         if (atom->part != part)
             continue;
-        if (atom->says.element == BS_UNSAID || atom->says.element < 1 || atom->says.aromatic == 1 ||
+        if (atom->says.element < 1 || atom->says.aromatic == 1 ||
             written_bonds(&kase->source, i, &degree) < 0)
             return false;
         if (slot < kase->target.atom_count && !is_full(&kase->target, slot))

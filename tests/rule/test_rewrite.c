@@ -197,6 +197,20 @@ static void rewrite__new_pyrrole_nitrogen_gets_its_hydrogen(void **state)
     assert_string_equal(outcome_text(f, &out.items[0]), canonical(f, "Cc1ccc(C)[nH]1"));
 }
 
+/* Azinones and chloroazines (POCl3; common practice, no source): the ring stays aromatic both ways. */
+static void rewrite__ring_keeps_aromatic_when_an_oxo_group_goes(void **state)
+{
+    fixture *f = *state;
+    const char *azinone = "O=c1[nH]cnc2ccccc12", *chloride = "Clc1ncnc2ccccc12";
+    bs_outcomes out = run(f, "[c:1](=O):[nH:2]>>[c:1](-Cl):[nH0:2]", &azinone, 1);
+
+    assert_int_equal(out.count, 1);
+    assert_string_equal(outcome_text(f, &out.items[0]), canonical(f, chloride));
+    out = run(f, "[c:1](-Cl):[n:2]>>[c:1](=O):[nH:2]", &chloride, 1);
+    assert_int_equal(out.count, 1);
+    assert_string_equal(outcome_text(f, &out.items[0]), canonical(f, azinone));
+}
+
 static void rewrite__site_tells_where_the_left_side_lay(void **state)
 {
     fixture *f = *state;
@@ -299,6 +313,7 @@ int main(void)
         check_case(rewrite__double_bond_keeps_geometry_when_its_halogen_is_exchanged),
         check_case(rewrite__aromatic_rest_finds_its_double_bonds),
         check_case(rewrite__new_pyrrole_nitrogen_gets_its_hydrogen),
+        check_case(rewrite__ring_keeps_aromatic_when_an_oxo_group_goes),
         check_case(rewrite__site_tells_where_the_left_side_lay),
         check_case(rewrite__errors_tell_the_place),
         check_case(rewrite__wrong_number_of_reactants_is_refused),
