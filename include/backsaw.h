@@ -15,6 +15,7 @@
 #include "backsaw/rule.h"
 #include "backsaw/group.h"
 #include "backsaw/why.h"
+#include "backsaw/example.h"
 #include "backsaw/catalogue.h"
 #include "backsaw/route.h"
 #include "backsaw/search.h"

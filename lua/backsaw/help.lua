@@ -43,6 +43,8 @@ synthon "name" { kind = "donor" or "acceptor", equivalents = { { attach = "Cl" }
 disconnection "name" { target =, cut = { 1, 2 }, acceptor = { 1, "..." }, donor = { 2, "..." } }
 interconversion "name" { target =, from = }
 example { "product", from = { ... } }   refuse { "product" }     inside the tables
+draft "A.B>>P"                       the text of a transform from one reaction, to be edited;
+                                     a second result: does it give its example back?
 Further fields: conditions recipe yield reagents cautions spares also_attacks source rxno also
 when prefer step_cost about]],
 groups = [[

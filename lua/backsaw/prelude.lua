@@ -22,6 +22,7 @@ mol = setmetatable(core.module "file", {
 })
 pattern, rewrite = core.pattern, core.rewrite
 transform, back, forth = transforms.fetch, core.back, core.forth
+draft = core.draft
 pack, synthon, disconnection, interconversion = words.pack, words.synthon, words.disconnection,
     words.interconversion
 example, refuse, preference = words.example, words.refuse, words.preference

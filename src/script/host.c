@@ -166,6 +166,7 @@ static int open_state(lua_State *L)
     bsl_open_pattern(L);
     bsl_open_rewrite(L);
     bsl_open_polarity(L);
+    bsl_open_example(L);
     bsl_open_why(L);
     bsl_open_descriptor(L);
     bsl_open_direct(L);

@@ -174,6 +174,7 @@ void bsl_open_mol(lua_State *L);
 void bsl_open_pattern(lua_State *L);
 void bsl_open_rewrite(lua_State *L);
 void bsl_open_polarity(lua_State *L); /* after bsl_open_mol() */
+void bsl_open_example(lua_State *L);
 void bsl_open_why(lua_State *L);
 void bsl_open_descriptor(lua_State *L); /* after bsl_open_mol() */
 void bsl_open_direct(lua_State *L);         /* the same */

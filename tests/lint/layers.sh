@@ -20,6 +20,7 @@ BEGIN {
     module["direct"] = "rule"
     module["group"] = "rule"
     module["why"] = "rule"
+    module["example"] = "rule"
     module["file"] = "format"
 }
 
