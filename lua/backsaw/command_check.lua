@@ -119,10 +119,16 @@ local function expand(names)
         local files = core.folder(name)
         if files then
             table.sort(files)
+            local before = #list
             for _, file in ipairs(files) do
-                list[#list + 1] = string.gsub(name, "/*$", "") .. "/" .. file
+                local path = string.gsub(name, "/*$", "") .. "/" .. file
+                if study.is_pack((core.pack_text(path))) then
+                    list[#list + 1] = path
+                else
+                    io.stderr:write("backsaw check: ", path, " has no header of a pack; left out\n")
+                end
             end
-            if #files == 0 then problems[#problems + 1] = name .. ": no pack in this folder" end
+            if #list == before then problems[#problems + 1] = name .. ": no pack in this folder" end
         else
             list[#list + 1] = name
         end

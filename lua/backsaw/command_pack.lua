@@ -1,6 +1,7 @@
 -- backsaw pack list|show|new|hash|diff|pages: what packs there are, what is in them, and what changed.
 local core = ...
 local check = core.module "check"
+local study = core.module "study"
 local compare = core.module "packdiff"
 local skeleton = core.module "skeleton"
 local page = core.module "packpage"
@@ -27,13 +28,7 @@ Exit status: 0 done (diff: no difference), 1 failed (diff: they differ), 2 wrong
 
 local function folder_of(path) return string.match(path, "^(.*)/[^/]*$") or "." end
 
-local function is_file(path)
-    local file = io.open(path, "rb")
-    if not file then return false end
-    local readable = file:read(0) ~= nil or file:seek "end" == 0
-    file:close()
-    return readable
-end
+local function is_file(path) return (core.pack_text(path)) ~= nil end
 
 -- The file of a pack.
 local function find(name)
@@ -51,15 +46,6 @@ end
 
 local function inspect(path)
     return core.inspect(string.find(path, "/", 1, true) and path or "./" .. path, folder_of(path))
-end
-
-local function slurp(path)
-    local file, problem = io.open(path, "rb")
-    if not file then core.fail("file error", problem) end
-    local text = file:read "a"
-    file:close()
-    if not text then core.fail("file error", path .. ": cannot be read") end
-    return text
 end
 
 -- Rows as columns of equal width; the last is as long as it likes.
@@ -89,7 +75,7 @@ function commands.list()
         table.sort(files)
         for _, file in ipairs(files) do
             local path = folder .. "/" .. file
-            if not seen[file] and string.find(slurp(path), "%f[%w_]pack%s*[{(]") then
+            if not seen[file] and study.is_pack((core.pack_text(path))) then
                 seen[file] = true
                 local ok, pack = pcall(inspect, path)
                 if ok then
@@ -116,7 +102,7 @@ function commands.show(name)
     local path = find(name)
     local pack = inspect(path)
     print(string.format("%s %s: %s", pack.name, pack.version or "(no version)", pack.about or "-"))
-    print(string.format("%s, SHA-256 %s", path, core.sha256(slurp(path))))
+    print(string.format("%s, SHA-256 %s", path, core.sha256((core.pack_text(path)))))
     if #pack.transforms > 0 then
         local rows = { { "transform", "kind", "conditions", "yield", "tests", "source" } }
         for _, one in ipairs(pack.transforms) do
@@ -153,7 +139,8 @@ function commands.new(name, path)
         io.write(text)
         return 0
     end
-    if is_file(path) then
+    local there, other = core.pack_text(path)
+    if there or other then
         core.fail("file error", string.format("%s is there already; nothing was written", path))
     end
     write_file(path, text)
@@ -163,7 +150,7 @@ end
 function commands.hash(...)
     for _, name in ipairs { ... } do
         local path = find(name)
-        print(core.sha256(slurp(path)) .. "  " .. path)
+        print(core.sha256((core.pack_text(path))) .. "  " .. path)
     end
     return 0
 end

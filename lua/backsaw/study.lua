@@ -32,6 +32,11 @@ end
 
 local function base_of(path) return string.match(path, "[^/]*$") end
 
+-- Has this text the header of a pack? Scripts and notes may lie in the same folder.
+function study.is_pack(text)
+    return text ~= nil and string.find(text, "%f[%w_]pack%s*[{(]") ~= nil
+end
+
 -- The pack of this number in core.packs().
 function study.pack(number)
     for _, pack in ipairs(core.packs()) do

@@ -8,6 +8,7 @@
 #include <dirent.h>
 #include <stdio.h>
 #include <string.h>
+#include <sys/stat.h>
 
 /* table = core.nth_synthon(index), 0-based: false for one out of use, nil behind the last */
 static int core_nth_synthon(lua_State *L)
@@ -99,6 +100,30 @@ static int core_places(lua_State *L)
     }
     lua_pushstring(L, session->opts.bare ? NULL : session->library);
     return 2;
+}
+
+#define PACK_SIZE_LIMIT ((size_t)8 << 20)
+
+/* text = core.pack_text(path), or nil and whether there is something else */
+static int core_pack_text(lua_State *L)
+{
+    bsl_host *host = bsl_host_of(L);
+    const char *path = luaL_checkstring(L, 1);
+    bs_mark mark = bs_arena_mark(&host->results);
+    struct stat st;
+    char *text;
+    size_t length;
+
+    if (stat(path, &st) != 0 || !S_ISREG(st.st_mode)) {
+        lua_pushnil(L);
+        lua_pushboolean(L, stat(path, &st) == 0);
+        return 2;
+    }
+    if (bs_read_file(host->cx, &host->results, path, PACK_SIZE_LIMIT, &text, &length) != BS_OK)
+        return bsl_raise_from(L, mark, NULL, 0);
+    lua_pushlstring(L, text, length);
+    bs_arena_rewind(&host->results, mark);
+    return 1;
 }
 
 /* hex = core.sha256(text) */
@@ -221,8 +246,13 @@ static int core_inspect(lua_State *L)
 void bsl_open_study(lua_State *L)
 {
     static const luaL_Reg functions[] = {
-        {"nth_synthon", core_nth_synthon}, {"folder", core_folder},   {"places", core_places},
-        {"sha256", core_sha256},           {"inspect", core_inspect}, {NULL, NULL},
+        {"nth_synthon", core_nth_synthon},
+        {"folder", core_folder},
+        {"places", core_places},
+        {"pack_text", core_pack_text},
+        {"sha256", core_sha256},
+        {"inspect", core_inspect},
+        {NULL, NULL},
     };
 
     lua_getfield(L, LUA_REGISTRYINDEX, "backsaw.core");

@@ -73,6 +73,7 @@ end
 put("b.lua", 'pack { name = "b", needs = { "a" } }\n' .. clean)
 put("a.lua", 'pack { name = "a", version = "2.0.0" }\n' .. class)
 put("notes.txt", "no pack")
+put("script.lua", "print(plan)")
 check({ "--bare", "check", "--strict", folder }, 0, { "a: 0 transforms", "b: 1 transform, 2 self-tests, 0 failed" })
 check({ "--bare", "check", folder .. "/b.lua" }, 0, { "b: 1 transform" }, { "a: 0" }) -- needs lie beside it
 

@@ -111,6 +111,13 @@ check({ "catalogue", "build", list, "-o", folder .. "/shelf" }, 0)
 result = run { "--bare", "-l", path, "plan", "N#CCc1ccc(F)cc1", "-c", folder .. "/shelf", "--quiet" }
 expect("plans", result, result.status == 0 and result.out:find("quayside benzyl cyanide", 1, true)
     and result.out:find("quayside benzyl chloride", 1, true))
+
+-- what is no regular file is no pack: nothing waits for it
+assert(os.execute("mkfifo '" .. folder .. "/pipe.lua'"))
+check({ "pack", "hash", folder .. "/pipe.lua" }, 1, nil, nil, "no pack in file")
+check({ "pack", "new", "x", folder .. "/quayside.lua" }, 1, nil, nil, "is there already")
+check({ "pack", "new", "x", folder .. "/pipe.lua" }, 1, nil, nil, "is there already")
+check({ "check", folder .. "/pipe.lua" }, 1, { "no pack in file" })
 os.execute("rm -r '" .. folder .. "'")
 
 program.finish()
