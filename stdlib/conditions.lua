@@ -2370,3 +2370,40 @@ conditions "metathesis" {
     survives = { "aniline", "tertiary-amine" },
     source = "Clayden; Carey and Sundberg; from memory",
 }
+
+-- ---- Nucleophiles, acids and reducible groups that look harmless ------------------------------------
+
+local METALS = { "organolithium", "grignard", "cuprate" }
+
+verdict { group = "amidine", conditions = { "acylation", "alkylation", "cu", "socl2", "pbr3" }, "attacked",
+    why = "a strong base and nucleophile: reacts on nitrogen" }
+verdict { group = "amidine", conditions = METALS, "attacked", why = "protonates the reagent" }
+verdict { group = "amidine", conditions = { "base-aq-strong", "hydrazine", "diazotisation", "pd0" }, "slow",
+    why = "hydrolysed slowly, or binds the metal" }
+verdict { group = "amidoxime", conditions = { "acylation", "alkylation", "cu", "socl2", "mitsunobu", "diazotisation" },
+    "attacked", why = "reacts on oxygen, then closes an oxadiazole" }
+verdict { group = "hydroxamic-acid", conditions = { "acylation", "alkylation", "cu", "socl2", "pbr3", "mitsunobu" },
+    "attacked", why = "reacts on oxygen, then rearranges (Lossen)" }
+verdict { group = { "hydroxamic-acid", "amidoxime", "sulfonic-acid", "phosphorus-acid" }, conditions = METALS, "attacked",
+    why = "protonates the reagent" }
+verdict { group = "hydroxamic-acid", conditions = { "lialh4", "borane", "h2-raney", "kmno4", "diazotisation",
+    "acid-aq-strong", "base-aq-strong", "heat-200" }, "attacked", why = "reduced, oxidised or hydrolysed" }
+verdict { group = "sulfonic-acid", conditions = { "socl2", "pbr3" }, "attacked", why = "becomes the sulfonyl halide" }
+verdict { group = { "sulfonic-acid", "phosphorus-acid" }, conditions = { "alkylation", "silylation", "mitsunobu" },
+    "slow", why = "may be esterified" }
+verdict { group = "phosphorus-acid", conditions = { "acylation", "socl2", "pbr3" }, "attacked", why = "activated, condenses" }
+verdict { group = "phosphorus-ester", conditions = { "lialh4", "bbr3", "organolithium", "wolff-kishner" }, "attacked",
+    why = "attacked at phosphorus or dealkylated" }
+verdict { group = "phosphorus-ester", conditions = { "grignard", "base-aq-strong", "acid-aq-strong" }, "slow",
+    why = "slowly cleaved to the acid" }
+verdict { group = "azo", conditions = { "h2-pd", "h2-raney", "zn-acid", "birch", "clemmensen", "wolff-kishner", "lialh4" },
+    "attacked", why = "reduced to the hydrazine or to two amines" }
+verdict { group = "azo", conditions = { "fe-acid", "hydrazine", "borane", "mcpba" }, "slow", why = "reduced, or oxidised to azoxy" }
+verdict { group = { "thiourea", "isothiourea" }, conditions = { "alkylation", "acylation", "diazotisation", "mcpba", "kmno4",
+    "h2o2-base", "oxymercuration", "br2", "pd0", "cu", "tempo" }, "attacked",
+    why = "reacts on sulfur or nitrogen, or binds the metal" }
+verdict { group = "cyanohydrin-ester", conditions = { "base-aq-mild", "base-aq-strong", "alkoxide", "amine-heat", "hydrazine",
+    "cu", "thiolate", "alkylation" }, "attacked", why = "loses the acyl group, then cyanide" }
+verdict { group = "nitrate-ester", conditions = { "lialh4", "h2-pd", "h2-raney", "zn-acid", "fe-acid", "base-aq-strong",
+    "heat-200", "acid-hot-dry", "birch", "hydrazine", "thiolate", "organolithium", "grignard" }, "attacked",
+    why = "reduced or cleaved; explosive when heated" }

@@ -1403,3 +1403,82 @@ group "azinone" {
     examples = { "O=c1cccc[nH]1", "O=c1ccnc[nH]1" },
     non_examples = { "Oc1ccccn1", "O=C1CCCCN1", "c1cc[nH]c1" },
 }
+
+-- Groups that are nucleophiles, acids or easily reduced although they look harmless.
+
+group "amidine" {
+    name = "amidine or guanidine",
+    smarts = "[NX3;+0;!$(N-[C,S]=O);!$(N-[N+])][CX3;!$(C-S)]=[NX2;!$(N-[#7,#8]);!$(N-[C,S]=O);!$(N-C#N);!$(N-[N+])]",
+    also = { "guanidine" },
+    examples = { "CC(=N)N", { "NC(=N)N", 2 }, "NC(=N)c1ccccc1" },
+    non_examples = { "CC(N)=O", "CC(N)=NO", "Nc1ccccn1" },
+}
+
+group "amidoxime" {
+    smarts = "[NX3;+0][CX3]=[NX2][OX2;H1]",
+    examples = { "CC(N)=NO", "NC(=NO)c1ccccc1" },
+    non_examples = { "CC(C)=NO", "CC(N)=NOC", "CC(=O)NO" },
+}
+
+group "hydroxamic-acid" {
+    name = "hydroxamic acid",
+    smarts = "[OX2;H1][NX3][CX3]=[OX1]",
+    examples = { "CC(=O)NO", "CN(O)C(=O)c1ccccc1" },
+    non_examples = { "CC(=O)NOC", "CC(C)=NO", "CC(=O)O" },
+}
+
+group "azo" {
+    name = "azo compound",
+    smarts = "[#6][NX2]=[NX2][#6]",
+    examples = { "c1ccc(cc1)N=Nc1ccccc1", "CN=NC" },
+    non_examples = { "CNNC", "CC=NN", "[O-][N+](=Nc1ccccc1)c1ccccc1" },
+}
+
+group "sulfonic-acid" {
+    name = "sulfonic acid",
+    smarts = "[OX2;H1][SX4](=[OX1])(=[OX1])[#6]",
+    examples = { "CS(=O)(=O)O", "OS(=O)(=O)c1ccccc1" },
+    non_examples = { "COS(C)(=O)=O", "CS(N)(=O)=O", "CS(O)=O" },
+}
+
+group "phosphorus-acid" {
+    name = "phosphonic acid or acid phosphate",
+    smarts = "[OX2;H1][PX4]=[OX1]",
+    examples = { { "CP(=O)(O)O", 2 }, "COP(=O)(O)OC" },
+    non_examples = { "CP(=O)(OC)OC", "COP(OC)OC" },
+}
+
+group "phosphorus-ester" {
+    name = "phosphonate or phosphate ester",
+    smarts = "[PX4](=[OX1])[OX2][#6]",
+    examples = { "CP(C)(=O)OC", { "COP(=O)(OC)OC", 3 } },
+    non_examples = { "CP(=O)(O)O", "CP(C)(C)=O" },
+}
+
+group "thiourea" {
+    name = "thiourea",
+    smarts = "[SX1]=[CX3]([NX3])[NX3]",
+    examples = { "NC(N)=S", "CNC(=S)Nc1ccccc1" },
+    non_examples = { "CC(N)=S", "NC(N)=O", "CSC(N)=N" },
+}
+
+group "isothiourea" {
+    name = "isothiourea",
+    smarts = "[SX2;$(S[CX4])][CX3](=[NX2])[NX3]",
+    examples = { "CSC(=N)N", "CSC(=NC)NC" },
+    non_examples = { "NC(N)=S", "CSC(N)=O" },
+}
+
+group "cyanohydrin-ester" {
+    name = "ester of a cyanohydrin",
+    smarts = "[CX3](=[OX1])[OX2][CX4][CX2]#[NX1]",
+    examples = { "CC(=O)OCC#N", "CC(=O)OC(C#N)c1ccccc1" },
+    non_examples = { "CC(=O)OCCC#N", "OCC#N" },
+}
+
+group "nitrate-ester" {
+    name = "nitrate ester",
+    smarts = "[CX4][OX2][NX3+](=[OX1])[O-]",
+    examples = { "CCO[N+](=O)[O-]" },
+    non_examples = { "CC[N+](=O)[O-]", "CCON=O" },
+}

@@ -17,13 +17,18 @@ pack {
 incompatible "acylating agent with O-H or N-H" {
     { "acyl-halide", "isocyanate", "sulfonyl-chloride" },
     { "primary-amine", "secondary-amine", "primary-aniline", "secondary-aniline", "alcohol", "phenol", "thiol",
-        "hydrazine", "azole-nh" },
+        "hydrazine", "azole-nh", "amidine", "amidoxime", "hydroxamic-acid", "thiourea", "phosphorus-acid" },
     why = "acylates itself or its neighbour",
 }
 
 incompatible "acyl chloride with acid" {
     "acyl-halide", "carboxylic-acid",
-    verdict = "slow", why = "forms an anhydride with base",
+    why = "the reagent that made it takes both acids, and base gives the anhydride",
+}
+
+incompatible "acyl chloride with basic nitrogen" {
+    "acyl-halide", { "tertiary-amine", "pyridine" },
+    verdict = "slow", why = "stable as the salt only",
 }
 
 incompatible "anhydride or activated ester with amine" {
@@ -119,6 +124,7 @@ incompatible "organometal with electrophile" {
 incompatible "organometal with acidic hydrogen" {
     "organometal",
     { "carboxylic-acid", "alcohol", "phenol", "thiol", "primary-amine", "secondary-amine", "primary-aniline",
-        "secondary-aniline", "azole-nh", "terminal-alkyne", "primary-amide", "secondary-amide" },
+        "secondary-aniline", "azole-nh", "terminal-alkyne", "primary-amide", "secondary-amide", "sulfonamide-nh",
+        "carbamate-nh", "urea", "amidine", "hydroxamic-acid", "sulfonic-acid", "phosphorus-acid" },
     why = "the reagent is quenched by its own acidic hydrogen",
 }
