@@ -11,12 +11,12 @@ pack {
 
 disconnection "amide-from-ethyl-ester" {
     about = "Ammonolysis or aminolysis of an ethyl ester; chiral α carbon is kept under mild conditions",
-    target = "[#6:1][C;X3:2](=[O;X1:3])-!@[N;X3;H1,H2;!$(N[#7,#8]);!$(N-c);!$(N(-C=O)-[C,S]=O):4]",
+    target = "[#6;!$([CX4;H0]);!$([CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1][C;X3:2](=[O;X1:3])-!@[N;X3;$([H2]),$([H1]-[CX4;H2,H3]),$([H1]-[CX4;R]);!$(N-[CX4]-C(=O)[OX2H1]);!$(N[#7,#8]);!$(N-c);!$(N(-C=O)-[C,S]=O):4]",
     cut = { 2, 4 },
     acceptor = { 2, "acyl-ethyl-ester" },
     donor = { 4, "amine" },
     conditions = "amine-heat",
-    also_attacks = { "other ester", "acyl halide", "anhydride", "epoxide", "alkyl halide", "aldehyde" },
+    also_attacks = { "amidine", "thiourea", "other ester", "acyl halide", "anhydride", "epoxide", "alkyl halide", "aldehyde" },
     recipe = "conc. aq. NH3 or amine, EtOH, rt to 80 °C; also: methyl ester, NH3/MeOH in a pressure tube",
     yield = { 70, 92 },
     cautions = { "ammonia" },

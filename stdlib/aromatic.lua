@@ -1346,7 +1346,7 @@ interconversion "clemmensen" {
     target = "[" .. ARYL .. ":1]-[CX4;H2;" .. CHAIN .. ":2]-[CX4;!$(C-[!#6;!#1]);!$(C-[CX3]=O);!$(C-C#N):3]",
     from = "[c:1][C:2](=O)[C:3]",
     conditions = "clemmensen",
-    also_attacks = { "nitro", "alkene", "acid-labile acetal", "free alcohol", "other ketone" },
+    also_attacks = { "primary amide", "imide", "nitro", "alkene", "acid-labile acetal", "free alcohol", "other ketone" },
     recipe = "Zn(Hg), conc. HCl, toluene, reflux; also: Et3SiH, TFA",
     yield = { 60, 85 },
     cautions = { "zinc amalgam (mercury)", "hydrochloric acid" },
@@ -1360,7 +1360,7 @@ interconversion "wolff-kishner" {
     about = "Wolff-Kishner reduction of a ketone; C=O to CH2; base-stable substrates (Huang-Minlon)",
     rxno = "RXNO:0000227",
     target = "[" .. ARYL .. ":1]-[CX4;H2;" .. CHAIN ..
-        ":2]-[#6;$([CX4;!$(C-[!#6;!#1])]),$(c);!$([CX4]-[CX3]=O);!$(C-C#N):3]",
+        ":2]-[#6;$([CX4;!$(C-[!#6;!#1])]),$(c);!$([CX4]-[CX3]=O);!$(C-C#N);!$([CX4]-[CX4]-[NX3,OX2]):3]",
     from = "[c:1][C:2](=O)[#6:3]",
     conditions = "wolff-kishner",
     also_attacks = { "ester", "nitrile", "alkyl halide", "nitro", "activated aryl halide", "other ketone",

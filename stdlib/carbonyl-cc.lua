@@ -291,6 +291,7 @@ disconnection "robinson" {
     rxno = "RXNO:0000380",
     target = "[CX3:1]1=[CX3;H1:2]-[CX3:3](=[OX1:4])-[CX4;H1,H2:5]-[CX4;H2:6]-[CX4;H0,H1:7]-1",
     from = "[C:1](=O)[C:7].[C:2][C:3](=[O:4])[C:5]=[C:6]",
+    when = function(m) return not m.molecule:has "[OX2;r3]" end, -- a base opens the epoxide of its ketone
     conditions = "alkoxide",
     also_attacks = { "aldehyde", "alkyl halide", "acyl halide", "thiol", "primary amine" },
     recipe = "KOH, MeOH, reflux, or pyrrolidine, AcOH; Mannich base as a masked enone",
@@ -1673,7 +1674,7 @@ disconnection "coumarin-perkin" {
 interconversion "decarboxylation-malonic" {
     about = "Decarboxylation of a malonic acid; a new stereocentre is racemic",
     also = { "malonic-decarboxylation" },
-    target = "[OX2H1:1]-[CX3:2](=[OX1:3])-[CX4;H1,H2:4]-[#6;!$(C(=O)[OX2H1]):5]",
+    target = "[OX2H1:1]-[CX3:2](=[OX1:3])-[CX4;H1,H2;!$([C@H](*)(*)*);!$(C-[N;!$(N-C=O)]);!$(C-[OX2H1]);!$(C-[!#6;!#7;!#8;!#1]):4]-[CX4,c;!$(C(-[!#6;!#1])-[!#6;!#1]):5]",
     from = "[O:1][C:2](=[O:3])[C:4]([#6:5])C(=O)O",
     conditions = "heat-200",
     also_attacks = { "tert-butyl ester", "β-keto ester", "acid-labile acetal" },
@@ -1682,6 +1683,7 @@ interconversion "decarboxylation-malonic" {
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "O=C(O)C1CCC1", from = { "O=C(O)C1(C(=O)O)CCC1" } },
     example { "CCCCCC(=O)O", from = { "CCCCC(C(=O)O)C(=O)O" } },
+    refuse { "C[C@@H](Cc1ccccc1)C(=O)O" }, -- the centre comes out racemic
     refuse { "CC(C)(C)C(=O)O" }, -- no H left where the second carboxyl group stood
 }
 

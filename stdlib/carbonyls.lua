@@ -26,7 +26,7 @@ end
 interconversion "dess-martin-ketone" {
     about = "Dess-Martin ketone oxidation; no epimerisation; neutral",
     rxno = "RXNO:0000576",
-    target = "[#6:3][C;X3;H0:1](=[O;X1:2])[#6:4]",
+    target = "[#6;!$([CX4]-[OX2H1]);!$(C=[O,N]):3][C;X3;H0;!$(C1C=CC(=O)C=C1);!$(C1C(=O)C=CC=C1);!r3:1](=[O;X1:2])[#6;!$([CX4]-[OX2H1]);!$(C=[O,N]):4]",
     from = "[#6:3][C;X4;H1:1]([O;X2;H1:2])[#6:4]",
     conditions = "swern-dmp",
     also_attacks = { "free alcohol", "thiol", "thioether", "primary amine", "secondary amine" },
@@ -36,6 +36,7 @@ interconversion "dess-martin-ketone" {
     source = "D. B. Dess and J. C. Martin, J. Org. Chem. 1983, 48, 4155; from memory",
     example { "CC(C)(C)OC(=O)N1CCCC(=O)C1", from = { "CC(C)(C)OC(=O)N1CCCC(O)C1" } },
     example { "O=C1CCCCC1", from = { "OC1CCCCC1" } },
+    refuse { "CC(=O)C(C)O" }, -- a diol is cleaved, or goes on to the diketone
     refuse { "COC(C)=O" }, -- ester carbonyl does not come from an alcohol
 }
 

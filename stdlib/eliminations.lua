@@ -15,12 +15,39 @@ local CLAYDEN = "Clayden, Greeves, Warren, Organic Chemistry; from memory"
 -- The carbon that bore the leaving group is secondary or tertiary.
 local function is_branched(m) return m.atom[1].carbons >= 2 + (m.atom[1].hydrogens == 0 and 1 or 0) end
 
+-- Whether a group beside the alkene tells one side from the other: an arene, another double bond.
+local function is_conjugated(m, atom)
+    for _, near in ipairs(m.molecule:neighbours(atom.index)) do
+        if near.order == 1 then
+            if near.aromatic then return true end
+            for _, far in ipairs(m.molecule:neighbours(near.index)) do
+                if far.order > 1 then return true end
+            end
+        end
+    end
+    return false
+end
+
+-- An open chain with one group on each carbon gives both positions and both geometries, unless one is conjugated; the cis
+-- alkene is never the main product.
+local function is_one_alkene(m)
+    local first, second = m.atom[1], m.atom[2]
+    if not is_branched(m) then return false end
+    if first.hydrogens ~= 1 or second.hydrogens ~= 1 then return true end
+    for _, bond in ipairs(m.molecule:bonds()) do
+        local here = bond[1] == first.index and bond[2] == second.index or bond[1] == second.index and bond[2] == first.index
+        if here and bond.ring then return true end
+        if here and bond.geometry == "cis" then return false end
+    end
+    return is_conjugated(m, first) or is_conjugated(m, second)
+end
+
 for _, x in ipairs { "Br", "Cl", "I" } do
     interconversion("dehydrohalogenation-zaitsev-" .. x:lower()) {
         about = "E2 elimination with a small base; the more substituted alkene; hydrogen and halogen anti-periplanar",
         target = "[CX3;H0,H1;!$(C[!#6;!#1]):1]=[CX3;!$(C[!#6;!#1]):2]",
         from = "[C:1]([" .. x .. "])[C;!H0:2]",
-        when = is_branched,
+        when = is_one_alkene,
         addition = { "anti", 1, 2 },
         prefer = { "zaitsev", first = 1, second = 2 },
         conditions = "alkoxide",
@@ -36,9 +63,9 @@ for _, x in ipairs { "Br", "Cl", "I" } do
 
     interconversion("dehydrohalogenation-hofmann-" .. x:lower()) {
         about = "E2 elimination with a bulky base; the less substituted alkene",
-        target = "[CX3;H0,H1;!$(C[!#6;!#1]):1]=[CX3;!$(C[!#6;!#1]):2]",
+        target = "[CX3;H0,H1;!$(C[!#6;!#1]);!$(C-[CX3]=[OX1]):1]=[CX3;!$(C[!#6;!#1]):2]",
         from = "[C:1]([" .. x .. "])[C;!H0:2]",
-        when = is_branched,
+        when = is_one_alkene,
         addition = { "anti", 1, 2 },
         prefer = { "hofmann", first = 1, second = 2 },
         conditions = "base-hindered",
@@ -56,7 +83,7 @@ interconversion "dehydration-acid" {
     about = "Acid dehydration of a secondary or tertiary alcohol; the more substituted, conjugated alkene",
     target = "[CX3;H0,H1;!$(C[!#6;!#1]):1]=[CX3;!$(C[!#6;!#1]):2]",
     from = "[C:1]([OX2H])[C;!H0:2]",
-    when = is_branched,
+    when = is_one_alkene,
     prefer = { "zaitsev", first = 1, second = 2 },
     conditions = "acid-aq-strong",
     also_attacks = { "free alcohol", "acetal", "silyl ether", "tert-butyl ester", "Boc amine", "epoxide" },
@@ -71,8 +98,9 @@ interconversion "dehydration-acid" {
 interconversion "hofmann-elimination-hydroxide" {
     about = "Hofmann elimination of a quaternary ammonium hydroxide; the less substituted alkene",
     rxno = "RXNO:0000166",
-    target = "[CX3;!$(C[!#6;!#1]):1]=[CX3;!$(C[!#6;!#1]):2]",
+    target = "[CX3;!$(C[!#6;!#1]);$([H2]),$(*=[CX3;H2]):1]=[CX3;!$(C[!#6;!#1]):2]",
     from = "[C:1]([N+]([CH3])([CH3])[CH3])[C;!H0:2].[OH-]",
+    when = function(m) return not m.molecule:has "[$([CX3]=[OX1]),$([CX4]-[OX2H1]),$([CX2]#N),$(C-[F,Cl,Br,I])]" end,
     prefer = { "hofmann", first = 1, second = 2 },
     conditions = "base-aq-strong",
     also_attacks = { "ester", "alkyl halide", "aldehyde" },
@@ -80,6 +108,7 @@ interconversion "hofmann-elimination-hydroxide" {
     yield = { 60, 85 },
     source = MARCH,
     example { "CCC=C", from = { "CCC(C)[N+](C)(C)C.[OH-]" } },
+    refuse { "C=CCC(=O)O" }, -- an acceptor moves the double bond
     refuse { "CC=CC" }, -- the more substituted alkene
 }
 
@@ -103,7 +132,7 @@ interconversion "pinacol" {
 
 interconversion "baeyer-villiger-by-aptitude" {
     about = "Baeyer-Villiger oxidation; tertiary alkyl before secondary alkyl and aryl before primary alkyl before methyl",
-    target = "[#6:1][CX3:2](=[OX1:3])[OX2:4][#6;$(c),$([CX4;H0,H1]([#6])[#6]),$([CX4;R]):5]",
+    target = "[#6;!$(C-[!#6;!#1]);!$(C=[O,N]);!$([CX3]=[CX3]):1][CX3:2](=[OX1:3])[OX2:4][#6;$(c),$([CX4;H0,H1]([#6])[#6]),$([CX4;R]);!$([CX4](-[!#6;!#1])-[!#6;!#1]);!$([CX4]-[CX3]=O);!$([CX4]-C#N):5]",
     from = "[#6:1][C:2](=[O:3])[#6:5]",
     when = function(m) return not m.atom[1].aromatic or m.atom[5].aromatic or m.atom[5].carbons >= 2 end,
     prefer = { "migratory aptitude", group = 5, to = 4 },

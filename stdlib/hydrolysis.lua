@@ -83,7 +83,7 @@ interconversion "gem-diacetate-hydrolysis" {
 
 interconversion "acid-from-primary-amide" {
     about = "Hydrolysis of a primary amide to the acid; nitrous acid cleaves even hindered amides",
-    target = "[#6:1][C;X3:2](=[O;X1:3])[O;X2;H1]",
+    target = "[#6;!$([CX4]-C(=O)[OX2H1]):1][C;X3:2](=[O;X1:3])[O;X2;H1]",
     from = "[#6:1][C;X3:2](=[O;X1:3])[N;H2]",
     conditions = "acid-aq-strong",
     also_attacks = { "primary amine", "acetal", "Boc carbamate", "tert-butyl ester", "silyl ether", "ester",

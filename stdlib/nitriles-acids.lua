@@ -184,7 +184,7 @@ disconnection "steglich-esterification" {
 disconnection "amide-coupling" {
     about = "Amide coupling of an acid with an amine; alpha centre kept with carbamate-protected amino acids; primary amine before aniline",
     rxno = "RXNO:0000357",
-    target = "[#6:1][C;X3:2](=[O;X1:3])-!@[N;X3;!$(N(C=O)[C,S]=[O,S,N]);!$(N[#7,#8]):4]",
+    target = "[#6;!$([CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1][C;X3:2](=[O;X1:3])-!@[N;X3;!$(N(C=O)[C,S]=[O,S,N]);!$(N[#7,#8]):4]",
     cut = { 2, 4 },
     acceptor = { 2, "acyl-acid" },
     donor = { 4, "amine" },
@@ -195,13 +195,14 @@ disconnection "amide-coupling" {
     cautions = { "HATU", "N,N-dimethylformamide" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COC(=O)[C@H](Cc1ccccc1)NC(=O)[C@H](C)NC(=O)OC(C)(C)C", from = { "C[C@@H](C(=O)O)NC(=O)OC(C)(C)C", "COC(=O)[C@@H](N)Cc1ccccc1" } },
+    refuse { "NCC(=O)NCc1ccccc1" }, -- the free amine of an amino acid couples with itself
     refuse { "CNC(=O)OC" }, -- carbamate: no carbon on the acyl side
 }
 
 disconnection "schotten-baumann" {
     about = "Schotten-Baumann reaction; amine before alcohol and water",
     rxno = "RXNO:0000165",
-    target = "[#6:1][C;X3:2](=[O;X1:3])-!@[N;X3;!$(N(C=O)[C,S]=[O,S,N]);!$(N[#7,#8]):4]",
+    target = "[#6;!$([CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1][C;X3:2](=[O;X1:3])-!@[N;X3;!$(N(C=O)[C,S]=[O,S,N]);!$(N[#7,#8]):4]",
     cut = { 2, 4 },
     acceptor = { 2, "acyl" },
     donor = { 4, "amine" },
@@ -212,17 +213,18 @@ disconnection "schotten-baumann" {
     cautions = { "sodium hydroxide" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "O=C(NCCN1CCOCC1)c1ccc(Cl)cc1", from = { "O=C(Cl)c1ccc(Cl)cc1", "NCCN1CCOCC1" } },
+    refuse { "NCC(=O)NCc1ccccc1" }, -- no acid chloride beside a free amine
     refuse { "CN(C)C(=O)N(C)C" }, -- urea: no carbon on the acyl side
 }
 
 disconnection "ester-aminolysis" {
     about = "Aminolysis of a methyl ester; primary alkylamines and ammonia; slow with hindered partners",
-    target = "[#6:1][C;X3:2](=[O;X1:3])-!@[N;X3;H1,H2;!$(N[#7,#8]);!$(Nc):4]",
+    target = "[#6;!$([CX4;H0]);!$([CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1][C;X3:2](=[O;X1:3])-!@[N;X3;$([H2]),$([H1]-[CX4;H2,H3]),$([H1]-[CX4;R]);!$(N-[CX4]-C(=O)[OX2H1]);!$(N[#7,#8]);!$(Nc):4]",
     cut = { 2, 4 },
     acceptor = { 2, "acyl-methyl-ester" },
     donor = { 4, "amine" },
     conditions = "amine-heat",
-    also_attacks = { "ester", "acyl halide", "anhydride", "epoxide", "alkyl halide", "aldehyde" },
+    also_attacks = { "amidine", "thiourea", "ester", "acyl halide", "anhydride", "epoxide", "alkyl halide", "aldehyde" },
     recipe = "neat or MeOH, 60-120 °C; also: AlMe3 or TBD; ethyl ester",
     yield = { 65, 92 },
     source = "March's Advanced Organic Chemistry; from memory",
@@ -611,10 +613,10 @@ interconversion "lossen-rearrangement" {
 disconnection "arndt-eistert" {
     about = "Arndt-Eistert reaction; one carbon more; migrating group keeps its configuration",
     rxno = "RXNO:0000063",
-    target = "[#6:1][C;X4;H2:2][C;X3:3](=[O;X1:4])[O;X2;H1]",
+    target = "[#6;!$([CX4]-[CX3]=[CX3]);!$([CX4]-[OX2H1]);!$([CX4]-[NX3;H1,H2]):1][C;X4;H2:2][C;X3:3](=[O;X1:4])[O;X2;H1]",
     from = "[#6:1][C;X3:3](=[O;X1:4])[Cl;X1].[C;H2:2]=[N+]=[N-]",
     conditions = "photo",
-    also_attacks = { "free acid", "phenol", "aldehyde", "thiol" },
+    also_attacks = { "pyridine", "tertiary amine", "free acid", "phenol", "aldehyde", "thiol" },
     recipe = "CH2N2 (2-3 equiv), Et2O, 0 °C, then Ag2O or PhCO2Ag, H2O or light",
     yield = { 50, 80 },
     cautions = { "diazomethane" },

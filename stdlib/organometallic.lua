@@ -272,11 +272,12 @@ disconnection "dmf-formylation" {
 
 disconnection "cuprate-acid-chloride" {
     about = "Ketone from acid chloride and cuprate; stops at the ketone; ester, nitrile and amide stand",
-    target = CARBANION_STRICT .. ":1]-!@[CX3;!R:2](=[OX1:3])-[#6;!$([#6]=[O,N,S]);!$([#6]#[N,C]):4]",
+    target = CARBANION_STRICT .. ":1]-!@[CX3;!R:2](=[OX1:3])-[#6;!$([#6]=[O,N,S]);!$([#6]#[N,C]);!$([CX3]=[CX3]):4]",
     cut = { 2, 1 },
     acceptor = { 2, "acyl" },
     donor = { 1, "organolithium" },
     conditions = "cuprate",
+    also_attacks = { "urea", "secondary amide", "primary amide", "free alcohol", "phenol", "free acid", "enone" },
     recipe = "R2CuLi (from RLi and CuI), THF or Et2O, -78 °C",
     yield = { 65, 90 },
     cautions = { "butyllithium", "copper(I) iodide" },

@@ -309,7 +309,7 @@ interconversion "tert-butyl-ester-removal" {
 interconversion "aryl-methyl-ether-cleavage" {
     about = "Cleavage of an aryl methyl ether (hydroxy group deprotection); ketone, ester (cold), nitro, halide survive; ortho-carbonyl methyl ether first with BCl3",
     rxno = "RXNO:0000430",
-    target = "[c:1][O;X2;H1:2]",
+    target = "[c;r5,r6;!$(c1ccc1):1][O;X2;H1:2]",
     from = "[c:1][O;X2;H0:2][C;H3]",
     conditions = "bbr3",
     also_attacks = { "tert-butyl ester", "Boc amine", "trityl ether", "acetal", "silyl ether", "THP ether",
@@ -445,7 +445,7 @@ interconversion "pmb-ether-removal" {
     from = "[C;X4:1][O;X2;H0:2][C;X4;H2]c1ccc(O[C;H3])cc1",
     when = guards_something,
     conditions = "ddq",
-    also_attacks = { "aniline", "phenol", "enol ether", "electron-rich arene" },
+    also_attacks = { "primary amine", "secondary amine", "aniline", "phenol", "enol ether", "electron-rich arene" },
     recipe = "DDQ, CH2Cl2-H2O (18:1), 0 °C; also: CAN, MeCN-H2O; CF3CO2H",
     yield = { 80, 96 },
     cautions = { "DDQ" },
