@@ -116,10 +116,10 @@ static bs_status try_detail(trial *t, const bs_example_detail *detail)
 static bs_status try_all(trial *t, int radius)
 {
     const bs_example_detail details[] = {
-        {radius, false, false},   {radius, false, true},     {radius, true, false},
-        {radius, true, true},     {radius + 1, false, true}, {radius + 1, true, true},
+        {radius, false, true},    {radius, false, false},    {radius, true, true},
+        {radius, true, false},    {radius + 1, false, true}, {radius + 1, true, true},
         {radius + 3, true, true}, {0, false, true},          {BS_EXAMPLE_ATOMS, true, true},
-        {radius, false, false},
+        {radius, false, true},
     };
     bs_status st = BS_OK;
 

@@ -51,7 +51,7 @@ static inline int bs_example__bond(const bs_example_side *side, int a, int b)
 typedef struct bs_example_detail {
     int radius;
     bool exact;  /* hydrogens and connections of every atom */
-    bool stereo; /* hands of the centres that are stated on both sides */
+    bool stereo; /* hands of centres and geometry of double bonds that the reaction touches */
 } bs_example_detail;
 
 /* Reads the reaction; everything lies in ex->work. Errors as bs_example_draft(). */
@@ -84,10 +84,18 @@ typedef struct bs_sketch_bond {
     const char *text;
 } bs_sketch_bond;
 
+/* A double bond: bonds `x` and `y`, one at each end, lie on one side of it or on opposite ones. */
+typedef struct bs_sketch_slope {
+    int x, y;
+    int a, b; /* the ends of the double bond; x is at a, y at b */
+    bool trans;
+} bs_sketch_slope;
+
 typedef struct bs_sketch {
     bs_sketch_atom *atoms;
     bs_sketch_bond *bonds;
-    int atom_count, bond_count;
+    bs_sketch_slope *slopes;
+    int atom_count, bond_count, slope_count;
 } bs_sketch;
 
 /* Writes a sketch as SMARTS, part after part. */

@@ -114,26 +114,23 @@ static int added_price(const seeker *s, int p, int r)
 }
 
 /*
- * An alkyl carbon rarely leaves the oxygen of an ester: the bond to the acyl group breaks. Small,
- * to decide between equals.
+ * Which bond of carbon to a heteroatom breaks more readily, to decide between equals: that of an
+ * acyl group, then that of an alkyl group, then that of an arene or alkene.
  */
-static int acyl_price(const bs_example_side *r, int alkyl, int hetero)
+static int break_price(const bs_example_side *r, int carbon, int hetero)
 {
-    if (r->atoms[alkyl].element != 6 || r->atoms[hetero].element == 6)
-        return 0;
-    for (int k = r->start[alkyl]; k < r->start[alkyl + 1]; k++) {
-        if (bs_example__bond(r, alkyl, r->near[k]) != 1)
-            return 0;
-    }
-    for (int k = r->start[hetero]; k < r->start[hetero + 1]; k++) {
-        int c = r->near[k];
+    bool flat = false;
 
-        for (int n = r->start[c]; n < r->start[c + 1] && c != alkyl; n++) {
-            if (bs_example__bond(r, c, r->near[n]) == 2 && r->atoms[r->near[n]].element != 6)
-                return 1;
-        }
+    if (r->atoms[carbon].element != 6 || r->atoms[hetero].element == 6)
+        return 0;
+    for (int k = r->start[carbon]; k < r->start[carbon + 1]; k++) {
+        int order = bs_example__bond(r, carbon, r->near[k]);
+
+        if (order == 2 && r->atoms[r->near[k]].element != 6)
+            return 0;
+        flat = flat || order != 1;
     }
-    return 0;
+    return flat ? 2 : 1;
 }
 
 /* An atom that moves a hydrogen while its bonds stay, as an azole does; to decide between equals.
@@ -165,7 +162,7 @@ static int leaving_price(const seeker *s)
             if (s->became[other] < 0)
                 price += bond_price(&s->r->atoms[i], &s->r->atoms[other],
                                     bs_example__bond(s->r, i, other), 0) +
-                         acyl_price(s->r, i, other) + acyl_price(s->r, other, i);
+                         break_price(s->r, i, other) + break_price(s->r, other, i);
         }
     }
     return price;
@@ -496,6 +493,30 @@ static bs_status make_room(bs_example *ex, seeker *s)
     return BS_OK;
 }
 
+/* Whether a centre with the same neighbours on both sides gets the other hand. */
+static bool is_turned(const bs_example *ex, int p)
+{
+    const bs_example_side *left = &ex->reactants, *right = &ex->product;
+    int r = ex->image[p], degree = right->start[p + 1] - right->start[p], odd = 0, at[4];
+    bs_hand before = bs_mol_atom_hand(left->pieces[left->atoms[r].piece], left->atoms[r].atom);
+    bs_hand after = bs_mol_atom_hand(right->pieces[0], p);
+
+    if (before == BS_HAND_NONE || after == BS_HAND_NONE || degree > 4)
+        return false;
+    for (int k = 0; k < degree; k++) {
+        int from = ex->image[right->near[right->start[p] + k]];
+
+        at[k] = 0;
+        while (at[k] < degree && left->near[left->start[r] + at[k]] != from)
+            at[k]++;
+    }
+    for (int i = 0; i < degree; i++) {
+        for (int k = i + 1; k < degree; k++)
+            odd += at[i] > at[k];
+    }
+    return (odd % 2 != 0) != (before != after);
+}
+
 /* Whether the reaction changes an atom of the product: its bonds, its charge or its hydrogens. */
 static bool is_changed(const bs_example *ex, int p)
 {
@@ -518,7 +539,7 @@ static bool is_changed(const bs_example *ex, int p)
         if (q < 0 || !bs_example__bond(right, p, q))
             return true;
     }
-    return false;
+    return is_turned(ex, p);
 }
 
 static bs_status settle(bs_example *ex, const int *image)

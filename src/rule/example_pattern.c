@@ -276,6 +276,68 @@ static void put_hand(const bs_example_side *side, int i, const int *place, bs_sk
         out->around[count++] = place[side->near[k]] >= 0 ? place[side->near[k]] : BS_SKETCH_OUTSIDE;
 }
 
+/* The bond of a sketch between two of its atoms, or -1. */
+static int find_bond(const bs_sketch *sketch, int a, int b)
+{
+    for (int i = 0; i < sketch->bond_count; i++) {
+        const bs_sketch_bond *bond = &sketch->bonds[i];
+
+        if ((bond->a == a && bond->b == b) || (bond->a == b && bond->b == a))
+            return i;
+    }
+    return -1;
+}
+
+/*
+ * A single bond of the sketch at one end of a double bond. `*turned` tells that it is not the one
+ * to the first neighbour, by which the molecule states its geometry.
+ */
+static int find_slope_bond(const bs_example_side *side, int end, int other, const int *place,
+                           const bs_sketch *sketch, bool *turned)
+{
+    bool first = true;
+
+    for (int k = side->start[end]; k < side->start[end + 1]; k++) {
+        int next = side->near[k];
+
+        if (next == other)
+            continue;
+        if (place[next] >= 0 && bs_example__bond(side, end, next) == 1) {
+            *turned = !first;
+            return find_bond(sketch, place[end], place[next]);
+        }
+        first = false;
+    }
+    return -1;
+}
+
+/* Adds the geometry of the double bond between atoms a and b, if the reaction touches one of them.
+ */
+static void put_slope(const bs_example *ex, bool left, int a, int b, const int *place,
+                      bs_sketch *out)
+{
+    const bs_example_side *side = left ? &ex->reactants : &ex->product;
+    int base = side->first[side->atoms[a].piece];
+    const bs_mol *mol = side->pieces[side->atoms[a].piece];
+    bs_geometry geometry = bs_mol_bond_geometry(mol, bs_mol_bond_between(mol, a - base, b - base));
+    int p = left ? ex->became[a] : a, q = left ? ex->became[b] : b, x, y;
+    bool turned_a = false, turned_b = false;
+
+    if (geometry == BS_GEOMETRY_NONE || bs_example__bond(side, a, b) != 2 ||
+        (p >= 0 && q >= 0 && !ex->changes[p] && !ex->changes[q]))
+        return;
+    x = find_slope_bond(side, a, b, place, out, &turned_a);
+    y = find_slope_bond(side, b, a, place, out, &turned_b);
+    if (x >= 0 && y >= 0)
+        out->slopes[out->slope_count++] = (bs_sketch_slope){
+            .x = x,
+            .y = y,
+            .a = place[a],
+            .b = place[b],
+            .trans = (geometry == BS_GEOMETRY_TRANS) != (turned_a != turned_b),
+        };
+}
+
 /* Puts the atoms with `place` >= 0 and the bonds between them into a sketch. */
 static bs_status make_sketch(const pencil *pen, bool left, const int *place, bs_sketch *out)
 {
@@ -284,6 +346,7 @@ static bs_status make_sketch(const pencil *pen, bool left, const int *place, bs_
     bs_status st;
 
     if ((st = bs_new(ex->cx, ex->work, side->count + 1, &out->atoms)) != BS_OK ||
+        (st = bs_new(ex->cx, ex->work, side->start[side->count] + 1, &out->slopes)) != BS_OK ||
         (st = bs_new(ex->cx, ex->work, side->start[side->count] + 1, &out->bonds)) != BS_OK)
         return st;
     for (int i = 0; i < side->count; i++) {
@@ -311,6 +374,12 @@ static bs_status make_sketch(const pencil *pen, bool left, const int *place, bs_
                 (bs_sketch_bond){place[i], place[other],
                                  bond_text(&out->atoms[place[i]], &out->atoms[place[other]],
                                            bs_example__bond(side, i, other))};
+        }
+    }
+    for (int i = 0; i < side->count && pen->detail->stereo; i++) {
+        for (int k = side->start[i]; k < side->start[i + 1]; k++) {
+            if (side->near[k] > i && place[i] >= 0 && place[side->near[k]] >= 0)
+                put_slope(ex, left, i, side->near[k], place, out);
         }
     }
     return BS_OK;

@@ -10,6 +10,7 @@ typedef struct writer {
     int *parent;   /* bond to the atom before; -1 for a first atom, -2 not yet met */
     int *place;    /* of each atom: when it was met */
     int *digit;    /* of each bond: the ring closure, 0 for none */
+    int *slant;    /* of each bond, from a to b: 1 up, -1 down, 0 not said */
     bool *in_tree; /* of each bond */
     int *stack;
     int closures;
@@ -116,6 +117,40 @@ static const char *mark_of(const writer *w, int atom)
     return clockwise ? "@@" : "@";
 }
 
+/* ---- Double bonds ------------------------------------------------------------------------------
+ */
+
+/* Slants of single bonds, so that each double bond has its geometry; one that cannot be is left
+ * out. */
+static void find_slants(writer *w)
+{
+    const bs_sketch *s = w->sketch;
+
+    for (int i = 0; i < s->slope_count; i++) {
+        const bs_sketch_slope *slope = &s->slopes[i];
+        int x = s->bonds[slope->x].a == slope->a ? 1 : -1;
+        int y = s->bonds[slope->y].a == slope->b ? 1 : -1;
+        int turn = x * y * (slope->trans ? -1 : 1);
+
+        if (w->slant[slope->x] == 0 && w->slant[slope->y] == 0)
+            w->slant[slope->x] = x;
+        if (w->slant[slope->y] == 0)
+            w->slant[slope->y] = w->slant[slope->x] * turn;
+        else if (w->slant[slope->x] == 0)
+            w->slant[slope->x] = w->slant[slope->y] * turn;
+    }
+}
+
+/* The text of a bond as it is written from `atom` on. */
+static const char *text_of(const writer *w, int bond, int atom)
+{
+    int slant = w->sketch->bonds[bond].a == atom ? w->slant[bond] : -w->slant[bond];
+
+    if (slant == 0)
+        return w->sketch->bonds[bond].text;
+    return slant > 0 ? "/" : "\\";
+}
+
 /* ---- Text --------------------------------------------------------------------------------------
  */
 
@@ -131,7 +166,7 @@ static bs_status write_atom(writer *w, int atom)
         if ((s->bonds[i].a != atom && s->bonds[i].b != atom) || !w->digit[i])
             continue;
         /* The order stands at the end that is written first. */
-        st = bs_text_puts(w->text, w->place[atom] < w->place[next] ? s->bonds[i].text : "");
+        st = bs_text_puts(w->text, w->place[atom] < w->place[next] ? text_of(w, i, atom) : "");
         if (st == BS_OK && w->digit[i] > 9)
             st = bs_text_putc(w->text, '%');
         if (st == BS_OK)
@@ -177,7 +212,7 @@ static bs_status write_tree(writer *w, int root, int *child, bool *open)
         if (open[depth])
             st = bs_text_putc(w->text, '(');
         if (st == BS_OK)
-            st = bs_text_puts(w->text, s->bonds[bond].text);
+            st = bs_text_puts(w->text, text_of(w, bond, atom));
         if (st == BS_OK)
             st = write_atom(w, next);
         w->stack[depth] = next;
@@ -227,6 +262,7 @@ static bs_status write_all(bs_ctx *cx, writer *w)
         if (w->sketch->atoms[i].part >= parts)
             parts = w->sketch->atoms[i].part + 1;
     }
+    find_slants(w);
     for (int i = 0; i < parts && st == BS_OK; i++)
         st = write_part(w, i, child, open);
     return st;
@@ -244,6 +280,7 @@ bs_status bs_sketch__write(bs_ctx *cx, bs_arena *home, const bs_sketch *sketch, 
     if ((st = bs_new(cx, &cx->scratch, atoms, &w.parent)) == BS_OK &&
         (st = bs_new(cx, &cx->scratch, atoms, &w.place)) == BS_OK &&
         (st = bs_new(cx, &cx->scratch, bonds, &w.digit)) == BS_OK &&
+        (st = bs_new(cx, &cx->scratch, bonds, &w.slant)) == BS_OK &&
         (st = bs_new(cx, &cx->scratch, bonds, &w.in_tree)) == BS_OK &&
         (st = bs_new(cx, &cx->scratch, atoms, &w.stack)) == BS_OK &&
         (st = write_all(cx, &w)) == BS_OK)

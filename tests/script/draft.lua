@@ -43,6 +43,19 @@ print((inverted:check()), #inverted:back(mol "CC[C@@H](Br)C")) --> true	1
 local hand = inverted:back(mol "CC[C@@H](Br)C")[1].precursors[1]
 print(hand == mol "CC[C@H](O)C" or hand == mol "CC[C@@H](O)C") --> true
 
+-- Which carbon-oxygen bond of two breaks: the acyl one (Fischer), not the alkyl one; the alkyl one (Mitsunobu), not
+-- the aryl one. Textbook mechanisms, from memory.
+local fischer = loaded "CC(=O)O.OCC>[H+]>CC(=O)OCC"
+print(makes(fischer, "CC(=O)OC(C)(C)C") ~= "nothing", fischer.target:find("=[O", 1, true) ~= nil) --> true	true
+local ether = loaded "Oc1ccccc1.OCC>>CCOc1ccccc1"
+print(makes(ether, "CCCOc1ccncc1") ~= "nothing", makes(ether, "c1ccccc1Oc1ccccc1")) --> true	nothing
+
+-- A centre that only turns (Mitsunobu), and a cis reduction of an alkyne: the rule makes no trans alkene.
+local turned = loaded "C[C@H](O)CCc1ccccc1>>C[C@@H](O)CCc1ccccc1"
+print(turned:back(mol "CC[C@@H](O)C")[1].precursors[1] == mol "CC[C@H](O)C") --> true
+local cis = loaded "CCC#CC>>CC/C=C\\C"
+print(makes(cis, "CCC/C=C\\CC") == mol("CCCC#CCC"):smiles(), makes(cis, "CCC/C=C/CC")) --> true	nothing
+
 -- A salt as reactant, the by-products and what comes from nowhere.
 local _, salt = loaded "COc1ccc(CCl)cc1.[Na+].[C-]#N>>COc1ccc(CC#N)cc1.[Na+].[Cl-]"
 local _, acid = loaded "CCO>>CC(=O)O"
