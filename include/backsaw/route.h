@@ -187,6 +187,7 @@ typedef struct bs_transform_count {
     long found;   /* of those, steps that gave the product when they were run forwards */
     long refused; /* of those, steps that constraints or `allow` refused */
     long used;    /* steps of the routes listed */
+    const char *fault; /* what its function failed with, which took it out of the search; or NULL */
 } bs_transform_count;
 
 /* What a search saw. Lists of routes share it; the last one to drop it frees it. */
@@ -222,6 +223,8 @@ typedef struct bs_routes {
     bool complete;      /* nothing was cut short: these are the best of all routes */
     const char *reason; /* why not, in words, such as "the limit of 20000 molecules was reached";
                            NULL if complete */
+    const char **warnings; /* a line for each rule that fell out of the search */
+    int warning_count;
     const char *target; /* canonical SMILES */
     long molecules;     /* explored: molecules, those expanded, steps */
     long expanded;

@@ -241,6 +241,25 @@ typedef struct bs_site {
     const int *role_maps;
 } bs_site;
 
+/* A rule whose function failed, and with what. */
+typedef struct bs_rule_fault {
+    int transform;
+    const char *message;
+} bs_rule_fault;
+
+/* Adding to the list leaves the array as it was, so that a copy of the list stays what it is. */
+typedef struct bs_rule_faults {
+    const bs_rule_fault *items;
+    int count;
+} bs_rule_faults;
+
+/* The fault of a transform, or NULL. */
+const bs_rule_fault *bs_rule_faults_find(const bs_rule_faults *faults, int transform);
+
+/* Adds a fault of a transform that has none yet; its message is copied. */
+bs_status bs_rule_faults_add(bs_ctx *cx, bs_arena *home, bs_rule_faults *faults, int transform,
+                             const char *message);
+
 /* Functions of a rule that live elsewhere (in Lua). Both may be NULL if no rule has a hook. */
 typedef struct bs_rule_hooks {
     void *payload;
@@ -252,6 +271,12 @@ typedef struct bs_rule_hooks {
                         const bs_site *site, double *score);
     /* If not NULL, sets of precursors that bs_rules_back() tried are counted here, by transform. */
     long *tried;
+    /*
+     * If not NULL, bs_rules_back() gives no steps of the transforms in this list, and a function
+     * that fails with BS_ESCRIPT puts its transform on it (in the arena of the steps), which is no
+     * failure of the call.
+     */
+    bs_rule_faults *faults;
 } bs_rule_hooks;
 
 /* ---- Steps ----------------------------------------------------------------------------- */

@@ -13,6 +13,8 @@
  *
  * Callbacks get the payload of the options and may fail: their status ends the plan and is passed
  * on, but for BS_ESTOPPED, which ends the search only. All but hooks run on the calling thread.
+ * A hook that fails with BS_ESCRIPT takes its rule out of the rest of the search, with a warning in
+ * the list of routes; the same search gives the same warnings.
  */
 #ifndef BACKSAW_SEARCH_H
 #define BACKSAW_SEARCH_H

@@ -103,5 +103,5 @@ function core.routes_methods.unsolved(list)
     return answers
 end
 
--- list = rs:transforms(): of those that did anything, each with transform fired found refused used
+-- list = rs:transforms(): of those that did anything, each with transform tried found refused used fault
 core.routes_methods.transforms = core.route_transforms

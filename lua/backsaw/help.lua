@@ -88,9 +88,9 @@ protections     steps that put a protecting group on   unprotect = true: they co
 longest         steps in line                          convergent = true: two branches meet]],
 routes = [[
 print(routes)                        a table, one line a route
-#routes  routes[1]  routes:where(f)  routes:sort(f)  routes:gaps()  routes.complete  routes.reason
+#routes  routes[1]  routes:where(f)  routes:sort(f)  routes:gaps()  routes.complete  routes.reason  routes.warnings
 routes:why(m)  routes:unsolved()     what became of a molecule; what stayed open
-routes:transforms()                  how the transforms did: tried, found, refused, used
+routes:transforms()                  how the transforms did: tried, found, refused, used, fault
 routes:merge(others)                 both lists in one, each route once
 routes:save "r.json"                 and routes.load "r.json"
 print(routes[1])                     the route as an indented tree

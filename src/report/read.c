@@ -424,6 +424,24 @@ static bs_status read_lists(bs_reader *r, const json_t *top, bs_routes *list)
     return st;
 }
 
+static bs_status read_warnings(bs_reader *r, const json_t *top, bs_routes *list)
+{
+    const char **words = NULL;
+    int count = 0;
+    bs_status st = bs_field__words(r, top, "warnings", &words, &count);
+
+    if (st == BS_OK)
+        st = bs_new(r->cx, r->home, count, &list->warnings);
+    for (int i = 0; st == BS_OK && i < count; i++) {
+        char *copy = NULL;
+
+        st = bs_copy_text(r->cx, r->home, words[i], strlen(words[i]), &copy);
+        list->warnings[i] = copy;
+    }
+    list->warning_count = st == BS_OK ? count : 0;
+    return st;
+}
+
 static bs_status read_top(bs_reader *r, const json_t *top, bs_routes *list)
 {
     const char *format;
@@ -445,7 +463,7 @@ static bs_status read_top(bs_reader *r, const json_t *top, bs_routes *list)
         (st = bs_field__flag(r, top, "complete", BS_FIELD_OPTIONAL, &list->complete)) != BS_OK ||
         (st = bs_field__text(r, r->home, top, "reason", BS_FIELD_OPTIONAL, &list->reason)) !=
             BS_OK ||
-        (st = read_explored(r, top, list)) != BS_OK)
+        (st = read_warnings(r, top, list)) != BS_OK || (st = read_explored(r, top, list)) != BS_OK)
         return st;
     return read_lists(r, top, list);
 }

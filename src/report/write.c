@@ -190,6 +190,7 @@ bs_status bs_routes_json(const bs_routes *routes, bs_text *text)
     bs_json__string_field(&json, "target", routes->target);
     bs_json__flag_field(&json, "complete", routes->complete);
     bs_json__string_field(&json, "reason", routes->reason);
+    bs_json__strings_field(&json, "warnings", routes->warnings, routes->warning_count);
     bs_json__key(&json, "explored");
     bs_json__open_line(&json, '{');
     bs_json__number_field(&json, "molecules", (double)routes->molecules);

@@ -27,6 +27,16 @@ static bs_status copy_packs(bs_ctx *cx, const bs_pack_name *packs, int count, bs
     return st;
 }
 
+static bs_status copy_warnings(bs_ctx *cx, const bs_routes *like, bs_routes *list)
+{
+    bs_status st = bs_new(cx, &list->arena, like->warning_count, &list->warnings);
+
+    for (int i = 0; st == BS_OK && i < like->warning_count; i++)
+        st = bs_route__copy_string(cx, &list->arena, like->warnings[i], &list->warnings[i]);
+    list->warning_count = like->warning_count;
+    return st;
+}
+
 static bs_status copy_statements(bs_ctx *cx, const bs_routes *like, bs_routes *list)
 {
     bs_arena *home = &list->arena;
@@ -39,6 +49,7 @@ static bs_status copy_statements(bs_ctx *cx, const bs_routes *like, bs_routes *l
     list->steps = like->steps;
     if ((st = bs_route__copy_string(cx, home, like->reason, &list->reason)) != BS_OK ||
         (st = bs_route__copy_string(cx, home, like->target, &list->target)) != BS_OK ||
+        (st = copy_warnings(cx, like, list)) != BS_OK ||
         (st = bs_new(cx, home, like->gap_count, &list->gaps)) != BS_OK)
         return st;
     for (int i = 0; st == BS_OK && i < like->gap_count; i++) {
@@ -156,6 +167,23 @@ static bool has_pack(const bs_pack_name *packs, int count, const bs_pack_name *p
     return false;
 }
 
+static bs_status join_warnings(bs_ctx *cx, const bs_routes *a, const bs_routes *b, bs_routes *both)
+{
+    bs_status st = bs_new(cx, &cx->scratch, a->warning_count + b->warning_count, &both->warnings);
+
+    for (int i = 0; st == BS_OK && i < a->warning_count; i++)
+        both->warnings[i] = a->warnings[i];
+    for (int i = 0; st == BS_OK && i < b->warning_count; i++) {
+        bool there = false;
+
+        for (int k = 0; k < a->warning_count; k++)
+            there = there || strcmp(a->warnings[k], b->warnings[i]) == 0;
+        if (!there)
+            both->warnings[both->warning_count++] = b->warnings[i];
+    }
+    return st;
+}
+
 /* What both say of their searches; the parts lie in scratch, to be copied. */
 static bs_status join_statements(bs_ctx *cx, const bs_routes *a, const bs_routes *b,
                                  bs_routes *both)
@@ -172,7 +200,8 @@ static bs_status join_statements(bs_ctx *cx, const bs_routes *a, const bs_routes
     both->expanded += b->expanded;
     both->steps += b->steps;
     if ((st = bs_new(cx, scratch, a->gap_count + b->gap_count, &both->gaps)) != BS_OK ||
-        (st = bs_new(cx, scratch, a->pack_count + b->pack_count, &both->packs)) != BS_OK)
+        (st = bs_new(cx, scratch, a->pack_count + b->pack_count, &both->packs)) != BS_OK ||
+        (st = join_warnings(cx, a, b, both)) != BS_OK)
         return st;
     for (int i = 0; i < a->gap_count; i++)
         both->gaps[i] = a->gaps[i];

@@ -286,5 +286,10 @@ bs_status bs_routes_table(const bs_routes *routes, bs_text *text)
         st = add_rows(routes, text);
     if (st == BS_OK && !routes->complete && routes->reason)
         st = bs_text_printf(text, "incomplete: %s\n", routes->reason);
+    for (int i = 0; st == BS_OK && i < routes->warning_count; i++) {
+        if ((st = bs_text_puts(text, "warning: ")) == BS_OK &&
+            (st = add_clean(text, routes->warnings[i])) == BS_OK)
+            st = bs_text_putc(text, '\n');
+    }
     return st;
 }

@@ -455,14 +455,30 @@ static bs_status take_result(void *payload, bs_ctx *cx, const uint32_t *where,
 
 /* ---- All ---------------------------------------------------------------------------------- */
 
+/* Takes a transform whose function failed out of the run, with the steps that it gave. */
+static bs_status leave_out(bs_ctx *cx, back *b, int index)
+{
+    int kept = 0;
+
+    for (int i = 0; i < b->steps->count; i++) {
+        if (b->steps->items[i].transform != index)
+            b->steps->items[kept++] = b->steps->items[i];
+    }
+    b->steps->count = kept;
+    return bs_rule_faults_add(cx, b->home, b->hooks->faults, index, cx->error.message);
+}
+
 static bs_status run_transform(bs_ctx *cx, back *b, int index)
 {
+    bs_rule_faults *faults = b->hooks ? b->hooks->faults : NULL;
     const bs_transform *tr = b->rules->transforms[index];
     bs_run_opts opts = {.limit = MAX_PLACES,
                         .steps = MAX_STEPS,
                         .every_place = tr->def.hook_when >= 0 && b->hooks && b->hooks->when};
     bs_status st = BS_OK;
 
+    if (faults && bs_rule_faults_find(faults, index))
+        return BS_OK;
     b->transform = index;
     b->tr = tr;
     bs_seen__init(&b->seen, cx);
@@ -477,7 +493,7 @@ static bs_status run_transform(bs_ctx *cx, back *b, int index)
             st = BS_OK;
     }
     bs_seen__free(&b->seen);
-    return st;
+    return st == BS_ESCRIPT && faults ? leave_out(cx, b, index) : st;
 }
 
 static bs_status run_pieces(bs_ctx *cx, back *b, int first, int last)
@@ -521,6 +537,7 @@ bs_status bs_back__watched(bs_ctx *cx, bs_arena *home, const bs_rules *rules, in
               .watch = watch,
               .whole = product,
               .steps = out};
+    bs_rule_faults faults = hooks && hooks->faults ? *hooks->faults : (bs_rule_faults){0};
     bs_status st;
 
     *out = (bs_steps){0};
@@ -532,6 +549,8 @@ bs_status bs_back__watched(bs_ctx *cx, bs_arena *home, const bs_rules *rules, in
     if (st != BS_OK) {
         bs_arena_rewind(home, kept);
         *out = (bs_steps){0};
+        if (hooks && hooks->faults)
+            *hooks->faults = faults;
         return st;
     }
     order_steps(out);

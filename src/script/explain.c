@@ -72,7 +72,8 @@ static int core_unsolved_notes(lua_State *L)
     return 1;
 }
 
-/* list = rs:transforms(): those of which steps were tried; transform tried found refused used */
+/* list = rs:transforms(): those of which steps were tried; transform tried found refused used fault
+ */
 static int core_route_transforms(lua_State *L)
 {
     const bs_explored *saw = bsl_checkroutes(L, 1)->saw;
@@ -82,15 +83,17 @@ static int core_route_transforms(lua_State *L)
     for (int i = 0; saw && i < saw->transform_count; i++) {
         const bs_transform_count *count = &saw->transforms[i];
 
-        if (count->tried == 0 && count->found == 0)
+        if (count->tried == 0 && count->found == 0 && !count->fault)
             continue;
-        lua_createtable(L, 0, 5);
+        lua_createtable(L, 0, 6);
         lua_pushstring(L, count->name);
         lua_setfield(L, -2, "transform");
         set_number(L, "tried", (double)count->tried);
         set_number(L, "found", (double)count->found);
         set_number(L, "refused", (double)count->refused);
         set_number(L, "used", (double)count->used);
+        lua_pushstring(L, count->fault);
+        lua_setfield(L, -2, "fault");
         lua_rawseti(L, -2, ++n);
     }
     return 1;

@@ -7,6 +7,7 @@
 #include "script/host.h"
 
 #include <math.h>
+#include <stdio.h>
 
 #define HOOK_BUDGET 2000000
 #define HOOK_DEPTH 8
@@ -83,6 +84,7 @@ static bs_status call_hook(bsl_host *host, bs_ctx *cx, hook_call *call)
     if (host->depth >= HOOK_DEPTH)
         return bs_fail(cx, BS_ELIMIT, "functions of rules call each other too deeply");
     host->depth++;
+    host->breach = NULL;
     host->cx = cx;
     lua_checkstack(host->calls, 4);
     lua_pushcfunction(host->calls, run_hook);
@@ -93,6 +95,10 @@ static bs_status call_hook(bsl_host *host, bs_ctx *cx, hook_call *call)
     if (status == LUA_OK)
         return BS_OK;
     bsl_take_fault(host->calls, &fault);
+    if (status == LUA_ERRMEM && !host->breach)
+        return bs_fail_memory(cx);
+    if (status == LUA_ERRMEM)
+        snprintf(fault.message, sizeof fault.message, "%s", host->breach);
     /* To the library, a budget that ran out inside a rule is a failure, not a limit of its own. */
     if (fault.code != BS_ESTOPPED && fault.code != BS_ENOMEM)
         fault.code = BS_ESCRIPT;
@@ -126,10 +132,21 @@ static bs_status session_prefer(void *payload, bs_ctx *cx, int hook, const bs_mo
 
 bs_rule_hooks bsl_session_hooks(bs_session *session)
 {
-    return (bs_rule_hooks){ session, session_when, session_prefer, NULL };
+    return (bs_rule_hooks){.payload = session, .when = session_when, .prefer = session_prefer};
 }
 
 /* ---- Lanes ----------------------------------------------------------------------------- */
+
+static void drop_state(bsl_lane *lane, bs_ctx *cx)
+{
+    bs_session *session = lane->session;
+
+    if (lane->host)
+        lane->host->cx = cx;
+    bsl_host_free(lane->host);
+    bs_gate_free(session->cx.gate, lane->replayed, (size_t)session->pack_count);
+    *lane = (bsl_lane){.session = session};
+}
 
 /* Makes the state of a lane and reads the pack of a hook in it, when either is first needed. */
 static bs_status ready_lane(bsl_lane *lane, bs_ctx *cx, int hook)
@@ -143,25 +160,37 @@ static bs_status ready_lane(bsl_lane *lane, bs_ctx *cx, int hook)
         if (!lane->replayed)
             return bs_fail_memory(cx);
         if (bsl_host_new(session, cx, BSL_LANE, &lane->host) != BS_OK)
-            return cx->error.code;
+            return bs_fail_memory(cx); /* there are such states, so nothing else can be wrong */
     }
     if (lane->replayed[hook >> 16])
         return BS_OK;
     lane->replayed[hook >> 16] = true;
-    if (bsl_replay(lane->host, cx, hook >> 16, &fault) != BS_OK)
-        return bsl_fail_fault(cx, &fault);
-    return BS_OK;
+    if (bsl_replay(lane->host, cx, hook >> 16, &fault) == BS_OK)
+        return BS_OK;
+    if (fault.code != BS_ESTOPPED && fault.code != BS_ENOMEM)
+        fault.code = BS_ESCRIPT;
+    return bsl_fail_fault(cx, &fault);
+}
+
+/* Calls a function in a lane. A state in which one failed is dropped; the next call makes another,
+   so that nothing of the failure is left. */
+static bs_status call_lane(bsl_lane *lane, bs_ctx *cx, hook_call *call)
+{
+    bs_status st = ready_lane(lane, cx, call->hook);
+
+    if (st == BS_OK)
+        st = call_hook(lane->host, cx, call);
+    if (st != BS_OK)
+        drop_state(lane, cx);
+    return st;
 }
 
 static bs_status lane_when(void *payload, bs_ctx *cx, int hook, const bs_mol *product,
                            const bs_site *site, bool *allowed)
 {
     hook_call call = {.hook = hook, .is_when = true, .product = product, .site = site};
-    bsl_lane *lane = payload;
-    bs_status st = ready_lane(lane, cx, hook);
+    bs_status st = call_lane(payload, cx, &call);
 
-    if (st == BS_OK)
-        st = call_hook(lane->host, cx, &call);
     *allowed = call.allowed;
     return st;
 }
@@ -170,27 +199,18 @@ static bs_status lane_prefer(void *payload, bs_ctx *cx, int hook, const bs_mol *
                              const bs_site *site, double *score)
 {
     hook_call call = {.hook = hook, .product = product, .site = site};
-    bsl_lane *lane = payload;
-    bs_status st = ready_lane(lane, cx, hook);
+    bs_status st = call_lane(payload, cx, &call);
 
-    if (st == BS_OK)
-        st = call_hook(lane->host, cx, &call);
     *score = call.score;
     return st;
 }
 
 bs_rule_hooks bsl_lane_hooks(bsl_lane *lane)
 {
-    return (bs_rule_hooks){ lane, lane_when, lane_prefer, NULL };
+    return (bs_rule_hooks){.payload = lane, .when = lane_when, .prefer = lane_prefer};
 }
 
 void bsl_lane_free(bsl_lane *lane)
 {
-    bs_session *session = lane->session;
-
-    if (lane->host)
-        lane->host->cx = &session->cx;
-    bsl_host_free(lane->host);
-    bs_gate_free(session->cx.gate, lane->replayed, (size_t)session->pack_count);
-    *lane = (bsl_lane){.session = session};
+    drop_state(lane, &lane->session->cx);
 }

@@ -140,7 +140,8 @@ static bs_status run_pack(bsl_host *host, const char *shown, const char *text, s
         return BS_OK;
     bsl_take_fault(L, fault);
     if (status == LUA_ERRMEM)
-        fail(fault, BS_ELIMIT, "%s", host->breach ? host->breach : "out of memory");
+        fail(fault, host->breach ? BS_ELIMIT : BS_ENOMEM, "%s",
+             host->breach ? host->breach : "out of memory");
     if (!fault->where[0] && !strstr(fault->message, ".lua:"))
         snprintf(fault->where, sizeof fault->where, "%s", shown);
     return fault->code == BS_OK ? BS_ESCRIPT : fault->code;

@@ -440,6 +440,18 @@ static void say_stopped(const bs_session *session, const bs_routes *routes)
         session->opts.say(session->opts.payload, line);
 }
 
+/* Says the warnings that were not there yet. */
+static void say_warnings(const bs_session *session, const bs_routes *routes, int *said)
+{
+    for (; *said < routes->warning_count; ++*said) {
+        char line[BS_MESSAGE_MAX + 200];
+
+        snprintf(line, sizeof line, "warning: %s", routes->warnings[*said]);
+        if (session->opts.say)
+            session->opts.say(session->opts.payload, line);
+    }
+}
+
 /* ---- Searches that are kept --------------------------------------------------------------- */
 
 /* Large graphs that nobody holds any more are freed before a new one grows. */
@@ -448,6 +460,7 @@ static void say_stopped(const bs_session *session, const bs_routes *routes)
 typedef struct search_box {
     bs_search *search; /* NULL once freed */
     bool running;
+    int said; /* warnings */
 } search_box;
 
 static int search_gc(lua_State *L)
@@ -520,6 +533,8 @@ static int run_search(lua_State *L, int at, bs_plan_opts *opts, const bs_rerank 
     }
     if (st != BS_OK)
         return plan.failed ? bsl_raise_fault(L, &plan.fault) : bsl_raise(L, NULL, 0);
+    if (!has_option(L, 1, "quiet"))
+        say_warnings(session, routes, &box->said);
     st = bsl_name_packs(L, routes);
     bsl_push_routes(L, routes);
     lua_pushvalue(L, at);

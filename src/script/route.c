@@ -323,7 +323,7 @@ static void push_nth(lua_State *L, const bs_routes *routes, int i)
     lua_remove(L, -2);
 }
 
-/* rs[i], rs.complete, rs.reason, rs.target, rs.explored; else a method */
+/* rs[i], rs.complete, rs.reason, rs.warnings, rs.target, rs.explored; else a method */
 static int routes_index(lua_State *L)
 {
     const bs_routes *routes = bsl_checkroutes(L, 1);
@@ -340,6 +340,12 @@ static int routes_index(lua_State *L)
         lua_pushboolean(L, routes->complete);
     } else if (strcmp(key, "reason") == 0) {
         lua_pushstring(L, routes->reason);
+    } else if (strcmp(key, "warnings") == 0) {
+        lua_createtable(L, routes->warning_count, 0);
+        for (int k = 0; k < routes->warning_count; k++) {
+            lua_pushstring(L, routes->warnings[k]);
+            lua_rawseti(L, -2, k + 1);
+        }
     } else if (strcmp(key, "target") == 0) {
         lua_pushstring(L, routes->target);
         if (routes->target)

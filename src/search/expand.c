@@ -211,13 +211,17 @@ bs_status bs_plan__expand(void *payload, bs_ctx *cx, bs_arena *home, int lane, c
     const bs_rule_hooks *given = opts->lane_hooks ? &opts->lane_hooks[lane] : opts->hooks;
     bs_rule_hooks hooks = given ? *given : (bs_rule_hooks){0};
     list l = {.cx = cx, .home = home, .out = out, .hooks = &hooks};
+    bs_plan_asked *asked;
     bs_mol *mol;
     bs_status st = add_known(plan, &l, smiles);
 
-    if (st != BS_OK || closed || !plan->rules_on ||
-        (st = bs_new(cx, home, plan->count_count, &hooks.tried)) != BS_OK)
+    if (st != BS_OK || closed || !plan->rules_on || (st = bs_new(cx, home, 1, &asked)) != BS_OK ||
+        (st = bs_new(cx, home, bs_rules_count(opts->rules), &asked->tried)) != BS_OK)
         return st;
-    out->extra = hooks.tried;
+    asked->faults = plan->batch_faults;
+    hooks.tried = asked->tried;
+    hooks.faults = &asked->faults;
+    out->extra = asked;
     if (bs_smiles_read(cx, home, smiles, strlen(smiles), NULL, &mol) != BS_OK)
         return bs_fail(cx, BS_EBUG, "the canonical SMILES %s cannot be read again", smiles);
     return add_ruled(plan, &l, mol);

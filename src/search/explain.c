@@ -41,13 +41,21 @@ bs_status bs_plan__start_counts(bs_plan_state *plan)
     return bs_new(plan->cx, &plan->arena, plan->count_count, &plan->counts);
 }
 
-void bs_plan__merged(void *payload, const bs_proposals *found)
+bs_status bs_plan__merged(void *payload, bs_proposals *found)
 {
     bs_plan_state *plan = payload;
-    const long *tried = found->extra;
+    const bs_plan_asked *asked = found->extra;
+    bs_status st;
 
-    for (int i = 0; tried && i < plan->count_count; i++)
-        plan->counts[i].tried += tried[i];
+    if (!asked)
+        return BS_OK;
+    for (int i = 0; i < plan->count_count; i++) {
+        if (!bs_rule_faults_find(&plan->faults, i))
+            plan->counts[i].tried += asked->tried[i];
+    }
+    if ((st = bs_plan__note_faults(plan, &asked->faults)) == BS_OK)
+        bs_plan__strike(plan, found);
+    return st;
 }
 
 /* The first precursor that cannot be had, of the way that lacks the fewest. */
@@ -121,6 +129,23 @@ static void count_uses(const bs_routes *list, bs_explored *explored)
     }
 }
 
+static bs_status copy_count(const bs_plan_state *plan, int i, bs_explored *explored)
+{
+    const char *name = bs_rules_transform(plan->opts->rules, i)->name;
+    const bs_rule_fault *fault = bs_rule_faults_find(&plan->faults, i);
+    bs_transform_count *to = &explored->transforms[i];
+    char *copy = NULL, *message = NULL;
+    bs_status st = bs_copy_text(plan->cx, &explored->arena, name, strlen(name), &copy);
+
+    if (st == BS_OK && fault)
+        st = bs_copy_text(plan->cx, &explored->arena, fault->message, strlen(fault->message),
+                          &message);
+    *to = plan->counts[i];
+    to->name = copy;
+    to->fault = message;
+    return st;
+}
+
 static bs_status fill(bs_plan_state *plan, const bs_values *values, bs_routes *list)
 {
     bs_explored *explored = list->saw;
@@ -135,14 +160,8 @@ static bs_status fill(bs_plan_state *plan, const bs_values *values, bs_routes *l
         if (lack != BS_GRAPH_NONE)
             explored->molecules[m].lacks = explored->molecules[lack].smiles;
     }
-    for (int i = 0; st == BS_OK && i < plan->count_count; i++) {
-        const char *name = bs_rules_transform(plan->opts->rules, i)->name;
-        char *copy;
-
-        st = bs_copy_text(plan->cx, &explored->arena, name, strlen(name), &copy);
-        explored->transforms[i] = plan->counts[i];
-        explored->transforms[i].name = copy;
-    }
+    for (int i = 0; st == BS_OK && i < plan->count_count; i++)
+        st = copy_count(plan, i, explored);
     count_uses(list, explored);
     return st;
 }

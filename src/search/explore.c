@@ -211,8 +211,8 @@ static bs_status merge(bs_explore *x, uint32_t mol, bs_proposals *found)
     if (!x->partial) {
         x->next_proposal = 0;
         x->since = x->graph.way_count;
-        if (x->calls.merged)
-            x->calls.merged(x->calls.payload, found);
+        if (x->calls.merged && (st = x->calls.merged(x->calls.payload, found)) != BS_OK)
+            return st;
     }
     x->partial = true;
     for (; x->next_proposal < found->count; x->next_proposal++) {
@@ -335,6 +335,8 @@ static bs_status expand_batch(bs_explore *x, bs_arena *home, bool *over)
         jobs[i].lane = (int)(first + (uint32_t)i) % x->limits.lanes;
         bs_arena_init(&jobs[i].home, x->cx->gate);
     }
+    if (x->calls.begin)
+        x->calls.begin(x->calls.payload);
     if (x->limits.threads > 1)
         st = bs_lane__run_all(x, jobs, count);
     for (int i = 0; st == BS_OK && !*over && i < count; i++) {

@@ -52,8 +52,10 @@ typedef struct bs_explore_calls {
     /* May refuse a proposal or set its cost; NULL admits all. */
     bs_status (*admit)(void *payload, bs_ctx *cx, const char *product, bs_proposal *proposal,
                        bool *admitted);
-    /* Told of each answer before its proposals are merged; may be NULL. */
-    void (*merged)(void *payload, const bs_proposals *found);
+    /* Told of each batch before any of it is expanded; may be NULL. */
+    void (*begin)(void *payload);
+    /* Told of each answer before its proposals are merged, and may strike some; may be NULL. */
+    bs_status (*merged)(void *payload, bs_proposals *found);
     bs_status (*meet)(void *payload, bs_ctx *cx, const bs_mol *mol, const char *smiles,
                       bs_meeting *out);
     /*

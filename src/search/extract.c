@@ -31,16 +31,20 @@ static bs_status run_again(bs_plan_state *plan, uint32_t w, bs_plan_detail *deta
     const bs_graph_way *way = &plan->x.graph.ways[w];
     const char *smiles = plan->x.nodes[way->product].smiles;
     bs_ctx *cx = plan->cx;
+    bs_rule_hooks hooks = plan->opts->hooks ? *plan->opts->hooks : (bs_rule_hooks){0};
+    bs_rule_faults faults = plan->faults;
     bs_steps found = {NULL, 0};
     bs_arena home; /* not the scratch arena, which the callee rewinds */
     bs_mol *mol;
     bs_status st;
 
+    hooks.faults = &faults;
     bs_arena_init(&home, cx->gate);
     st = bs_smiles_read(cx, &home, smiles, strlen(smiles), NULL, &mol);
     if (st == BS_OK)
-        st = bs_rules_back(cx, &home, plan->opts->rules, (int)way->tag, mol, plan->opts->hooks, 0,
-                           &found);
+        st = bs_rules_back(cx, &home, plan->opts->rules, (int)way->tag, mol, &hooks, 0, &found);
+    if (st == BS_OK)
+        st = bs_plan__note_faults(plan, &faults);
     for (int i = 0; st == BS_OK && !detail->checked && i < found.count; i++) {
         if (!same_precursors(plan, way, &found.items[i]))
             continue;

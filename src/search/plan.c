@@ -134,6 +134,7 @@ bs_status bs_plan__explore(bs_plan_state *plan)
         .payload = plan,
         .expand = bs_plan__expand,
         .admit = bs_plan__admit,
+        .begin = bs_plan__begin,
         .merged = bs_plan__merged,
         .meet = bs_plan__meet,
         .enough = is_enough,
@@ -287,7 +288,8 @@ static bs_status fill_list(bs_plan_state *plan, bs_arena *home, bs_routes **out)
     list->molecules = plan->x.graph.mol_count;
     list->expanded = plan->x.expanded;
     list->steps = plan->x.graph.step_count;
-    st = say_why(plan, list);
+    if ((st = say_why(plan, list)) == BS_OK)
+        st = bs_plan__warn(plan, list);
     if (st == BS_OK && plan->x.graph.mol_count > 0) {
         const char *smiles;
         char *copy;

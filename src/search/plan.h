@@ -43,6 +43,12 @@ typedef struct bs_plan_tally {
     uint32_t found, barred, disallowed;
 } bs_plan_tally;
 
+/* What the expansion of a molecule tells beside its proposals. */
+typedef struct bs_plan_asked {
+    long *tried;           /* sets of precursors, by rule */
+    bs_rule_faults faults; /* the rules left out, and those whose function failed */
+} bs_plan_asked;
+
 typedef enum bs_verdict_of {
     BS_ADMITTED,
     BS_REFUSED_BY_CONSTRAINT,
@@ -71,6 +77,8 @@ typedef struct bs_plan_state {
     size_t tally_room;
     bs_transform_count *counts; /* by rule */
     int count_count;
+    bs_rule_faults faults;       /* of rules that are out */
+    bs_rule_faults batch_faults; /* the same as it was before the batch at hand */
     bs_status trace_status; /* of what is traced where nothing can fail */
     uint32_t deepest;       /* depth of the molecules expanded so far */
     int routes_seen;        /* by the last enumeration */
@@ -150,8 +158,20 @@ bs_status bs_plan__take_routes(bs_plan_state *plan, bs_arena *home, long tries, 
 bs_status bs_plan__start_counts(bs_plan_state *plan);
 bs_status bs_plan__count(bs_plan_state *plan, const char *product, uint32_t tag,
                          bs_verdict_of whose);
-void bs_plan__merged(void *payload, const bs_proposals *found);
+bs_status bs_plan__merged(void *payload, bs_proposals *found);
 bs_status bs_plan__explain(bs_plan_state *plan, bs_routes *list);
+
+/* Before a batch: the rules that are out by now are not asked in it. */
+void bs_plan__begin(void *payload);
+
+/* Puts rules out whose functions failed, unless they are. */
+bs_status bs_plan__note_faults(bs_plan_state *plan, const bs_rule_faults *found);
+
+/* Strikes proposals of rules that are out. */
+void bs_plan__strike(const bs_plan_state *plan, bs_proposals *found);
+
+/* The warnings of the list: a line for each rule that is out. */
+bs_status bs_plan__warn(const bs_plan_state *plan, bs_routes *list);
 
 /* Finds the gaps of the explored graph: at most `most`, strings in `home`. */
 bs_status bs_plan__find_gaps(const bs_explore *x, bs_arena *home, uint32_t target, int most,

@@ -538,7 +538,7 @@ static bs_status score_carbons(void *payload, bs_ctx *cx, int hook, const bs_mol
 static void hooks__decide_and_order(void **state)
 {
     book b = new_book(state);
-    bs_rule_hooks hooks = {NULL, fewer_carbons, score_carbons, NULL};
+    bs_rule_hooks hooks = {.when = fewer_carbons, .prefer = score_carbons};
     bs_transform_def def = {.name = "hydroboration",
                             .target = "[CX4:1]([OX2H:3])[CX4;!H0:2]",
                             .from = "[C:1]=[C:2]",
