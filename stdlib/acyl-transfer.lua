@@ -454,7 +454,7 @@ disconnection "urea-cdi" {
     target = "[#6:5][N;X3;H1;!$(N-[S,N,O]);!$(N(-C=O)-[C,S]=O):1]-!@[C;X3:2](=[O:3])-!@[N;X3;!$(N(-C=O)-[C,S]=O);!$(N-[S,N,O]):4]",
     from = "[#6:5][N:1].[N:4].[C:2](=[O:3])(n1ccnc1)n1ccnc1",
     conditions = "amine-rt",
-    also_attacks = { "free acid", "free alcohol", "other primary amine", "phenol" },
+    also_attacks = { "thiol", "free acid", "free alcohol", "other primary amine", "phenol" },
     recipe = "CDI, CH2Cl2 or THF, 0 °C, then second amine; also: triphosgene, 4-nitrophenyl chloroformate",
     yield = { 65, 88 },
     source = "Larock, Comprehensive Organic Transformations; from memory",

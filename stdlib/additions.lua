@@ -180,7 +180,7 @@ interconversion "dihydroxylation-of-alkene" {
     addition = { "syn", 1, 2 },
     prefer = { "electron-rich alkene", first = 1, second = 2 },
     conditions = "oso4",
-    also_attacks = { "alkene", "thiol", "thioether" },
+    also_attacks = { "primary amine", "secondary amine", "alkene", "thiol", "thioether" },
     recipe = "OsO4 (cat), NMO, acetone-H2O, rt; also: K2OsO4, K3Fe(CN)6; KMnO4, cold, dilute",
     yield = { 70, 95 },
     cautions = { "osmium tetroxide" },

@@ -194,7 +194,7 @@ interconversion "syn-dihydroxylation" {
     when = function(m) return not lies(m, TRANS_DIOL, 2, 4, m.atom[1].index, m.atom[3].index) end,
     addition = { "syn", 1, 3 },
     conditions = "oso4",
-    also_attacks = { "alkene", "thiol", "thioether" },
+    also_attacks = { "primary amine", "secondary amine", "alkene", "thiol", "thioether" },
     recipe = "OsO4 (cat), NMO, acetone-H2O, rt; also: K2OsO4",
     yield = { 75, 95 },
     cautions = { "osmium tetroxide" },
@@ -272,7 +272,7 @@ interconversion "anti-diol-from-epoxide" {
 
 interconversion "alcohol-from-ester-hydrolysis" {
     about = "Ester hydrolysis giving an alcohol; C-O bond of the alcohol and its configuration kept",
-    target = "[C;X4;H1;R:1]([C;X4:3])([C;X4:4])[O;X2;H1:2]",
+    target = "[C;X4;H1;R;!$([CX4]-[CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1]([C;X4:3])([C;X4:4])[O;X2;H1:2]",
     from = "[C;X4;H1;R:1]([C;X4:3])([C;X4:4])[O;X2;H0:2][C;X3](=O)c1ccccc1",
     conditions = "base-aq-mild",
     also_attacks = { "ester", "acyl halide", "anhydride" },

@@ -378,6 +378,7 @@ interconversion "dithiolane-desulfurisation" {
     about = "Raney nickel desulfurisation of a dithiolane; C=O to CH2 under neutral conditions; ester survives",
     target = "[C;X4;H2;r6:1]1[C;X4;H2;r6:2][C;X4;H2;r6:3][C;X4;H1;r6:4][C;X4;H2;r6:5][C;X4;H2;r6:6]1",
     from = "[C;X4;H0:1]12([C;X4;H2:2][C;X4;H2:3][C;X4;H1:4][C;X4;H2:5][C;X4;H2:6]1)[S;X2][C;H2][C;H2][S;X2]2",
+    when = function(m) return not m.molecule:has "[$([SX2]),$([#6]=S)]" end,
     conditions = "h2-raney",
     also_attacks = { "thiol", "thioether", "alkene", "alkyne", "nitro", "azide", "aldehyde", "ketone",
         "aryl halide" },

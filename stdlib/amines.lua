@@ -473,7 +473,7 @@ disconnection "reductive-amination-secondary" {
 disconnection "reductive-amination-ketone" {
     about = "Reductive amination of a ketone with an amine; equatorial or axial mixture in rings; slower than aldehydes",
     rxno = "RXNO:0000335",
-    target = "[#6;!$(C=[O,N]);!$(C#N):4][C;X4;H1:1]([C;X4:6])-!@[N;X3;!$(N[C,S]=[O,S,N]);!$(N[#7,#8,#16]);!H2:2]",
+    target = "[#6;!$(C=[O,N]);!$(C#N):4][C;X4;H1:1]([C;X4:6])-!@[N;X3;!$(N[C,S]=[O,S,N]);!$(N[#7,#8,#15,#16]);!$(N-c:[nX2]);!H2:2]",
     cut = { 1, 2 },
     acceptor = { 1, "alkylidene" },
     donor = { 2, "amine" },
@@ -628,7 +628,7 @@ interconversion "nitrile-reduction" {
 interconversion "nitro-reduction" {
     about = "Nitro reduction to amine; ester and aryl chloride survive with Fe, Zn or SnCl2",
     rxno = "RXNO:0000337",
-    target = "[c:1][N;X3;H2;+0:2]",
+    target = "[c;!$(c(:n):n):1][N;X3;H2;+0:2]",
     from = "[c:1][N;X3;H0;+:2](=[O;X1])[O;X1;-]",
     conditions = "fe-acid",
     also_attacks = { "nitro", "azide", "imine", "aldehyde" },
@@ -646,7 +646,7 @@ interconversion "amide-reduction" {
     rxno = "RXNO:0000338",
     target = "[#6;!$(C=[O,N]):1][C;X4;H2:2]-[N;X3;!$(N[C,S]=[O,S,N]);!$(N[#7,#8,#15,#16]);!$(N-c:[nX2]):3]",
     from = "[#6:1][C;X3;H0:2](=[O;X1])[N;X3:3]",
-    when = function(m) return m.molecule:count "[OX2H1]" <= 3 end, -- LiAlH4 makes a lump of a polyol
+    when = function(m) return m.molecule:count "[OX2H1]" <= 3 and not m.molecule:has "[NX3][N+](=O)[O-]" end, -- LiAlH4 makes a lump of a polyol
     conditions = "lialh4",
     also_attacks = { "oxime", "aldehyde", "ketone", "ester", "free acid", "amide", "nitrile", "epoxide", "acyl halide",
         "alkyl halide", "nitro", "azide" },
@@ -717,6 +717,7 @@ disconnection "amide-n-alkylation" {
     cut = { 6, 4 },
     acceptor = { 6, "alkyl" },
     donor = { 4, "amide-nitrogen" },
+    when = function(m) return not m.molecule:has "[CX4;!H0]([$([CX3]=[OX1]),$(C#N),$([N+]=O)])[$([CX3]=[OX1]),$(C#N),$([N+]=O)]" end,
     conditions = "alkylation",
     also_attacks = { "other secondary amide", "other primary amide", "carbamate N-H", "other urea", "alkyl halide", "acyl halide", "ester", "ketone", "free alcohol", "phenol", "thiol",
         "free acid", "epoxide" },

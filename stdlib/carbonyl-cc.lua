@@ -387,7 +387,7 @@ disconnection "baylis-hillman" {
 
 disconnection "ester-enolate-alkylation" {
     about = "Alkylation of an ester enolate; less hindered face",
-    target = "[CX4:1]-[OX2:2]-[CX3:3](=[OX1:4])-[CX4;H0,H1;!$(C([CX3]=O)[CX3]=O);!$(C(C=O)[CX2]#N);!$(C-[N+](=O)[O-]):5]-!@[CX4;H2,H3;!$(C-[O,N,S,F,Cl,Br,I]);!$([CX4][CX4]([CX4])([CX4])[CX4]):6]",
+    target = "[CX4:1]-[OX2:2]-[CX3:3](=[OX1:4])-[CX4;H0,H1;!$(C([CX3]=O)[CX3]=O);!$(C(C=O)[CX2]#N);!$(C-[N+](=O)[O-]);!$(C-[OX2H1]);!$(C-[NX3;H1,H2]):5]-!@[CX4;H2,H3;!$(C-[O,N,S,F,Cl,Br,I]);!$([CX4][CX4]([CX4])([CX4])[CX4]):6]",
     cut = { 6, 5 },
     acceptor = { 6, "alkyl" },
     donor = { 5, "enolate" },
@@ -441,10 +441,11 @@ disconnection "arylacetonitrile-alkylation" {
 
 disconnection "enamine-alkylation" {
     about = "Stork enamine alkylation; less substituted α carbon, monoalkylation",
-    target = "[OX1:1]=[CX3;R;$(C([#6])[#6]):2]-[CX4;H1;R:3]-!@[CX4;H2;$(C-[c,$([CX3]=C),$(C(=O)[O,#6]),$(C#C)]):4]",
+    target = "[OX1:1]=[CX3;R;$(C([#6])[#6]):2]-[CX4;H1;R;!$(C~[CX4]-[OX2,NX3]):3]-!@[CX4;H2;$(C-[c,$([CX3]=C),$(C(=O)[O,#6]),$(C#C)]):4]",
     cut = { 4, 3 },
     acceptor = { 4, "alkyl" },
     donor = { 3, "enolate" },
+    when = function(m) return not m.molecule:has "[CX3](=[OX1])[CX4;H1,H2][CX4][OX2,NX3]" end,
     conditions = "amine-heat",
     also_attacks = { "aldehyde", "acyl halide", "primary amine", "other alkyl halide" },
     recipe = "pyrrolidine, toluene, Dean-Stark; then halide, MeCN or dioxane, reflux; aq. acid",
@@ -512,7 +513,7 @@ disconnection "strecker" {
 interconversion "krapcho" {
     about = "Krapcho decarboxylation; one ester is lost, the other stays",
     rxno = "RXNO:0000507",
-    target = "[CX4;$([CH3]),$([CH2][CH3]),R:1]-[OX2:2]-[CX3:3](=[OX1:4])-[CX4;H1,H2:5]-[#6;!$([#6]=O):6]",
+    target = "[CX4;$([CH3]),$([CH2][CH3]),R:1]-[OX2:2]-[CX3:3](=[OX1:4])-[CX4;H1,H2;!$([C@H](*)(*)*);!$(C-[CX4]-O);!$(C-[O,S]):5]-[#6;!$([#6]=O):6]",
     from = "[C:1][O:2][C:3](=[O:4])[C:5]([#6:6])C(=O)OC",
     conditions = "heat-200",
     also_attacks = { "alkyl halide", "tertiary alcohol" },
@@ -1360,7 +1361,7 @@ disconnection "malonic-ester-synthesis" {
     target = "[OX2H1:1]-[CX3:2](=[OX1:3])-[CX4;H2:4]-!@[CX4;H2,H3;!$(C-[O,N,S,F,Cl,Br,I]);!$([CX4][CX4]([CX4])([CX4])[CX4]):5]",
     from = "[O:1](CC)[C:2](=[O:3])[C:4]C(=O)OCC.Br[C:5]",
     conditions = "alkoxide",
-    also_attacks = { "alkyl halide", "aldehyde", "acyl halide", "epoxide", "ester" },
+    also_attacks = { "free acid", "alkyl halide", "aldehyde", "acyl halide", "epoxide", "ester" },
     recipe = "NaOEt, EtOH, reflux; KOH; aq. HCl, reflux; also: I, OTs",
     yield = { 55, 80 },
     cautions = { "sodium ethoxide" },
@@ -1372,7 +1373,7 @@ disconnection "malonic-ester-synthesis" {
 
 disconnection "active-methylene-alkylation" {
     about = "Alkylation of a malonate, acetoacetate or cyanoacetate; C-alkylation; dialkylation is the rival where H remains",
-    target = "[CX4;H0,H1;$(C([CX3](=O)[O,#6])[CX3](=O)[O,#6]),$(C([CX3](=O)[O,#6])C#N):1]-!@[CX4;H2,H3;!$(C-[O,N,S,F,Cl,Br,I]);!$([CX4][CX4]([CX4])([CX4])[CX4]):2]",
+    target = "[CX4;H0,H1;$(C([CX3](=O)[O,#6])[CX3](=O)[O,#6]),$(C([CX3](=O)[O,#6])C#N);!$(C-C(=O)[OX2H1]):1]-!@[CX4;H2,H3;!$(C-[O,N,S,F,Cl,Br,I]);!$([CX4][CX4]([CX4])([CX4])[CX4]):2]",
     cut = { 2, 1 },
     acceptor = { 2, "alkyl" },
     donor = { 1, "stabilised-carbanion" },

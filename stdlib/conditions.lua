@@ -2407,3 +2407,6 @@ verdict { group = "cyanohydrin-ester", conditions = { "base-aq-mild", "base-aq-s
 verdict { group = "nitrate-ester", conditions = { "lialh4", "h2-pd", "h2-raney", "zn-acid", "fe-acid", "base-aq-strong",
     "heat-200", "acid-hot-dry", "birch", "hydrazine", "thiolate", "organolithium", "grignard" }, "attacked",
     why = "reduced or cleaved; explosive when heated" }
+
+verdict { group = "thiocarbonyl", conditions = { "pd0", "cu", "alkylation", "h2-pd", "h2-raney", "mcpba", "oso4", "ozone",
+    "oxymercuration", "kmno4", "h2o2-base" }, "attacked", why = "sulfur binds the metal, is oxidised or alkylated" }

@@ -22,16 +22,34 @@ disconnection "suzuki-biaryl" {
     rxno = "RXNO:0000634",
     target = "[c;!$(c1nnnn1):1]-!@[c;!$(c:[nX2]);!$(c1:[o,s]:c:c:[n]:1);!$(c1nnnn1):2]",
     cut = { 1, 2 },
-    acceptor = { 1, "aryl-halide" },
+    acceptor = { 1, "aryl-iodide" },
     donor = { 2, "organoboron" },
     conditions = "pd0",
     also_attacks = { "aryl bromide", "aryl iodide", "aryl triflate", "vinyl halide", "allylic ester",
         "acyl halide" },
-    recipe = "Pd(PPh3)4 or Pd(dppf)Cl2, K2CO3 or Na2CO3, dioxane/H2O, 80-100 °C; also: I, OTf, Cl (SPhos); BPin, BF3K",
+    recipe = "Pd(PPh3)4 or Pd(dppf)Cl2, K2CO3 or Na2CO3, dioxane/H2O, 80-100 °C; also: I, OTf; BPin, BF3K",
     yield = { 70, 95 },
     source = "Miyaura, Suzuki, Chem. Rev. 1995, 95, 2457; from memory",
     example { "O=Cc1ccc(-c2cccnc2)cc1", from = { "Brc1cccnc1", "O=Cc1ccc(B(O)O)cc1" } },
     example { "Cc1ccc(cc1)-c1ccccc1", from = { "Brc1ccccc1", "Cc1ccc(B(O)O)cc1" } },
+    refuse { "c1ccc(-c2ccccn2)nc1" }, -- 2-pyridylboronic acids lose boron: Negishi or Stille
+}
+
+disconnection "suzuki-biaryl-chloride" {
+    about = "Suzuki coupling of an aryl chloride, biaryl; ipso at both partners",
+    rxno = "RXNO:0000634",
+    target = "[c;!$(c1nnnn1):1]-!@[c;!$(c:[nX2]);!$(c1:[o,s]:c:c:[n]:1);!$(c1nnnn1):2]",
+    cut = { 1, 2 },
+    acceptor = { 1, "aryl-chloride" },
+    donor = { 2, "organoboron" },
+    conditions = "pd0",
+    also_attacks = { "other aryl chloride", "aryl bromide", "aryl iodide", "aryl triflate", "vinyl halide",
+        "allylic ester", "acyl halide" },
+    recipe = "Pd(OAc)2, SPhos or XPhos, K3PO4, toluene or dioxane/H2O, 80-100 °C; also: BPin, BF3K",
+    yield = { 60, 90 },
+    source = "Miyaura, Suzuki, Chem. Rev. 1995, 95, 2457; from memory",
+    example { "O=Cc1ccc(-c2cccnc2)cc1", from = { "Clc1cccnc1", "O=Cc1ccc(B(O)O)cc1" } },
+    example { "Cc1ccc(cc1)-c1ccccc1", from = { "Clc1ccccc1", "Cc1ccc(B(O)O)cc1" } },
     refuse { "c1ccc(-c2ccccn2)nc1" }, -- 2-pyridylboronic acids lose boron: Negishi or Stille
 }
 
@@ -433,7 +451,7 @@ disconnection "alkoxycarbonylation" {
     target = "[c:1]-!@[CX3;+0:2](=[OX1;+0:3])-!@[OX2:4]-[CX4:5]",
     from = "[c:1]Br.[C-:2]#[O+:3].[O:4]-[C:5]",
     conditions = "pd0",
-    also_attacks = { "aryl bromide", "aryl iodide", "aryl triflate", "vinyl halide", "allylic ester",
+    also_attacks = { "free acid", "aryl bromide", "aryl iodide", "aryl triflate", "vinyl halide", "allylic ester",
         "primary amine", "secondary amine", "other free alcohol" },
     recipe = "Pd(OAc)2 or PdCl2(dppf), CO 1-10 bar, ROH, Et3N, 80-100 °C; also: I, OTf",
     yield = { 70, 95 },
@@ -446,7 +464,7 @@ disconnection "alkoxycarbonylation" {
 
 disconnection "aminocarbonylation" {
     about = "Palladium-catalysed aminocarbonylation; ipso",
-    target = "[c:1]-!@[CX3;+0:2](=[OX1;+0:3])-!@[NX3;$(N-[CX4]);!$(N-[C,S]=[O,S,N]~[#6,#7,#8,#16;!c]);!$(N-[O,N]):4]",
+    target = "[c:1]-!@[CX3;+0:2](=[OX1;+0:3])-!@[NX3;$(N-[CX4]);!$(N-[C,S]=[O,S,N]~[#6,#7,#8,#16;!c]);!$(N-[O,N]);!$(N-[CX4]-[OX2,NX3,Cl,Br]):4]",
     from = "[c:1]Br.[C-:2]#[O+:3].[N:4]",
     conditions = "pd0",
     also_attacks = { "free acid", "aryl bromide", "aryl iodide", "aryl triflate", "vinyl halide", "allylic ester",
@@ -468,7 +486,7 @@ disconnection "alpha-arylation" {
     acceptor = { 1, "aryl-halide" },
     donor = { 2, "enolate" },
     conditions = "base-hindered",
-    also_attacks = { "aryl bromide", "aryl iodide", "aryl triflate", "vinyl halide", "allylic ester",
+    also_attacks = { "primary amine", "secondary amine", "amidine", "aryl bromide", "aryl iodide", "aryl triflate", "vinyl halide", "allylic ester",
         "aldehyde", "free acid", "free alcohol", "acyl halide" },
     recipe = "Pd(OAc)2 or Pd(dba)2, P(tBu)3, NaOtBu or LiHMDS, toluene, rt to 80 °C; also: Cl",
     yield = { 65, 90 },
@@ -539,7 +557,7 @@ disconnection "sonogashira" {
     rxno = "RXNO:0000579",
     target = "[c:1]-[CX2:2]#[CX2:3]-[#6,Si:4]",
     cut = { 1, 2 },
-    acceptor = { 1, "aryl-halide" },
+    acceptor = { 1, "aryl-iodide" },
     donor = { 2, "acetylide" },
     conditions = "pd0",
     also_attacks = { "aryl bromide", "aryl iodide", "aryl triflate", "vinyl halide", "allylic ester",

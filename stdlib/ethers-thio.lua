@@ -33,7 +33,7 @@ disconnection "williamson-ether" {
 disconnection "aryl-alkyl-ether" {
     about = "Alkylation of a phenol (Williamson ether synthesis); O- not C-alkylation in polar aprotic solvent; phenol before alcohol",
     rxno = "RXNO:0000090",
-    target = "[c:3][O;X2:2]-!@[C;X4;H3,$([C;H2][#6;!$([C;X4;H0])]);!$(C([#8])[#7,#8,#16]):1]",
+    target = "[c;!$(c:[nX2]):3][O;X2:2]-!@[C;X4;H3,$([C;H2][#6;!$([C;X4;H0])]);!$(C([#8])[#7,#8,#16]):1]",
     cut = { 1, 2 },
     acceptor = { 1, "alkyl" },
     donor = { 2, "phenol" },
@@ -45,6 +45,7 @@ disconnection "aryl-alkyl-ether" {
     cautions = { "N,N-dimethylformamide" },
     source = "Clayden, Greeves, Warren, Organic Chemistry; from memory",
     example { "COC(=O)c1ccc(OCc2ccccn2)cc1", from = { "COC(=O)c1ccc(O)cc1", "BrCc1ccccn1" } },
+    refuse { "COc1ncccn1" }, -- a 2-pyridone and its kin take the alkyl group on nitrogen
     refuse { "CC(C)(C)Oc1ccccc1" }, -- tertiary halide eliminates
 }
 
@@ -190,7 +191,7 @@ disconnection "phenol-methylation" {
     about = "Methylation of a phenol with iodomethane (Williamson ether synthesis); phenol before alcohol; chelated ortho OH reacts last",
     rxno = "RXNO:0000090",
     also = { "phenol-methylation-dimethyl-sulfate" },
-    target = "[c:1][O;X2:2]-!@[C;X4;H3:3]",
+    target = "[c;!$(c:[nX2]):1][O;X2:2]-!@[C;X4;H3:3]",
     cut = { 3, 2 },
     acceptor = { 3, "methyl" },
     donor = { 2, "phenol" },
@@ -202,6 +203,7 @@ disconnection "phenol-methylation" {
     cautions = { "iodomethane", "N,N-dimethylformamide" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "COc1ccc(C=O)c(F)c1", from = { "O=Cc1ccc(O)cc1F", "CI" } },
+    refuse { "COc1ncccn1" }, -- a 2-pyridone and its kin take the methyl group on nitrogen
     refuse { "COC(C)=O" }, -- a methyl ester
 }
 

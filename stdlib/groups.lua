@@ -1482,3 +1482,10 @@ group "nitrate-ester" {
     examples = { "CCO[N+](=O)[O-]" },
     non_examples = { "CC[N+](=O)[O-]", "CCON=O" },
 }
+
+group "thiocarbonyl" {
+    name = "thiocarbonyl compound",
+    smarts = "[#6]=[SX1]",
+    examples = { "CC(=S)N", "NC(N)=S", "S=c1cc[nH]cc1" },
+    non_examples = { "CC(=O)S", "CSC", "CS(C)=O" },
+}

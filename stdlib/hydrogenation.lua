@@ -135,6 +135,7 @@ interconversion "cycloalkylidene-hydrogenation" {
     rxno = "RXNO:0000339",
     target = "[#6:3][C;X4;H2:1]-!@[C;X4;H1;R:2]([C;X4;R:4])[C;X4;R:5]",
     from = "[#6:3][C;H1:1]=[C;H0:2]([C:4])[C:5]",
+    when = function(m) return not m.molecule:has "[CX3]=[CX3]" end,
     conditions = "h2-pd",
     recipe = "H2 (1-3 bar), Pd/C, EtOH or EtOAc, rt",
     yield = { 90, 99 },

@@ -169,7 +169,7 @@ interconversion "malonic-ester-saponification" {
 
 interconversion "nitrobenzoate-removal" {
     about = "Alcohol from its 4-nitrobenzoate by mild base; the configuration stays",
-    target = "[CX4;H1;R;!$(C([#8])[#7,#8]):1]([#6:3])([#6:4])[OX2H:2]",
+    target = "[CX4;H1;R;!$(C([#8])[#7,#8]);!$([CX4]-[CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1]([#6:3])([#6:4])[OX2H:2]",
     from = "[C:1]([#6:3])([#6:4])[O:2]C(=O)c1ccc(cc1)[N+](=O)[O-]",
     conditions = "base-aq-mild",
     also_attacks = { "other ester", "acyl halide", "anhydride" },
@@ -390,7 +390,7 @@ interconversion "cyanoacetate-acid-decarboxylation" {
     target = "[#6;!$(C-[OX2H,NX3;H1,H2]):3][C;X4;H2:1][C;X3:2](=[O;X1])[O;X2;H1]",
     from = "[#6:3][C;H1:1](C#N)[C:2](=O)OCC",
     conditions = "base-aq-strong",
-    also_attacks = { "other nitrile", "amide", "alkyl halide" },
+    also_attacks = { "acetonide", "allylic alcohol", "other nitrile", "amide", "alkyl halide" },
     recipe = "KOH, ethylene glycol, 190 °C; also: conc. HCl/AcOH reflux",
     yield = { 65, 85 },
     cautions = { "potassium hydroxide" },
@@ -496,7 +496,7 @@ interconversion "boronic-acid-oxidation" {
     target = "[c;$(c1ccccc1):1][O;X2;H1]",
     from = "[c:1]B(O)O",
     conditions = "h2o2-base",
-    also_attacks = { "thioether", "tertiary amine", "primary amine", "pyridine" },
+    also_attacks = { "imine", "thioether", "tertiary amine", "primary amine", "pyridine" },
     recipe = "H2O2, aq. NaOH, THF, 0 °C; also: boronate, Oxone, NaBO3",
     yield = { 80, 95 },
     cautions = { "sodium hydroxide", "hydrogen peroxide" },

@@ -17,7 +17,8 @@ pack {
 incompatible "acylating agent with O-H or N-H" {
     { "acyl-halide", "isocyanate", "sulfonyl-chloride" },
     { "primary-amine", "secondary-amine", "primary-aniline", "secondary-aniline", "alcohol", "phenol", "thiol",
-        "hydrazine", "azole-nh", "amidine", "amidoxime", "hydroxamic-acid", "thiourea", "phosphorus-acid" },
+        "hydrazine", "azole-nh", "amidine", "amidoxime", "hydroxamic-acid", "thiourea", "phosphorus-acid",
+        "sulfonic-acid" },
     why = "acylates itself or its neighbour",
 }
 

@@ -36,7 +36,7 @@ disconnection "grignard-aldehyde" {
 disconnection "grignard-formaldehyde" {
     about = "Grignard addition to formaldehyde; one carbon more, primary alcohol",
     rxno = "RXNO:0000014",
-    target = CARBANION .. ":1]-!@[CX4;H2:2]-[OX2H1:3]",
+    target = CARBANION .. ":1]-!@[CX4;H2;!$(C-[CX4]-c):2]-[OX2H1:3]",
     cut = { 2, 1 },
     acceptor = { 2, "hydroxyalkyl" },
     donor = { 1, "organomagnesium" },
@@ -48,6 +48,7 @@ disconnection "grignard-formaldehyde" {
     cautions = { "formaldehyde", "magnesium alkyl halide", "diethyl ether" },
     source = "Vogel's Textbook of Practical Organic Chemistry; from memory",
     example { "OCC1CCC(CC1)C(C)(C)C", from = { "CC(C)(C)C1CCC([Mg]Br)CC1", "C=O" } },
+    refuse { "OCCc1ccccc1" }, -- benzylmagnesium halides attack by their ortho position
     refuse { "COC(=O)CO" }, -- a carbonyl carbon cannot carry the metal
 }
 
@@ -145,7 +146,7 @@ disconnection "weinreb-ketone" {
     target = CARBANION_STRICT .. ":1]-!@[CX3;!R:2](=[OX1:3])-[#6;!$([#6]=[O,N,S]);!$([#6]#[N,C]):4]",
     from = "[#6:1][Mg]Br.[C:2](=[O:3])([#6:4])N(C)OC",
     conditions = "grignard",
-    also_attacks = { "free alcohol", "free acid", "aldehyde", "ketone", "acyl halide", "nitro",
+    also_attacks = { "urea", "secondary amide", "free alcohol", "free acid", "aldehyde", "ketone", "acyl halide", "nitro",
         "terminal alkyne" },
     recipe = "RMgBr or RLi, THF, -78 to 0 °C, aq. NH4Cl",
     yield = { 75, 95 },
@@ -276,6 +277,7 @@ disconnection "cuprate-acid-chloride" {
     cut = { 2, 1 },
     acceptor = { 2, "acyl" },
     donor = { 1, "organolithium" },
+    when = function(m) return not m.molecule:has "[CX3](=[OX1])[CX3]=[CX3]" end,
     conditions = "cuprate",
     also_attacks = { "urea", "secondary amide", "primary amide", "free alcohol", "phenol", "free acid", "enone" },
     recipe = "R2CuLi (from RLi and CuI), THF or Et2O, -78 °C",

@@ -123,7 +123,7 @@ disconnection "benzylamine-protection" {
 interconversion "benzylamine-removal" {
     about = "Benzylamine deprotection; Boc, ester, silyl ether survive",
     rxno = "RXNO:0000327",
-    target = "[N;X3;H1,H2;!$(N[C,S]=[O,S,N]);!$(N[#7,#8,#16]);!$(N[C;X3]=[C;X3]);!$(N(c)c):1]",
+    target = "[N;X3;H1,H2;!$(N[C,S]=[O,S,N]);!$(N[#7,#8,#16]);!$(N[C;X3]=[C;X3]);!$(N(c)c);!$(N-c:[nX2]);!$(N-C=N):1]",
     from = "[N;X3:1][C;X4;H2]c1ccccc1",
     conditions = "h2-pd",
     also_attacks = { "alkene", "alkyne", "nitro", "azide", "imine", "aryl halide", "benzyl ether",
@@ -133,6 +133,7 @@ interconversion "benzylamine-removal" {
     cautions = { "hydrogen" },
     source = "Wuts, Greene's Protective Groups in Organic Synthesis; from memory",
     example { "CC(C)(C)OC(=O)NC1CCNC1", from = { "CC(C)(C)OC(=O)NC1CCN(C1)Cc1ccccc1" } },
+    refuse { "Nc1ncccn1" }, -- on an azine the nitrogen is no amine
     refuse { "CC(=O)N" }, -- amide nitrogen: benzyl amides resist hydrogenolysis
 }
 
@@ -154,7 +155,7 @@ interconversion "ketone-dioxolane-protection" {
 interconversion "ketone-dioxolane-removal" {
     about = "Hydrolysis of a ketone dioxolane (deprotection); ester, benzyl ether, Cbz survive",
     rxno = "RXNO:0000203",
-    target = "[#6:1][C;X3;H0:2]([#6:3])=[O;X1]",
+    target = "[#6:1][C;X3;H0;!$(C-C(F)F):2]([#6:3])=[O;X1]",
     from = "[#6:1][C;X4;H0:2]1([#6:3])[O;X2][C;H2][C;H2][O;X2]1",
     conditions = "acid-aq-mild",
     also_attacks = { "acetal", "silyl ether", "trityl ether", "THP ether", "enol ether", "epoxide",
@@ -164,6 +165,7 @@ interconversion "ketone-dioxolane-removal" {
     cautions = { "hydrochloric acid" },
     source = "Wuts, Greene's Protective Groups in Organic Synthesis; from memory",
     example { "O=C1CCC(CC1)C(=O)OCC", from = { "CCOC(=O)C1CCC2(CC1)OCCO2" } },
+    refuse { "CC(=O)C(F)(F)F" }, -- the acetal of a trifluoromethyl ketone stays in acid
     refuse { "CC(=O)OC" }, -- ester carbonyl
 }
 
@@ -247,7 +249,7 @@ interconversion "acetate-protection" {
 interconversion "acetate-removal" {
     about = "Removal of an acetate (hydroxy group deprotection); silyl ether, acetal, Boc, benzyl ether, pivalate survive",
     rxno = "RXNO:0000430",
-    target = "[C;X4;!$(C([#8])[#7,#8,#16]):1][O;X2;H1:2]",
+    target = "[C;X4;!$(C([#8])[#7,#8,#16]);!$([CX4]-[CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1][O;X2;H1:2]",
     from = "[C;X4:1][O;X2;H0:2][C;X3](=[O;X1])[C;H3]",
     conditions = "base-aq-mild",
     also_attacks = { "ester", "acyl halide", "anhydride", "alkyl halide", "epoxide", "imide", "Fmoc amine" },
@@ -255,13 +257,14 @@ interconversion "acetate-removal" {
     yield = { 90, 99 },
     source = "Wuts, Greene's Protective Groups in Organic Synthesis; from memory",
     example { "OC1CCC(CC1)O[Si](C)(C)C(C)(C)C", from = { "CC(=O)OC1CCC(CC1)O[Si](C)(C)C(C)(C)C" } },
+    refuse { "NCCO" }, -- the acyl group would have gone to the nitrogen
     refuse { "Oc1ccccc1" }, -- phenol
 }
 
 interconversion "methyl-ester-removal" {
     about = "Methyl ester deprotection; Boc, tert-butyl ester, benzyl ether, amide survive",
     rxno = "RXNO:0000435",
-    target = "[#6:1][C;X3:2](=[O;X1:3])[O;X2;H1:4]",
+    target = "[#6;!$([CX4;H0;R]([#6])([#6])[#6]):1][C;X3:2](=[O;X1:3])[O;X2;H1:4]",
     from = "[#6:1][C;X3:2](=[O;X1:3])[O;X2;H0:4][C;H3]",
     when = function(m) return not m.molecule:has "[$([nX3]-[CX3]=O),$([c][OX2][CX3](=O)[#6])]" end,
     conditions = "base-aq-mild",
@@ -271,13 +274,14 @@ interconversion "methyl-ester-removal" {
     cautions = { "lithium hydroxide" },
     source = "Wuts, Greene's Protective Groups in Organic Synthesis; from memory",
     example { "OC(=O)C1CCN(CC1)C(=O)OC(C)(C)C", from = { "COC(=O)C1CCN(CC1)C(=O)OC(C)(C)C" } },
+    refuse { "CC1(C(=O)O)CCCCC1" }, -- too hindered for mild base
     refuse { "CNC(=O)O" }, -- carbamic acid
 }
 
 interconversion "ethyl-ester-removal" {
     about = "Ethyl ester deprotection; Boc, tert-butyl ester, benzyl ether, amide survive",
     rxno = "RXNO:0000436",
-    target = "[#6:1][C;X3:2](=[O;X1:3])[O;X2;H1:4]",
+    target = "[#6;!$([CX4;H0;R]([#6])([#6])[#6]):1][C;X3:2](=[O;X1:3])[O;X2;H1:4]",
     from = "[#6:1][C;X3:2](=[O;X1:3])[O;X2;H0:4][C;H2][C;H3]",
     when = function(m) return not m.molecule:has "[$([nX3]-[CX3]=O),$([c][OX2][CX3](=O)[#6])]" end,
     conditions = "base-aq-mild",
@@ -287,6 +291,7 @@ interconversion "ethyl-ester-removal" {
     cautions = { "sodium hydroxide", "lithium hydroxide" },
     source = "Wuts, Greene's Protective Groups in Organic Synthesis; from memory",
     example { "OC(=O)c1cnn(C)c1C(F)(F)F", from = { "CCOC(=O)c1cnn(C)c1C(F)(F)F" } },
+    refuse { "CC1(C(=O)O)CCCCC1" }, -- too hindered for mild base
     refuse { "CNC(=O)O" }, -- carbamic acid
 }
 
@@ -445,7 +450,7 @@ interconversion "pmb-ether-removal" {
     from = "[C;X4:1][O;X2;H0:2][C;X4;H2]c1ccc(O[C;H3])cc1",
     when = guards_something,
     conditions = "ddq",
-    also_attacks = { "primary amine", "secondary amine", "aniline", "phenol", "enol ether", "electron-rich arene" },
+    also_attacks = { "indole", "pyrrole", "primary amine", "secondary amine", "aniline", "phenol", "enol ether", "electron-rich arene" },
     recipe = "DDQ, CH2Cl2-H2O (18:1), 0 °C; also: CAN, MeCN-H2O; CF3CO2H",
     yield = { 80, 96 },
     cautions = { "DDQ" },
@@ -652,7 +657,7 @@ disconnection "benzoate-protection" {
 interconversion "benzoate-removal" {
     about = "Removal of a benzoate (hydroxy group deprotection); silyl ether, acetal, Boc, benzyl ether survive",
     rxno = "RXNO:0000430",
-    target = "[C;X4;H1,H2;!$(C([#8])[#7,#8,#16]):1][O;X2;H1:2]",
+    target = "[C;X4;H1,H2;!$(C([#8])[#7,#8,#16]);!$([CX4]-[CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1][O;X2;H1:2]",
     from = "[C;X4:1][O;X2;H0:2][C;X3](=[O;X1])c1ccccc1",
     when = guards_something,
     conditions = "alkoxide",
@@ -663,6 +668,7 @@ interconversion "benzoate-removal" {
     source = "Wuts, Greene's Protective Groups in Organic Synthesis; from memory",
     example { "OCC1CCCN1C(=O)OC(C)(C)C", from = { "O=C(OCC1CCCN1C(=O)OC(C)(C)C)c1ccccc1" } },
     example { "OC1CC=CC1", from = { "O=C(OC1CC=CC1)c1ccccc1" } },
+    refuse { "NCCO" }, -- the acyl group would have gone to the nitrogen
     refuse { "Oc1ccccc1" }, -- phenol
 }
 
