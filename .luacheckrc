@@ -3,7 +3,7 @@
 std = "lua54"
 max_line_length = false -- patterns cannot be broken
 read_globals = {
-    "mol", "pattern", "rewrite", "transform", "back", "forth",
+    "mol", "pattern", "rewrite", "transform", "back", "forth", "draft",
     "pack", "use", "synthon", "disconnection", "interconversion", "preference", "example", "refuse",
     "group", "conditions", "verdict", "protecting", "incompatible",
     "catalogue", "plan", "cost", "routes", "help",

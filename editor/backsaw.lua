@@ -236,6 +236,8 @@ local Step = {}
 function Step:uses(reagent) end
 ---@return table[]
 function Step:protections() end
+---@return { rings: integer, stereo: integer, complexity: number, pieces: integer, halves: boolean }
+function Step:simplification() end
 
 ---@class backsaw.ProductSet
 ---@field products backsaw.Molecule[]
@@ -282,6 +284,11 @@ function back(m, given) end
 ---@param ... backsaw.Compound
 ---@return backsaw.ProductSet[]
 function forth(...) end
+---@param reaction string
+---@param given? { radius: integer, name: string }
+---@return string text
+---@return boolean works
+function draft(reaction, given) end
 
 -- ---- Rules and packs ---------------------------------------------------------------------------
 

@@ -57,6 +57,7 @@ group "id" { smarts =, parents =, also =, examples =, non_examples = }
 conditions "id" { attacks = { "group", { "group", why = } }, slow =, survives =, reagents = }
 step.clashes  step.worries           what the step attacks, what needs care, in which precursor
 step:protections()                   protecting groups that would help
+step:simplification()                rings, stereo and complexity that the step takes away
 protecting "id" { guards =, installed_by =, removed_by =, group =, example = }
 incompatible "id" { { "groups" }, { "groups" }, conditions =, why = }]],
 catalogues = [[

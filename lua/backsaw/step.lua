@@ -114,6 +114,34 @@ function methods.protections(step)
     return one and core.protections(one) or {}
 end
 
+local function stereo_elements(m)
+    local count = 0
+    for _, atom in ipairs(m:atoms()) do count = count + (atom.cip and 1 or 0) end
+    for _, bond in ipairs(m:bonds()) do count = count + (bond.cip and 1 or 0) end
+    return count
+end
+
+-- t = step:simplification(): by how much the hardest precursor is simpler than the product
+function methods.simplification(step)
+    local product = step.product
+    local rings, stereo, complexity, pieces = 0, 0, 0, 0
+    for _, m in ipairs(step.precursors) do
+        if m:has "[#6]" then
+            rings = math.max(rings, #m:rings())
+            stereo = math.max(stereo, stereo_elements(m))
+            complexity = math.max(complexity, m:complexity())
+            pieces = pieces + 1
+        end
+    end
+    return {
+        rings = #product:rings() - rings,
+        stereo = stereo_elements(product) - stereo,
+        complexity = product:complexity() - complexity,
+        pieces = pieces,
+        halves = pieces == 1 and #step.precursors == 1 and step.equivalents[1] == 2,
+    }
+end
+
 -- "a1 + d2", and whether one of them is against nature
 local function labels(polarity)
     local text = "; " .. polarity.labels[1] .. " + " .. polarity.labels[2]

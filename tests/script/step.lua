@@ -27,3 +27,16 @@ for _, set in ipairs(forth(mol "CCO", mol "CC(=O)OC(C)=O")) do
 end
 print(found) --> true
 print(fails(forth)) --> argument 1: molecule or SMILES expected, got nothing
+
+-- How much a step simplifies: two rings of the biaryl become one of each half; the aldol of
+-- propanal halves its product and takes two stereocentres away.
+synthon "step aryl" { kind = "acceptor", equivalents = { { attach = "Br" } } }
+synthon "step boron" { kind = "donor", equivalents = { { attach = "B(O)O" } } }
+disconnection "step biaryl" { target = "[c:1]-!@[c:2]", cut = { 1, 2 },
+    acceptor = { 1, "step aryl" }, donor = { 2, "step boron" } }
+local simpler = transform("step biaryl"):back(mol "c1ccccc1-c1ccccc1")[1]:simplification()
+print(simpler.rings, simpler.stereo, simpler.pieces, simpler.halves, simpler.complexity > 0) --> 1	0	2	false	true
+interconversion "step aldol" { target = "[CX3;H1:1](=[O:2])[C:3][CX4;H1:4][OX2H:5]",
+    from = "[C:1](=[O:2])[C:3].[C:4]=[O:5]" }
+simpler = transform("step aldol"):back(mol "O=C[C@@H](C)[C@H](O)CC")[1]:simplification()
+print(simpler.rings, simpler.stereo, simpler.pieces, simpler.halves) --> 0	2	1	true

@@ -88,3 +88,11 @@ print(found["why large"].fires, found["why large"].text)
 --> false	atom 2 (C) does not fit [H2]: it has 1 hydrogen
 print(select(2, pcall(transform("why ether").why, transform("why ether"), 7)).message)
 --> why: argument 2: molecule or SMILES expected, got number
+
+-- A ring of the wrong kind, a charge, a missing group.
+interconversion "why acylation" { target = "[c;r6:1][CX3:2](=[O:3])[CX4:4]",
+    from = "[cH:1].[C:2](=[O:3])([C:4])Cl" }
+interconversion "why salt" { target = "[CX4:1][NX4;+1:2]", from = "[C:1]Br.[N;+0:2]" }
+why("why acylation", "CC(=O)c1ccco1") --> 0	pattern	atom 4 (aromatic C) does not fit [r6]: its smallest ring has 5 members
+why("why acylation", "O=Cc1ccccc1") --> 0	pattern	atom 2 (C) has no neighbour left for [C&X4:4]
+why("why salt", "CN(C)C") --> 0	pattern	atom 2 (N) does not fit [X4]: it has 3 connections; atom 2 (N) does not fit [+]: its charge is 0
