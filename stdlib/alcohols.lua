@@ -272,7 +272,7 @@ interconversion "anti-diol-from-epoxide" {
 
 interconversion "alcohol-from-ester-hydrolysis" {
     about = "Ester hydrolysis giving an alcohol; C-O bond of the alcohol and its configuration kept",
-    target = "[C;X4;H1;R;!$([CX4]-[CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1]([C;X4:3])([C;X4:4])[O;X2;H1:2]",
+    target = "[C;X4;H1;R;!$([CX4]-[CX4;!H0]-[CX3;!$(C-[O,N])]=[OX1]);!$([CX4]-[CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1]([C;X4:3])([C;X4:4])[O;X2;H1:2]",
     from = "[C;X4;H1;R:1]([C;X4:3])([C;X4:4])[O;X2;H0:2][C;X3](=O)c1ccccc1",
     conditions = "base-aq-mild",
     also_attacks = { "ester", "acyl halide", "anhydride" },

@@ -2375,14 +2375,14 @@ conditions "metathesis" {
 
 local METALS = { "organolithium", "grignard", "cuprate" }
 
-verdict { group = "amidine", conditions = { "acylation", "alkylation", "cu", "socl2", "pbr3" }, "attacked",
+verdict { group = "amidine", conditions = { "acylation", "alkylation", "cu", "socl2", "pbr3", "mitsunobu" }, "attacked",
     why = "a strong base and nucleophile: reacts on nitrogen" }
 verdict { group = "amidine", conditions = METALS, "attacked", why = "protonates the reagent" }
 verdict { group = "amidine", conditions = { "base-aq-strong", "hydrazine", "diazotisation", "pd0" }, "slow",
     why = "hydrolysed slowly, or binds the metal" }
 verdict { group = "amidoxime", conditions = { "acylation", "alkylation", "cu", "socl2", "mitsunobu", "diazotisation" },
     "attacked", why = "reacts on oxygen, then closes an oxadiazole" }
-verdict { group = "hydroxamic-acid", conditions = { "acylation", "alkylation", "cu", "socl2", "pbr3", "mitsunobu" },
+verdict { group = "hydroxamic-acid", conditions = { "acylation", "alkylation", "alkoxide", "cu", "socl2", "pbr3", "mitsunobu" },
     "attacked", why = "reacts on oxygen, then rearranges (Lossen)" }
 verdict { group = { "hydroxamic-acid", "amidoxime", "sulfonic-acid", "phosphorus-acid" }, conditions = METALS, "attacked",
     why = "protonates the reagent" }

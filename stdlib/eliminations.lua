@@ -81,7 +81,7 @@ end
 
 interconversion "dehydration-acid" {
     about = "Acid dehydration of a secondary or tertiary alcohol; the more substituted, conjugated alkene",
-    target = "[CX3;H0,H1;!$(C[!#6;!#1]):1]=[CX3;!$(C[!#6;!#1]):2]",
+    target = "[CX3;H0,H1;!$(C[!#6;!#1]);!$(C-[CX3]=[OX1]):1]=[CX3;!$(C[!#6;!#1]):2]",
     from = "[C:1]([OX2H])[C;!H0:2]",
     when = is_one_alkene,
     prefer = { "zaitsev", first = 1, second = 2 },

@@ -169,7 +169,7 @@ interconversion "malonic-ester-saponification" {
 
 interconversion "nitrobenzoate-removal" {
     about = "Alcohol from its 4-nitrobenzoate by mild base; the configuration stays",
-    target = "[CX4;H1;R;!$(C([#8])[#7,#8]);!$([CX4]-[CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1]([#6:3])([#6:4])[OX2H:2]",
+    target = "[CX4;H1;R;!$(C([#8])[#7,#8]);!$([CX4]-[CX4;!H0]-[CX3;!$(C-[O,N])]=[OX1]);!$([CX4]-[CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1]([#6:3])([#6:4])[OX2H:2]",
     from = "[C:1]([#6:3])([#6:4])[O:2]C(=O)c1ccc(cc1)[N+](=O)[O-]",
     conditions = "base-aq-mild",
     also_attacks = { "other ester", "acyl halide", "anhydride" },

@@ -581,7 +581,7 @@ disconnection "curtius-boc-amine" {
 interconversion "schmidt-acid" {
     about = "Schmidt rearrangement of a carboxylic acid; migrating group keeps its configuration",
     rxno = "RXNO:0000170",
-    target = "[#6;$([c;!$(c:c-[N+])]),$([C;X4;H1,H0]);!$(C-[CX3]=O):1][N;X3;H2:2]",
+    target = "[#6;$([c;!$(c:c-[N+]);!$(c:[nX2])]),$([C;X4;H1,H0]);!$(C-[CX3]=O):1][N;X3;H2:2]",
     from = "[#6:1][C;X3](=[O;X1])[O;H1].[N;X2;H1:2]=[N+]=[N-]",
     conditions = "acid-aq-strong",
     also_attacks = { "ketone", "aldehyde", "alkene", "free alcohol" },

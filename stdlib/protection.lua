@@ -249,7 +249,7 @@ interconversion "acetate-protection" {
 interconversion "acetate-removal" {
     about = "Removal of an acetate (hydroxy group deprotection); silyl ether, acetal, Boc, benzyl ether, pivalate survive",
     rxno = "RXNO:0000430",
-    target = "[C;X4;!$(C([#8])[#7,#8,#16]);!$([CX4]-[CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1][O;X2;H1:2]",
+    target = "[C;X4;!$(C([#8])[#7,#8,#16]);!$([CX4]-[CX4;!H0]-[CX3;!$(C-[O,N])]=[OX1]);!$([CX4]-[CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1][O;X2;H1:2]",
     from = "[C;X4:1][O;X2;H0:2][C;X3](=[O;X1])[C;H3]",
     conditions = "base-aq-mild",
     also_attacks = { "ester", "acyl halide", "anhydride", "alkyl halide", "epoxide", "imide", "Fmoc amine" },
@@ -257,6 +257,7 @@ interconversion "acetate-removal" {
     yield = { 90, 99 },
     source = "Wuts, Greene's Protective Groups in Organic Synthesis; from memory",
     example { "OC1CCC(CC1)O[Si](C)(C)C(C)(C)C", from = { "CC(=O)OC1CCC(CC1)O[Si](C)(C)C(C)(C)C" } },
+    refuse { "CC(=O)CCO" }, -- the acyloxy group beta to a ketone is lost
     refuse { "NCCO" }, -- the acyl group would have gone to the nitrogen
     refuse { "Oc1ccccc1" }, -- phenol
 }
@@ -657,7 +658,7 @@ disconnection "benzoate-protection" {
 interconversion "benzoate-removal" {
     about = "Removal of a benzoate (hydroxy group deprotection); silyl ether, acetal, Boc, benzyl ether survive",
     rxno = "RXNO:0000430",
-    target = "[C;X4;H1,H2;!$(C([#8])[#7,#8,#16]);!$([CX4]-[CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1][O;X2;H1:2]",
+    target = "[C;X4;H1,H2;!$(C([#8])[#7,#8,#16]);!$([CX4]-[CX4;!H0]-[CX3;!$(C-[O,N])]=[OX1]);!$([CX4]-[CX4]-[NX3;H1,H2;+0;!$(N-[C,S]=[O,S,N]);!$(N-c)]):1][O;X2;H1:2]",
     from = "[C;X4:1][O;X2;H0:2][C;X3](=[O;X1])c1ccccc1",
     when = guards_something,
     conditions = "alkoxide",
@@ -668,6 +669,7 @@ interconversion "benzoate-removal" {
     source = "Wuts, Greene's Protective Groups in Organic Synthesis; from memory",
     example { "OCC1CCCN1C(=O)OC(C)(C)C", from = { "O=C(OCC1CCCN1C(=O)OC(C)(C)C)c1ccccc1" } },
     example { "OC1CC=CC1", from = { "O=C(OC1CC=CC1)c1ccccc1" } },
+    refuse { "CC(=O)CCO" }, -- the acyloxy group beta to a ketone is lost
     refuse { "NCCO" }, -- the acyl group would have gone to the nitrogen
     refuse { "Oc1ccccc1" }, -- phenol
 }
