@@ -386,6 +386,20 @@ interconversion "riley-oxidation" {
     refuse { "O=C(c1ccccc1)CC(C)=O" }, -- 1,3-diketone
 }
 
+interconversion "benzoin-oxidation" {
+    about = "Oxidation of a benzoin to the 1,2-diketone; milder alcohol oxidants may cleave the C-C bond instead",
+    target = "[c:1][C;X3;H0:2](=[O;X1:3])[C;X3;H0:4](=[O;X1:5])[c:6]",
+    from = "[c:1][C:2](=[O:3])[CH1:4]([OH1:5])[c:6]",
+    also_attacks = { "aldehyde", "primary alcohol", "thiol", "thioether", "primary amine" },
+    recipe = "NH4NO3, cat. Cu(OAc)2, AcOH-H2O, reflux; also: HNO3, AcOH; CuSO4, pyridine-H2O",
+    yield = { 85, 96 },
+    cautions = { "nitric acid", "ammonium nitrate" },
+    source = "Clarke and Dreger, Org. Synth. Coll. Vol. 1, 87; from memory",
+    example { "O=C(C(=O)c1ccccc1)c1ccccc1", from = { "O=C(c1ccccc1)C(O)c1ccccc1" } },
+    example { "COc1ccc(cc1)C(=O)C(=O)c1ccc(OC)cc1", from = { "COc1ccc(cc1)C(=O)C(O)c1ccc(OC)cc1" } },
+    refuse { "CC(=O)C(=O)c1ccccc1" }, -- one aryl group only
+}
+
 interconversion "benzylic-oxidation-ketone" {
     about = "Benzylic oxidation to a ketone; benzylic CH2; the position para to a donor first",
     target = "[c:1][C;X3;H0;R;$(C1(=O)c:c[CX4][CX4]1),$(C1(=O)c:c[CX4,O][CX4][CX4]1):2](=[O;X1])[C;X4;R:3]",

@@ -187,7 +187,7 @@ static bs_status find_shells(bs_ctx *cx, const bs_example_side *side, uint64_t *
     for (int i = 0; i < side->count && st == BS_OK; i++) {
         const bs_example_atom *a = &side->atoms[i];
 
-        shells[i] = mix(mix((uint64_t)a->element, a->aromatic), (uint64_t)(a->charge + 16));
+        shells[i] = mix(mix((uint64_t)a->element, a->aromatic), (uint64_t)a->charge + 16);
     }
     for (int k = 1; k < DEEPEST && st == BS_OK; k++) {
         const uint64_t *last = shells + (size_t)(k - 1) * (size_t)side->count;
